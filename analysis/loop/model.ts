@@ -1,0 +1,39 @@
+import type { Complex } from '@/analysis/numbers/complex';
+
+/**
+ * A real rational function in factored form: gain·Π(s − zeroᵢ)/Π(s − poleᵢ).
+ * `gain` is the ratio of the leading coefficients. Conjugates are present and stand next to each other.
+ */
+export interface Rational {
+  readonly gain: number;
+  readonly zeros: readonly Complex[];
+  readonly poles: readonly Complex[];
+}
+
+/** PID gains in parallel form: kp + ki/s + kd·s/(1 + s·filterTime). */
+export interface ParallelGains {
+  readonly kp: number;
+  readonly ki: number;
+  readonly kd: number;
+  readonly filterTime: number;
+}
+
+/**
+ * One continuous loop, ready to be evaluated: what plant, controller and sensor of a contract Loop become.
+ *
+ * L(s) = plant·filters·controller·sensor·e^(−s(plantDeadTime + sensorDeadTime)), negative feedback.
+ */
+export interface LoopModel {
+  readonly plant: Rational;
+  readonly plantDeadTime: number;
+  readonly sensor: Rational;
+  readonly sensorDeadTime: number;
+  /** The feedback controller C_y as one rational function (filters not included). */
+  readonly controller: Rational;
+  /** The same controller as converted parallel gains. */
+  readonly gains: ParallelGains;
+  /** Everything in series behind the controller's output, feedforward included. */
+  readonly filters: Rational;
+  readonly weights: { readonly proportional: number; readonly derivative: number };
+  readonly feedforwardGain: number;
+}
