@@ -15,8 +15,7 @@ const api = process.env.KERBLINE_API;
 if (api) {
   const { createProxyMiddleware } = require('http-proxy-middleware');
   const proxy = createProxyMiddleware({ target: api, pathFilter: '/api' });
-  config.server.enhanceMiddleware = (metro) => (request, response, next) =>
-    proxy(request, response, () => metro(request, response, next));
+  config.server.enhanceMiddleware = (metro) => (request, response, next) => proxy(request, response, () => metro(request, response, next));
 }
 
 module.exports = config;

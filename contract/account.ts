@@ -12,7 +12,13 @@ export const Preferences = z
   .meta({ id: 'Preferences' });
 export type Preferences = z.infer<typeof Preferences>;
 
-export const defaultPreferences: Preferences = { frequencyUnit: 'rad/s', magnitudeUnit: 'dB', speedUnit: 'm/s', theme: 'system', singleKeys: true };
+export const defaultPreferences: Preferences = {
+  frequencyUnit: 'rad/s',
+  magnitudeUnit: 'dB',
+  speedUnit: 'm/s',
+  theme: 'system',
+  singleKeys: true,
+};
 
 export const TeamRole = z.enum(['owner', 'member']);
 
@@ -33,7 +39,15 @@ export type UpdateMe = z.infer<typeof UpdateMe>;
 
 /** One signed-in device, as GET /api/me/sessions lists it. */
 export const DeviceSession = z
-  .object({ id: z.string(), current: z.boolean(), device: z.string(), address: z.string().nullable(), createdAt: Timestamp, lastSeenAt: Timestamp, expiresAt: Timestamp })
+  .object({
+    id: z.string(),
+    current: z.boolean(),
+    device: z.string(),
+    address: z.string().nullable(),
+    createdAt: Timestamp,
+    lastSeenAt: Timestamp,
+    expiresAt: Timestamp,
+  })
   .meta({ id: 'DeviceSession' });
 export type DeviceSession = z.infer<typeof DeviceSession>;
 

@@ -23,7 +23,10 @@ export type Margins = z.infer<typeof Margins>;
 
 export const SensitivityPeaks = z
   .object({ ms: Peak, mt: Peak, noiseGain: z.object({ value: z.number().nullable(), frequency: Frequency.nullable() }) })
-  .meta({ id: 'SensitivityPeaks', description: 'noiseGain.value is null where the command answers noise without bound (an improper controller)' });
+  .meta({
+    id: 'SensitivityPeaks',
+    description: 'noiseGain.value is null where the command answers noise without bound (an improper controller)',
+  });
 export type SensitivityPeaks = z.infer<typeof SensitivityPeaks>;
 
 const numbers = z.array(z.number());
@@ -50,9 +53,22 @@ export type TimeSeries = z.infer<typeof TimeSeries>;
 const metric = z.number().nullable();
 export const TimeMetrics = z
   .object({
-    finalValue: metric, riseTime: metric, settlingTime: metric, overshootPercent: metric, undershootPercent: metric, peakTime: metric,
-    steadyStateError: metric, iae: metric, itae: metric, controlTotalVariation: metric, controlPeak: metric, timeAtLimits: metric,
-    loadPeak: metric, loadPeakTime: metric, loadSettlingTime: metric, loadIae: metric,
+    finalValue: metric,
+    riseTime: metric,
+    settlingTime: metric,
+    overshootPercent: metric,
+    undershootPercent: metric,
+    peakTime: metric,
+    steadyStateError: metric,
+    iae: metric,
+    itae: metric,
+    controlTotalVariation: metric,
+    controlPeak: metric,
+    timeAtLimits: metric,
+    loadPeak: metric,
+    loadPeakTime: metric,
+    loadSettlingTime: metric,
+    loadIae: metric,
   })
   .meta({ id: 'TimeMetrics' });
 export type TimeMetrics = z.infer<typeof TimeMetrics>;

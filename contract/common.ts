@@ -17,8 +17,24 @@ export type Verdict = z.infer<typeof Verdict>;
 
 export const Quantity = z
   .enum([
-    'gainMargin', 'gainReduction', 'phaseMargin', 'delayMargin', 'ms', 'mt', 'modulusMargin', 'diskMargin', 'noiseGain', 'bandwidth',
-    'riseTime', 'settlingTime', 'overshootPercent', 'undershootPercent', 'steadyStateError', 'loadPeak', 'loadSettlingTime', 'controlPeak',
+    'gainMargin',
+    'gainReduction',
+    'phaseMargin',
+    'delayMargin',
+    'ms',
+    'mt',
+    'modulusMargin',
+    'diskMargin',
+    'noiseGain',
+    'bandwidth',
+    'riseTime',
+    'settlingTime',
+    'overshootPercent',
+    'undershootPercent',
+    'steadyStateError',
+    'loadPeak',
+    'loadSettlingTime',
+    'controlPeak',
   ])
   .meta({ id: 'Quantity', description: 'gainMargin and gainReduction are factors, phaseMargin degrees, delayMargin s' });
 export type Quantity = z.infer<typeof Quantity>;

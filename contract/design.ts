@@ -6,7 +6,11 @@ import { KeptAnalysis } from './kept-analysis';
 
 const content = {
   controller: Controller,
-  sampling: z.union([Sampling, z.literal('continuous')]).nullable().default(null).meta({ description: '"continuous" where someone states it; null: nobody said' }),
+  sampling: z
+    .union([Sampling, z.literal('continuous')])
+    .nullable()
+    .default(null)
+    .meta({ description: '"continuous" where someone states it; null: nobody said' }),
   actuator: Actuator.nullable().default(null),
 };
 
@@ -21,8 +25,17 @@ export const ReviseDesign = z
 export type ReviseDesign = z.input<typeof ReviseDesign>;
 
 export const DesignRevision = z
-  .object({ id: Id, name: z.string(), revision: z.int(), ...content, note: z.string().nullable(), createdAt: Timestamp, createdBy: z.string(), authorId: z.string() })
-  .meta({ id: 'DesignRevision', description: 'id is the design\'s' });
+  .object({
+    id: Id,
+    name: z.string(),
+    revision: z.int(),
+    ...content,
+    note: z.string().nullable(),
+    createdAt: Timestamp,
+    createdBy: z.string(),
+    authorId: z.string(),
+  })
+  .meta({ id: 'DesignRevision', description: "id is the design's" });
 export type DesignRevision = z.infer<typeof DesignRevision>;
 
 export const RevisedDesign = DesignRevision.extend({ analysis: KeptAnalysis.optional() }).meta({ id: 'RevisedDesign' });

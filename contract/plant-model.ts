@@ -6,8 +6,7 @@ const MAX_ORDER = 24;
 const MAX_MAGNITUDE = 1e30;
 const MAX_DEAD_TIME = 1e4;
 
-const finite = (name: string) =>
-  z.number().refine((x) => Math.abs(x) <= MAX_MAGNITUDE, `${name} is a number of magnitude at most 1e30.`);
+const finite = (name: string) => z.number().refine((x) => Math.abs(x) <= MAX_MAGNITUDE, `${name} is a number of magnitude at most 1e30.`);
 
 export const DeadTime = z
   .number()
@@ -50,7 +49,15 @@ export const FormulaPlant = z
   .strictObject({
     kind: z.literal('formula'),
     text: z.string().trim().min(1, 'A formula in s.').max(500, 'A formula has at most 500 characters.'),
-    parameters: z.record(z.string().regex(/^[A-Za-z][A-Za-z0-9_]*$/, 'A parameter is named by letters, digits and _.').max(40), finite('A parameter')).default({}),
+    parameters: z
+      .record(
+        z
+          .string()
+          .regex(/^[A-Za-z][A-Za-z0-9_]*$/, 'A parameter is named by letters, digits and _.')
+          .max(40),
+        finite('A parameter'),
+      )
+      .default({}),
   })
   .meta({ id: 'FormulaPlant', description: 'ordinary mathematics in s; other letters are named parameters' });
 

@@ -20,10 +20,20 @@ export type PlantContent = z.infer<typeof PlantContent>;
 
 export const CreatePlant = z.strictObject({ name: Name, ...content, note: Note.optional() }).meta({ id: 'CreatePlant' });
 export type CreatePlant = z.input<typeof CreatePlant>;
-export const RevisePlant = z.strictObject({ name: Name.optional(), ...content, note: Note.optional(), baseRevision: Revision }).meta({ id: 'RevisePlant' });
+export const RevisePlant = z
+  .strictObject({ name: Name.optional(), ...content, note: Note.optional(), baseRevision: Revision })
+  .meta({ id: 'RevisePlant' });
 export type RevisePlant = z.input<typeof RevisePlant>;
 
 export const PlantRevision = z
-  .object({ id: Id, name: z.string(), revision: z.int(), ...content, note: z.string().nullable(), createdAt: Timestamp, createdBy: z.string() })
-  .meta({ id: 'PlantRevision', description: 'id is the plant\'s' });
+  .object({
+    id: Id,
+    name: z.string(),
+    revision: z.int(),
+    ...content,
+    note: z.string().nullable(),
+    createdAt: Timestamp,
+    createdBy: z.string(),
+  })
+  .meta({ id: 'PlantRevision', description: "id is the plant's" });
 export type PlantRevision = z.infer<typeof PlantRevision>;

@@ -20,10 +20,19 @@ export type Headline = z.infer<typeof Headline>;
 const Description = Note;
 const Vehicle = z.string().trim().max(120, 'At most 120 characters.');
 
-export const CreateProject = z.strictObject({ name: Name, vehicle: Vehicle.optional(), description: Description.optional(), teamId: Id.optional() }).meta({ id: 'CreateProject' });
+export const CreateProject = z
+  .strictObject({ name: Name, vehicle: Vehicle.optional(), description: Description.optional(), teamId: Id.optional() })
+  .meta({ id: 'CreateProject' });
 export type CreateProject = z.infer<typeof CreateProject>;
 
-export const UpdateProject = z.strictObject({ name: Name.optional(), vehicle: Vehicle.optional(), description: Description.optional(), archived: z.boolean().optional() }).meta({ id: 'UpdateProject' });
+export const UpdateProject = z
+  .strictObject({
+    name: Name.optional(),
+    vehicle: Vehicle.optional(),
+    description: Description.optional(),
+    archived: z.boolean().optional(),
+  })
+  .meta({ id: 'UpdateProject' });
 export type UpdateProject = z.infer<typeof UpdateProject>;
 
 export const DeleteProject = z.strictObject({ confirmName: z.string() });
@@ -40,7 +49,9 @@ export const Project = z
     createdAt: Timestamp,
     updatedAt: Timestamp,
     headline: Headline.nullable().meta({ description: 'null until something was analysed' }),
-    latestAnalysis: z.object({ id: Id, design: z.object({ id: Id, name: z.string(), revision: z.int() }), createdAt: Timestamp }).nullable(),
+    latestAnalysis: z
+      .object({ id: Id, design: z.object({ id: Id, name: z.string(), revision: z.int() }), createdAt: Timestamp })
+      .nullable(),
     people: z.array(z.object({ id: z.string(), name: z.string(), role: Role })),
   })
   .meta({ id: 'Project' });

@@ -5,5 +5,7 @@ export const Health = z.object({ status: z.literal('ok'), engineVersion: z.strin
 export type Health = z.infer<typeof Health>;
 
 /** A message kept by the local mail fake. */
-export const DevMail = z.object({ to: z.string(), subject: z.string(), text: z.string(), html: z.string(), links: z.array(z.string()), at: Timestamp }).meta({ id: 'DevMail' });
+export const DevMail = z
+  .object({ to: z.string(), subject: z.string(), text: z.string(), html: z.string(), links: z.array(z.string()), at: Timestamp })
+  .meta({ id: 'DevMail' });
 export type DevMail = z.infer<typeof DevMail>;
