@@ -1,0 +1,45 @@
+import { formatNumber, decimalsFor } from './format';
+import { clamp, type Interval } from './geometry';
+import { type Axis, finiteExtent, multiples } from './linear-axis';
+import { fromDecibels, type MagnitudeUnit } from './units';
+import { axisWithStep } from './value-axis';
+
+const DECIBEL_LIMITS: Interval = [-60, 60];
+const DECIBEL_STEPS = [5, 10, 20, 40, 60];
+const DEGREE_STEPS = [15, 30, 45, 90, 180, 360];
+const LARGEST_PHASE_SPAN = 540;
+const LABEL_PITCH = 22;
+
+const stepFor = (steps: readonly number[], span: number, pixels: number): number =>
+  steps.find((step) => (span / step) * LABEL_PITCH <= pixels) ?? steps[steps.length - 1];
+
+/** The axis of |L|, in decibels inside: from the least to the greatest value, 0 dB always among them, no further than ±60 dB. */
+export function magnitudeAxis(decibels: Iterable<number>, range: Interval, unit: MagnitudeUnit): Axis {
+  const [low, high] = finiteExtent(decibels) ?? [-20, 20];
+  const bottom = clamp(low, DECIBEL_LIMITS[0], -10);
+  const top = clamp(high, 10, DECIBEL_LIMITS[1]);
+  const pixels = Math.abs(range[1] - range[0]);
+  const step = stepFor(unit === 'dB' ? DECIBEL_STEPS : [20, 40, 60], top - bottom, pixels);
+  const axis = axisWithStep([Math.floor(bottom / 10) * 10, Math.ceil(top / 10) * 10], step, range);
+  if (unit === 'dB') return axis;
+  return { ...axis, ticks: axis.ticks.map(({ value }) => ({ value, text: factorLabel(fromDecibels(value)) })) };
+}
+
+const factorLabel = (factor: number): string => formatNumber(factor, decimalsFor(factor, 1));
+
+/** The axis of arg L in degrees, −180° or another odd half turn always inside; a span of more than a turn and a half keeps its upper part. */
+export function phaseAxis(degrees: Iterable<number>, range: Interval): Axis {
+  const [low, high] = finiteExtent(degrees) ?? [-270, -90];
+  const reference = nearestOddHalfTurn((Math.max(low, high - LARGEST_PHASE_SPAN) + high) / 2);
+  const top = Math.max(high, reference + 45);
+  const bottom = Math.max(Math.min(low, reference - 45), top - LARGEST_PHASE_SPAN);
+  const step = stepFor(DEGREE_STEPS, top - bottom, Math.abs(range[1] - range[0]));
+  const unit = Math.min(step, 45);
+  return axisWithStep([Math.floor(bottom / unit) * unit, Math.ceil(top / unit) * unit], step, range);
+}
+
+/** −180° and its copies every turn: where a loop's phase leaves no margin. */
+export const nearestOddHalfTurn = (degrees: number): number => Math.round((degrees - 180) / 360) * 360 + 180;
+
+/** All odd half turns inside an interval of degrees. */
+export const oddHalfTurns = ([low, high]: Interval): number[] => multiples(360, [low - 180, high - 180]).map((turn) => turn + 180);

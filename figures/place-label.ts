@@ -1,0 +1,86 @@
+import type { Point, Rect } from './geometry';
+import { clipSegment, pointAt, type Polyline } from './polyline';
+import { textWidth } from './text-width';
+
+export type Anchor = 'start' | 'middle' | 'end';
+
+/** Where a label's baseline starts, ends or has its middle. */
+export interface LabelPlace extends Point {
+  readonly anchor: Anchor;
+}
+
+export interface PlacedLabel extends LabelPlace {
+  readonly box: Rect;
+}
+
+export interface Paper {
+  /** The picture: labels stay inside. */
+  readonly bounds: Rect;
+  /** Curves that a label never covers. */
+  readonly curves: readonly Polyline[];
+  /** Labels, marks and kerbs that stand already. */
+  readonly taken: readonly Rect[];
+  /** Hairlines, covered only where there is no free paper. */
+  readonly hairlines?: readonly Rect[];
+}
+
+const COST = { outside: 1000, curve: 400, taken: 200, hairline: 2, later: 0.1 };
+const PAD = 2;
+
+/** The box of a text of one or more lines on a baseline. */
+export function labelBox(place: LabelPlace, lines: readonly string[], size = 13): Rect {
+  const width = Math.max(...lines.map((line) => textWidth(line, size)));
+  const left = { start: 0, middle: width / 2, end: width }[place.anchor];
+  return { x: place.x - left - PAD, y: place.y - size * 0.8 - PAD, width: width + 2 * PAD, height: size + (lines.length - 1) * 16 + PAD };
+}
+
+const overlaps = (a: Rect, b: Rect): boolean => a.x < b.x + b.width && b.x < a.x + a.width && a.y < b.y + b.height && b.y < a.y + a.height;
+
+const isInside = (box: Rect, bounds: Rect): boolean =>
+  box.x >= bounds.x && box.y >= bounds.y && box.x + box.width <= bounds.x + bounds.width && box.y + box.height <= bounds.y + bounds.height;
+
+function crosses(line: Polyline, box: Rect): boolean {
+  for (let i = 1; i < line.x.length; i++) {
+    if (Math.max(line.x[i - 1], line.x[i]) < box.x || Math.min(line.x[i - 1], line.x[i]) > box.x + box.width) continue;
+    if (clipSegment(pointAt(line, i - 1), pointAt(line, i), box) !== null) return true;
+  }
+  return false;
+}
+
+function costOf(box: Rect, paper: Paper): number {
+  const outside = isInside(box, paper.bounds) ? 0 : COST.outside;
+  const curves = paper.curves.filter((curve) => crosses(curve, box)).length * COST.curve;
+  const taken = paper.taken.filter((rect) => overlaps(rect, box)).length * COST.taken;
+  const hairlines = (paper.hairlines ?? []).filter((rect) => overlaps(rect, box)).length * COST.hairline;
+  return outside + curves + taken + hairlines;
+}
+
+/** The candidate in the freest paper: inside, on no curve, on nothing that stands already, on hairlines last. Earlier ones are preferred. */
+export function placeLabel(lines: readonly string[], candidates: readonly LabelPlace[], paper: Paper, size = 13): PlacedLabel {
+  let best: PlacedLabel | null = null;
+  let least = Infinity;
+  candidates.forEach((candidate, i) => {
+    const box = labelBox(candidate, lines, size);
+    const cost = costOf(box, paper) + i * COST.later;
+    if (cost < least) {
+      least = cost;
+      best = { ...candidate, box };
+    }
+  });
+  if (best === null) throw new Error('A label needs at least one place.');
+  return best;
+}
+
+const DIRECTIONS = [20, -20, 160, -160, 60, -60, 120, -120, 0, 180, 90, -90];
+
+/** Places round a point, nearest first: the baseline starts, ends or is centred so that the text lies away from the point. */
+export function placesAround(point: Point, distances: readonly number[]): LabelPlace[] {
+  return distances.flatMap((distance) =>
+    DIRECTIONS.map((degrees) => {
+      const a = (degrees * Math.PI) / 180;
+      const dx = Math.cos(a);
+      const anchor: Anchor = dx > 0.3 ? 'start' : dx < -0.3 ? 'end' : 'middle';
+      return { x: point.x + distance * dx, y: point.y + distance * Math.sin(a) + 4.5, anchor };
+    }),
+  );
+}

@@ -1,0 +1,84 @@
+import { grow, type Point, type Rect, round2, type Scale } from './geometry';
+
+/** A curve in pixels. Points that are not finite break it. */
+export interface Polyline {
+  readonly x: Float64Array;
+  readonly y: Float64Array;
+}
+
+/** Points nearer than this to the last one drawn add nothing that a screen can show. */
+const SHORTEST_STEP = 0.6;
+/** What lies outside is cut this far off the picture, so that line ends and joins never show. */
+const CUT = 6;
+
+/** Maps two series of one length through their scales. */
+export function toPolyline(xs: ArrayLike<number>, ys: ArrayLike<number>, toX: Scale, toY: Scale): Polyline {
+  const length = Math.min(xs.length, ys.length);
+  const line = { x: new Float64Array(length), y: new Float64Array(length) };
+  for (let i = 0; i < length; i++) {
+    line.x[i] = toX(xs[i]);
+    line.y[i] = toY(ys[i]);
+  }
+  return line;
+}
+
+export const pointAt = (line: Polyline, i: number): Point => ({ x: line.x[i], y: line.y[i] });
+
+/**
+ * The part of a segment inside a rectangle as two parameters in 0..1; null where there is none.
+ *
+ * @see Liang and Barsky, "A new concept and method for line clipping", ACM Transactions on Graphics 3(1), 1984
+ */
+export function clipSegment(from: Point, to: Point, rect: Rect): [number, number] | null {
+  const dx = to.x - from.x;
+  const dy = to.y - from.y;
+  let enter = 0;
+  let leave = 1;
+  const edges = [
+    [-dx, from.x - rect.x],
+    [dx, rect.x + rect.width - from.x],
+    [-dy, from.y - rect.y],
+    [dy, rect.y + rect.height - from.y],
+  ];
+  for (const [direction, distance] of edges) {
+    if (direction === 0) {
+      if (distance < 0) return null;
+      continue;
+    }
+    const t = distance / direction;
+    if (direction < 0) enter = Math.max(enter, t);
+    else leave = Math.min(leave, t);
+    if (enter > leave) return null;
+  }
+  return [enter, leave];
+}
+
+const isFinitePoint = ({ x, y }: Point): boolean => Number.isFinite(x) && Number.isFinite(y);
+const along = (from: Point, to: Point, t: number): Point => ({ x: from.x + (to.x - from.x) * t, y: from.y + (to.y - from.y) * t });
+const print = ({ x, y }: Point): string => `${round2(x)} ${round2(y)}`;
+
+/** SVG path data of a curve, cut a little outside `bounds` and without points closer than a screen can show. Empty where nothing is inside. */
+export function polylinePath(line: Polyline, bounds: Rect): string {
+  const rect = grow(bounds, CUT);
+  let path = '';
+  let pen: Point | null = null;
+  for (let i = 1; i < line.x.length; i++) {
+    const from = pointAt(line, i - 1);
+    const to = pointAt(line, i);
+    const part = isFinitePoint(from) && isFinitePoint(to) ? clipSegment(from, to, rect) : null;
+    if (part === null) {
+      pen = null;
+      continue;
+    }
+    const end = along(from, to, part[1]);
+    if (pen === null || part[0] > 0) {
+      pen = along(from, to, part[0]);
+      path += `M${print(pen)}`;
+    }
+    const last = i === line.x.length - 1 || part[1] < 1;
+    if (!last && Math.abs(end.x - pen.x) < SHORTEST_STEP && Math.abs(end.y - pen.y) < SHORTEST_STEP) continue;
+    path += `L${print(end)}`;
+    pen = part[1] < 1 ? null : end;
+  }
+  return path;
+}
