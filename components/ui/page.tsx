@@ -1,0 +1,52 @@
+import type { PropsWithChildren, ReactNode } from 'react';
+import { ScrollView, StyleSheet, View } from 'react-native';
+import { Heading, Text } from './text';
+import { useTheme } from './theme';
+import { gutter } from './tokens';
+import { useLayout } from './use-layout';
+
+export interface PageProps {
+  /** Left out where the phone's top bar already says it. */
+  title?: string;
+  sub?: string;
+  actions?: ReactNode;
+  /** A narrower column for text. */
+  width?: number;
+}
+
+/** One scrolling page on the desk: its title and actions, then sheets. On a phone the sheet fills the page. */
+export function Page({ title, sub, actions, width = 1240, children }: PropsWithChildren<PageProps>) {
+  const { colors } = useTheme();
+  const phone = useLayout() === 'phone';
+  return (
+    <ScrollView style={[styles.scroll, { backgroundColor: colors.desk }]} contentContainerStyle={styles.content}>
+      <View style={[styles.column, { maxWidth: width + 2 * gutter.wide }, phone ? styles.phone : styles.wide]}>
+        {title && !phone ? (
+          <View style={styles.head}>
+            <View style={styles.title}>
+              <Heading level={1}>{title}</Heading>
+              {sub ? (
+                <Text step="note" tone="ink2">
+                  {sub}
+                </Text>
+              ) : null}
+            </View>
+            <View style={styles.actions}>{actions}</View>
+          </View>
+        ) : null}
+        {children}
+      </View>
+    </ScrollView>
+  );
+}
+
+const styles = StyleSheet.create({
+  scroll: { flex: 1 },
+  content: { flexGrow: 1, alignItems: 'center' },
+  column: { width: '100%' },
+  wide: { paddingHorizontal: gutter.wide, paddingTop: 20, paddingBottom: 40, gap: 14 },
+  phone: { flexGrow: 1, paddingBottom: 20, gap: 8 },
+  head: { flexDirection: 'row', alignItems: 'center', minHeight: 52, gap: 16 },
+  title: { flex: 1, gap: 2 },
+  actions: { flexDirection: 'row', alignItems: 'center', gap: 10 },
+});
