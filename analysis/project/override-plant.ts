@@ -1,0 +1,18 @@
+import type { CaseParameters, PlantModel } from '@/contract';
+
+/**
+ * The plant of one case: its gain times `gainFactor`, and `deadTime` in place of its own, s.
+ *
+ * @throws TypeError for a formula with overrides: its dead time stands inside the text, so it is factored first
+ */
+export function overridePlant(plant: PlantModel, { gainFactor = 1, deadTime }: CaseParameters): PlantModel {
+  if (gainFactor === 1 && deadTime === undefined) return plant;
+  switch (plant.kind) {
+    case 'coefficients':
+      return { ...plant, numerator: plant.numerator.map((coefficient) => coefficient * gainFactor), deadTime: deadTime ?? plant.deadTime };
+    case 'roots':
+      return { ...plant, gain: plant.gain * gainFactor, deadTime: deadTime ?? plant.deadTime };
+    case 'formula':
+      throw new TypeError('A formula is factored before a case overrides its gain or dead time.');
+  }
+}
