@@ -1,0 +1,53 @@
+import { useMutation, useQueryClient } from '@tanstack/react-query';
+import type { SignIn, SignUp } from '@/contract';
+import { request } from '../api/request';
+import { meKey, meQuery } from './me';
+
+/** What follows every sign-in: nothing of whoever was signed in before stays. */
+function useEntry<Input>(path: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (input: Input) => request<unknown>('POST', path, { body: input }),
+    onSuccess: async () => {
+      client.clear();
+      await client.fetchQuery(meQuery);
+    },
+  });
+}
+
+export const useSignIn = () => useEntry<SignIn>('/auth/sign-in/email');
+export const useSignUp = () => useEntry<SignUp>('/auth/sign-up/email');
+
+export function useSignOut() {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: () => request<unknown>('POST', '/auth/sign-out', { body: {} }),
+    onSuccess: () => {
+      client.clear();
+      client.setQueryData(meKey, null);
+    },
+  });
+}
+
+export const useAskReset = () =>
+  useMutation({
+    mutationFn: (email: string) =>
+      request<unknown>('POST', '/auth/request-password-reset', { body: { email, redirectTo: '/reset-password' } }),
+  });
+
+export const useResetPassword = () =>
+  useMutation({
+    mutationFn: (input: { token: string; newPassword: string }) => request<unknown>('POST', '/auth/reset-password', { body: input }),
+  });
+
+/** The other devices are signed out with it. */
+export const useChangePassword = () =>
+  useMutation({
+    mutationFn: (input: { currentPassword: string; newPassword: string }) =>
+      request<unknown>('POST', '/auth/change-password', { body: { ...input, revokeOtherSessions: true } }),
+  });
+
+export const useSendVerification = () =>
+  useMutation({
+    mutationFn: (email: string) => request<unknown>('POST', '/auth/send-verification-email', { body: { email, callbackURL: '/verified' } }),
+  });
