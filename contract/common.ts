@@ -9,6 +9,12 @@ export const Note = z.string().trim().max(2000, 'A note has at most 2,000 charac
 export const Revision = z.int().min(1, 'Revisions are counted from 1.');
 export const Email = z.email('An e-mail address looks like name@team.example.').max(254);
 
+/** One line of a thing's history. */
+export const RevisionSummary = z
+  .object({ revision: z.int(), note: z.string().nullable(), createdAt: Timestamp, createdBy: z.string() })
+  .meta({ id: 'RevisionSummary' });
+export type RevisionSummary = z.infer<typeof RevisionSummary>;
+
 export const Role = z.enum(['owner', 'editor', 'reviewer', 'viewer']).meta({ id: 'Role' });
 export type Role = z.infer<typeof Role>;
 
@@ -42,8 +48,12 @@ export type Quantity = z.infer<typeof Quantity>;
 /** Query of every list: `?limit=` and `?cursor=`. */
 export const PageQuery = z.object({
   limit: z.coerce.number().int().min(1).max(200).default(50),
-  cursor: z.string().max(200).optional(),
+  cursor: z
+    .string()
+    .regex(/^\d{1,15}_[0-9a-f-]{36}$/, 'A cursor is the nextCursor of the list before.')
+    .optional(),
 });
+export type PageQuery = z.infer<typeof PageQuery>;
 
-/** Answer of every list. */
+/** Answer of every list; a cursor holds the sort key and the id of the last item before it. */
 export const page = <T extends z.ZodType>(item: T) => z.object({ items: z.array(item), nextCursor: z.string().nullable() });
