@@ -9,12 +9,6 @@ export const Note = z.string().trim().max(2000, 'A note has at most 2,000 charac
 export const Revision = z.int().min(1, 'Revisions are counted from 1.');
 export const Email = z.email('An e-mail address looks like name@team.example.').max(254);
 
-/** One line of a thing's history. */
-export const RevisionSummary = z
-  .object({ revision: z.int(), note: z.string().nullable(), createdAt: Timestamp, createdBy: z.string() })
-  .meta({ id: 'RevisionSummary' });
-export type RevisionSummary = z.infer<typeof RevisionSummary>;
-
 export const Role = z.enum(['owner', 'editor', 'reviewer', 'viewer']).meta({ id: 'Role' });
 export type Role = z.infer<typeof Role>;
 

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { Id, Name, Note, Revision, RevisionSummary, Timestamp } from './common';
+import { Id, Name, Note, Revision, Timestamp } from './common';
 import { Controller } from './controller';
 import { Actuator, Sampling } from './loop';
 import { KeptAnalysis } from './kept-analysis';
@@ -40,7 +40,3 @@ export type DesignRevision = z.infer<typeof DesignRevision>;
 
 export const RevisedDesign = DesignRevision.extend({ analysis: KeptAnalysis.optional() }).meta({ id: 'RevisedDesign' });
 export type RevisedDesign = z.infer<typeof RevisedDesign>;
-
-/** A design as it is now, with its history, newest first. */
-export const DesignDetail = DesignRevision.extend({ revisions: z.array(RevisionSummary) }).meta({ id: 'DesignDetail' });
-export type DesignDetail = z.infer<typeof DesignDetail>;

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { Id, Name, Note, Revision, RevisionSummary, Timestamp } from './common';
+import { Id, Name, Note, Revision, Timestamp } from './common';
 import { PlantModel, Sensor } from './plant-model';
 
 const Seconds = z.number().min(0, 'A delay is 0 or more.').max(1e4);
@@ -37,7 +37,3 @@ export const PlantRevision = z
   })
   .meta({ id: 'PlantRevision', description: "id is the plant's" });
 export type PlantRevision = z.infer<typeof PlantRevision>;
-
-/** A plant as it is now, with its history, newest first. */
-export const PlantDetail = PlantRevision.extend({ revisions: z.array(RevisionSummary) }).meta({ id: 'PlantDetail' });
-export type PlantDetail = z.infer<typeof PlantDetail>;
