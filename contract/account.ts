@@ -57,10 +57,32 @@ const Password = z
   .min(passwordLength.least, 'A password has 12 characters or more.')
   .max(passwordLength.most, 'A password has at most 128 characters.');
 
-/** Bodies of the better-auth routes that the screens use. */
-export const SignUp = z.strictObject({ name: Name, email: Email, password: Password });
+/** A path of this site, to land on after a link in a mail. */
+const LandingPath = z
+  .string()
+  .max(200)
+  .regex(/^\/(?![/\\])[^\\]*$/, 'A path of this site begins with one slash.');
+
+/** Bodies of the sign-in routes, under better-auth's names for them. */
+export const SignUp = z.strictObject({ name: Name, email: Email, password: Password }).meta({ id: 'SignUp' });
 export type SignUp = z.infer<typeof SignUp>;
-export const SignIn = z.strictObject({ email: Email, password: z.string().min(1, 'A password is needed.').max(passwordLength.most) });
+export const SignIn = z
+  .strictObject({ email: Email, password: z.string().min(1, 'A password is needed.').max(passwordLength.most) })
+  .meta({ id: 'SignIn' });
 export type SignIn = z.infer<typeof SignIn>;
-export const AskReset = z.strictObject({ email: Email });
+export const AskReset = z.strictObject({ email: Email, redirectTo: LandingPath.optional() }).meta({ id: 'AskReset' });
+export type AskReset = z.infer<typeof AskReset>;
 export const ResetPassword = z.strictObject({ newPassword: Password });
+export type ResetPassword = z.infer<typeof ResetPassword>;
+export const ResetPasswordByToken = ResetPassword.extend({ token: z.string().min(1).max(200) }).meta({ id: 'ResetPasswordByToken' });
+export const ChangePassword = z
+  .strictObject({
+    currentPassword: SignIn.shape.password,
+    newPassword: Password,
+    revokeOtherSessions: z.literal(true).optional().meta({ description: 'always so, whether said or not' }),
+  })
+  .meta({ id: 'ChangePassword' });
+export type ChangePassword = z.infer<typeof ChangePassword>;
+export const SendVerification = z.strictObject({ email: Email, callbackURL: LandingPath.optional() }).meta({ id: 'SendVerification' });
+export type SendVerification = z.infer<typeof SendVerification>;
+export const VerifyEmail = z.strictObject({ token: z.string().min(1).max(2000), callbackURL: LandingPath.default('/account') });
