@@ -1,7 +1,7 @@
 import { range } from 'd3-array';
-import { formatNumber } from './format';
-import { decimalsFor } from './format';
+import { decimalsFor, formatNumber } from './format';
 import type { Interval, Scale } from './geometry';
+import { logScale } from './log-scale';
 import { textWidth } from './text-width';
 import { frequencyFrom, frequencyIn, type FrequencyUnit } from './units';
 
@@ -34,11 +34,6 @@ const DENSITIES: readonly { digits: readonly number[]; decades: number }[] = [
   { digits: [1], decades: 3 },
   { digits: [1], decades: 6 },
 ];
-
-export function logScale([low, high]: Interval, [from, to]: Interval): { at: Scale; invert: Scale } {
-  const slope = (to - from) / Math.log(high / low);
-  return { at: (value) => from + Math.log(value / low) * slope, invert: (pixel) => low * Math.exp((pixel - from) / slope) };
-}
 
 const frequencyLabel = (value: number): string => formatNumber(value, decimalsFor(value, 1));
 

@@ -1,0 +1,65 @@
+import { memo } from 'react';
+import { Text } from 'react-native-svg';
+import { fonts } from '@/components/ui/tokens';
+import { useTheme } from '@/components/ui/theme';
+import type { LabelTone, PanelLabel } from '@/figures';
+
+export type TextTone = LabelTone | 'tick' | 'title' | 'flag' | 'fail';
+
+type Role = keyof ReturnType<typeof useTheme>['colors'];
+
+const tones: Record<TextTone, { color: Role; weight: 500 | 600; size?: number; struck?: boolean }> = {
+  tick: { color: 'ink3', weight: 500 },
+  title: { color: 'ink', weight: 600 },
+  strong: { color: 'ink', weight: 600 },
+  quiet: { color: 'ink2', weight: 500 },
+  limit: { color: 'fail', weight: 500 },
+  fail: { color: 'fail', weight: 600 },
+  b: { color: 'b', weight: 600 },
+  struck: { color: 'ink3', weight: 600, struck: true },
+  contour: { color: 'contourText', weight: 500, size: 12 },
+  flag: { color: 'paper', weight: 600 },
+};
+
+export interface ChartTextProps {
+  x: number;
+  y: number;
+  children: string;
+  tone?: TextTone;
+  anchor?: 'start' | 'middle' | 'end';
+  /** A rim of paper, so that the text reads over lines. */
+  halo?: boolean;
+}
+
+/** A text of a picture. */
+export const ChartText = memo(function ChartText({ x, y, children, tone = 'tick', anchor = 'start', halo = false }: ChartTextProps) {
+  const { colors } = useTheme();
+  const { color, weight, size = 13, struck } = tones[tone];
+  const rim = halo ? { stroke: colors.paper, strokeWidth: 4, strokeLinejoin: 'round' as const, paintOrder: 'stroke' } : {};
+  return (
+    <Text
+      x={x}
+      y={y}
+      fill={colors[color]}
+      fontFamily={fonts.narrow[weight]}
+      fontSize={size}
+      textAnchor={anchor}
+      textDecoration={struck ? 'line-through' : undefined}
+      {...rim}
+    >
+      {children}
+    </Text>
+  );
+});
+
+const LINE_HEIGHT = 16;
+
+/** A placed label, line under line. Of a number without meaning only the number is struck out. */
+export function ChartLabel({ label: { lines, place, tone } }: { label: PanelLabel }) {
+  const rest: TextTone = tone === 'struck' ? 'fail' : tone === 'strong' ? 'quiet' : tone;
+  return lines.map((line, i) => (
+    <ChartText key={i} x={place.x} y={place.y + i * LINE_HEIGHT} anchor={place.anchor} tone={i === 0 ? tone : rest} halo>
+      {line}
+    </ChartText>
+  ));
+}

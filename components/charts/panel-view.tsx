@@ -1,0 +1,83 @@
+import { memo, useId } from 'react';
+import { Circle, ClipPath, Defs, G, Path, Rect } from 'react-native-svg';
+import { useTheme } from '@/components/ui/theme';
+import { type PanelPicture, round2, textWidth } from '@/figures';
+import { ChartLabel, ChartText } from './chart-text';
+import { CurvePath } from './curve-path';
+import { KerbStripe } from './kerb-stripe';
+
+const TITLE_RISE = 6;
+/** Round caps of a curve may reach this far beyond the panel. */
+const OVERHANG = 1;
+
+function Hairlines({ picture: { plot, axis, strong }, columns }: { picture: PanelPicture; columns: readonly number[] }) {
+  const { colors } = useTheme();
+  const row = (value: number) => `M${plot.x} ${round2(axis.at(value))}h${plot.width}`;
+  const inView = (value: number) => value >= axis.domain[0] && value <= axis.domain[1];
+  const rows = axis.ticks.filter(({ value }) => !strong.includes(value)).map(({ value }) => row(value));
+  const uprights = columns.map((x) => `M${round2(x)} ${plot.y}v${plot.height}`);
+  return (
+    <G>
+      <Path d={[...rows, ...uprights].join('')} stroke={colors.rule} strokeWidth={1} fill="none" />
+      <Path d={strong.filter(inView).map(row).join('')} stroke={colors.rule2} strokeWidth={1} fill="none" />
+    </G>
+  );
+}
+
+function AxisNames({ picture: { plot, axis, title, unit } }: { picture: PanelPicture }) {
+  return (
+    <G>
+      {axis.ticks.map(({ value, text }) => (
+        <ChartText key={value} x={plot.x - 7} y={axis.at(value) + 4.5} anchor="end">
+          {text}
+        </ChartText>
+      ))}
+      <ChartText x={plot.x} y={plot.y - TITLE_RISE} tone="title">
+        {title}
+      </ChartText>
+      <ChartText x={plot.x + textWidth(title) * 1.04 + 8} y={plot.y - TITLE_RISE}>
+        {unit}
+      </ChartText>
+    </G>
+  );
+}
+
+/** One panel of a stack: grid, other cases, kerbs, B, A, marks, labels, in that order. `columns` are the upright hairlines. */
+export const PanelView = memo(function PanelView({ picture, columns }: { picture: PanelPicture; columns: readonly number[] }) {
+  const { colors } = useTheme();
+  const clip = useId();
+  const { plot, curves, kerbs, bars, dots, labels } = picture;
+  return (
+    <G>
+      <Defs>
+        <ClipPath id={clip}>
+          <Rect x={plot.x} y={plot.y - OVERHANG} width={plot.width} height={plot.height + 2 * OVERHANG} />
+        </ClipPath>
+      </Defs>
+      <Hairlines picture={picture} columns={columns} />
+      <AxisNames picture={picture} />
+      <G clipPath={`url(#${clip})`}>
+        <CurvePath d={curves.others} kind="others" />
+        {kerbs.map((kerb, i) => (
+          <KerbStripe key={i} kerb={kerb} />
+        ))}
+        <CurvePath d={curves.secondB} kind="secondB" />
+        <CurvePath d={curves.b} kind="b" />
+        <CurvePath d={curves.secondA} kind="secondA" />
+        <CurvePath d={curves.a} kind="a" />
+      </G>
+      {bars.map(({ x, from, to, disc }, i) => (
+        <G key={i}>
+          <Path d={`M${round2(x)} ${round2(from)}V${round2(to)}`} stroke={colors.ink} strokeWidth={1.5} fill="none" />
+          {disc ? <Circle cx={x} cy={to} r={3.5} fill={colors.ink} /> : null}
+        </G>
+      ))}
+      {dots.map(({ x, y, radius }, i) => (
+        <Circle key={i} cx={x} cy={y} r={radius} fill={colors.ink} stroke={colors.paper} strokeWidth={1.5} />
+      ))}
+      {labels.map((label, i) => (
+        <ChartLabel key={i} label={label} />
+      ))}
+    </G>
+  );
+});

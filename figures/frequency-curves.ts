@@ -1,0 +1,46 @@
+import type { FrequencyResponse } from '@/contract';
+import type { FrequencyAxis } from './frequency-axis';
+import type { Rect } from './geometry';
+import type { Axis } from './linear-axis';
+import { responseOf, type LoopScene } from './loop-picture';
+import { indicesWithin } from './margin-marks';
+import { type Polyline, polylinePath, toPolyline } from './polyline';
+
+/** Takes one ordinate out of a response, in the units of the panel's axis. */
+export type Ordinate = (response: FrequencyResponse) => ArrayLike<number>;
+
+/** The ordinates of a response inside the axis' window. */
+export function ordinatesWithin(response: FrequencyResponse, axis: FrequencyAxis, ordinate: Ordinate): number[] {
+  if (response.frequencies.length === 0) return [];
+  const [first, last] = indicesWithin(response, axis.domain);
+  return Array.from(ordinate(response)).slice(first, last + 1);
+}
+
+/** The curve of one ordinate in pixels, the window's part of it. */
+export function frequencyPolyline(response: FrequencyResponse, ordinate: Ordinate, across: FrequencyAxis, up: Axis): Polyline {
+  if (response.frequencies.length === 0) return toPolyline([], [], across.at, up.at);
+  const [first, last] = indicesWithin(response, across.domain);
+  return toPolyline(response.frequencies.slice(first, last + 1), ordinatesWithin(response, across, ordinate), across.at, up.at);
+}
+
+/** Where a panel stands and how it is scaled. */
+export interface PanelFrame {
+  readonly across: FrequencyAxis;
+  readonly up: Axis;
+  readonly plot: Rect;
+}
+
+export interface FrequencyCurves {
+  readonly a: Polyline;
+  readonly b: Polyline | null;
+  readonly paths: { readonly a: string; readonly b: string; readonly others: string };
+}
+
+/** The curves of one ordinate for A, B and the other cases. */
+export function frequencyCurves(scene: LoopScene, ordinate: Ordinate, { across, up, plot }: PanelFrame): FrequencyCurves {
+  const draw = (response: FrequencyResponse) => frequencyPolyline(response, ordinate, across, up);
+  const a = draw(responseOf(scene.a));
+  const b = scene.b === undefined ? null : draw(responseOf(scene.b));
+  const others = (scene.others ?? []).map((response) => polylinePath(draw(response), plot)).join('');
+  return { a, b, paths: { a: polylinePath(a, plot), b: b === null ? '' : polylinePath(b, plot), others } };
+}

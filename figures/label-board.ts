@@ -1,0 +1,44 @@
+import type { Rect } from './geometry';
+import type { LabelTone, PanelLabel } from './panel';
+import { type LabelPlace, type Paper, type PlacedLabel, placeLabel } from './place-label';
+
+export interface LabelBoard {
+  readonly labels: PanelLabel[];
+  /** Puts a label in the freest of its places, and keeps that place from those that follow. */
+  add(lines: readonly string[], tone: LabelTone, places: readonly LabelPlace[]): PlacedLabel;
+  /** Keeps labels off something that is drawn. */
+  reserve(rect: Rect): void;
+}
+
+/** One picture's labels, placed one after the other so that none covers another. */
+export function createLabelBoard(paper: Omit<Paper, 'taken'>): LabelBoard {
+  const labels: PanelLabel[] = [];
+  const taken: Rect[] = [];
+  return {
+    labels,
+    add(lines, tone, places) {
+      const place = placeLabel(lines, places, { ...paper, taken });
+      taken.push(place.box);
+      labels.push({ lines, tone, place });
+      return place;
+    },
+    reserve(rect) {
+      taken.push(rect);
+    },
+  };
+}
+
+/** Places beside a point of an upright bar: left and right of it, at some heights. */
+export function placesBeside(x: number, heights: readonly number[], away = 8): LabelPlace[] {
+  return heights.flatMap((y) => [
+    { x: x - away, y, anchor: 'end' as const },
+    { x: x + away, y, anchor: 'start' as const },
+  ]);
+}
+
+export const boxAround = (x: number, y: number, radius: number): Rect => ({
+  x: x - radius,
+  y: y - radius,
+  width: 2 * radius,
+  height: 2 * radius,
+});
