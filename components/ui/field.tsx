@@ -16,6 +16,7 @@ export function Field({ label, unit, hint, error, compact, numeric, ...input }: 
   return (
     <FieldFrame id={id} label={label} unit={unit} hint={hint} error={error} compact={compact}>
       <TextInput
+        blurOnSubmit={false}
         {...input}
         id={id}
         aria-invalid={error ? true : undefined}

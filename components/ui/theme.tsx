@@ -1,4 +1,4 @@
-import { createContext, type PropsWithChildren, useContext, useMemo } from 'react';
+import { createContext, type PropsWithChildren, useContext, useEffect, useMemo } from 'react';
 import { useColorScheme } from 'react-native';
 import type { Preferences } from '@/contract';
 import { type Palette, palettes, type ThemeName } from './tokens';
@@ -15,6 +15,9 @@ export function ThemeProvider({ preference, children }: PropsWithChildren<{ pref
   const system = useColorScheme() === 'dark' ? 'dark' : 'light';
   const name = preference === 'system' ? system : preference;
   const theme = useMemo(() => ({ name, colors: palettes[name] }), [name]);
+  useEffect(() => {
+    document.documentElement.dataset.theme = name;
+  }, [name]);
   return <ThemeContext.Provider value={theme}>{children}</ThemeContext.Provider>;
 }
 

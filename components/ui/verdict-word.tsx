@@ -1,9 +1,8 @@
 import { View } from 'react-native';
 import type { Verdict } from '@/contract';
+import { verdictWords } from '@/figures/verdict-shape';
 import { Text } from './text';
 import { VerdictGlyph } from './verdict-glyph';
-
-export const verdictWords: Readonly<Record<Verdict, string>> = { pass: 'pass', tight: 'tight', fail: 'fail', notJudged: 'not judged' };
 
 /** The verdict in a line of text: shape and word. */
 export function VerdictWord({ verdict, size = 18 }: { verdict: Verdict; size?: number }) {

@@ -1,11 +1,10 @@
 import { queryOptions, useMutation, useQueryClient, useSuspenseQuery } from '@tanstack/react-query';
 import type { DeviceSession, Me, UpdateMe } from '@/contract';
 import { hasStatus } from '../api/problem';
-import { staleTimes } from '../api/query-client';
+import { meKey, staleTimes } from '../api/query-client';
 import { request } from '../api/request';
 import type { Page } from './page';
 
-export const meKey = ['me'] as const;
 const sessionsKey = ['me', 'sessions'] as const;
 
 /** Who is signed in; null where nobody is. */

@@ -1,7 +1,7 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import type { SignIn, SignUp } from '@/contract';
 import { request } from '../api/request';
-import { meKey, meQuery } from './me';
+import { meQuery } from './me';
 
 /** What follows every sign-in: nothing of whoever was signed in before stays. */
 function useEntry<Input>(path: string) {
@@ -18,16 +18,12 @@ function useEntry<Input>(path: string) {
 export const useSignIn = () => useEntry<SignIn>('/auth/sign-in/email');
 export const useSignUp = () => useEntry<SignUp>('/auth/sign-up/email');
 
-export function useSignOut() {
-  const client = useQueryClient();
-  return useMutation({
+/** Ends with a fresh page: nothing of the one who was signed in stays in memory. */
+export const useSignOut = () =>
+  useMutation({
     mutationFn: () => request<unknown>('POST', '/auth/sign-out', { body: {} }),
-    onSuccess: () => {
-      client.clear();
-      client.setQueryData(meKey, null);
-    },
+    onSuccess: () => window.location.assign('/sign-in'),
   });
-}
 
 export const useAskReset = () =>
   useMutation({

@@ -1,0 +1,1 @@
+export { ProjectList as default } from '@/components/projects/project-list';

@@ -1,0 +1,7 @@
+import { useLocalSearchParams } from 'expo-router';
+import { AnalysisScreen } from '@/components/analyses/analysis-screen';
+
+export default function AnalysisRoute() {
+  const { analysisId } = useLocalSearchParams<{ analysisId: string }>();
+  return <AnalysisScreen key={analysisId} analysisId={analysisId} />;
+}

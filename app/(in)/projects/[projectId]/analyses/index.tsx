@@ -1,0 +1,1 @@
+export { AnalysisList as default } from '@/components/analyses/analysis-list';

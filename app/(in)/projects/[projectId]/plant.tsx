@@ -1,0 +1,1 @@
+export { PlantScreen as default } from '@/components/plants/plant-screen';

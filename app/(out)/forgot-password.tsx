@@ -1,0 +1,1 @@
+export { ForgotPassword as default } from '@/components/account/forgot-password';

@@ -1,0 +1,1 @@
+export { ResetPassword as default } from '@/components/account/reset-password';

@@ -1,0 +1,1 @@
+export { SignUp as default } from '@/components/account/sign-up';

@@ -1,0 +1,1 @@
+export { Verified as default } from '@/components/account/verified';

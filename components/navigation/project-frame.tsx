@@ -1,0 +1,72 @@
+import { useQuery } from '@tanstack/react-query';
+import { usePathname } from 'expo-router';
+import { type PropsWithChildren, useMemo, useState } from 'react';
+import { StyleSheet, View } from 'react-native';
+import { IconButton } from '@/components/ui/icon-button';
+import { QueryView } from '@/components/ui/query-view';
+import { HiddenHeading } from '@/components/ui/hidden-heading';
+import { useLayout } from '@/components/ui/use-layout';
+import { projectQuery, type ReadProject } from '@/hooks/queries/projects';
+import { DeskFrame } from './desk-frame';
+import { MainArea } from './main-area';
+import { PageBar } from './page-bar';
+import { pageOf, pages } from './pages';
+import { PagesSheet } from './pages-sheet';
+import { PhoneTop } from './phone-top';
+import { ProjectContext } from './project-context';
+import { ProjectSwitch } from './project-switch';
+import { ProjectTabs } from './project-tabs';
+import { projectPath } from './routes';
+import { SignalBanner } from './signal-banner';
+import { TopBar } from './top-bar';
+
+/** What stands round every page of a project: the bars of the layout, the sheet of pages, and the project itself for those inside. */
+export function ProjectFrame({ projectId, children }: PropsWithChildren<{ projectId: string }>) {
+  const project = useQuery(projectQuery(projectId));
+  if (project.data) return <LoadedFrame project={project.data}>{children}</LoadedFrame>;
+  return (
+    <DeskFrame title="Project">
+      <QueryView query={project} waiting="Fetching the project" missing="No such project, or it is not yours to see.">
+        {() => null}
+      </QueryView>
+    </DeskFrame>
+  );
+}
+
+function LoadedFrame({ project, children }: PropsWithChildren<{ project: ReadProject }>) {
+  const phone = useLayout() === 'phone';
+  const pathname = usePathname();
+  const current = pageOf(pathname);
+  const [sheet, setSheet] = useState(false);
+  const context = useMemo(() => ({ project, openPages: () => setSheet(true) }), [project]);
+  const place = { projectId: project.id, current };
+  const pageName = pages.find(({ page }) => page === current)?.name ?? 'Home';
+  const home = current === 'home';
+  const deeper = pathname !== projectPath(project.id, current);
+  const up = deeper ? projectPath(project.id, current) : home ? '/' : projectPath(project.id);
+  return (
+    <ProjectContext.Provider value={context}>
+      <View style={styles.frame}>
+        {phone ? (
+          <PhoneTop title={home ? project.name : pageName} sub={home ? project.vehicle : project.name} up={up}>
+            <IconButton icon="more" label="All pages" onPress={context.openPages} />
+          </PhoneTop>
+        ) : (
+          <TopBar>
+            <ProjectSwitch project={project} />
+            <ProjectTabs {...place} />
+          </TopBar>
+        )}
+        <SignalBanner />
+        <MainArea>
+          {!phone && (home || current === 'bench') ? <HiddenHeading>{home ? project.name : `Bench, ${project.name}`}</HiddenHeading> : null}
+          {children}
+        </MainArea>
+        {phone && current !== 'bench' ? <PageBar {...place} /> : null}
+        <PagesSheet {...place} open={sheet} onClose={() => setSheet(false)} />
+      </View>
+    </ProjectContext.Provider>
+  );
+}
+
+const styles = StyleSheet.create({ frame: { flex: 1, minHeight: 0 } });
