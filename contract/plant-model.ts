@@ -65,6 +65,22 @@ export const PlantModel = z.discriminatedUnion('kind', [CoefficientsPlant, Roots
 export type PlantModel = z.infer<typeof PlantModel>;
 export type PlantModelInput = z.input<typeof PlantModel>;
 
+export const ReadPlant = z.strictObject({ plant: PlantModel }).meta({ id: 'ReadPlant' });
+
+/** A plant worked out once: factored as gain·Π(s − zero)/Π(s − pole)·e^(−s·deadTime), as coefficients, and in words. */
+export const PlantReading = z
+  .object({
+    gain: z.number(),
+    zeros: z.array(ComplexNumber),
+    poles: z.array(ComplexNumber),
+    deadTime: z.number().meta({ description: 's' }),
+    numerator: z.array(z.number()),
+    denominator: z.array(z.number()),
+    words: z.string(),
+  })
+  .meta({ id: 'PlantReading' });
+export type PlantReading = z.infer<typeof PlantReading>;
+
 export const Sensor = z
   .strictObject({
     timeConstant: z.number().min(0, 'A time constant is 0 or more.').max(MAX_DEAD_TIME).default(0),
