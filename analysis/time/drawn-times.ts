@@ -1,0 +1,63 @@
+import type { Curve } from './curve';
+import { derivativeAtNodes, NODE_COUNT } from './nodes';
+
+/** Straight lines between drawn points stay within this share of a curve's range. */
+const DRAWING_TOLERANCE = 2.5e-4;
+const LOOSER = 3;
+const MAX_POINTS = 4000;
+
+/** How long before a jump its foot is drawn, and the least distance of two points, as shares of the axis. */
+const INSTANT = 1e-9;
+
+/**
+ * Ascending times on [0, end], both included, at which to draw the curves: at least `points` evenly spread, more where a
+ * curve bends, and a pair about each jump. Where that came to more than 4,000 the tolerance is loosened.
+ */
+export function drawnTimes(curves: readonly Curve[], end: number, points: number): number[] {
+  const even = Array.from({ length: points }, (_, k) => (end * k) / (points - 1));
+  for (let tolerance = DRAWING_TOLERANCE; tolerance < 1; tolerance *= LOOSER) {
+    const extra = curves.flatMap((curve) => bendTimes(curve, { end, spacing: end / (points - 1), tolerance }));
+    const times = ascending([...even, ...extra], end);
+    if (times.length <= Math.max(points, MAX_POINTS)) return times;
+  }
+  return even;
+}
+
+interface Drawing {
+  readonly end: number;
+  readonly spacing: number;
+  readonly tolerance: number;
+}
+
+function bendTimes(curve: Curve, { end, spacing, tolerance }: Drawing): number[] {
+  const times: number[] = [];
+  const allowed = tolerance * rangeUntil(curve, end);
+  let [before, slopeBefore] = [curve.values[0], 0];
+  for (let panel = 0; panel < curve.panels && curve.starts[panel] < end; panel += 1) {
+    const [start, width, offset] = [curve.starts[panel], curve.widths[panel], panel * NODE_COUNT];
+    const slopes = derivativeAtNodes(curve.values, offset);
+    if (Math.abs(curve.values[offset] - before) > allowed) times.push(start - INSTANT * end, start);
+    else if ((Math.abs(slopes[0] / width - slopeBefore) * spacing) / 4 > allowed) times.push(start);
+    const bend = derivativeAtNodes(slopes, 0).reduce((most, value) => Math.max(most, Math.abs(value)), 0);
+    const pieces = Math.ceil(Math.sqrt(bend / (8 * allowed)));
+    if (width / pieces < spacing) for (let k = 0; k <= pieces; k += 1) times.push(start + (width * k) / pieces);
+    [before, slopeBefore] = [curve.values[offset + NODE_COUNT - 1], slopes[NODE_COUNT - 1] / width];
+    if (times.length > MAX_POINTS) break;
+  }
+  return times;
+}
+
+function rangeUntil(curve: Curve, end: number): number {
+  let size = Number.MIN_VALUE;
+  for (let panel = 0; panel < curve.panels && curve.starts[panel] < end; panel += 1) {
+    for (let j = 0; j < NODE_COUNT; j += 1) size = Math.max(size, Math.abs(curve.values[panel * NODE_COUNT + j]));
+  }
+  return size;
+}
+
+function ascending(times: number[], end: number): number[] {
+  const sorted = times.filter((time) => time >= 0 && time <= end).sort((a, b) => a - b);
+  const distinct = sorted.filter((time, k) => k === 0 || time - sorted[k - 1] > (INSTANT * end) / 2);
+  distinct[distinct.length - 1] = end;
+  return distinct;
+}

@@ -1,0 +1,1 @@
+export { timeResponse, type KnownStability, type TimeResponseOptions } from './time-response';
