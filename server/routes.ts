@@ -1,7 +1,25 @@
 import { authRoutes } from './auth/auth-routes';
 import { accountRoutes } from './account/account-routes';
+import { activityRoutes } from './activity/activity-routes';
+import { analysisRoutes } from './analyses/analysis-routes';
+import { caseRoutes } from './cases/case-routes';
+import { designRoutes } from './designs/design-routes';
 import type { Route } from './http/route';
+import { loopRoutes } from './loops/loop-routes';
+import { plantRoutes } from './plants/plant-routes';
+import { projectRoutes } from './projects/project-routes';
 import { systemRoutes } from './system/system-routes';
 
 /** Every route of the API; what is not listed here does not exist. */
-export const routes: readonly Route[] = [...systemRoutes, ...authRoutes, ...accountRoutes];
+export const routes: readonly Route[] = [
+  ...systemRoutes,
+  ...authRoutes,
+  ...accountRoutes,
+  ...projectRoutes,
+  ...plantRoutes,
+  ...designRoutes,
+  ...caseRoutes,
+  ...analysisRoutes,
+  ...activityRoutes,
+  ...loopRoutes,
+];

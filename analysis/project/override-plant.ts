@@ -1,11 +1,11 @@
-import type { CaseParameters, PlantModel } from '@/contract';
+import type { FrozenCase, PlantModel } from '@/contract';
 
 /**
  * The plant of one case: its gain times `gainFactor`, and `deadTime` in place of its own, s.
  *
  * @throws TypeError for a formula with overrides: its dead time stands inside the text, so it is factored first
  */
-export function overridePlant(plant: PlantModel, { gainFactor = 1, deadTime }: CaseParameters): PlantModel {
+export function overridePlant(plant: PlantModel, { gainFactor = 1, deadTime }: FrozenCase['parameters']): PlantModel {
   if (gainFactor === 1 && deadTime === undefined) return plant;
   switch (plant.kind) {
     case 'coefficients':

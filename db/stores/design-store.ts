@@ -16,7 +16,7 @@ export interface DesignKey {
 interface NewRevision extends DesignKey {
   readonly name: string;
   readonly content: DesignContent;
-  readonly note: string | null;
+  readonly note?: string;
   readonly activity: ActivityEntry;
   readonly stamp: Stamp;
 }

@@ -16,7 +16,7 @@ export interface PlantKey {
 interface NewRevision extends PlantKey {
   readonly name: string;
   readonly content: PlantContent;
-  readonly note: string | null;
+  readonly note?: string;
   readonly activity: ActivityEntry;
   readonly stamp: Stamp;
 }
