@@ -14,12 +14,6 @@ export interface PointerLayerProps {
   onStep: (direction: 1 | -1, coarse: boolean) => void;
 }
 
-interface KeyPress {
-  key: string;
-  shiftKey: boolean;
-  preventDefault: () => void;
-}
-
 const directions: Record<string, 1 | -1> = { ArrowRight: 1, ArrowUp: 1, ArrowLeft: -1, ArrowDown: -1 };
 
 // Sideways drags are the cursor's; the page keeps the upright ones.
@@ -29,13 +23,11 @@ const sideways = { touchAction: 'pan-y', cursor: 'crosshair' } as unknown as Vie
 export function PointerLayer({ rect, label, valueText, range, onPoint, onStep }: PointerLayerProps) {
   const { style, ...focus } = useFocusRing();
   const follow = ({ nativeEvent }: PointerEvent) => onPoint({ x: rect.x + nativeEvent.offsetX, y: rect.y + nativeEvent.offsetY });
-  const keys = {
-    onKeyDown: (event: KeyPress) => {
-      const direction = directions[event.key];
-      if (direction === undefined) return;
-      event.preventDefault();
-      onStep(direction, event.shiftKey);
-    },
+  const step = (event: KeyboardEvent) => {
+    const direction = directions[event.key];
+    if (direction === undefined) return;
+    event.preventDefault();
+    onStep(direction, event.shiftKey);
   };
   return (
     <View
@@ -48,9 +40,9 @@ export function PointerLayer({ rect, label, valueText, range, onPoint, onStep }:
       aria-valuetext={valueText}
       onPointerDown={follow}
       onPointerMove={follow}
+      onKeyDown={step}
       style={[{ position: 'absolute', left: rect.x, top: rect.y, width: rect.width, height: rect.height }, sideways, style]}
       {...focus}
-      {...keys}
     />
   );
 }

@@ -1,0 +1,14 @@
+export type { ChartDesign, ChartLimits, ChartUnits, FrequencyPanel, LoopChartProps, LoopPoint, PlaneKind, TimePanel } from './chart-types';
+export { type CursorKind, createCursorStore, type CursorStore } from './cursor-store';
+export { CursorProvider, useCursor, useCursorStore } from './cursor-provider';
+export { FrequencySheet, type FrequencySheetProps } from './frequency-sheet';
+export { PlaneChart, type PlaneChartProps } from './plane-chart';
+export { TimeSheet, type TimeSheetProps } from './time-sheet';
+export { ReadOut, type ReadOutProps, TimeReadOut, type TimeReadOutProps } from './read-out';
+export { CurveKey, CurveSwatch } from './curve-key';
+export { EdgeRuler, type EdgeRulerProps } from './edge-ruler';
+export { GainRule, type GainRuleProps } from './gain-rule';
+export type { GainChange } from './use-gain-drag';
+export { DataTable, type TableContent } from './data-table';
+export { KerbCircle, KerbOutline, KerbStripe } from './kerb-stripe';
+export { VerdictGlyph } from '@/components/ui/verdict-glyph';

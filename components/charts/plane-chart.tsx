@@ -1,0 +1,96 @@
+import { memo, useMemo, useState } from 'react';
+import { StyleSheet } from 'react-native';
+import Svg from 'react-native-svg';
+import { Segments } from '@/components/ui/segments';
+import { touch } from '@/components/ui/tokens';
+import {
+  type LoopScene,
+  nicholsPicture,
+  nicholsWindow,
+  nyquistPicture,
+  nyquistWindow,
+  type PlanePicture,
+  type Rect,
+  responseOf,
+} from '@/figures';
+import { ChartShell } from './chart-shell';
+import { ChartText } from './chart-text';
+import type { LoopChartProps, PlaneKind } from './chart-types';
+import { describePlane, encirclementText } from './describe';
+import { PlaneCursor } from './plane-cursor';
+import { PlaneView } from './plane-view';
+import { frequencyTable } from './tables';
+import { UnstableMark } from './unstable-mark';
+import { useChartFrame } from './use-chart-frame';
+
+export interface PlaneChartProps extends LoopChartProps {
+  height: number;
+  /** Measured where absent. */
+  width?: number;
+  /** Which plane is drawn, where the screen keeps that; the chart's own switch where absent. */
+  plane?: PlaneKind;
+  onPlane?: (plane: PlaneKind) => void;
+}
+
+const names: Record<PlaneKind, string> = { nyquist: 'Nyquist', nichols: 'Nichols' };
+const options = (['nyquist', 'nichols'] as const).map((value) => ({ value, label: names[value] }));
+const FOOT = 24;
+const insets: Record<PlaneKind, { left: number; right: number; foot: number }> = {
+  nyquist: { left: 6, right: 6, foot: FOOT },
+  nichols: { left: 40, right: 6, foot: FOOT + 22 },
+};
+
+function plotOf(kind: PlaneKind, width: number, height: number): Rect {
+  const { left, right, foot } = insets[kind];
+  return { x: left, y: touch + 4, width: Math.max(1, width - left - right), height: Math.max(1, height - touch - 4 - foot) };
+}
+
+function pictureOf(kind: PlaneKind, scene: LoopScene, plot: Rect): PlanePicture {
+  const designs = scene.b === undefined ? [scene.a] : [scene.a, scene.b];
+  if (kind === 'nyquist') return nyquistPicture(scene, nyquistWindow(designs.map(({ analysis }) => analysis)), plot);
+  return nicholsPicture(scene, nicholsWindow(designs.map(responseOf)), plot);
+}
+
+/** L on the contours of |S|, as Nyquist or Nichols: how near it comes to −1, in which direction it runs, and how often it goes round. */
+export const PlaneChart = memo(function PlaneChart({ a, b, others, limits, units, height, width: fixed, plane, onPlane }: PlaneChartProps) {
+  const { width, onLayout } = useChartFrame(fixed);
+  const [own, setOwn] = useState<PlaneKind>('nyquist');
+  const kind = plane ?? own;
+  const scene = useMemo(() => ({ a, b, others, limits, units }), [a, b, others, limits, units]);
+  const picture = useMemo(() => pictureOf(kind, scene, plotOf(kind, width, height)), [kind, scene, width, height]);
+  const count = encirclementText(scene);
+  const { plot } = picture;
+  const right = plot.x + plot.width;
+  const foot = kind === 'nyquist' ? `posts along L: ${units.frequency}` : `dB over arg L, posts in ${units.frequency}`;
+  const drawing = (
+    <Svg width={width} height={height} style={StyleSheet.absoluteFill} aria-hidden>
+      <PlaneView picture={picture} />
+      <ChartText x={plot.x} y={26} tone="title">
+        {names[kind]}
+      </ChartText>
+      <ChartText x={plot.x + 52} y={26} tone="contour">
+        contours are |S|
+      </ChartText>
+      <ChartText x={plot.x} y={height - 6}>
+        {foot}
+      </ChartText>
+      <ChartText x={right} y={height - 6} anchor="end" tone={count.differ ? 'fail' : 'quiet'}>
+        {count.text}
+      </ChartText>
+      {a.analysis.closedLoop.stable ? null : <UnstableMark x={right} y={plot.y + 14} />}
+    </Svg>
+  );
+  const { frequencies } = responseOf(a);
+  return (
+    <ChartShell
+      name={names[kind]}
+      description={describePlane(scene, names[kind])}
+      height={height}
+      onLayout={onLayout}
+      picture={width > 0 ? drawing : null}
+      overlay={width > 0 ? <PlaneCursor scene={scene} picture={picture} size={{ width, height }} /> : null}
+      table={() => frequencyTable(scene, [frequencies[0] ?? 1, frequencies[frequencies.length - 1] ?? 10])}
+      tools={<Segments label="Plane" value={kind} options={options} onChange={onPlane ?? setOwn} />}
+    />
+  );
+});

@@ -1,0 +1,47 @@
+import { StyleSheet } from 'react-native';
+import Svg from 'react-native-svg';
+import { clamp, contains, frequencyAtPlace, type LoopScene, nearestPlace, type PlanePicture, responseOf } from '@/figures';
+import { CursorDisc } from './cursor-marks';
+import { useCursor } from './cursor-provider';
+import { frequencyCursorText, steppedFrequency } from './frequency-cursor';
+import { PointerLayer } from './pointer-layer';
+
+/** The cursor on a plane: the frequency of the point of A that is nearest to the finger. */
+export function PlaneCursor({
+  scene,
+  picture,
+  size,
+}: {
+  scene: LoopScene;
+  picture: PlanePicture;
+  size: { width: number; height: number };
+}) {
+  const [frequency, set] = useCursor('frequency');
+  const { a, b } = scene;
+  const { frequencies } = responseOf(a);
+  const [low, high] = [frequencies[0] ?? 1, frequencies[frequencies.length - 1] ?? 1];
+  const now = clamp(frequency ?? a.analysis.margins.phase?.frequency ?? Math.sqrt(low * high), low, high);
+  const places = [b, a].flatMap((design) => (design === undefined ? [] : [{ design, at: picture.toPixel(design.at(now)) }]));
+  return (
+    <>
+      <Svg width={size.width} height={size.height} style={StyleSheet.absoluteFill} aria-hidden>
+        {places
+          .filter(({ at }) => frequency !== null && contains(picture.plot, at))
+          .map(({ design, at }) => (
+            <CursorDisc key={design.label} at={at} design={design === a ? 'a' : 'b'} radius={4.5} />
+          ))}
+      </Svg>
+      <PointerLayer
+        rect={picture.plot}
+        label="Cursor, frequency along L"
+        valueText={frequencyCursorText(scene, now)}
+        range={{ least: low, most: high, now }}
+        onPoint={(point) => {
+          const place = nearestPlace(picture.lineA, point);
+          if (place !== null) set(frequencyAtPlace(frequencies, place));
+        }}
+        onStep={(direction, coarse) => set(steppedFrequency(now, direction, coarse, [low, high]))}
+      />
+    </>
+  );
+}

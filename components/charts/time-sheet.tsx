@@ -1,0 +1,72 @@
+import { memo, useMemo } from 'react';
+import { StyleSheet } from 'react-native';
+import Svg from 'react-native-svg';
+import { stackLayout, stackMargins, timeAxis, timePanel, timeWindow } from '@/figures';
+import { ChartShell } from './chart-shell';
+import type { LoopChartProps, TimePanel } from './chart-types';
+import { describeTime } from './describe';
+import { TimeFoot } from './foot-axis';
+import { PanelView } from './panel-view';
+import { timeTable } from './tables';
+import { TimeCursor } from './time-cursor';
+import { UnstableMark } from './unstable-mark';
+import { useChartFrame } from './use-chart-frame';
+import { useSteadyInterval } from './use-steady-interval';
+
+export interface TimeSheetProps extends Omit<LoopChartProps, 'others'> {
+  /** From top to foot, each with its title and unit; a panel's height is its weight in the stack, 1 where absent. */
+  panels: readonly TimePanel[];
+  height: number;
+  /** Measured where absent. */
+  width?: number;
+}
+
+const itself = (value: number): number => value;
+
+/** Reference step, load step and control in a stack over one time axis, with their own cursor. */
+export const TimeSheet = memo(function TimeSheet({ a, b, limits, units, panels: asked, height, width: fixed }: TimeSheetProps) {
+  const { width, onLayout } = useChartFrame(fixed);
+  const scene = useMemo(() => ({ a, b, limits, units }), [a, b, limits, units]);
+  const wanted = useMemo(() => timeWindow(b === undefined ? [a.analysis] : [a.analysis, b.analysis]), [a, b]);
+  const domain = useSteadyInterval(wanted, itself);
+  const layout = useMemo(
+    () =>
+      stackLayout(
+        width,
+        height,
+        asked.map((panel) => panel.height ?? 1),
+      ),
+    [width, height, asked],
+  );
+  const across = useMemo(
+    () => timeAxis(domain[1], [stackMargins.left, Math.max(stackMargins.left + 1, width - stackMargins.right)]),
+    [domain, width],
+  );
+  const panels = useMemo(
+    () => asked.map((panel, i) => ({ panel, picture: timePanel(scene, panel, across, layout.plots[i]) })),
+    [asked, scene, across, layout],
+  );
+  const columns = useMemo(() => across.ticks.filter(({ text }) => text !== null).map(({ x }) => x), [across]);
+  const stable = a.analysis.closedLoop.stable;
+  const picture = (
+    <Svg width={width} height={height} style={StyleSheet.absoluteFill} aria-hidden>
+      {panels.map(({ panel, picture: drawn }) => (
+        <PanelView key={panel.kind} picture={drawn} columns={columns} />
+      ))}
+      <TimeFoot axis={across} y={layout.foot} />
+      {stable ? null : <UnstableMark x={width - 60} y={12} />}
+    </Svg>
+  );
+  const titles = asked.map(({ title }) => title);
+  return (
+    <ChartShell
+      name={titles.join(', ')}
+      description={describeTime(scene, titles)}
+      height={height}
+      onLayout={onLayout}
+      picture={width > 0 ? picture : null}
+      overlay={width > 0 ? <TimeCursor scene={scene} panels={panels} across={across} size={layout} /> : null}
+      table={() => timeTable(scene, asked, domain)}
+    />
+  );
+});
