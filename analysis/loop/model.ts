@@ -1,5 +1,11 @@
 import type { Complex } from '@/analysis/numbers/complex';
 
+/** Coefficients in descending powers of s. */
+export interface Coefficients {
+  readonly numerator: readonly number[];
+  readonly denominator: readonly number[];
+}
+
 /**
  * A real rational function in factored form: gain·Π(s − zeroᵢ)/Π(s − poleᵢ).
  * `gain` is the ratio of the leading coefficients. Conjugates are present and stand next to each other.
@@ -8,6 +14,11 @@ export interface Rational {
   readonly gain: number;
   readonly zeros: readonly Complex[];
   readonly poles: readonly Complex[];
+  /**
+   * Present where coefficients are what was given. They are then evaluated (Horner is exact to rounding even where roots
+   * are nearly multiple) and the roots only tell how many turns the phase has made.
+   */
+  readonly coefficients?: Coefficients;
 }
 
 /** PID gains in parallel form: kp + ki/s + kd·s/(1 + s·filterTime). */

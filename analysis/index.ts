@@ -1,0 +1,9 @@
+/** The contents page of the engine: what others may use. */
+export { analyseLoop, engineVersion, type AnalyseOptions } from './analyse-loop';
+export { loopAt, type LoopPoint } from './loop-at';
+export { buildLoop } from './loop/build-loop';
+export { describePlant, type PlantDescription } from './loop/describe-plant';
+export { LoopError, type LoopErrorCode } from './loop/loop-error';
+export type { LoopModel, ParallelGains, Rational } from './loop/model';
+export { toParallelGains } from './loop/parallel-gains';
+export type { Complex } from './numbers/complex';

@@ -1,0 +1,32 @@
+import type { LoopModel } from '@/analysis/loop/model';
+import { ContinuousLoop } from '@/analysis/margins/continuous-loop';
+import { IM, PHASE, RE, ROW } from '@/analysis/margins/sample';
+
+/** The exact loop at one frequency, for a cursor. Magnitudes are factors. */
+export interface LoopPoint {
+  re: number;
+  im: number;
+  magnitude: number;
+  phaseDegrees: number;
+  sensitivity: number;
+  complementarySensitivity: number;
+}
+
+/**
+ * L, |S| and |T| at ω > 0 rad/s.
+ * @throws LoopError where the loop has no finite value there
+ */
+export const loopAt = (model: LoopModel, omega: number): LoopPoint => {
+  const row = new Float64Array(ROW);
+  new ContinuousLoop(model).sampleAt(omega, row, 0);
+  const magnitude = Math.hypot(row[RE], row[IM]);
+  const distance = Math.hypot(1 + row[RE], row[IM]);
+  return {
+    re: row[RE],
+    im: row[IM],
+    magnitude,
+    phaseDegrees: (row[PHASE] * 180) / Math.PI,
+    sensitivity: 1 / distance,
+    complementarySensitivity: magnitude / distance,
+  };
+};

@@ -1,0 +1,32 @@
+import type { Loop } from '@/contract';
+import { buildController } from './controller';
+import { buildFilters, lag } from './filters';
+import { LoopError } from './loop-error';
+import type { LoopModel } from './model';
+import { toParallelGains } from './parallel-gains';
+import { buildPlant } from './plant';
+
+/**
+ * A contract Loop as one continuous loop in factored form.
+ * @throws LoopError with a JSON Pointer into the Loop where it has no meaning or is not yet supported
+ */
+export const buildLoop = (loop: Loop): LoopModel => {
+  if (loop.sampling)
+    throw unsupported('/sampling', 'Loops with a sample period are not analysed yet; leave it out to analyse the continuous loop.');
+  if (loop.actuator) throw unsupported('/actuator', 'Actuator limits are not analysed yet; leave them out to analyse the linear loop.');
+  const { rational, deadTime } = buildPlant(loop.plant);
+  const { controller } = loop;
+  return {
+    plant: rational,
+    plantDeadTime: deadTime,
+    sensor: lag(loop.sensor?.timeConstant ?? 0),
+    sensorDeadTime: loop.sensor?.deadTime ?? 0,
+    controller: buildController(controller),
+    gains: toParallelGains(controller),
+    filters: buildFilters(controller.filters),
+    weights: controller.setpointWeights,
+    feedforwardGain: controller.feedforward.gain,
+  };
+};
+
+const unsupported = (pointer: string, detail: string) => new LoopError({ pointer, detail, code: 'unsupported' });

@@ -1,0 +1,36 @@
+/** Places in the accumulator of a product that is built factor by factor. */
+export const RE = 0;
+export const IM = 1;
+/** Whole turns that the argument of the product has made beyond atan2's (−π, π]. */
+export const TURNS = 2;
+/** d ln|product| / d ln ω. */
+export const LOG_SLOPE = 3;
+/** d arg(product) / d ln ω, radians. */
+export const PHASE_SLOPE = 4;
+export const WIDTH = 5;
+
+export const startProduct = (product: Float64Array): void => {
+  product.fill(0);
+  product[RE] = 1;
+};
+
+/**
+ * Multiplies one complex factor into the product and keeps count of whole turns, so that the unwrapped argument costs one
+ * atan2 at the very end instead of one per factor. Two arguments in [0, π] wrap where their product falls below the real
+ * axis, two in (−π, 0) where it rises above.
+ */
+export const multiplyIn = (product: Float64Array, re: number, im: number): void => {
+  const x = product[RE];
+  const y = product[IM];
+  const nextIm = x * im + y * re + 0;
+  product[RE] = x * re - y * im;
+  product[IM] = nextIm;
+  const above = y >= 0;
+  if (above !== im >= 0) return;
+  const bothOnCut = y === 0 && im === 0 && x < 0 && re < 0;
+  if (bothOnCut) product[TURNS] += 1;
+  else if (above !== nextIm >= 0) product[TURNS] += above ? 1 : -1;
+};
+
+/** Unwrapped argument of the product, radians. */
+export const argument = (product: Float64Array): number => Math.atan2(product[IM], product[RE]) + 2 * Math.PI * product[TURNS];

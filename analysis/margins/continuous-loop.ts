@@ -1,0 +1,98 @@
+import { AxisProduct } from '@/analysis/loop/axis-product';
+import { fromGains } from '@/analysis/loop/controller';
+import { LoopError } from '@/analysis/loop/loop-error';
+import type { LoopModel, Rational } from '@/analysis/loop/model';
+import { axisFrequencies, landmarks } from './landmarks';
+import type { EndOfAxis, LoopFunction } from './loop-function';
+import * as S from './sample';
+
+/** More evaluations than any loop needs that a person would draw; past it the loop is refused rather than waited for. */
+const BUDGET = 400_000;
+
+/** A continuous LoopModel on the axis s = jω, dead time exact. */
+export class ContinuousLoop implements LoopFunction {
+  readonly landmarks: readonly number[];
+  readonly axisFrequencies: readonly number[];
+  readonly isZero: boolean;
+  readonly deadTime: number;
+  readonly atZero: EndOfAxis;
+  readonly atInfinity: EndOfAxis;
+  evaluations = 0;
+  private readonly plant: AxisProduct;
+  private readonly command: AxisProduct;
+  private readonly sensor: AxisProduct;
+  private readonly forward: AxisProduct;
+  private readonly plantDeadTime: number;
+  /** Both plant and controller negative: each starts at −180°, the loop at 0°. */
+  private readonly phaseShift: number;
+
+  constructor(model: LoopModel) {
+    const { plant, controller, filters, sensor } = model;
+    this.plant = new AxisProduct([plant]);
+    this.command = new AxisProduct([controller, filters]);
+    this.sensor = new AxisProduct([sensor]);
+    this.forward = new AxisProduct([forwardController(model), filters]);
+    this.plantDeadTime = model.plantDeadTime;
+    this.deadTime = model.plantDeadTime + model.sensorDeadTime;
+    const parts = [plant, controller, filters, sensor];
+    this.landmarks = landmarks(parts, this.deadTime);
+    this.axisFrequencies = axisFrequencies(parts);
+    const loop = new AxisProduct(parts);
+    const reference = new AxisProduct([plant, forwardController(model), filters]);
+    this.isZero = loop.isZero;
+    this.atZero = { loop: loop.atZero, command: this.command.atZero, reference: reference.atZero };
+    this.atInfinity = { loop: loop.atInfinity, command: this.command.atInfinity, reference: reference.atInfinity };
+    this.phaseShift = this.plant.isNegative && this.command.isNegative ? 2 * Math.PI : 0;
+  }
+
+  sampleAt(omega: number, table: S.Table, offset: number): void {
+    this.evaluations += 1;
+    if (this.evaluations > BUDGET) throw tooMuch();
+    const { plant, command, sensor, forward, deadTime } = this;
+    plant.evaluate(omega);
+    command.evaluate(omega);
+    sensor.evaluate(omega);
+    forward.evaluate(omega);
+    const re = plant.re * command.re - plant.im * command.im;
+    const im = plant.re * command.im + plant.im * command.re;
+    const loopRe = re * sensor.re - im * sensor.im;
+    const loopIm = re * sensor.im + im * sensor.re;
+    const cos = deadTime === 0 ? 1 : Math.cos(omega * deadTime);
+    const sin = deadTime === 0 ? 0 : -Math.sin(omega * deadTime);
+    table[offset + S.OMEGA] = omega;
+    table[offset + S.RE] = loopRe * cos - loopIm * sin;
+    table[offset + S.IM] = loopRe * sin + loopIm * cos;
+    table[offset + S.LOG] = plant.logMagnitude + command.logMagnitude + sensor.logMagnitude;
+    table[offset + S.LOG_SLOPE] = plant.logSlope + command.logSlope + sensor.logSlope;
+    table[offset + S.PHASE] = plant.phase + command.phase + sensor.phase + this.phaseShift - omega * deadTime;
+    table[offset + S.PHASE_SLOPE] = plant.phaseSlope + command.phaseSlope + sensor.phaseSlope - omega * deadTime;
+    table[offset + S.PLANT_LOG] = plant.logMagnitude;
+    table[offset + S.PLANT_PHASE] = plant.phase - omega * this.plantDeadTime;
+    table[offset + S.COMMAND_LOG] = command.logMagnitude;
+    table[offset + S.COMMAND_LOG_SLOPE] = command.logSlope;
+    table[offset + S.COMMAND_PHASE] = command.phase;
+    table[offset + S.REFERENCE_LOG] = plant.logMagnitude + forward.logMagnitude;
+    table[offset + S.REFERENCE_LOG_SLOPE] = plant.logSlope + forward.logSlope;
+    if (Number.isNaN(table[offset + S.RE] + table[offset + S.PHASE])) throw outOfRange(omega);
+  }
+}
+
+/** C_r + F: the controller with its set-point weights, and the static feedforward beside it. */
+const forwardController = ({ gains, weights, feedforwardGain, controller }: LoopModel): Rational => {
+  if (weights.proportional === 1 && weights.derivative === 1 && feedforwardGain === 0) return controller;
+  return fromGains({ ...gains, kp: gains.kp * weights.proportional + feedforwardGain, kd: gains.kd * weights.derivative });
+};
+
+const tooMuch = () =>
+  new LoopError({
+    pointer: '/plant/deadTime',
+    detail: 'This loop turns through too many crossovers to analyse: its dead time is very long beside its fastest pole.',
+    code: 'tooMuchToCompute',
+  });
+
+const outOfRange = (omega: number) =>
+  new LoopError({
+    pointer: '/plant',
+    detail: `The loop has no finite value at ${omega} rad/s: its numbers are too far apart.`,
+    code: 'outOfRange',
+  });

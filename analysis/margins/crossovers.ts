@@ -1,0 +1,77 @@
+import { limitOf } from './end-values';
+import type { LoopFunction } from './loop-function';
+import { visitPieces } from './pieces';
+import type { Probe } from './probe';
+import { loopGain, loopPhase } from './quantities';
+import { LOG, PHASE } from './sample';
+import { LEAST_LISTED_GAIN } from './search-grid';
+
+/** A point where |L| = 1. The phase is unwrapped, radians. */
+export interface GainCrossover {
+  readonly frequency: number;
+  readonly phase: number;
+}
+
+/** A point where L is real and negative. `frequency` null: as ω → ∞. */
+export interface PhaseCrossover {
+  readonly frequency: number | null;
+  readonly gain: number;
+}
+
+/** |L| below this counts as zero. */
+const ZERO_GAIN = 1e-12;
+/** A neutral loop's crossovers never end; the list does. */
+export const MOST_NEUTRAL_CROSSOVERS = 200;
+const TURN = 2 * Math.PI;
+/** Phases nearer than this to −180° are on it: the crossing is not a crossing but a stretch, or rounding. */
+const ON_AXIS = 1e-13;
+
+/** All ω > 0 with |L(jω)| = 1, ascending. */
+export const gainCrossovers = (probe: Probe): GainCrossover[] => {
+  const found: GainCrossover[] = [];
+  visitPieces(probe, loopGain, {
+    matters: (least, most) => least <= 0 && most >= 0,
+    visit: ({ a, valueA, b, valueB }) => {
+      if (valueA > 0 === valueB > 0) return;
+      const frequency = probe.crossing(loopGain, 0, { a, valueA, b, valueB });
+      found.push({ frequency, phase: probe.row[PHASE] });
+    },
+  });
+  return found;
+};
+
+/** All ω ≥ 0 with L real and negative, ascending, the point at infinity last. */
+export const phaseCrossovers = (loop: LoopFunction, probe: Probe): PhaseCrossover[] => {
+  const found: PhaseCrossover[] = [];
+  const atZero = limitOf(loop.atZero.loop, 'zero');
+  if (Number.isFinite(atZero) && atZero < -ZERO_GAIN) found.push({ frequency: 0, gain: -atZero });
+  const limit = loop.deadTime > 0 ? limitOf(loop.atInfinity.loop, 'infinity') : 0;
+  const most = limit === 0 ? Infinity : MOST_NEUTRAL_CROSSOVERS;
+  const least = Math.log(loop.deadTime > 0 ? LEAST_LISTED_GAIN : ZERO_GAIN);
+  visitPieces(probe, loopPhase, {
+    matters: (low, high) => firstLevel(low) <= high,
+    visit: ({ a, valueA, b, valueB }) => {
+      const levels = levelsBetween(valueA, valueB);
+      for (const level of levels) {
+        const frequency = probe.crossing(loopPhase, level, { a, valueA, b, valueB });
+        const log = probe.row[LOG];
+        if (log >= least) found.push({ frequency, gain: Math.exp(log) });
+        if (found.length >= most) return true;
+      }
+    },
+  });
+  const atInfinity = limitOf(loop.atInfinity.loop, 'infinity');
+  if (loop.deadTime === 0 && Number.isFinite(atInfinity) && atInfinity < -ZERO_GAIN) found.push({ frequency: null, gain: -atInfinity });
+  return found;
+};
+
+/** The least −π − 2πk that is not below `phase`. */
+const firstLevel = (phase: number): number => Math.ceil((phase + ON_AXIS + Math.PI) / TURN) * TURN - Math.PI;
+
+/** Every −π − 2πk strictly between two phases, in the order in which they are met. */
+const levelsBetween = (from: number, to: number): number[] => {
+  const levels: number[] = [];
+  const high = Math.max(from, to);
+  for (let level = firstLevel(Math.min(from, to)); level < high - ON_AXIS; level += TURN) levels.push(level);
+  return from <= to ? levels : levels.reverse();
+};
