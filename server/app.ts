@@ -7,14 +7,15 @@ import { NotFound } from './http/problem';
 import { problemHandler } from './http/problem-handler';
 import { logRequests } from './http/request-log';
 import { securityHeaders } from './http/security-headers';
-import { routes } from './routes';
+import type { Route } from './http/route';
+import { routes as allRoutes } from './routes';
 import { serveClient } from './serve-client';
 import { serveApiPage } from './system/api-page';
 
 const BODY_LIMIT = '1mb';
 
 /** The whole product behind one request handler; never listens. */
-export function createApp(context: Context): Express {
+export function createApp(context: Context, routes: readonly Route[] = allRoutes): Express {
   const { config, log } = context;
   const app = express();
   app.disable('x-powered-by');

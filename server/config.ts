@@ -18,6 +18,8 @@ export interface Config {
   readonly logLevel: string;
   /** Where the built client stands; null until it is built. */
   readonly clientDir: string | null;
+  /** Whether every answer is held against its schema, as tests do. */
+  readonly checkAnswers: boolean;
   /** Signs cookies and mailed links. */
   readonly secret: string;
 }
@@ -33,6 +35,7 @@ const Environment = z.object({
   ANALYSE_PER_MINUTE: z.coerce.number().int().min(1).default(600),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent']).default('info'),
   CLIENT_DIR: z.string().optional(),
+  CHECK_ANSWERS: z.enum(['0', '1']).default('0'),
 });
 
 const bracketed = (host: string) => (host.includes(':') ? `[${host}]` : host);
@@ -65,6 +68,7 @@ export function readConfig(environment: Readonly<Record<string, string | undefin
     analysePerMinute: variables.ANALYSE_PER_MINUTE,
     logLevel: variables.LOG_LEVEL,
     clientDir: variables.CLIENT_DIR ?? null,
+    checkAnswers: variables.CHECK_ANSWERS === '1',
     secret: readSecret(dataDir),
   };
 }

@@ -46,11 +46,14 @@ function detailOf(issue: Issue, value: unknown): string {
   return issue.message;
 }
 
-/** What a schema found wrong, as pointers into the body and sentences, and whether any of it is the shape. */
+const firstAtEach = (errors: readonly ProblemError[]) =>
+  errors.filter(({ pointer }, index) => errors.findIndex((other) => other.pointer === pointer) === index);
+
+/** What a schema found wrong, one sentence per place in the body, and whether any of it is the shape. */
 export function issueErrors(issues: readonly Issue[], body: unknown): { errors: ProblemError[]; malformed: boolean } {
   const found = leaves(issues).map((issue) => ({ issue, value: valueAt(body, issue.path) }));
   return {
-    errors: found.map(({ issue, value }) => ({ pointer: pointerOf(issue.path), detail: detailOf(issue, value) })),
+    errors: firstAtEach(found.map(({ issue, value }) => ({ pointer: pointerOf(issue.path), detail: detailOf(issue, value) }))),
     malformed: found.some(({ issue, value }) => isMalformed(issue, value)),
   };
 }

@@ -7,6 +7,7 @@ import type { Database } from '@/db/open';
 import { createApp } from '@/server/app';
 import { readConfig, type Config } from '@/server/config';
 import { createContext, type Context } from '@/server/context';
+import type { Route } from '@/server/http/route';
 import { createClient, type Client } from './client';
 
 /** The whole server on a port and a data directory of its own. */
@@ -23,6 +24,8 @@ export interface TestAppOptions {
   /** Environment variables beside DATA_DIR, as a person starting the server would set them. */
   readonly env?: Readonly<Record<string, string>>;
   readonly config?: Partial<Config>;
+  /** Instead of the product's own routes. */
+  readonly routes?: readonly Route[];
   readonly replaced?: Partial<Pick<Context, 'jobs' | 'mailer' | 'log'>>;
 }
 
@@ -30,11 +33,11 @@ const listening = (server: Server) =>
   new Promise<number>((resolve) => server.listen(0, '127.0.0.1', () => resolve((server.address() as AddressInfo).port)));
 
 /** @example const app = await startTestApp(); const ada = await app.client('ada').signUp(); */
-export async function startTestApp({ env, config, replaced }: TestAppOptions = {}): Promise<TestApp> {
+export async function startTestApp({ env, config, routes, replaced }: TestAppOptions = {}): Promise<TestApp> {
   const dataDir = mkdtempSync(join(tmpdir(), 'kerbline-test-'));
-  const settings = { ...readConfig({ LOG_LEVEL: 'silent', ...env, DATA_DIR: dataDir }), ...config };
+  const settings = { ...readConfig({ LOG_LEVEL: 'silent', CHECK_ANSWERS: '1', ...env, DATA_DIR: dataDir }), ...config };
   const context = createContext(settings, replaced);
-  const server = createServer(createApp(context));
+  const server = createServer(createApp(context, routes));
   const url = `http://127.0.0.1:${await listening(server)}`;
   const cast = new Map<string, Client>();
   return {
