@@ -30,8 +30,13 @@ export async function startBuiltServer({ demo = true } = {}): Promise<BuiltServe
   const port = await freePort();
   const dataDir = mkdtempSync(join(tmpdir(), 'kerbline-browser-'));
   const url = `http://127.0.0.1:${port}`;
-  const env = { ...process.env, PORT: String(port), HOST: '127.0.0.1', DATA_DIR: dataDir, DEMO: demo ? '1' : '0', NODE_ENV: '' };
-  const child = spawn(process.execPath, ['scripts/start.mjs'], { env, stdio: ['ignore', 'pipe', 'pipe'] });
+  // A test runner's own NODE_ENV is not what a newcomer starts with.
+  const env = { ...process.env, PORT: String(port), HOST: '127.0.0.1', DATA_DIR: dataDir, DEMO: demo ? '1' : '0' };
+  Reflect.deleteProperty(env, 'NODE_ENV');
+  const child = spawn(process.execPath, ['scripts/start.mjs'], {
+    env,
+    stdio: ['ignore', 'pipe', 'pipe'],
+  });
   let log = '';
   child.stdout.on('data', (chunk: Buffer) => (log += chunk.toString()));
   child.stderr.on('data', (chunk: Buffer) => (log += chunk.toString()));
