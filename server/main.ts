@@ -1,5 +1,6 @@
 import { createServer } from 'node:http';
 import closeWithGrace from 'close-with-grace';
+import { seedDemo } from '@/db/seed/seed-demo';
 import { createApp } from './app';
 import { readConfig } from './config';
 import { createContext } from './context';
@@ -19,4 +20,5 @@ closeWithGrace({ delay: GRACE_MS, logger: log }, async ({ err, signal }) => {
   await context.close();
 });
 
+if (config.demo) await seedDemo(context);
 server.listen(config.port, config.host, () => log.info(`Kerbline is at ${config.baseUrl}`));

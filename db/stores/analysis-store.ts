@@ -17,7 +17,6 @@ export interface NewAnalysis {
   readonly headline: Headline;
   readonly inputs: FrozenInputs;
   readonly results: CaseResult[];
-  readonly activity: ActivityEntry;
   readonly stamp: Stamp;
 }
 
@@ -82,15 +81,17 @@ export function findAnalysis(db: Database, { projectId, analysisId }: { projectI
 }
 
 /** Writes an analysis within the transaction that also writes what it belongs to. */
-export function insertAnalysis(within: Database, { activity, stamp, ...kept }: NewAnalysis): void {
+export function insertAnalysis(within: Database, { stamp, ...kept }: NewAnalysis): void {
   const { id: designId, revision: designRevision } = kept.inputs.design;
   within
     .insert(analysis)
     .values({ ...kept, designId, designRevision, createdBy: stamp.by, createdAt: stamp.at })
     .run();
-  recordActivity(within, kept.projectId, activity, stamp);
 }
 
-export function createAnalysis(db: Database, kept: NewAnalysis): void {
-  transact(db, (within) => insertAnalysis(within, kept));
+export function createAnalysis(db: Database, kept: NewAnalysis, activity: ActivityEntry): void {
+  transact(db, (within) => {
+    insertAnalysis(within, kept);
+    recordActivity(within, kept.projectId, activity, kept.stamp);
+  });
 }

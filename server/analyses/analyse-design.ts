@@ -3,7 +3,6 @@ import { engineVersion } from '@/analysis';
 import { headline } from '@/analysis/project';
 import type { NewAnalysis } from '@/db/stores/analysis-store';
 import type { Stamp } from '@/db/stores/stamp';
-import { activityEntry } from '../activity/activity-entry';
 import type { Context } from '../context';
 import { computeResults } from './compute-results';
 import { contentHash } from './content-hash';
@@ -17,8 +16,6 @@ interface Request {
   readonly caseIds?: readonly string[];
   readonly stamp: Stamp;
 }
-
-const counted = (cases: number) => (cases === 1 ? 'one case' : `${cases} cases`);
 
 /** Freezes the inputs and computes them: an analysis that only needs to be written. @throws as freezeInputs and computeResults */
 export async function analyseDesign(
@@ -38,7 +35,6 @@ export async function analyseDesign(
     headline: first,
     inputs,
     results,
-    activity: activityEntry('analysis.kept', `analysed ${design.name}, revision ${design.revision}, over ${counted(results.length)}`),
     stamp,
   };
 }

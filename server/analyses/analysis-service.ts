@@ -6,7 +6,9 @@ import { findDesign } from '@/db/stores/design-store';
 import type { Stamp } from '@/db/stores/stamp';
 import type { Context } from '../context';
 import { NotFound } from '../http/problem';
+import { activityEntry } from '../activity/activity-entry';
 import { analyseDesign } from './analyse-design';
+import { overCases } from './over-cases';
 import { computeCase, computeResults } from './compute-results';
 import { hashResults } from './hash-results';
 import { numberDifferences } from './number-differences';
@@ -41,7 +43,8 @@ export async function keepAnalysis(
   const design = findDesign(parts.db, { projectId, designId }, designRevision ?? null);
   if (!design) throw new NotFound('There is no such design revision in this project.');
   const kept = await analyseDesign(parts, { projectId, design, caseIds, stamp });
-  createAnalysis(parts.db, kept);
+  const summary = `analysed ${design.name}, revision ${design.revision}, ${overCases(kept)}`;
+  createAnalysis(parts.db, kept, activityEntry('analysis.kept', summary));
   return openAnalysis(parts, { projectId, analysisId: kept.id });
 }
 

@@ -6,6 +6,7 @@ import type { Stamp } from '@/db/stores/stamp';
 import { activityEntry } from '../activity/activity-entry';
 import { analyseDesign } from '../analyses/analyse-design';
 import { openAnalysis } from '../analyses/analysis-service';
+import { overCases } from '../analyses/over-cases';
 import type { Context } from '../context';
 import { NotFound } from '../http/problem';
 import { staleRevision } from '../http/stale-revision';
@@ -50,7 +51,8 @@ export async function addDesignRevision(
   const revision = baseRevision + 1;
   const design = { id: key.designId, name: name ?? before.name, revision, ...content };
   const analysis = analyse ? await analyseDesign(parts, { projectId: key.projectId, design, stamp }) : null;
-  const activity = activityEntry('design.revised', `changed the design ${design.name} to revision ${revision}`, note);
+  const analysed = analysis ? ` and analysed it ${overCases(analysis)}` : '';
+  const activity = activityEntry('design.revised', `changed the design ${design.name} to revision ${revision}${analysed}`, note);
   const revised = { ...key, name: design.name, content, note, activity, stamp };
   if (!reviseDesign(parts.db, revised, { baseRevision, analysis })) throw staleRevision(openDesign(parts, key).revision);
   const kept = openDesign(parts, key, revision);
