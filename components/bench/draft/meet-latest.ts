@@ -13,6 +13,6 @@ export function meetLatest(draft: Draft, latest: KeptBase): Draft {
   return nothingOfItsOwn && draft.held === null ? { ...freshDraft(latest), note: draft.note } : draft;
 }
 
-/** True where someone kept a newer revision than the one the draft was moved from. */
-export const isOvertaken = (draft: Draft, latest: KeptBase): boolean =>
-  latest.revision !== null && (draft.base.revision ?? 0) < latest.revision;
+/** True where a newer revision was kept than the one the draft was moved from. */
+export const isOvertaken = (draft: Draft, latestRevision: number | null): boolean =>
+  latestRevision !== null && (draft.base.revision ?? 0) < latestRevision;

@@ -1,0 +1,36 @@
+import { createContext, useContext, useSyncExternalStore } from 'react';
+import { useStore } from 'zustand';
+import { current } from './draft/draft';
+import type { DraftState, DraftStore } from './draft/draft-store';
+import type { Settings } from './draft/settings';
+import type { LiveAnalyser, LiveAnswer } from './live/live-analyser';
+import type { LoopAnswer } from './live/loop-answer';
+import type { BenchSubject } from './subject/bench-subject';
+import type { BenchQuestion } from './live/bench-loop';
+
+/** The same for all parts of one bench; what changes with every gesture is in the store. */
+export interface BenchValue {
+  readonly subject: BenchSubject;
+  readonly store: DraftStore;
+  readonly analyser: LiveAnalyser<BenchQuestion, LoopAnswer>;
+}
+
+export const BenchContext = createContext<BenchValue | null>(null);
+
+export function useBench(): BenchValue {
+  const bench = useContext(BenchContext);
+  if (bench === null) throw new Error('Parts of the bench stand inside a Bench.');
+  return bench;
+}
+
+/** A part of the draft; only what reads a part that changed is rendered again. */
+export const useDraft = <Part>(select: (draft: DraftState) => Part): Part => useStore(useBench().store, select);
+
+/** The settings on the bench this moment. */
+export const useSettings = (): Settings => useDraft(current);
+
+/** The engine's newest answer. What calls this is rendered once a frame while a gain moves. */
+export function useAnswer(): LiveAnswer<BenchQuestion, LoopAnswer> {
+  const { analyser } = useBench();
+  return useSyncExternalStore(analyser.subscribe, analyser.get);
+}

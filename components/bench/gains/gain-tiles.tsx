@@ -1,0 +1,49 @@
+import { StyleSheet, View } from 'react-native';
+import { IconButton } from '@/components/ui/icon-button';
+import { useTheme } from '@/components/ui/theme';
+import { useDraft, useSettings } from '../bench-context';
+import { type Gain, gains } from '../draft/gain';
+import { GainTile } from './gain-tile';
+
+interface GainTilesProps {
+  active: Gain;
+  onChoose: (gain: Gain) => void;
+  onSettings: () => void;
+}
+
+const steps: Readonly<Record<string, number>> = { ArrowRight: 1, ArrowLeft: -1 };
+
+/** The gains side by side, one of them active; at the end the way to all settings. */
+export function GainTiles({ active, onChoose, onSettings }: GainTilesProps) {
+  const { colors } = useTheme();
+  const settings = useSettings();
+  const kept = useDraft(({ base }) => base.settings);
+  const walk = (event: KeyboardEvent) => {
+    const step = steps[event.key];
+    if (!step) return;
+    event.preventDefault();
+    onChoose(gains[(gains.indexOf(active) + step + gains.length) % gains.length]);
+  };
+  return (
+    <View style={[styles.row, { backgroundColor: colors.bar }]}>
+      <View role="radiogroup" aria-label="Gain that rule and nudges move" style={styles.tiles} onKeyDown={walk}>
+        {gains.map((gain) => (
+          <GainTile
+            key={gain}
+            gain={gain}
+            value={settings[gain]}
+            moved={settings[gain] !== kept[gain]}
+            active={gain === active}
+            onChoose={() => onChoose(gain)}
+          />
+        ))}
+      </View>
+      <IconButton icon="more" label="All settings" onPress={onSettings} />
+    </View>
+  );
+}
+
+const styles = StyleSheet.create({
+  row: { flexDirection: 'row', alignItems: 'center', paddingRight: 4 },
+  tiles: { flexDirection: 'row', flex: 1 },
+});

@@ -1,0 +1,33 @@
+import { Pressable, StyleSheet } from 'react-native';
+import { Text } from '@/components/ui/text';
+import { useTheme } from '@/components/ui/theme';
+import { corner, line } from '@/components/ui/tokens';
+import { typographicMinus } from '@/figures/format';
+
+interface NudgeButtonProps {
+  gainLabel: string;
+  percent: number;
+  onNudge: (fraction: number) => void;
+}
+
+/** One step of a gain, in reach of a thumb. */
+export function NudgeButton({ gainLabel, percent, onNudge }: NudgeButtonProps) {
+  const { colors } = useTheme();
+  const size = Math.abs(percent);
+  return (
+    <Pressable
+      role="button"
+      aria-label={`${gainLabel} ${percent > 0 ? 'up' : 'down'} ${size} %`}
+      onPress={() => onNudge(percent / 100)}
+      style={({ pressed }) => [styles.key, { borderColor: colors.rule2, backgroundColor: pressed ? colors.bar : colors.paper }]}
+    >
+      <Text step="note" weight={600} numberOfLines={1}>
+        {percent > 0 ? `+${size} %` : `${typographicMinus(String(percent))} %`}
+      </Text>
+    </Pressable>
+  );
+}
+
+const styles = StyleSheet.create({
+  key: { width: 48, height: 52, borderWidth: line.field, borderRadius: corner, alignItems: 'center', justifyContent: 'center' },
+});

@@ -1,0 +1,29 @@
+import { useSignal } from '@/hooks/use-signal';
+import { useBench, useDraft } from '../bench-context';
+import { isMoved } from '../draft/draft';
+import { isOvertaken } from '../draft/meet-latest';
+import { mayKeep, nextRevision } from './saved-words';
+
+export interface KeepButton {
+  readonly revision: number;
+  readonly disabled: boolean;
+  /** Why it cannot be pressed, or what pressing it needs; null where there is nothing to say. */
+  readonly remark: string | null;
+}
+
+/** Whether the bench can be kept now, as which revision, and if not why; said before it is pressed. */
+export function useKeepButton(): KeepButton {
+  const { subject } = useBench();
+  const online = useSignal();
+  const latest = subject.latest?.revision ?? null;
+  const nothingToKeep = useDraft((draft) => draft.base.revision !== null && !isMoved(draft));
+  const overtaken = useDraft((draft) => isOvertaken(draft, latest));
+  const revision = nextRevision(latest);
+  const remark = (() => {
+    if (subject.project.archived) return 'An archived project keeps nothing new.';
+    if (!mayKeep(subject.project.role)) return `You are a ${subject.project.role} here: move the gains, an editor keeps them.`;
+    if (!online) return 'No signal. The draft stays on this device; keeping it needs signal.';
+    return null;
+  })();
+  return { revision, disabled: remark !== null || nothingToKeep || overtaken, remark };
+}
