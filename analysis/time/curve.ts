@@ -1,4 +1,4 @@
-import { NODES, NODE_COUNT, interpolate } from './nodes';
+import { NODE_COUNT, interpolate } from './nodes';
 
 /**
  * A signal over time as panels, each a polynomial through its values at NODES. Jumps stand between panels: the value at
@@ -8,6 +8,8 @@ export class Curve {
   readonly starts: number[] = [];
   readonly widths: number[] = [];
   readonly values: number[] = [];
+  /** The greatest magnitude at any node so far. */
+  size = 0;
 
   get panels(): number {
     return this.starts.length;
@@ -22,7 +24,11 @@ export class Curve {
   append({ start, width }: { start: number; width: number }, source: ArrayLike<number>, offset: number): void {
     this.starts.push(start);
     this.widths.push(width);
-    for (let i = 0; i < NODE_COUNT; i += 1) this.values.push(source[offset + i]);
+    for (let i = 0; i < NODE_COUNT; i += 1) {
+      const value = source[offset + i];
+      this.values.push(value);
+      this.size = Math.max(this.size, Math.abs(value));
+    }
   }
 
   /** The panel that holds `time`; at a boundary the later one. */
@@ -41,12 +47,14 @@ export class Curve {
     return this.valueIn(this.panelAt(time), time);
   }
 
+  /** The value just before `time`, which differs from the value at it where the curve jumps. */
+  valueBefore(time: number): number {
+    const panel = this.panelAt(time);
+    return this.valueIn(panel > 0 && this.starts[panel] === time ? panel - 1 : panel, time);
+  }
+
   /** The polynomial of one panel, also at the panel's ends. */
   valueIn(panel: number, time: number): number {
     return interpolate(this.values, panel * NODE_COUNT, (time - this.starts[panel]) / this.widths[panel]);
-  }
-
-  nodeTime(panel: number, node: number): number {
-    return this.starts[panel] + this.widths[panel] * NODES[node];
   }
 }

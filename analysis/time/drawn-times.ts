@@ -56,8 +56,6 @@ function rangeUntil(curve: Curve, end: number): number {
 }
 
 function ascending(times: number[], end: number): number[] {
-  const sorted = times.filter((time) => time >= 0 && time <= end).sort((a, b) => a - b);
-  const distinct = sorted.filter((time, k) => k === 0 || time - sorted[k - 1] > (INSTANT * end) / 2);
-  distinct[distinct.length - 1] = end;
-  return distinct;
+  const sorted = times.filter((time) => time >= 0 && time < end * (1 - INSTANT / 2)).sort((a, b) => a - b);
+  return [...sorted.filter((time, k) => k === 0 || time - sorted[k - 1] > (INSTANT * end) / 2), end];
 }

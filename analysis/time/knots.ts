@@ -15,55 +15,41 @@ export interface Knots {
 export function monotoneKnots(curve: Curve, end: number): Knots {
   const times: number[] = [];
   const values: number[] = [];
-  const add = (time: number, value: number) => {
-    times.push(time);
-    values.push(value);
-  };
-  const size = curve.values.reduce((most, value) => Math.max(most, Math.abs(value)), 0);
   for (let panel = 0; panel < curve.panels && curve.starts[panel] < end; panel += 1) {
-    const turns = turningPositions(curve, panel, size);
-    const positions = [...NODES, ...turns].sort((a, b) => a - b);
-    for (const position of positions) {
-      const time = curve.starts[panel] + position * curve.widths[panel];
-      if (time >= end) break;
-      add(time, interpolate(curve.values, panel * NODE_COUNT, position));
+    const [start, width, offset] = [curve.starts[panel], curve.widths[panel], panel * NODE_COUNT];
+    const slopes = isFlat(curve, offset) ? null : derivativeAtNodes(curve.values, offset);
+    for (let i = 0; i < NODE_COUNT; i += 1) {
+      if (slopes && i > 0 && slopes[i - 1] * slopes[i] < 0) {
+        const turn = zeroBetween((x) => interpolate(slopes, 0, x), NODES[i - 1], NODES[i]);
+        times.push(start + turn * width);
+        values.push(interpolate(curve.values, offset, turn));
+      }
+      times.push(start + NODES[i] * width);
+      values.push(curve.values[offset + i]);
     }
-    if (curve.starts[panel] + curve.widths[panel] >= end) add(end, curve.valueIn(panel, end));
   }
+  return cutAt(curve, { times, values }, end);
+}
+
+/** Knots until `end`, the last one at `end` itself. */
+function cutAt(curve: Curve, { times, values }: { times: number[]; values: number[] }, end: number): Knots {
+  while (times.length && times[times.length - 1] >= end) {
+    times.pop();
+    values.pop();
+  }
+  times.push(end);
+  values.push(curve.valueBefore(end));
   return { times, values };
 }
 
-/** Times at which the curve turns from rising to falling or back. */
-export function turningTimes({ times, values }: Knots): number[] {
-  const found: number[] = [];
-  let direction = 0;
-  for (let i = 1; i < values.length; i += 1) {
-    const now = Math.sign(values[i] - values[i - 1]);
-    if (direction !== 0 && now === -direction) found.push(times[i - 1]);
-    if (now !== 0) direction = now;
-  }
-  return found;
-}
-
-function turningPositions(curve: Curve, panel: number, size: number): number[] {
-  const offset = panel * NODE_COUNT;
-  if (isFlat(curve, offset, size)) return [];
-  const slopes = derivativeAtNodes(curve.values, offset);
-  const turns: number[] = [];
-  for (let i = 1; i < NODE_COUNT; i += 1) {
-    if (slopes[i - 1] * slopes[i] < 0) turns.push(zeroBetween((x) => interpolate(slopes, 0, x), NODES[i - 1], NODES[i]));
-  }
-  return turns;
-}
-
-function isFlat(curve: Curve, offset: number, size: number): boolean {
+function isFlat(curve: Curve, offset: number): boolean {
   let low = Infinity;
   let high = -Infinity;
   for (let i = 0; i < NODE_COUNT; i += 1) {
     low = Math.min(low, curve.values[offset + i]);
     high = Math.max(high, curve.values[offset + i]);
   }
-  return high - low <= FLAT * size;
+  return high - low <= FLAT * curve.size;
 }
 
 /** A zero of f between a and b, where f has opposite signs or one is zero, by bisection. */

@@ -1,14 +1,16 @@
 import type { TimeMetrics } from '@/contract';
 import { absoluteIntegrals } from './absolute-integrals';
 import type { Curve } from './curve';
-import { peakOf, settlingBand, SETTLING_BAND } from './horizon';
 import { monotoneKnots, type Knots } from './knots';
-import { extreme, firstPassage, lastOutside } from './passages';
+import { extreme, firstPassage, lastOutside, peakOf } from './passages';
+import { loadBand, referenceBand } from './settling';
 
 /** A response to a unit step: its curves, how far they are known and shown, and where the output ends (null: nowhere). */
 export interface StepResponse {
   readonly output: Curve;
   readonly control: Curve;
+  /** Of the output, up to the horizon. */
+  readonly knots: Knots;
   readonly horizon: number;
   readonly axisEnd: number;
   readonly finalValue: number | null;
@@ -21,13 +23,12 @@ const RISE_FROM = 0.1;
 const RISE_TO = 0.9;
 
 /** Metrics of the response to a reference step of this size, as numerics.md defines them; times are refined between samples. */
-export function referenceMetrics({ output, control, horizon, axisEnd, finalValue }: StepResponse, size: number): ReferenceMetrics {
-  const knots = monotoneKnots(output, horizon);
+export function referenceMetrics({ output, control, knots, horizon, axisEnd, finalValue }: StepResponse, size: number): ReferenceMetrics {
   const commands = monotoneKnots(control, horizon);
   const error = absoluteIntegrals(output, 1, axisEnd);
   const present = size !== 0;
   const scale = Math.abs(size);
-  const { centre, band } = settlingBand(finalValue ?? 0, peakOf(knots));
+  const { centre, band } = referenceBand(finalValue, peakOf(knots));
   const ends = present && finalValue !== null && centre !== 0;
   const swing = ends ? swings(knots, centre) : { overshootPercent: null, undershootPercent: null, peakTime: null };
   return {
@@ -45,15 +46,14 @@ export function referenceMetrics({ output, control, horizon, axisEnd, finalValue
 }
 
 /** Metrics of the response to a load step of this size. */
-export function loadMetrics({ output, horizon, axisEnd }: StepResponse, size: number): LoadMetrics {
-  const knots = monotoneKnots(output, horizon);
+export function loadMetrics({ output, knots, axisEnd }: StepResponse, size: number): LoadMetrics {
   const peak = peakOf(knots);
   const top = Math.abs(extreme(knots, 1).value) === peak ? extreme(knots, 1) : extreme(knots, -1);
   const answers = size !== 0 && peak > 0;
   return {
     loadPeak: peak * Math.abs(size),
     loadPeakTime: answers ? top.time : null,
-    loadSettlingTime: answers ? lastOutside(output, knots, { centre: 0, band: SETTLING_BAND * peak }) : null,
+    loadSettlingTime: answers ? lastOutside(output, knots, loadBand(0, peak)) : null,
     loadIae: absoluteIntegrals(output, 0, axisEnd).plain * Math.abs(size),
   };
 }

@@ -25,6 +25,17 @@ export function interpolate(values: ArrayLike<number>, offset: number, position:
   return above / below;
 }
 
+/** The weights that node values have in the polynomial's value at `position` in [0, 1]. */
+export function interpolationWeights(position: number): Float64Array {
+  return NODES.map((_, j) =>
+    interpolate(
+      NODES.map((__, i) => (i === j ? 1 : 0)),
+      0,
+      position,
+    ),
+  );
+}
+
 /** Row i gives the derivative at node i from the values at the nodes. @see REFERENCES.md [Berrut & Trefethen 2004], equation 9.4 */
 const DIFFERENTIATION = Array.from(NODES, (_, i) => {
   const row = new Float64Array(NODE_COUNT);
@@ -35,7 +46,12 @@ const DIFFERENTIATION = Array.from(NODES, (_, i) => {
 
 /** Derivative at the nodes, per panel width, of the polynomial through `values` from `offset`. */
 export function derivativeAtNodes(values: ArrayLike<number>, offset: number): Float64Array {
-  return Float64Array.from(DIFFERENTIATION, (row) => row.reduce((sum, weight, j) => sum + weight * values[offset + j], 0));
+  const slopes = new Float64Array(NODE_COUNT);
+  for (let i = 0; i < NODE_COUNT; i += 1) {
+    const row = DIFFERENTIATION[i];
+    for (let j = 0; j < NODE_COUNT; j += 1) slopes[i] += row[j] * values[offset + j];
+  }
+  return slopes;
 }
 
 /** Ascending coefficients of the polynomial through values at the nodes: coefficients = TAYLOR·values. */

@@ -35,3 +35,6 @@ export function extreme({ times, values }: Knots, sign: number): { time: number;
   for (let i = 1; i < values.length; i += 1) if (sign * values[i] > sign * values[best]) best = i;
   return { time: times[best] ?? 0, value: values[best] ?? 0 };
 }
+
+/** The greatest magnitude. */
+export const peakOf = (knots: Knots): number => Math.max(Math.abs(extreme(knots, 1).value), Math.abs(extreme(knots, -1).value));

@@ -14,14 +14,13 @@ const TAIL_WEIGHTS = [DEGREE - 1, DEGREE].map((k) =>
   }),
 );
 
-/** Whether every panel's polynomial follows the curve it stands for, told by how its coefficients fall off. */
-export function isResolved(curve: Curve): boolean {
-  const size = curve.values.reduce((most, value) => Math.max(most, Math.abs(value)), 0);
-  for (let offset = 0; offset < curve.values.length; offset += NODE_COUNT) {
+/** Whether the panels from `first` on follow the curve they stand for, told by how their coefficients fall off. */
+export function isResolved(curve: Curve, first = 0): boolean {
+  for (let offset = first * NODE_COUNT; offset < curve.values.length; offset += NODE_COUNT) {
     for (const weights of TAIL_WEIGHTS) {
       let coefficient = 0;
       for (let j = 0; j < NODE_COUNT; j += 1) coefficient += weights[j] * curve.values[offset + j];
-      if (Math.abs(coefficient) > TAIL * size) return false;
+      if (Math.abs(coefficient) > TAIL * curve.size) return false;
     }
   }
   return true;

@@ -1,47 +1,52 @@
 import { Curve } from './curve';
 import type { LoopSystem } from './loop-system';
 import { NODE_COUNT } from './nodes';
-import { panelOperator, WATCHED, type PanelOperator } from './panel-operator';
-import type { Stage } from './panel-plan';
+import { WATCHED } from './panel-operator';
+import { renode } from './renode';
+import type { Track, Tracks } from './track';
 
-/** One panel's operator in the order in which a plan uses them. */
-export type OperatorAt = (index: number) => PanelOperator;
+/** Turns of a track before wider panels are tried; doubled each time they do not do. */
+const TURNS_BETWEEN_TRIALS = 4;
 
-/** The operators of a plan, made once per stage and shared by every response of the loop. */
-export function operatorsOf(system: LoopSystem, stages: readonly Stage[]): { at: OperatorAt; perPeriod: number } {
-  const operators = stages.map((stage) => panelOperator(system, stage.width));
-  const ends: number[] = [];
-  stages.reduce((sum, stage, k) => (ends[k] = sum + stage.count), 0);
-  const at = (index: number) => operators[ends.findIndex((end) => index < end)];
-  return { at, perPeriod: ends.length ? ends[ends.length - 1] : 0 };
+interface Run {
+  readonly system: LoopSystem;
+  readonly tracks: Tracks;
+  /** The state just after the step. */
+  readonly initial: Float64Array;
+  /** The part of the dead time that stands between the simulated output and the watched one. */
+  readonly outputDelay: number;
+  /** Whether panels may widen as the response calms down. */
+  readonly widening: boolean;
 }
 
 /**
  * One response from rest, panel after panel. Each panel is the exact exponential map of the state; the measurement that
- * comes round through the dead time stands in a delay line of one dead time and enters as its panel polynomial.
+ * comes round through the dead time stands in a delay line and enters as its panel polynomials.
+ *
+ * The first track resolves what jumps wake within one dead time. As the response grows smooth, panels widen to the dead
+ * time and past it, each time only where the wider panels give back what was just simulated.
  */
 export class Simulation {
   readonly output = new Curve();
   readonly control = new Curve();
+  private readonly measurement = new Curve();
   private time = 0;
   private slot = 0;
+  private turns = 0;
+  private turnsToTrial = TURNS_BETWEEN_TRIALS;
+  private track: Track;
+  private delayLine: Float64Array;
   private readonly state: Float64Array;
-  private readonly delayLine: Float64Array;
   private readonly result: Float64Array;
 
-  constructor(
-    system: LoopSystem,
-    private readonly operators: { at: OperatorAt; perPeriod: number },
-    { initial, outputDelay }: { initial: Float64Array; outputDelay: number },
-  ) {
+  constructor(private readonly run: Run) {
+    const { system, tracks, initial, outputDelay } = run;
+    this.track = tracks.first;
+    this.delayLine = new Float64Array(system.deadTime > 0 ? this.track.panels * NODE_COUNT : 0);
     this.state = Float64Array.from(initial);
-    this.delayLine = new Float64Array(system.deadTime > 0 ? operators.perPeriod * NODE_COUNT : 0);
     this.result = new Float64Array(WATCHED.length * NODE_COUNT + initial.length);
-    this.outputDelay = outputDelay;
     if (outputDelay > 0) this.output.append({ start: 0, width: outputDelay }, new Float64Array(NODE_COUNT), 0);
   }
-
-  private readonly outputDelay: number;
 
   get panels(): number {
     return this.control.panels;
@@ -49,27 +54,59 @@ export class Simulation {
 
   /** Simulates until output and control are known up to `end`, or `maxPanels` is reached; says whether it got there. */
   advanceTo(end: number, maxPanels: number): boolean {
-    while (this.time < end && this.panels < maxPanels) this.step();
+    while (this.time < end && this.panels < maxPanels) {
+      this.step();
+      if (this.slot === this.track.panels) this.endTurn();
+    }
     return this.time >= end;
   }
 
   private step(): void {
-    const { width, matrix } = this.operators.at(this.slot);
-    const size = this.state.length;
+    const { width, matrix } = this.track.operatorAt(this.slot);
+    const { state, result, delayLine } = this;
     const history = this.slot * NODE_COUNT;
     for (let i = 0; i < matrix.rows; i += 1) {
       const row = i * matrix.columns;
       let sum = 0;
-      for (let j = 0; j < size; j += 1) sum += matrix.data[row + j] * this.state[j];
-      for (let j = size; j < matrix.columns; j += 1) sum += matrix.data[row + j] * this.delayLine[history + j - size];
-      this.result[i] = sum;
+      for (let j = 0; j < state.length; j += 1) sum += matrix.data[row + j] * state[j];
+      for (let j = state.length; j < matrix.columns; j += 1) sum += matrix.data[row + j] * delayLine[history + j - state.length];
+      result[i] = sum;
     }
-    this.output.append({ start: this.time + this.outputDelay, width }, this.result, 0);
-    this.control.append({ start: this.time, width }, this.result, NODE_COUNT);
-    if (this.delayLine.length) this.delayLine.set(this.result.subarray(2 * NODE_COUNT, 3 * NODE_COUNT), history);
-    this.state.set(this.result.subarray(WATCHED.length * NODE_COUNT));
+    this.output.append({ start: this.time + this.run.outputDelay, width }, result, 0);
+    this.control.append({ start: this.time, width }, result, NODE_COUNT);
+    if (delayLine.length) {
+      this.measurement.append({ start: this.time, width }, result, 2 * NODE_COUNT);
+      delayLine.set(result.subarray(2 * NODE_COUNT, 3 * NODE_COUNT), history);
+    }
+    state.set(result.subarray(WATCHED.length * NODE_COUNT));
     this.time += width;
     this.slot += 1;
-    if (this.delayLine.length && this.slot === this.operators.perPeriod) this.slot = 0;
+  }
+
+  private endTurn(): void {
+    this.slot = 0;
+    this.turns += 1;
+    if (!this.run.widening || this.turns < this.turnsToTrial) return;
+    const widened = this.widerWidths().some((width) => this.widenTo(width));
+    this.turnsToTrial = widened ? TURNS_BETWEEN_TRIALS : 2 * this.turnsToTrial;
+    this.turns = 0;
+  }
+
+  /** The dead time or its largest even parts that are wider than what is run; past it, twice what is run. */
+  private widerWidths(): number[] {
+    const { deadTime } = this.run.system;
+    if (this.track.panels === 1) return [2 * this.track.operatorAt(0).width];
+    const widths: number[] = [];
+    for (let parts = 1; parts <= this.track.panels / 2; parts *= 2) widths.push(deadTime / parts);
+    return widths;
+  }
+
+  private widenTo(width: number): boolean {
+    const count = Math.max(1, Math.round(this.run.system.deadTime / width));
+    const history = renode(this.measurement, width, count);
+    if (!history || !renode(this.output, width, count) || !renode(this.control, width, count)) return false;
+    this.track = this.run.tracks.evenTrack(width);
+    this.delayLine = history;
+    return true;
   }
 }

@@ -1,11 +1,16 @@
 import type { Complex } from '@/analysis/numbers/complex';
 import type { LoopModel } from '@/analysis/loop/model';
-import { simulateUntil, untilGrown, untilSettled, settlingBand, SETTLING_BAND, type Simulated } from './horizon';
+import type { FinalValues } from './final-values';
+import { GROWN, hasGrown, hasSettled, simulateUntil } from './horizon';
+import { monotoneKnots, type Knots } from './knots';
 import type { LoopSystem } from './loop-system';
 import type { StepResponse } from './metrics';
 import { planPanels } from './panel-plan';
+import { lastOutside } from './passages';
 import { isResolved } from './resolution';
-import { operatorsOf, Simulation } from './simulation';
+import { loadBand, referenceBand } from './settling';
+import { Simulation } from './simulation';
+import { Tracks } from './track';
 
 /** Panels of time that one response may cost: about a second of work. */
 const MAX_PANELS = 100_000;
@@ -16,13 +21,19 @@ const FINENESSES = [1, 2, 4, 8, 16];
 /** The first look at a response reaches past its dead time by so many panels. */
 const FIRST_PANELS = 4;
 
+/** The axis is this multiple of the settling time: between the 1.25 and 2 that numerics.md allows. */
+const AXIS_PER_SETTLING = 1.6;
+
+type StepKind = 'reference' | 'load';
+const bands = { reference: referenceBand, load: loadBand };
+
 export interface StepQuestion {
   readonly model: LoopModel;
   readonly system: LoopSystem;
   readonly poles: readonly Complex[];
   readonly stable: boolean;
   readonly duration: number | null;
-  readonly finalValues: { readonly reference: number | null; readonly load: number | null };
+  readonly finalValues: FinalValues;
 }
 
 export interface StepResponses {
@@ -42,11 +53,17 @@ export function stepResponses(question: StepQuestion): StepResponses | null {
 function attemptResponses(question: StepQuestion, fineness: number): StepResponses | 'coarse' | null {
   const { system, finalValues } = question;
   const stages = planPanels(question.poles, system.deadTime || Infinity, fineness);
-  const operators = operatorsOf(system, stages);
+  const tracks = new Tracks(system, stages);
   const firstHorizon = 2 * system.deadTime + FIRST_PANELS * stages[0].width;
-  const respond = (kind: 'reference' | 'load') => {
+  const respond = (kind: StepKind) => {
     const initial = kind === 'reference' ? system.initial(1, 0) : system.initial(0, 1);
-    const simulation = new Simulation(system, operators, { initial, outputDelay: question.model.plantDeadTime });
+    const simulation = new Simulation({
+      system,
+      tracks,
+      initial,
+      outputDelay: question.model.plantDeadTime,
+      widening: question.stable && system.deadTime > 0,
+    });
     return finish(question, { simulation, firstHorizon, kind, finalValue: finalValues[kind] });
   };
   const reference = respond('reference');
@@ -59,22 +76,25 @@ function attemptResponses(question: StepQuestion, fineness: number): StepRespons
 interface Run {
   readonly simulation: Simulation;
   readonly firstHorizon: number;
-  readonly kind: 'reference' | 'load';
+  readonly kind: StepKind;
   readonly finalValue: number | null;
 }
 
 function finish({ stable, duration }: StepQuestion, { simulation, firstHorizon, kind, finalValue }: Run): StepResponse | 'coarse' | 'long' {
   const { output, control } = simulation;
-  const bandOf = (peak: number) =>
-    kind === 'reference' ? settlingBand(finalValue ?? 0, peak) : { centre: finalValue ?? 0, band: SETTLING_BAND * peak };
-  const watched: Simulated =
-    duration !== null && !stable
-      ? { outcome: 'done', axisEnd: duration, horizon: duration }
-      : simulateUntil(simulation, { firstHorizon, maxPanels: MAX_PANELS, enough: stable ? untilSettled(output, bandOf) : untilGrown });
+  const bandFor = (peak: number) => bands[kind](finalValue, peak);
+  const enough = stable ? hasSettled(bandFor) : duration === null ? hasGrown : () => true;
+  const watched = simulateUntil(simulation, { firstHorizon, maxPanels: MAX_PANELS, enough });
   if (watched.outcome !== 'done') return watched.outcome;
-  const axisEnd = duration ?? watched.axisEnd;
-  const horizon = Math.max(watched.horizon, axisEnd);
+  const horizon = Math.max(watched.horizon, duration ?? 0);
   if (!simulation.advanceTo(horizon, MAX_PANELS)) return 'long';
   if (!isResolved(output) || !isResolved(control)) return 'coarse';
-  return { output, control, horizon, axisEnd, finalValue };
+  const knots = monotoneKnots(output, horizon);
+  const shown = stable ? AXIS_PER_SETTLING * (lastOutside(output, knots, bandFor(output.size)) ?? 0) || horizon : grownAt(knots) || horizon;
+  return { output, control, knots, horizon, axisEnd: duration ?? shown, finalValue };
+}
+
+/** When the response first reached ten times the unit step; 0 if it never did. */
+function grownAt({ times, values }: Knots): number {
+  return times[values.findIndex((value) => Math.abs(value) >= GROWN)] ?? 0;
 }
