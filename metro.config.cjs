@@ -3,10 +3,26 @@ const { getDefaultConfig } = require('expo/metro-config');
 const config = getDefaultConfig(__dirname);
 const resolve = config.resolver.resolveRequest;
 
-// zod ships its messages in some forty languages (277 kB); the product speaks one and writes its own.
+// What is imported by packages but never rendered here, as [who imports, what]. Each resolves to an empty module; together they are a
+// third of the first load, whose budget is checked by scripts/check-bundle-size.mjs.
+const unused = [
+  // zod ships its messages in some forty languages (277 kB); the product speaks one and writes its own.
+  [/[\\/]zod[\\/]/, /^\.\.?\/.*locales\/index(\.js|\.cjs)?$/],
+  // Lists that draw only what is in view, and controls that have our own in their place.
+  [
+    /react-native-web[\\/]dist[\\/](index|.*Animated[\\/]components[\\/]\w+)\.js$/,
+    /exports\/(FlatList|SectionList|VirtualizedList|CheckBox|ProgressBar|Switch|Touchable\w*|ActivityIndicator|RefreshControl)$/,
+  ],
+  // The router's own headers, tab bars, stacks and site map: our layouts are slots between our own bars.
+  [/expo-router[\\/]build[\\/]exports\.js$/, /layouts\/(Tabs|experimental-stack)$/],
+  [/expo-router[\\/]build[\\/]index\.js$/, /^\.\/stack$/],
+  [/expo-router[\\/]build[\\/]layouts[\\/]StackClient\.js$/, /stack-utils$/],
+  [/expo-router[\\/].*native-stack[\\/]/, /views\/NativeStackView$/],
+  [/expo-router[\\/].*bottom-tabs[\\/]/, /views\/(BottomTabView|BottomTabBar)$/],
+];
+
 config.resolver.resolveRequest = (context, name, platform) => {
-  if (/zod.*[\\/]v4[\\/]core/.test(context.originModulePath) && /\/locales\/index/.test(name)) return { type: 'empty' };
-  if (/[\\/]zod[\\/]/.test(context.originModulePath) && /^\.\.?\/.*locales\/index(\.js|\.cjs)?$/.test(name)) return { type: 'empty' };
+  if (unused.some(([who, what]) => who.test(context.originModulePath) && what.test(name))) return { type: 'empty' };
   return (resolve ?? context.resolveRequest)(context, name, platform);
 };
 

@@ -1,18 +1,17 @@
-import { zodResolver } from '@hookform/resolvers/zod';
 import { useForm } from 'react-hook-form';
 import { Banner } from '@/components/ui/banner';
 import { Button } from '@/components/ui/button';
 import { Form } from '@/components/ui/form';
+import { contractResolver } from '@/components/ui/contract-resolver';
 import { FormField } from '@/components/ui/form-field';
 import { Link } from '@/components/ui/link';
-import { AskReset } from '@/contract';
 import { sentence } from '@/hooks/api/problem';
 import { useAskReset } from '@/hooks/queries/session';
 import { EntryFrame } from './entry-frame';
 
 export function ForgotPassword() {
   const reset = useAskReset();
-  const { control, handleSubmit } = useForm({ resolver: zodResolver(AskReset), defaultValues: { email: '' } });
+  const { control, handleSubmit } = useForm({ resolver: contractResolver(({ AskReset }) => AskReset), defaultValues: { email: '' } });
   const submit = handleSubmit(({ email }) => reset.mutate(email));
   return (
     <EntryFrame title="Password forgotten" lead="A link to choose a new password comes by e-mail.">

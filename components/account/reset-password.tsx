@@ -1,12 +1,11 @@
-import { zodResolver } from '@hookform/resolvers/zod';
 import { useLocalSearchParams } from 'expo-router';
 import { useForm } from 'react-hook-form';
 import { Banner } from '@/components/ui/banner';
 import { Button } from '@/components/ui/button';
 import { Form } from '@/components/ui/form';
+import { contractResolver } from '@/components/ui/contract-resolver';
 import { FormField } from '@/components/ui/form-field';
 import { Link } from '@/components/ui/link';
-import { ResetPassword as ResetPasswordSchema } from '@/contract';
 import { sentence } from '@/hooks/api/problem';
 import { useResetPassword } from '@/hooks/queries/session';
 import { EntryFrame } from './entry-frame';
@@ -15,7 +14,10 @@ import { EntryFrame } from './entry-frame';
 export function ResetPassword() {
   const { token } = useLocalSearchParams<{ token?: string }>();
   const reset = useResetPassword();
-  const { control, handleSubmit } = useForm({ resolver: zodResolver(ResetPasswordSchema), defaultValues: { newPassword: '' } });
+  const { control, handleSubmit } = useForm({
+    resolver: contractResolver(({ ResetPassword }) => ResetPassword),
+    defaultValues: { newPassword: '' },
+  });
   const submit = handleSubmit(({ newPassword }) => token && reset.mutate({ token, newPassword }));
   if (!token) {
     return (

@@ -1,14 +1,13 @@
-import { zodResolver } from '@hookform/resolvers/zod';
 import { useLocalSearchParams, useRouter } from 'expo-router';
 import { useForm } from 'react-hook-form';
 import { View } from 'react-native';
 import { safeNext } from '@/components/navigation/routes';
 import { Button } from '@/components/ui/button';
 import { Form } from '@/components/ui/form';
+import { contractResolver } from '@/components/ui/contract-resolver';
 import { FormField } from '@/components/ui/form-field';
 import { Link } from '@/components/ui/link';
 import { Text } from '@/components/ui/text';
-import { SignIn as SignInSchema } from '@/contract';
 import { hasStatus, sentence } from '@/hooks/api/problem';
 import { useSignIn } from '@/hooks/queries/session';
 import { EntryFrame } from './entry-frame';
@@ -19,7 +18,10 @@ export function SignIn() {
   const router = useRouter();
   const { next } = useLocalSearchParams<{ next?: string }>();
   const signIn = useSignIn();
-  const { control, handleSubmit } = useForm({ resolver: zodResolver(SignInSchema), defaultValues: { email: '', password: '' } });
+  const { control, handleSubmit } = useForm({
+    resolver: contractResolver(({ SignIn }) => SignIn),
+    defaultValues: { email: '', password: '' },
+  });
   const submit = handleSubmit((values) => signIn.mutate(values, { onSuccess: () => router.replace(safeNext(next)) }));
   return (
     <EntryFrame title="Sign in" lead="How far is the loop from the edge, before the car leaves the garage?">

@@ -1,12 +1,11 @@
-import { zodResolver } from '@hookform/resolvers/zod';
 import { useLocalSearchParams, useRouter } from 'expo-router';
 import { useForm } from 'react-hook-form';
 import { safeNext } from '@/components/navigation/routes';
 import { Button } from '@/components/ui/button';
 import { Form } from '@/components/ui/form';
+import { contractResolver } from '@/components/ui/contract-resolver';
 import { FormField } from '@/components/ui/form-field';
 import { Link } from '@/components/ui/link';
-import { SignUp as SignUpSchema } from '@/contract';
 import { sentence } from '@/hooks/api/problem';
 import { useSignUp } from '@/hooks/queries/session';
 import { EntryFrame } from './entry-frame';
@@ -16,7 +15,7 @@ export function SignUp() {
   const { next } = useLocalSearchParams<{ next?: string }>();
   const signUp = useSignUp();
   const { control, handleSubmit } = useForm({
-    resolver: zodResolver(SignUpSchema),
+    resolver: contractResolver(({ SignUp }) => SignUp),
     defaultValues: { name: '', email: '', password: '' },
   });
   const submit = handleSubmit((values) => signUp.mutate(values, { onSuccess: () => router.replace(safeNext(next)) }));

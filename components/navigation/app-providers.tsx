@@ -5,7 +5,7 @@ import { AnnouncementsProvider } from '@/components/ui/announcements';
 import { useAppFonts } from '@/components/ui/use-app-fonts';
 import { ThemeProvider } from '@/components/ui/theme';
 import { UnitsProvider } from '@/components/ui/units';
-import { defaultPreferences } from '@/contract';
+import { defaultPreferences } from '@/hooks/default-preferences';
 import { createQueryClient } from '@/hooks/api/query-client';
 import { meQuery } from '@/hooks/queries/me';
 import { recallTheme, rememberTheme } from '@/hooks/recall-theme';

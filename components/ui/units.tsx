@@ -1,5 +1,6 @@
 import { createContext, type PropsWithChildren, useContext, useMemo } from 'react';
-import { defaultPreferences, type Preferences } from '@/contract';
+import type { Preferences } from '@/contract';
+import { defaultPreferences } from '@/hooks/default-preferences';
 
 export interface Units {
   frequency: Preferences['frequencyUnit'];

@@ -1,0 +1,48 @@
+import { useForm } from 'react-hook-form';
+import { Button } from '@/components/ui/button';
+import { contractResolver } from '@/components/ui/contract-resolver';
+import { Dialog, DialogActions } from '@/components/ui/dialog';
+import { Form } from '@/components/ui/form';
+import { FormField } from '@/components/ui/form-field';
+import { sentence } from '@/hooks/api/problem';
+import { useMe, useUpdateMe } from '@/hooks/queries/me';
+
+interface NameDialogProps {
+  open: boolean;
+  onClose: () => void;
+}
+
+export function NameDialog({ open, onClose }: NameDialogProps) {
+  return (
+    <Dialog open={open} title="Your name" onClose={onClose}>
+      <NameForm onClose={onClose} />
+    </Dialog>
+  );
+}
+
+function NameForm({ onClose }: { onClose: () => void }) {
+  const me = useMe();
+  const update = useUpdateMe();
+  const { control, handleSubmit } = useForm({
+    resolver: contractResolver(({ SignUp }) => SignUp.pick({ name: true })),
+    defaultValues: { name: me.name },
+  });
+  const submit = handleSubmit(({ name }) => update.mutate({ name }, { onSuccess: onClose }));
+  return (
+    <Form onSubmit={submit} problem={update.error && sentence(update.error)}>
+      <FormField
+        control={control}
+        name="name"
+        label="Name"
+        hint="It stands beside what you keep from now on."
+        autoComplete="name"
+        autoCapitalize="words"
+        onSubmitEditing={submit}
+      />
+      <DialogActions>
+        <Button label="Not yet" onPress={onClose} />
+        <Button kind="primary" label="Change the name" busy={update.isPending} onPress={submit} />
+      </DialogActions>
+    </Form>
+  );
+}
