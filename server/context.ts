@@ -23,7 +23,7 @@ export function createContext(config: Config, replaced: Partial<Pick<Context, 'j
   const log = replaced.log ?? pino({ level: config.logLevel });
   const { db, wrongPragmas, close } = openDatabase(join(config.dataDir, 'kerbline.sqlite'));
   const mailer = replaced.mailer ?? createMailer(config, db);
-  const jobs = replaced.jobs ?? createLoopPool();
+  const jobs = replaced.jobs ?? createLoopPool({ onError: (error) => log.error({ err: error }, 'a worker thread ended') });
   return {
     config,
     db,

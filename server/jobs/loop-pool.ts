@@ -12,7 +12,11 @@ export interface LoopPoolOptions {
   readonly timeoutMs: number;
   /** How many loops may wait; past that, the caller is told to come back. */
   readonly maxWaiting: number;
+  /** What one thread may hold, MB. */
+  readonly memoryMb: number;
   readonly entry: WorkerEntry;
+  /** Hears of a thread that ended outside any task; another takes its place. */
+  readonly onError: (error: Error) => void;
 }
 
 /** The engine on worker threads: the server's main thread never runs it. */
@@ -24,19 +28,30 @@ export interface LoopPool {
   close(): Promise<void>;
 }
 
-const MEMORY_PER_THREAD_MB = 512;
+const defaults = (): LoopPoolOptions => ({
+  threads: Math.min(availableParallelism(), 8),
+  timeoutMs: 2_000,
+  maxWaiting: 2_000,
+  memoryMb: 512,
+  entry: workerEntry(),
+  onError: () => undefined,
+});
+
+const stopped = (detail: string) => new LoopRefused({ pointer: '#', detail });
+const isOutOfMemory = (error: unknown) => error instanceof Error && 'code' in error && error.code === 'ERR_WORKER_OUT_OF_MEMORY';
 
 /** A thread cannot be interrupted: one that takes too long is ended, and piscina starts another in its place. */
 export function createLoopPool(options: Partial<LoopPoolOptions> = {}): LoopPool {
-  const { threads = Math.min(availableParallelism(), 8), timeoutMs = 2_000, maxWaiting = 2_000, entry = workerEntry() } = options;
+  const { threads, timeoutMs, maxWaiting, memoryMb, entry, onError } = { ...defaults(), ...options };
   const pool = new Piscina({
     ...entry,
     minThreads: 1,
     maxThreads: threads,
     idleTimeout: 60_000,
     maxQueue: maxWaiting,
-    resourceLimits: { maxOldGenerationSizeMb: MEMORY_PER_THREAD_MB },
+    resourceLimits: { maxOldGenerationSizeMb: memoryMb },
   });
+  pool.on('error', onError);
 
   async function run<Value>(name: string, task: object): Promise<Value> {
     if (pool.queueSize >= maxWaiting) throw new TooBusy();
@@ -46,8 +61,8 @@ export function createLoopPool(options: Partial<LoopPoolOptions> = {}): LoopPool
       if ('refused' in outcome) throw new LoopRefused(outcome.refused);
       return outcome.value;
     } catch (error) {
-      if (signal.aborted)
-        throw new LoopRefused({ pointer: '#', detail: `This loop took longer than ${timeoutMs / 1000} s to analyse and was stopped.` });
+      if (signal.aborted) throw stopped(`This loop took longer than ${timeoutMs / 1000} s to analyse and was stopped.`);
+      if (isOutOfMemory(error)) throw stopped('This loop needs more memory than one analysis may take.');
       throw error;
     } finally {
       release();

@@ -9,5 +9,5 @@ export interface WorkerEntry {
 export function workerEntry(): WorkerEntry {
   const fromSource = import.meta.url.endsWith('.ts');
   const filename = fileURLToPath(new URL(fromSource ? './worker.ts' : './worker.mjs', import.meta.url));
-  return { filename, execArgv: fromSource ? ['--import', 'tsx'] : [] };
+  return { filename, execArgv: fromSource ? ['--import', new URL('./typescript-loader.mjs', import.meta.url).href] : [] };
 }
