@@ -37,6 +37,13 @@ export function decimalsFor(value: number, figures: number): number {
   return Math.max(0, figures - 1 - Number(exponent));
 }
 
+/** A number with at most so many significant figures and no idle zeros: what ticks and limits are named by. 0.08, 1.5, 200. */
+export function shortNumber(value: number, figures = 2): string {
+  const rounded = Number(value.toPrecision(figures));
+  const text = formatNumber(rounded, decimalsFor(rounded, figures));
+  return text.includes('.') && !text.includes('e') ? text.replace(/\.?0+$/, '') : text;
+}
+
 /** A gain: three significant figures, at least two decimals, no idle zeros after those. 1.05, 0.30, 0.035, 12.35. */
 export function formatGain(value: number): string {
   const size = Math.abs(value);

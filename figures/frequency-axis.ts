@@ -1,5 +1,5 @@
 import { range } from 'd3-array';
-import { decimalsFor, formatNumber } from './format';
+import { shortNumber } from './format';
 import type { Interval, Scale } from './geometry';
 import { logScale } from './log-scale';
 import { textWidth } from './text-width';
@@ -35,8 +35,6 @@ const DENSITIES: readonly { digits: readonly number[]; decades: number }[] = [
   { digits: [1], decades: 6 },
 ];
 
-const frequencyLabel = (value: number): string => formatNumber(value, decimalsFor(value, 1));
-
 /** The integers times powers of ten inside an interval, ascending. */
 function decadeIntegers([low, high]: Interval): { value: number; digit: number; exponent: number }[] {
   const exponents = range(Math.floor(Math.log10(low) - 1e-9), Math.floor(Math.log10(high) + 1e-9) + 1);
@@ -65,7 +63,7 @@ export function frequencyAxis(domain: Interval, pixels: Interval, unit: Frequenc
     return { frequency, x: at(frequency), text };
   };
   const named = DENSITIES.map(({ digits, decades }) => integers.filter((n) => digits.includes(n.digit) && n.exponent % decades === 0));
-  const candidates = named.map((list) => list.map((n) => tick(n.value, frequencyLabel(n.value))));
+  const candidates = named.map((list) => list.map((n) => tick(n.value, shortNumber(n.value, 1))));
   const labelled = candidates.find(fits) ?? candidates[candidates.length - 1];
   const taken = new Set(labelled.map((label) => label.frequency));
   const dense = (pixels[1] - pixels[0]) / Math.log10(domain[1] / domain[0]) > 40;

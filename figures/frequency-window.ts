@@ -5,8 +5,8 @@ import { frequencyFrom, frequencyIn, type FrequencyUnit } from './units';
 type LoopNumbers = Pick<Analysis, 'margins' | 'sensitivity' | 'frequencyResponse'>;
 
 /** How far the picture reaches below the first and above the last frequency that matters. */
-const BELOW = 9;
-const ABOVE = 6;
+const BELOW = 10;
+const ABOVE = 5;
 const LEAST_DECADES = 1.8;
 const MOST_DECADES = 6;
 /** A phase crossover with a gain margin beyond this (or its inverse) is of no concern. */
@@ -21,6 +21,14 @@ export function telltaleFrequencies({ margins, sensitivity }: LoopNumbers): numb
   const near = margins.phaseCrossovers.filter((c) => c.gainMarginFactor < FAR_GAIN_MARGIN && c.gainMarginFactor > 1 / FAR_GAIN_MARGIN);
   const crossovers = [...margins.gainCrossovers.slice(0, MOST_CROSSOVERS), ...near.slice(0, MOST_CROSSOVERS)].map((c) => c.frequency);
   return [...crossovers, sensitivity.ms.frequency, sensitivity.mt.frequency].filter(isDrawable);
+}
+
+/** Mt often lies far below the crossover, where nothing else happens: it does not widen the picture. */
+function framing(loop: LoopNumbers): number[] {
+  const mt = loop.sensitivity.mt.frequency;
+  const all = telltaleFrequencies(loop);
+  const others = all.filter((frequency) => frequency !== mt);
+  return others.length > 0 ? others : all;
 }
 
 const stopBelow = (value: number): number => {
@@ -44,7 +52,7 @@ function withDecades([low, high]: Interval): Interval {
 
 /** The frequencies that are drawn when nobody chose: round the crossovers and peaks of the loops, ending on 1, 2 or 5 of the reader's unit. rad/s. */
 export function frequencyWindow(loops: readonly LoopNumbers[], unit: FrequencyUnit): Interval {
-  const telltales = loops.flatMap(telltaleFrequencies);
+  const telltales = loops.flatMap(framing);
   const drawn = loops.flatMap(({ frequencyResponse }) => frequencyResponse?.frequencies ?? []).filter(isDrawable);
   const limits: Interval =
     drawn.length > 1 ? [Math.min(drawn[0], ...telltales), Math.max(drawn[drawn.length - 1], ...telltales)] : [1e-9, 1e12];

@@ -1,4 +1,4 @@
-import { formatNumber, decimalsFor } from './format';
+import { shortNumber } from './format';
 import type { Interval } from './geometry';
 import { type GainScaleInput, gainScale } from './gain-scale';
 import { type RuleLabel, ruleTicks, type RuleTick } from './gain-rule-ticks';
@@ -60,7 +60,7 @@ function edgeText(edge: GainEdge, x: number, end: 'low' | 'high', width: number)
 }
 
 function warningText(value: number, end: 'below' | 'above', x: number, width: number): RuleText {
-  const number = formatNumber(value, decimalsFor(value, 2));
+  const number = shortNumber(value);
   if (end === 'below') return { x: 0, anchor: 'start', text: `${inside(x, width) ? '' : '‹ '}unstable below ${number}` };
   return { x: width, anchor: 'end', text: `unstable from ${number}${inside(x, width) ? '' : ' ›'}` };
 }

@@ -28,12 +28,14 @@ export function createLabelBoard(paper: Omit<Paper, 'taken'>): LabelBoard {
   };
 }
 
-/** Places beside a point of an upright bar: left and right of it, at some heights. */
-export function placesBeside(x: number, heights: readonly number[], away = 8): LabelPlace[] {
-  return heights.flatMap((y) => [
-    { x: x - away, y, anchor: 'end' as const },
-    { x: x + away, y, anchor: 'start' as const },
-  ]);
+/** Places beside an upright bar, at some heights: close to it, then further off, past a short kerb across it. */
+export function placesBeside(x: number, heights: readonly number[], distances: readonly number[] = [8, 24]): LabelPlace[] {
+  return distances.flatMap((away) =>
+    heights.flatMap((y) => [
+      { x: x - away, y, anchor: 'end' as const },
+      { x: x + away, y, anchor: 'start' as const },
+    ]),
+  );
 }
 
 export const boxAround = (x: number, y: number, radius: number): Rect => ({

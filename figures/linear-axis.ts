@@ -1,4 +1,4 @@
-import { extent, tickStep, ticks } from 'd3-array';
+import { extent } from 'd3-array';
 import { clamp, type Interval, type Scale } from './geometry';
 
 export interface Tick {
@@ -31,15 +31,6 @@ export function finiteExtent(values: Iterable<number>): [number, number] | null 
   return low === undefined || high === undefined ? null : [low, high];
 }
 
-/** The interval widened to whole steps, with about `count` steps inside. */
-export function niceDomain([low, high]: Interval, count: number): { domain: Interval; step: number } {
-  const span = high > low ? high - low : Math.max(Math.abs(high), 1);
-  const base = high > low ? low : high - span / 2;
-  const step = tickStep(base, base + span, count);
-  const slack = 1e-9 * span;
-  return { domain: [Math.floor((base + slack) / step) * step, Math.ceil((base + span - slack) / step) * step], step };
-}
-
 /** Round values of a step inside an interval, without −0 or the dust of repeated addition. */
 export function multiples(step: number, [low, high]: Interval): number[] {
   const slack = 1e-9 * (high - low);
@@ -47,6 +38,3 @@ export function multiples(step: number, [low, high]: Interval): number[] {
   const last = Math.floor((high + slack) / step);
   return Array.from({ length: Math.max(0, last - first + 1) }, (_, i) => Number(((first + i) * step).toPrecision(12)) || 0);
 }
-
-/** About `count` round values between low and high, as d3 chooses them. */
-export const roundValues = ([low, high]: Interval, count: number): number[] => ticks(low, high, count);

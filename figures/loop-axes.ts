@@ -1,4 +1,4 @@
-import { formatNumber, decimalsFor } from './format';
+import { shortNumber } from './format';
 import { clamp, type Interval } from './geometry';
 import { type Axis, finiteExtent, multiples } from './linear-axis';
 import { fromDecibels, type MagnitudeUnit } from './units';
@@ -22,10 +22,8 @@ export function magnitudeAxis(decibels: Iterable<number>, range: Interval, unit:
   const step = stepFor(unit === 'dB' ? DECIBEL_STEPS : [20, 40, 60], top - bottom, pixels);
   const axis = axisWithStep([Math.floor(bottom / 10) * 10, Math.ceil(top / 10) * 10], step, range);
   if (unit === 'dB') return axis;
-  return { ...axis, ticks: axis.ticks.map(({ value }) => ({ value, text: factorLabel(fromDecibels(value)) })) };
+  return { ...axis, ticks: axis.ticks.map(({ value }) => ({ value, text: shortNumber(fromDecibels(value), 1) })) };
 }
-
-const factorLabel = (factor: number): string => formatNumber(factor, decimalsFor(factor, 1));
 
 /** The axis of arg L in degrees, −180° or another odd half turn always inside; a span of more than a turn and a half keeps its upper part. */
 export function phaseAxis(degrees: Iterable<number>, range: Interval): Axis {

@@ -1,4 +1,4 @@
-import { formatFrequency, formatMagnitude, withUnit } from './format';
+import { formatFrequency, formatMagnitude, shortNumber, withUnit } from './format';
 import type { FrequencyAxis } from './frequency-axis';
 import { frequencyCurves, type Ordinate, ordinatesWithin } from './frequency-curves';
 import { contains, type Rect } from './geometry';
@@ -10,7 +10,7 @@ import { responseOf, type LoopScene } from './loop-picture';
 import { crossoverOf, gainMarginBar } from './margin-marks';
 import type { PanelPicture } from './panel';
 import { placesAround } from './place-label';
-import { toDecibels } from './units';
+import { magnitudeIn, toDecibels } from './units';
 
 /** Half the length of the short kerb across a margin bar. */
 export const SHORT_KERB = 17;
@@ -36,7 +36,7 @@ function marginMarks(scene: LoopScene, across: FrequencyAxis, up: Axis, board: L
     placesBeside(x, [to + 17, to + 6, (from + to) / 2 + 4, from - 6, to - 8]),
   );
   if (y === null || limit === undefined) return { kerbs: [], bars: [{ x, from, to, disc: true }], dots: [] };
-  board.add([withUnit(formatMagnitude(limit, scene.units.magnitude), unit)], 'limit', [
+  board.add([withUnit(shortNumber(magnitudeIn(scene.units.magnitude, limit), 2), unit)], 'limit', [
     { x: x + SHORT_KERB + 5, y: y + 1, anchor: 'start' },
     { x: x - SHORT_KERB - 5, y: y + 1, anchor: 'end' },
   ]);

@@ -1,3 +1,4 @@
+import { extent } from 'd3-array';
 import { arrowheads } from './curve-marks';
 import { formatNumber, withUnit } from './format';
 import { type Point, type Rect, round2 } from './geometry';
@@ -44,6 +45,18 @@ function nameContours(turn: number, toPlane: ToPlane, board: LabelBoard): void {
     });
     board.add([formatNumber(level, 1)], 'contour', places);
   }
+}
+
+/** A closed outline as a curve that labels keep off. */
+const closedLine = (points: readonly Point[]): Polyline => ({
+  x: Float64Array.from([...points, points[0]], ({ x }) => x),
+  y: Float64Array.from([...points, points[0]], ({ y }) => y),
+});
+
+function boxOf(points: readonly Point[]): Rect {
+  const [left, right] = extent(points, ({ x }) => x).map(Number);
+  const [top, bottom] = extent(points, ({ y }) => y).map(Number);
+  return { x: left, y: top, width: right - left, height: bottom - top };
 }
 
 interface Grid {
@@ -95,27 +108,34 @@ export function nicholsPicture(scene: LoopScene, window: NicholsWindow, plot: Re
   const response = responseOf(scene.a);
   const lineA = draw(response);
   const lineB = scene.b === undefined ? null : draw(responseOf(scene.b));
-  const board = createLabelBoard({ bounds: plot, curves: lineB === null ? [lineA] : [lineA, lineB] });
   const summits = oddHalfTurns([window.phaseDegrees[0] - 60, window.phaseDegrees[1] + 60]);
+  const turns = summits.map((degrees) => degrees + 180);
+  const limit = scene.limits?.ms;
+  const others = (scene.others ?? []).map(draw);
+  const kerbOutlines = limit === undefined ? [] : turns.map((turn) => nicholsContour(limit, turn, toPlane));
+  const board = createLabelBoard({
+    bounds: plot,
+    curves: [lineA, ...(lineB === null ? [] : [lineB]), ...kerbOutlines.map(closedLine)],
+    faint: others,
+    shaded: turns.map((turn) => boxOf(nicholsContour(1.2, turn, toPlane))),
+  });
   for (const degrees of summits) board.reserve(boxAround(toX(degrees), toY(0), 8));
   const ground = { toPixel, plot, board };
   const worst = worstMark(scene, summitNear, ground);
   const posts = postMarks(scene, response.frequencies, ground);
-  const turns = summits.map((degrees) => degrees + 180);
   const mainTurn = turns[turns.length - 1];
   if (mainTurn !== undefined) nameContours(mainTurn, toPlane, board);
-  const limit = scene.limits?.ms;
   return {
     plot,
     contours: contourPaths(turns, toPlane, limit),
     ...gridOf(window, toPlane, plot),
     unitCircle: '',
-    kerbs: limit === undefined ? [] : turns.map((turn) => ({ closed: closedKerb(nicholsContour(limit, turn, toPlane)) })),
+    kerbs: kerbOutlines.map((outline) => ({ closed: closedKerb(outline) })),
     summits: summits.map((degrees) => toPlane(degrees, 0)),
     curves: {
       a: polylinePath(lineA, plot),
       b: lineB === null ? '' : polylinePath(lineB, plot),
-      others: (scene.others ?? []).map((other) => polylinePath(draw(other), plot)).join(''),
+      others: others.map((line) => polylinePath(line, plot)).join(''),
     },
     arrows: arrowheads(lineA, plot),
     posts,

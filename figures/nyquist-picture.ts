@@ -13,6 +13,7 @@ import { contourLevels, contourPoint, contourRadius, legibleContours } from './s
 
 const CONTOUR_PITCH = 5;
 const LABEL_PITCH = 17;
+const CONTOUR_POINTS = 48;
 const LABEL_ANGLES = [112, 100, 124, 68, 80, 56, 146, 158, 248, 260, 236, 212, 292, 304];
 
 const circlePath = ({ x, y }: Point, radius: number): string => {
@@ -50,6 +51,17 @@ function nameContours({ toPixel, pixelsPerUnit }: NyquistView, board: LabelBoard
   }
 }
 
+/** A contour as a curve that labels keep off. */
+function contourLine(level: number, { toX, toY }: NyquistView): Polyline {
+  const points = Array.from({ length: CONTOUR_POINTS + 1 }, (_, i) => contourPoint(level, (2 * Math.PI * i) / CONTOUR_POINTS));
+  return toPolyline(
+    points.map(({ re }) => re),
+    points.map(({ im }) => im),
+    toX,
+    toY,
+  );
+}
+
 const TICK = 3;
 
 function axes({ toX, toY, real, imaginary, pixelsPerUnit }: NyquistView, plot: Rect): string {
@@ -80,7 +92,14 @@ export function nyquistPicture(scene: LoopScene, window: NyquistWindow, plot: Re
   const response = responseOf(scene.a);
   const lineA = draw(response);
   const lineB = scene.b === undefined ? null : draw(responseOf(scene.b));
-  const board = createLabelBoard({ bounds: plot, curves: lineB === null ? [lineA] : [lineA, lineB] });
+  const limit = scene.limits?.ms;
+  const others = (scene.others ?? []).map(draw);
+  const board = createLabelBoard({
+    bounds: plot,
+    curves: [lineA, ...(lineB === null ? [] : [lineB]), ...(limit === undefined ? [] : [contourLine(limit, view)])],
+    faint: others,
+    shaded: [boxAround(summit.x, summit.y, contourRadius(1.2) * view.pixelsPerUnit)],
+  });
   const toPixel = ({ re, im }: { re: number; im: number }) => view.toPixel(re, im);
   board.reserve(boxAround(summit.x, summit.y, 8));
   board.add(['\u22121'], 'strong', [
@@ -91,7 +110,6 @@ export function nyquistPicture(scene: LoopScene, window: NyquistWindow, plot: Re
   const worst = worstMark(scene, () => summit, ground);
   const posts = postMarks(scene, response.frequencies, ground);
   nameContours(view, board);
-  const limit = scene.limits?.ms;
   return {
     plot,
     contours: contourPaths(summit, view.pixelsPerUnit, limit),
@@ -104,7 +122,7 @@ export function nyquistPicture(scene: LoopScene, window: NyquistWindow, plot: Re
     curves: {
       a: polylinePath(lineA, plot),
       b: lineB === null ? '' : polylinePath(lineB, plot),
-      others: (scene.others ?? []).map((other) => polylinePath(draw(other), plot)).join(''),
+      others: others.map((line) => polylinePath(line, plot)).join(''),
     },
     arrows: arrowheads(lineA, plot),
     posts,

@@ -14,7 +14,7 @@ import { placesAround } from './place-label';
 
 const degrees: Ordinate = ({ loop }) => loop.phaseDegrees;
 /** What lies under this |L| tells little of the loop: the axis does not follow its phase down. */
-const TELLING_MAGNITUDE = 0.05;
+const TELLING_MAGNITUDE = 0.2;
 const telling: Ordinate = ({ loop }) => loop.phaseDegrees.map((phase, i) => (loop.magnitude[i] >= TELLING_MAGNITUDE ? phase : NaN));
 
 interface Frame {
@@ -34,7 +34,7 @@ function demandKerbs(demand: number, x: number, reference: number, { up, plot, b
     if (!contains(plot, { x: plot.x, y })) return [];
     board.reserve({ x: x - SHORT_KERB, y: y - 7, width: 2 * SHORT_KERB, height: 14 });
     const text = withUnit(formatNumber(side === 'right' ? demand : -demand, 0), '°');
-    board.add([text], 'limit', placesBeside(x, [y + baseline, y + 4], SHORT_KERB + 5));
+    board.add([text], 'limit', placesBeside(x, [y + baseline, y + 4], [SHORT_KERB + 5]));
     return [straightKerb({ from: { x: x - SHORT_KERB, y }, to: { x: x + SHORT_KERB, y }, thickness: 6, block: 8, side })];
   });
 }

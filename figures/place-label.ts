@@ -20,11 +20,12 @@ export interface Paper {
   readonly curves: readonly Polyline[];
   /** Labels, marks and kerbs that stand already. */
   readonly taken: readonly Rect[];
-  /** Hairlines, covered only where there is no free paper. */
-  readonly hairlines?: readonly Rect[];
+  /** Grounds and thin curves, covered only where there is no free paper. */
+  readonly shaded?: readonly Rect[];
+  readonly faint?: readonly Polyline[];
 }
 
-const COST = { outside: 1000, curve: 400, taken: 200, hairline: 2, later: 0.1 };
+const COST = { outside: 1000, curve: 400, taken: 200, shaded: 4, faint: 2, later: 0.1 };
 const PAD = 2;
 
 /** The box of a text of one or more lines on a baseline. */
@@ -51,11 +52,12 @@ function costOf(box: Rect, paper: Paper): number {
   const outside = isInside(box, paper.bounds) ? 0 : COST.outside;
   const curves = paper.curves.filter((curve) => crosses(curve, box)).length * COST.curve;
   const taken = paper.taken.filter((rect) => overlaps(rect, box)).length * COST.taken;
-  const hairlines = (paper.hairlines ?? []).filter((rect) => overlaps(rect, box)).length * COST.hairline;
-  return outside + curves + taken + hairlines;
+  const shaded = (paper.shaded ?? []).filter((rect) => overlaps(rect, box)).length * COST.shaded;
+  const faint = (paper.faint ?? []).some((curve) => crosses(curve, box)) ? COST.faint : 0;
+  return outside + curves + taken + shaded + faint;
 }
 
-/** The candidate in the freest paper: inside, on no curve, on nothing that stands already, on hairlines last. Earlier ones are preferred. */
+/** The candidate in the freest paper: inside, on no curve, on nothing that stands already, on grounds and thin curves last. Earlier ones are preferred. */
 export function placeLabel(lines: readonly string[], candidates: readonly LabelPlace[], paper: Paper, size = 13): PlacedLabel {
   let best: PlacedLabel | null = null;
   let least = Infinity;

@@ -1,5 +1,5 @@
 import { type CurveMark, legiblePosts, type Post, postPath } from './curve-marks';
-import { formatFactor, formatFrequency, formatNumber, decimalsFor, withUnit } from './format';
+import { formatFactor, formatFrequency, shortNumber, withUnit } from './format';
 import { contains, type Point, type Rect } from './geometry';
 import { boxAround, type LabelBoard } from './label-board';
 import type { ChartDesign, LoopPoint, LoopScene } from './loop-picture';
@@ -28,7 +28,7 @@ function postFrequencies(frequencies: readonly number[], unit: FrequencyUnit): {
   return exponents
     .flatMap((exponent) => POST_DIGITS.map((digit) => Number(`${digit}e${exponent}`)))
     .filter((value) => value >= low && value <= high)
-    .map((value) => ({ frequency: frequencyFrom(unit, value), text: formatNumber(value, decimalsFor(value, 1)) }));
+    .map((value) => ({ frequency: frequencyFrom(unit, value), text: shortNumber(value, 1) }));
 }
 
 const STEP = 1.005;
@@ -44,7 +44,7 @@ function placesAcross({ point, angle }: CurveMark): LabelPlace[] {
     const a = ((angle + turn) * Math.PI) / 180;
     const dx = Math.cos(a);
     const anchor: LabelPlace['anchor'] = dx > 0.3 ? 'start' : dx < -0.3 ? 'end' : 'middle';
-    return [11, 16].map((d) => ({ x: point.x + d * dx, y: point.y + d * Math.sin(a) + 4.5, anchor }));
+    return [11, 16, 24].map((d) => ({ x: point.x + d * dx, y: point.y + d * Math.sin(a) + 4.5, anchor }));
   });
 }
 

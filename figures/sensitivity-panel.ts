@@ -21,7 +21,8 @@ function axisFor(scene: LoopScene, plot: Rect): Axis {
   const peaks = [scene.a, scene.b].flatMap((d) =>
     d === undefined ? [] : [d.analysis.sensitivity.ms.value, d.analysis.sensitivity.mt.value],
   );
-  const top = clamp(Math.ceil(Math.max(...peaks, (scene.limits?.ms ?? 0) + 0.2) * 1.08 * 2) / 2, LEAST_TOP, MOST_TOP);
+  const needed = Math.max(Math.max(...peaks) * 1.08, (scene.limits?.ms ?? 0) + 0.2);
+  const top = clamp(Math.ceil(needed * 2) / 2, LEAST_TOP, MOST_TOP);
   const step = top <= 2.5 && plot.height >= 90 ? 0.5 : top <= 4 ? 1 : 2;
   return axisWithStep([0, top], step, [plot.y + plot.height, plot.y]);
 }

@@ -1,5 +1,5 @@
 import { memo } from 'react';
-import { Text } from 'react-native-svg';
+import { Text, TSpan } from 'react-native-svg';
 import { fonts } from '@/components/ui/tokens';
 import { useTheme } from '@/components/ui/theme';
 import type { LabelTone, PanelLabel } from '@/figures';
@@ -25,6 +25,8 @@ export interface ChartTextProps {
   x: number;
   y: number;
   children: string;
+  /** Follows the text, lighter. */
+  unit?: string;
   tone?: TextTone;
   anchor?: 'start' | 'middle' | 'end';
   /** A rim of paper, so that the text reads over lines. */
@@ -32,7 +34,7 @@ export interface ChartTextProps {
 }
 
 /** A text of a picture. */
-export const ChartText = memo(function ChartText({ x, y, children, tone = 'tick', anchor = 'start', halo = false }: ChartTextProps) {
+export const ChartText = memo(function ChartText({ x, y, children, unit, tone = 'tick', anchor = 'start', halo = false }: ChartTextProps) {
   const { colors } = useTheme();
   const { color, weight, size = 13, struck } = tones[tone];
   const rim = halo ? { stroke: colors.paper, strokeWidth: 4, strokeLinejoin: 'round' as const, paintOrder: 'stroke' } : {};
@@ -48,6 +50,11 @@ export const ChartText = memo(function ChartText({ x, y, children, tone = 'tick'
       {...rim}
     >
       {children}
+      {unit === undefined ? null : (
+        <TSpan dx={7} fill={colors.ink3} fontFamily={fonts.narrow[500]}>
+          {unit}
+        </TSpan>
+      )}
     </Text>
   );
 });

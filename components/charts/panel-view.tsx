@@ -1,7 +1,7 @@
 import { memo, useId } from 'react';
 import { Circle, ClipPath, Defs, G, Path, Rect } from 'react-native-svg';
 import { useTheme } from '@/components/ui/theme';
-import { type PanelPicture, round2, textWidth } from '@/figures';
+import { type PanelPicture, round2 } from '@/figures';
 import { ChartLabel, ChartText } from './chart-text';
 import { CurvePath } from './curve-path';
 import { KerbStripe } from './kerb-stripe';
@@ -32,11 +32,8 @@ function AxisNames({ picture: { plot, axis, title, unit } }: { picture: PanelPic
           {text}
         </ChartText>
       ))}
-      <ChartText x={plot.x} y={plot.y - TITLE_RISE} tone="title">
+      <ChartText x={plot.x} y={plot.y - TITLE_RISE} tone="title" unit={unit}>
         {title}
-      </ChartText>
-      <ChartText x={plot.x + textWidth(title) * 1.04 + 8} y={plot.y - TITLE_RISE}>
-        {unit}
       </ChartText>
     </G>
   );

@@ -27,7 +27,7 @@ const itself = (value: number): number => value;
 export const TimeSheet = memo(function TimeSheet({ a, b, limits, units, panels: asked, height, width: fixed }: TimeSheetProps) {
   const { width, onLayout } = useChartFrame(fixed);
   const scene = useMemo(() => ({ a, b, limits, units }), [a, b, limits, units]);
-  const wanted = useMemo(() => timeWindow(b === undefined ? [a.analysis] : [a.analysis, b.analysis]), [a, b]);
+  const wanted = useMemo(() => timeWindow(a.analysis), [a]);
   const domain = useSteadyInterval(wanted, itself);
   const layout = useMemo(
     () =>
