@@ -3,7 +3,7 @@ import type { LoopFunction } from './loop-function';
 import { visitPieces } from './pieces';
 import type { Probe } from './probe';
 import { loopGain, loopPhase } from './quantities';
-import { LOG, PHASE } from './sample';
+import { LOG, PHASE, ROW } from './sample';
 import { LEAST_LISTED_GAIN } from './search-grid';
 
 /** A point where |L| = 1. The phase is unwrapped, radians. */
@@ -49,7 +49,7 @@ export const phaseCrossovers = (loop: LoopFunction, probe: Probe): PhaseCrossove
   const most = limit === 0 ? Infinity : MOST_NEUTRAL_CROSSOVERS;
   const least = Math.log(loop.deadTime > 0 ? LEAST_LISTED_GAIN : ZERO_GAIN);
   visitPieces(probe, loopPhase, {
-    matters: (low, high) => firstLevel(low) <= high,
+    matters: (low, high, i) => firstLevel(low) <= high && Math.max(probe.table[i * ROW + LOG], probe.table[(i + 1) * ROW + LOG]) >= least,
     visit: ({ a, valueA, b, valueB }) => {
       const levels = levelsBetween(valueA, valueB);
       for (const level of levels) {

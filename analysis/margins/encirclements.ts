@@ -24,7 +24,7 @@ export const clockwiseEncirclements = (loop: LoopFunction, crossovers: readonly 
     else entered = passes;
     outside = !outside;
   }
-  if (outside) upward += endOfContour(loop, crossovers) - entered;
+  if (outside) upward += endOfContour(crossovers) - entered;
   return -2 * upward;
 };
 
@@ -37,7 +37,7 @@ const startOfContour = (loop: LoopFunction): { gain: number; passes: number } =>
 };
 
 /** Where |L| > 1 as ω → ∞ the contour closes on the real axis, at the phase multiple of 180° nearest the last crossover. */
-const endOfContour = (loop: LoopFunction, crossovers: readonly GainCrossover[]): number => {
+const endOfContour = (crossovers: readonly GainCrossover[]): number => {
   const last = crossovers.length > 0 ? crossovers[crossovers.length - 1].phase : 0;
   const half = Math.round(last / Math.PI);
   const onRay = half % 2 !== 0;

@@ -13,12 +13,12 @@ export interface Piece {
 /**
  * Visits the axis from low to high in pieces on which `quantity` is monotone. An interval of the grid whose slopes differ
  * in sign holds a turning point; it is found exactly and the interval visited in two pieces, but only where `matters`
- * says that what lies between could. Stretches with an undamped pole or zero are left out. `visit` returns true to stop.
+ * says that what lies between could (it is told the least and the most that the interval reaches). Stretches with an undamped pole or zero are left out. `visit` returns true to stop.
  */
 export const visitPieces = (
   probe: Probe,
   quantity: Quantity,
-  { matters, visit }: { matters: (least: number, most: number) => boolean; visit: (piece: Piece) => boolean | void },
+  { matters, visit }: { matters: (least: number, most: number, interval: number) => boolean; visit: (piece: Piece) => boolean | void },
 ): void => {
   const { table, count } = probe;
   for (let i = 0; i < count - 1; i += 1) {
@@ -32,7 +32,7 @@ export const visitPieces = (
     const slopeB = quantity.slope(table, next);
     const turns = slopeA > 0 !== slopeB > 0 && slopeA !== 0 && slopeB !== 0;
     const [least, most] = turns ? reach({ a, valueA, slopeA, b, valueB, slopeB }) : [Math.min(valueA, valueB), Math.max(valueA, valueB)];
-    if (!matters(least, most) || probe.jumps(i)) continue;
+    if (!matters(least, most, i) || probe.jumps(i)) continue;
     if (!turns) {
       if (visit({ a, valueA, b, valueB })) return;
       continue;

@@ -2,7 +2,7 @@ import type { ClosedLoop } from '@/contract';
 import type { LoopModel } from '@/analysis/loop/model';
 import type { Complex } from '@/analysis/numbers/complex';
 import { closedLoopPoles } from './closed-loop-poles';
-import type { GainCrossover, PhaseCrossover } from './crossovers';
+import type { GainCrossover } from './crossovers';
 import { clockwiseEncirclements } from './encirclements';
 import { limitOf } from './end-values';
 import { hiddenModes } from './hidden-modes';
@@ -11,7 +11,9 @@ import type { LoopFunction } from './loop-function';
 /** A pole this near to the imaginary axis, relative to its size, is on it. */
 const ON_BOUNDARY = 1e-9;
 
-export interface Stability extends ClosedLoop {
+export interface Stability extends Omit<ClosedLoop, 'poles'> {
+  /** null with dead time: infinitely many. */
+  readonly poles: readonly Complex[] | null;
   /** Modes of Re s ≥ 0 that the loop cancels inside itself. */
   readonly hidden: readonly Complex[];
   /** A closed-loop pole lies on the imaginary axis, to within what numerics.md calls the boundary. */
@@ -19,8 +21,7 @@ export interface Stability extends ClosedLoop {
 }
 
 export interface Crossings {
-  readonly gain: readonly GainCrossover[];
-  readonly phase: readonly PhaseCrossover[];
+  readonly crossovers: readonly GainCrossover[];
   /** Least |1 + L| on the axis. */
   readonly modulus: number;
 }
@@ -55,7 +56,7 @@ const byEncirclements = (
   crossings: Crossings,
   open: { openUnstable: number; hidden: readonly Complex[] },
 ): Stability => {
-  const encirclements = clockwiseEncirclements(loop, crossings.gain) || 0;
+  const encirclements = clockwiseEncirclements(loop, crossings.crossovers) || 0;
   const hiddenOnAxis = open.hidden.filter((mode) => mode.re === 0).length;
   const onBoundary = crossings.modulus < ON_BOUNDARY;
   const endless = Math.abs(limitOf(loop.atInfinity.loop, 'infinity')) >= 1;
