@@ -6,9 +6,10 @@ import { axisWithStep } from './value-axis';
 
 const DECIBEL_LIMITS: Interval = [-60, 60];
 const DECIBEL_STEPS = [5, 10, 20, 40, 60];
-const DEGREE_STEPS = [15, 30, 45, 90, 180, 360];
+const DEGREE_STEPS = [45, 90, 180, 360];
+const ROUND_DEGREES = 15;
 const LARGEST_PHASE_SPAN = 540;
-const LABEL_PITCH = 22;
+const LABEL_PITCH = 25;
 
 const stepFor = (steps: readonly number[], span: number, pixels: number): number =>
   steps.find((step) => (span / step) * LABEL_PITCH <= pixels) ?? steps[steps.length - 1];
@@ -32,8 +33,7 @@ export function phaseAxis(degrees: Iterable<number>, range: Interval): Axis {
   const top = Math.max(high, reference + 45);
   const bottom = Math.max(Math.min(low, reference - 45), top - LARGEST_PHASE_SPAN);
   const step = stepFor(DEGREE_STEPS, top - bottom, Math.abs(range[1] - range[0]));
-  const unit = Math.min(step, 45);
-  return axisWithStep([Math.floor(bottom / unit) * unit, Math.ceil(top / unit) * unit], step, range);
+  return axisWithStep([Math.floor(bottom / ROUND_DEGREES) * ROUND_DEGREES, Math.ceil(top / ROUND_DEGREES) * ROUND_DEGREES], step, range);
 }
 
 /** −180° and its copies every turn: where a loop's phase leaves no margin. */

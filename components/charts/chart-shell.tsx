@@ -21,14 +21,14 @@ export interface ChartShellProps {
   tools?: ReactNode;
 }
 
-function TableButton({ name, open, onPress }: { name: string; open: boolean; onPress: () => void }) {
+function TableButton({ name, open, besideTools, onPress }: { name: string; open: boolean; besideTools: boolean; onPress: () => void }) {
   const { style, ...focus } = useFocusRing();
   return (
     <Pressable
       role="button"
       aria-label={`${open ? 'Curves' : 'Table'} of ${name}`}
       onPress={onPress}
-      style={[styles.button, style]}
+      style={[styles.button, besideTools && styles.middle, style]}
       {...focus}
     >
       <Text step="tick" tone="ink3">
@@ -57,7 +57,7 @@ export function ChartShell({ description, name, height, onLayout, picture, overl
       )}
       <View style={styles.tools}>
         {open ? null : tools}
-        <TableButton name={name} open={open} onPress={() => setOpen(!open)} />
+        <TableButton name={name} open={open} besideTools={tools !== undefined} onPress={() => setOpen(!open)} />
       </View>
     </View>
   );
@@ -66,5 +66,6 @@ export function ChartShell({ description, name, height, onLayout, picture, overl
 const styles = StyleSheet.create({
   table: { paddingTop: touch },
   tools: { position: 'absolute', top: 0, right: 0, flexDirection: 'row' },
+  middle: { justifyContent: 'center' },
   button: { minWidth: touch, minHeight: touch, paddingRight: 10, paddingTop: 2, alignItems: 'flex-end' },
 });

@@ -9,7 +9,7 @@ const GLYPH = 0.7;
 export function UnstableMark({ x, y }: { x: number; y: number }) {
   const { colors } = useTheme();
   const text = 'unstable';
-  const left = x - textWidth(text) * 1.05 - 20;
+  const left = x - textWidth(text) - 18;
   return (
     <G>
       <Path d={verdictShapes.fail.solid ?? ''} fill={colors.fail} transform={`translate(${left} ${y - 11}) scale(${GLYPH})`} />
