@@ -9,6 +9,7 @@ import { account, session, user, verification } from '@/db/tables';
 import type { Config } from '../config';
 import { resetLetter, verificationLetter } from '../mail/letters';
 import type { Mailer } from '../mail/mailer';
+import type { Message } from '../mail/message';
 import { ADDRESS_HEADER } from './call-headers';
 
 interface AuthParts {
@@ -26,6 +27,10 @@ const DAY_S = 24 * HOUR_S;
  * what is reachable is what we validate, limit, describe and test.
  */
 export function createAuth({ config, db, mailer, log }: AuthParts) {
+  // Not waited for: a slow mail server must not hold up a sign-up, nor tell by its slowness which addresses are known.
+  const post = async (letter: Message) => {
+    mailer.send(letter).catch((err: unknown) => log.error({ err, subject: letter.subject }, 'a letter was not sent'));
+  };
   return betterAuth({
     appName: 'Kerbline',
     baseURL: config.baseUrl,
@@ -33,7 +38,7 @@ export function createAuth({ config, db, mailer, log }: AuthParts) {
     secret: config.secret,
     telemetry: { enabled: false },
     database: drizzleAdapter(db, { provider: 'sqlite', schema: { user, session, account, verification } }),
-    logger: { log: (level, message) => log[level]({ part: 'auth' }, message) },
+    logger: { level: 'warn', log: (level, message) => log[level]({ part: 'auth' }, message) },
     // Limits are the routes' own: this limiter starts its window anew with every request, and calls from code pass it by.
     rateLimit: { enabled: false },
     advanced: {
@@ -51,12 +56,12 @@ export function createAuth({ config, db, mailer, log }: AuthParts) {
       revokeSessionsOnPasswordReset: true,
       resetPasswordTokenExpiresIn: HOUR_S,
       sendResetPassword: ({ user: { name, email }, token }) =>
-        mailer.send(resetLetter({ name, email, url: `${config.baseUrl}/reset-password?token=${token}` })),
+        post(resetLetter({ name, email, url: `${config.baseUrl}/reset-password?token=${token}` })),
     },
     emailVerification: {
       sendOnSignUp: true,
       expiresIn: DAY_S,
-      sendVerificationEmail: ({ user: { name, email }, url }) => mailer.send(verificationLetter({ name, email, url })),
+      sendVerificationEmail: ({ user: { name, email }, url }) => post(verificationLetter({ name, email, url })),
     },
     databaseHooks: {
       // Sign-up ends with a session, so nobody ever works without a team, also where the process died in between.

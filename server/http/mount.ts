@@ -15,11 +15,10 @@ async function receive(context: Context, route: Route, request: Request): Promis
   const { access, input } = route;
   const { user, setCookies } = await identify(context, request);
   if (setCookies.length > 0) request.res?.append('Set-Cookie', setCookies);
-  const params = input.params && validateParams(input.params, request.params);
   const project = authorise(context.db, access, user, request.params.projectId);
   return {
     context,
-    params,
+    params: input.params && validateParams(input.params, request.params),
     query: input.query && validate(input.query, request.query),
     body: input.body && validate(input.body, request.body),
     user,

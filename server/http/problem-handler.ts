@@ -1,22 +1,24 @@
 import type { ErrorRequestHandler, Response } from 'express';
 import type { Logger } from 'pino';
-import { Malformed, Problem } from './problem';
+import { Malformed, NotFound, Problem } from './problem';
 
-const isHttpError = (error: unknown): error is Error & { status: number; type: string } =>
-  error instanceof Error && 'status' in error && 'type' in error && typeof error.status === 'number' && typeof error.type === 'string';
+/** What Express, its body parser and its file server throw. */
+interface HttpError extends Error {
+  readonly status: number;
+  readonly type?: string;
+}
 
-/** What Express and its body parser throw, said as everything else is said. */
-function fromExpress(error: Error & { status: number; type: string }): Problem {
-  if (error.type === 'entity.parse.failed') return new Malformed([{ pointer: '#', detail: 'The body is not JSON.' }]);
-  if (error.type === 'entity.too.large') return new Problem(413, 'The body is larger than 1 MB.');
-  return new Problem(error.status, 'The request could not be read.');
+const isHttpError = (error: unknown): error is HttpError => error instanceof Error && 'status' in error && typeof error.status === 'number';
+
+function fromExpress({ status, type }: HttpError): Problem {
+  if (type === 'entity.parse.failed') return new Malformed([{ pointer: '#', detail: 'The body is not JSON.' }]);
+  if (type === 'entity.too.large') return new Problem(413, 'The body is larger than 1 MB.');
+  return status === 404 ? new NotFound() : new Problem(status, 'The request could not be read.');
 }
 
 function toProblem(error: unknown): Problem | null {
   if (error instanceof Problem) return error;
-  if (isHttpError(error) && error.status < 500) return fromExpress(error);
-  if (error instanceof URIError) return new Problem(400, 'The address cannot be decoded.');
-  return null;
+  return isHttpError(error) && error.status < 500 ? fromExpress(error) : null;
 }
 
 export function sendProblem(response: Response, problem: Problem): void {
