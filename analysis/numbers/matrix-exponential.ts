@@ -13,19 +13,21 @@ const PADE_REACH = 5.371920351148152;
 /**
  * e^A by scaling and squaring with the [13/13] Padé approximant.
  *
- * `a` is square and finite; balance it first where its entries differ by many decades.
- * Example: exponential of [[0, 1], [−1, 0]]·t has cos t = 0.5403023058681398 for t = 1 on its diagonal.
+ * What is squared is e^A − I, by E ← 2E + E²: beside a fast mode, a slow one would otherwise drown in the rounding of the
+ * ones on the diagonal. `a` is square and finite; balance it first where its entries differ by many decades.
+ * Example: exponential of [[0, 1], [−1, 0]] has cos 1 = 0.5403023058681398 on its diagonal.
  *
  * @see REFERENCES.md [Higham 2005], algorithm 2.3
  */
 export function exponential(a: Matrix): Matrix {
   const squarings = Math.max(0, Math.ceil(Math.log2(columnNorm(a) / PADE_REACH)));
-  let result = padeApproximant(weightedSum([[2 ** -squarings, a]]));
-  for (let k = 0; k < squarings; k += 1) result = multiply(result, result);
-  return result;
+  let change = padeChange(weightedSum([[2 ** -squarings, a]]));
+  for (let k = 0; k < squarings; k += 1) change = weightedSum([[2, change], [1, multiply(change, change)]]); // prettier-ignore
+  return weightedSum([[1, change], [1, identityMatrix(a.rows)]]); // prettier-ignore
 }
 
-function padeApproximant(a: Matrix): Matrix {
+/** e^A − I of a matrix within the approximant's reach. */
+function padeChange(a: Matrix): Matrix {
   const b = PADE;
   const one = identityMatrix(a.rows);
   const a2 = multiply(a, a);
@@ -35,5 +37,5 @@ function padeApproximant(a: Matrix): Matrix {
   const odd = multiply(a, weightedSum([[1, oddHigh], [b[7], a6], [b[5], a4], [b[3], a2], [b[1], one]])); // prettier-ignore
   const evenHigh = multiply(a6, weightedSum([[b[12], a6], [b[10], a4], [b[8], a2]])); // prettier-ignore
   const even = weightedSum([[1, evenHigh], [b[6], a6], [b[4], a4], [b[2], a2], [b[0], one]]); // prettier-ignore
-  return solve(weightedSum([[1, even], [-1, odd]]), weightedSum([[1, even], [1, odd]])); // prettier-ignore
+  return solve(weightedSum([[1, even], [-1, odd]]), weightedSum([[2, odd]])); // prettier-ignore
 }

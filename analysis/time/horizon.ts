@@ -3,6 +3,7 @@ import { NODES, NODE_COUNT } from './nodes';
 import type { Band } from './settling';
 import type { Simulation } from './simulation';
 import { isResolved } from './resolution';
+import type { Track } from './track';
 
 /** A response counts as settled once it was watched for this multiple of the time, lest a slow mode lead out again. */
 const WATCH_PER_SETTLING = 2.5;
@@ -12,29 +13,41 @@ const HORIZON_GROWTH = 1.5;
 export const GROWN = 10;
 const SWINGS = 60;
 
-/** `coarse`: panels too wide for what was found; `long`: more panels than the work allows. */
-export type Watched = { readonly outcome: 'done'; readonly horizon: number } | { readonly outcome: 'coarse' | 'long' };
+/** Panels of time that one response may cost: well under a second of work. */
+const MAX_PANELS = 60_000;
 
-interface Watch {
-  readonly firstHorizon: number;
-  readonly maxPanels: number;
-  /** Whether the output up to `horizon` shows enough. */
-  enough(output: Curve, horizon: number): boolean;
-}
+/** An output beyond this many times the step is no longer followed. */
+const MAX_SIZE = 1e100;
 
-/** Simulates on and on, each time half as far again, until enough was seen. */
-export function simulateUntil(simulation: Simulation, { firstHorizon, maxPanels, enough }: Watch): Watched {
+/** Why a response is not given. `coarse`: panels too wide for what was found; `long`: too much work; `boundless`: too large. */
+export type Failure = 'coarse' | 'long' | 'boundless';
+
+/** Whether the output up to `horizon` shows enough. */
+export type Enough = (output: Curve, horizon: number) => boolean;
+
+/** Simulates on and on, each time half as far again, until enough was seen; answers how far that is. */
+export function simulateUntil(simulation: Simulation, firstHorizon: number, enough: Enough): number | Failure {
   for (let horizon = firstHorizon; ; horizon *= HORIZON_GROWTH) {
-    const known = simulation.panels;
-    const arrived = simulation.advanceTo(horizon, maxPanels);
-    if (!isResolved(simulation.output, known) || !isResolved(simulation.control, known)) return { outcome: 'coarse' };
-    if (!arrived) return { outcome: 'long' };
-    if (enough(simulation.output, horizon)) return { outcome: 'done', horizon };
+    const failure = simulateTo(simulation, horizon);
+    if (failure) return failure;
+    if (enough(simulation.output, horizon)) return horizon;
   }
 }
 
+/** Simulates up to `horizon`, and says if that failed. */
+export function simulateTo(simulation: Simulation, horizon: number): Failure | null {
+  const known = simulation.panels;
+  const arrived = simulation.advanceTo(horizon, MAX_PANELS);
+  if (!(simulation.output.size < MAX_SIZE && simulation.control.size < MAX_SIZE)) return 'boundless';
+  if (!isResolved(simulation.output, known) || !isResolved(simulation.control, known)) return 'coarse';
+  return arrived ? null : 'long';
+}
+
+/** Whether a track's delay line alone would cost more than a response may. */
+export const isTooFine = (track: Track): boolean => track.panels < Infinity && track.panels > MAX_PANELS;
+
 /** Enough of a stable response: it settled, and was watched long enough after. `bandFor` gives the band for a peak. */
-export function hasSettled(bandFor: (peak: number) => Band): Watch['enough'] {
+export function hasSettled(bandFor: (peak: number) => Band): Enough {
   return (output, horizon) => {
     const { centre, band } = bandFor(output.size);
     for (let k = output.values.length - 1; k >= 0; k -= 1) {

@@ -24,7 +24,8 @@ export interface LoopSystem {
   initial(reference: number, load: number): Float64Array;
 }
 
-const HELD_INPUTS = 2;
+/** Reference and load. */
+export const HELD_INPUTS = 2;
 
 /** Closes the loop where there is no dead time and balances the states. Null where 1 + L(∞) = 0 without dead time. */
 export function assembleSystem(open: Watched<Signal> & { derivatives: readonly Signal[] }, deadTime: number): LoopSystem | null {

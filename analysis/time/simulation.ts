@@ -105,7 +105,9 @@ export class Simulation {
     const count = Math.max(1, Math.round(this.run.system.deadTime / width));
     const history = renode(this.measurement, width, count);
     if (!history || !renode(this.output, width, count) || !renode(this.control, width, count)) return false;
-    this.track = this.run.tracks.evenTrack(width);
+    const track = this.run.tracks.evenTrack(width);
+    if (!track) return false;
+    this.track = track;
     this.delayLine = history;
     return true;
   }

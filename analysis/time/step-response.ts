@@ -1,22 +1,29 @@
 import type { Complex } from '@/analysis/numbers/complex';
 import type { LoopModel } from '@/analysis/loop/model';
 import type { FinalValues } from './final-values';
-import { GROWN, hasGrown, hasSettled, simulateUntil } from './horizon';
+import { GROWN, hasGrown, hasSettled, isTooFine, simulateTo, simulateUntil, type Failure } from './horizon';
 import { monotoneKnots, type Knots } from './knots';
 import type { LoopSystem } from './loop-system';
 import type { StepResponse } from './metrics';
 import { planPanels } from './panel-plan';
 import { lastOutside } from './passages';
-import { isResolved } from './resolution';
 import { loadBand, referenceBand } from './settling';
 import { Simulation } from './simulation';
 import { Tracks } from './track';
 
-/** Panels of time that one response may cost: about a second of work. */
-const MAX_PANELS = 100_000;
+/** How panels are chosen, one way after the other until a response is resolved: as the poles ask and widening, then finer. */
+const MANNERS: readonly Manner[] = [
+  { fineness: 1, widening: true },
+  { fineness: 1, widening: false },
+  { fineness: 2, widening: false },
+  { fineness: 4, widening: false },
+  { fineness: 8, widening: false },
+];
 
-/** How much finer than the poles ask for panels are made, one after the other, until a response is resolved. */
-const FINENESSES = [1, 2, 4, 8, 16];
+interface Manner {
+  readonly fineness: number;
+  readonly widening: boolean;
+}
 
 /** The first look at a response reaches past its dead time by so many panels. */
 const FIRST_PANELS = 4;
@@ -41,57 +48,56 @@ export interface StepResponses {
   readonly load: StepResponse;
 }
 
-/** The responses to a unit reference and a unit load step, or null where they would take more work than is allowed. */
-export function stepResponses(question: StepQuestion): StepResponses | null {
-  for (const fineness of FINENESSES) {
-    const attempt = attemptResponses(question, fineness);
+/** The responses to a unit reference and a unit load step, or why there are none. */
+export function stepResponses(question: StepQuestion): StepResponses | 'long' | 'boundless' {
+  for (const manner of MANNERS) {
+    const attempt = attemptResponses(question, manner);
     if (attempt !== 'coarse') return attempt;
   }
-  return null;
+  return 'long';
 }
 
-function attemptResponses(question: StepQuestion, fineness: number): StepResponses | 'coarse' | null {
-  const { system, finalValues } = question;
+function attemptResponses(question: StepQuestion, { fineness, widening }: Manner): StepResponses | Failure {
+  const { system, finalValues, model } = question;
   const stages = planPanels(question.poles, system.deadTime || Infinity, fineness);
   const tracks = new Tracks(system, stages);
+  if (isTooFine(tracks.first)) return 'long';
   const firstHorizon = 2 * system.deadTime + FIRST_PANELS * stages[0].width;
   const respond = (kind: StepKind) => {
-    const initial = kind === 'reference' ? system.initial(1, 0) : system.initial(0, 1);
     const simulation = new Simulation({
       system,
       tracks,
-      initial,
-      outputDelay: question.model.plantDeadTime,
-      widening: question.stable && system.deadTime > 0,
+      initial: kind === 'reference' ? system.initial(1, 0) : system.initial(0, 1),
+      outputDelay: model.plantDeadTime,
+      widening: widening && question.stable && system.deadTime > 0,
     });
-    return finish(question, { simulation, firstHorizon, kind, finalValue: finalValues[kind] });
+    return watch(question, { simulation, firstHorizon, finalValue: finalValues[kind], bandOf: bands[kind] });
   };
   const reference = respond('reference');
-  if (typeof reference === 'string') return reference === 'coarse' ? reference : null;
+  if (typeof reference === 'string') return reference;
   const load = respond('load');
-  if (typeof load === 'string') return load === 'coarse' ? load : null;
-  return { reference, load };
+  return typeof load === 'string' ? load : { reference, load };
 }
 
 interface Run {
   readonly simulation: Simulation;
   readonly firstHorizon: number;
-  readonly kind: StepKind;
   readonly finalValue: number | null;
+  readonly bandOf: typeof referenceBand;
 }
 
-function finish({ stable, duration }: StepQuestion, { simulation, firstHorizon, kind, finalValue }: Run): StepResponse | 'coarse' | 'long' {
+/** Simulates one response for as long as it takes to judge it and to show it. */
+function watch({ stable, duration }: StepQuestion, { simulation, firstHorizon, finalValue, bandOf }: Run): StepResponse | Failure {
   const { output, control } = simulation;
-  const bandFor = (peak: number) => bands[kind](finalValue, peak);
-  const enough = stable ? hasSettled(bandFor) : duration === null ? hasGrown : () => true;
-  const watched = simulateUntil(simulation, { firstHorizon, maxPanels: MAX_PANELS, enough });
-  if (watched.outcome !== 'done') return watched.outcome;
-  const horizon = Math.max(watched.horizon, duration ?? 0);
-  if (!simulation.advanceTo(horizon, MAX_PANELS)) return 'long';
-  if (!isResolved(output) || !isResolved(control)) return 'coarse';
+  const bandFor = (peak: number) => bandOf(finalValue, peak);
+  const judged = stable || duration === null ? simulateUntil(simulation, firstHorizon, stable ? hasSettled(bandFor) : hasGrown) : 0;
+  if (typeof judged === 'string') return judged;
+  const horizon = Math.max(judged, duration ?? 0);
+  const failure = simulateTo(simulation, horizon);
+  if (failure) return failure;
   const knots = monotoneKnots(output, horizon);
-  const shown = stable ? AXIS_PER_SETTLING * (lastOutside(output, knots, bandFor(output.size)) ?? 0) || horizon : grownAt(knots) || horizon;
-  return { output, control, knots, horizon, axisEnd: duration ?? shown, finalValue };
+  const settled = stable ? AXIS_PER_SETTLING * (lastOutside(output, knots, bandFor(output.size)) ?? 0) : grownAt(knots);
+  return { output, control, knots, horizon, axisEnd: duration ?? (settled || horizon), finalValue };
 }
 
 /** When the response first reached ten times the unit step; 0 if it never did. */

@@ -33,6 +33,10 @@ const warnings = {
     code: 'responseTooLong',
     message: 'The response takes too long against its fastest motion or its dead time to be computed here: time responses are not given.',
   },
+  boundless: {
+    code: 'responseUnbounded',
+    message: 'The response grows beyond all numbers within the time asked for: ask for a shorter one.',
+  },
 } satisfies Record<string, Warning>;
 
 /** The two step responses as curves that can be evaluated at any time, or the warning that says why there are none. */
@@ -48,7 +52,7 @@ export function respond(model: LoopModel, duration: number | null, stability: Kn
     duration,
     finalValues: finalValues(model),
   });
-  return steps ?? warnings.long;
+  return typeof steps === 'string' ? warnings[steps] : steps;
 }
 
 /**

@@ -1,5 +1,6 @@
 import type { LoopSystem } from './loop-system';
 import { longPanelOperator } from './long-panel-operator';
+import { isStablePanel } from './panel-stability';
 import { panelOperator, type PanelOperator } from './panel-operator';
 import type { Stage } from './panel-plan';
 
@@ -13,7 +14,7 @@ export interface Track {
 /** The tracks of one loop, their operators made once and shared by all its responses. */
 export class Tracks {
   readonly first: Track;
-  private readonly even = new Map<number, Track>();
+  private readonly even = new Map<number, Track | null>();
 
   constructor(
     private readonly system: LoopSystem,
@@ -22,19 +23,22 @@ export class Tracks {
     this.first = trackOf(stages.map(({ width, count }) => ({ operator: panelOperator(system, width), count })));
   }
 
-  /** Panels all of `width`: a whole fraction of the dead time, or a whole multiple of it. */
-  evenTrack(width: number): Track {
+  /** Panels all of `width`, a whole fraction or multiple of the dead time; null where they would not stay stable. */
+  evenTrack(width: number): Track | null {
     let track = this.even.get(width);
-    if (!track) {
-      const { deadTime } = this.system;
-      const base = panelOperator(this.system, width);
-      track =
-        width > deadTime
-          ? trackOf([{ operator: longPanelOperator(base, deadTime), count: 1 }])
-          : trackOf([{ operator: base, count: Math.round(deadTime / width) }]);
+    if (track === undefined) {
+      track = this.makeEven(width);
       this.even.set(width, track);
     }
     return track;
+  }
+
+  private makeEven(width: number): Track | null {
+    const { deadTime } = this.system;
+    const direct = panelOperator(this.system, width);
+    if (width < deadTime) return trackOf([{ operator: direct, count: Math.round(deadTime / width) }]);
+    const operator = width > deadTime ? longPanelOperator(direct, deadTime) : direct;
+    return isStablePanel(operator) ? trackOf([{ operator, count: 1 }]) : null;
   }
 }
 
