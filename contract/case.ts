@@ -8,6 +8,7 @@ export const CaseParameters = z.strictObject({
     .optional(),
   deadTime: z.number().min(0, 'Dead time is 0 or more.').max(1e4, 'Dead time is at most 10,000 s.').optional(),
 });
+export type CaseParameters = z.infer<typeof CaseParameters>;
 export const CaseAxes = z.strictObject({ speed: z.number().optional(), mass: z.number().optional(), grade: z.number().optional() });
 
 /** One condition the loop must survive. */
