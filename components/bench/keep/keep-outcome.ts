@@ -37,6 +37,7 @@ export function keepWords(outcome: KeepOutcome, units: ReaderUnits): KeepWords |
     }
     case 'offline':
       return { lead: 'No signal.', text: 'The draft stays on this device; keeping it needs signal.' };
+    case 'overtaken':
     case 'refused':
       return { lead: 'Not kept.', text: outcome.detail };
     default:

@@ -1,4 +1,4 @@
-import { caseLoop } from '@/analysis';
+import { caseLoop } from '@/analysis/project';
 import type { Loop } from '@/contract';
 
 import { contentWith, type Settings } from '../draft/settings';

@@ -1,4 +1,4 @@
-import { headline, judgeCase } from '@/analysis';
+import { headline, judgeCase } from '@/analysis/project';
 import type { Analysis, Headline } from '@/contract';
 import type { Settings } from '../draft/settings';
 import type { BenchSubject } from '../subject/bench-subject';

@@ -5,6 +5,8 @@ import { type ChartSheet, isChartSheet } from '../sheets/chart-sheet';
 
 type Parameter = 'design' | 'revision' | 'analysis' | 'case' | 'chart' | 'b' | 'step' | 'load';
 type Parameters = Partial<Record<Parameter, string>>;
+/** Changes the address; what is set to undefined leaves it. */
+export type ChangeLink = (change: Parameters) => void;
 
 /** What can be shared of a bench, as its address has it. */
 export interface BenchLink {
@@ -43,8 +45,8 @@ export function benchLink(parameters: Parameters): BenchLink {
   };
 }
 
-/** The address of this bench, and the way to change it: what is set to undefined leaves the address. */
-export function useBenchLink(): [BenchLink, (change: Parameters) => void] {
+/** The address of this bench, and the way to change it. */
+export function useBenchLink(): [BenchLink, ChangeLink] {
   const {
     design,
     revision: rev,

@@ -10,7 +10,8 @@ const numbers = ({ ms = 1.5598, phase = 45.319 as number | null, unstablePoles =
   }) as unknown as Analysis;
 
 describe('server and bench', () => {
-  it('agree where six digits are the same', () => expect(agreementOf(numbers(), numbers({ ms: 1.5598 * (1 + 4e-7) }))).toEqual({ kind: 'agree' }));
+  it('agree where six digits are the same', () =>
+    expect(agreementOf(numbers(), numbers({ ms: 1.5598 * (1 + 4e-7) }))).toEqual({ kind: 'agree' }));
 
   it('differ where the sixth digit differs', () => {
     expect(agreementOf(numbers(), numbers({ ms: 1.55981 }))).toEqual({ kind: 'differ', quantity: 'ms', bench: 1.5598, server: 1.55981 });

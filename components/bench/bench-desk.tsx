@@ -1,0 +1,66 @@
+import { useCallback, useEffect, useMemo, useState } from 'react';
+import { StyleSheet, View } from 'react-native';
+import { CursorProvider } from '@/components/charts';
+import { useAnnounce } from '@/components/ui/announcements';
+import { BenchContext } from './bench-context';
+import type { BenchCommand } from './bench-keys';
+import { BenchScene } from './bench-scene';
+import { useCompared } from './compare/use-compared';
+import { type Gain, nudged } from './draft/gain';
+import { current } from './draft/draft';
+import { redo, undo } from './draft/draft-store';
+import { useDraftStore } from './draft/use-draft-store';
+import { useKeep } from './keep/use-keep';
+import { mayKeep } from './keep/saved-words';
+import { useBenchAnalysis } from './live/use-bench-analysis';
+import type { BenchSubject } from './subject/bench-subject';
+import type { BenchLink, ChangeLink } from './subject/use-bench-link';
+import { useBenchKeys } from './use-bench-keys';
+
+interface BenchDeskProps {
+  subject: BenchSubject;
+  link: BenchLink;
+  onLink: ChangeLink;
+}
+
+/** The bench with something on it: its draft, the engine that answers, what can be kept, and its keys. */
+export function BenchDesk({ subject, link, onLink }: BenchDeskProps) {
+  const store = useDraftStore(subject);
+  const analyser = useBenchAnalysis(subject, store, link.steps);
+  const compared = useCompared(subject, link);
+  const { outcome, keep } = useKeep(subject, store);
+  const [activeGain, setActiveGain] = useState<Gain>('kp');
+  const bench = useMemo(() => ({ subject, store, analyser }), [subject, store, analyser]);
+  const keptRevision = outcome.kind === 'kept' ? outcome.revision : null;
+  useEffect(() => {
+    // What a link pinned is no longer what is on the bench once a newer revision was kept here.
+    if (keptRevision !== null) onLink({ revision: undefined, analysis: undefined });
+  }, [keptRevision, onLink]);
+
+  const announce = useAnnounce();
+  const obey = useCallback(
+    (command: BenchCommand) => {
+      const draft = store.getState();
+      if (command.kind === 'chart') onLink({ chart: command.sheet });
+      else if (command.kind === 'undo') undo(store);
+      else if (command.kind === 'redo') redo(store);
+      else if (command.kind === 'nudge')
+        draft.move({ [activeGain]: nudged(activeGain, current(draft), draft.base.settings, command.fraction) });
+      else if (mayKeep(subject.project.role)) keep();
+      else announce('Keeping is for editors of this project.');
+    },
+    [store, onLink, activeGain, keep, announce, subject.project.role],
+  );
+  const keys = useBenchKeys(obey);
+  return (
+    <BenchContext.Provider value={bench}>
+      <CursorProvider>
+        <View {...keys} style={styles.desk}>
+          <BenchScene {...{ link, onLink, compared, outcome, activeGain }} onKeep={keep} onActiveGain={setActiveGain} />
+        </View>
+      </CursorProvider>
+    </BenchContext.Provider>
+  );
+}
+
+const styles = StyleSheet.create({ desk: { flex: 1, minHeight: 0, outlineStyle: 'none' as unknown as undefined } });

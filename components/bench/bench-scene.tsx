@@ -1,0 +1,33 @@
+import { useState } from 'react';
+import type { Compared } from './compare/use-compared';
+import type { BenchActions } from './layouts/bench-actions';
+import { BenchLayout } from './layouts/bench-layout';
+import { useDesigns } from './live/use-designs';
+import { SettingsSheet } from './settings/settings-sheet';
+import type { BenchLink, ChangeLink } from './subject/use-bench-link';
+
+interface BenchSceneProps extends Omit<BenchActions, 'onSettings'> {
+  link: BenchLink;
+  onLink: ChangeLink;
+  compared: Compared;
+}
+
+/** What is seen of the bench: the layout for this window, and the sheet with all settings over it. */
+export function BenchScene({ link, onLink, compared, ...actions }: BenchSceneProps) {
+  const designs = useDesigns(compared, link.steps);
+  const [settings, setSettings] = useState(false);
+  return (
+    <>
+      <BenchLayout
+        {...actions}
+        link={link}
+        designs={designs}
+        onSettings={() => setSettings(true)}
+        onChart={(chart) => onLink({ chart })}
+        onCase={(id) => onLink({ case: id })}
+        onFollow={() => onLink({ revision: undefined, analysis: undefined })}
+      />
+      <SettingsSheet open={settings} onClose={() => setSettings(false)} link={link} onLink={onLink} compared={compared} />
+    </>
+  );
+}

@@ -1,0 +1,37 @@
+import { useCallback } from 'react';
+import { GainRule } from '@/components/charts';
+import { gainSpans } from '@/figures';
+import { type Gain, gainWords } from '../draft/gain';
+import type { StabilitySpan } from '../live/stability-span';
+import type { GainControl } from './use-gain';
+
+interface BenchGainRuleProps {
+  gain: Gain;
+  control: GainControl;
+  unstable: StabilitySpan | undefined;
+  wide?: boolean;
+}
+
+/** The rule of one gain: dragging it moves the draft, lifting the finger ends the step. */
+export function BenchGainRule({ gain, control, unstable, wide = false }: BenchGainRuleProps) {
+  const { hold, release } = control;
+  const change = useCallback(
+    (value: number, phase: 'move' | 'end') => {
+      hold(value);
+      if (phase === 'end') release();
+    },
+    [hold, release],
+  );
+  const { label, name } = gainWords[gain];
+  return (
+    <GainRule
+      name={`${label}, ${name}`}
+      unit={control.unit}
+      value={control.value}
+      kept={control.kept}
+      span={wide ? gainSpans.wide : gainSpans.phone}
+      unstable={unstable}
+      onChange={change}
+    />
+  );
+}

@@ -1,0 +1,64 @@
+import { StyleSheet, View } from 'react-native';
+import { Button } from '@/components/ui/button';
+import { Text } from '@/components/ui/text';
+import { useTheme } from '@/components/ui/theme';
+import { line } from '@/components/ui/tokens';
+import { gains } from '../draft/gain';
+import { GainCell } from '../gains/gain-cell';
+import { HistoryButtons } from '../keep/history-buttons';
+import { KeepControl } from '../keep/keep-control';
+import { SavedState } from '../keep/saved-state';
+import { useKeepButton } from '../keep/use-keep-button';
+import { useStabilitySpans } from '../live/use-stability-spans';
+import type { BenchActions } from './bench-actions';
+
+/** All gains along the foot, and at the end whether they are kept. Two by two where there is not room for four. */
+export function GainShelf({ paired = false, onActiveGain, onSettings, outcome, onKeep }: BenchActions & { paired?: boolean }) {
+  const { colors } = useTheme();
+  const spans = useStabilitySpans(gains);
+  const { remark } = useKeepButton();
+  const edge = { borderColor: colors.rule };
+  return (
+    <View
+      role="region"
+      aria-label="Gains"
+      style={[styles.shelf, paired && styles.stacked, { backgroundColor: colors.paper, borderTopColor: colors.ink }]}
+    >
+      <View style={[styles.gains, paired && styles.pairs]}>
+        {gains.map((gain) => (
+          <View key={gain} style={[styles.gain, paired && styles.half, edge]}>
+            <GainCell gain={gain} unstable={spans[gain]} onActive={() => onActiveGain(gain)} />
+          </View>
+        ))}
+      </View>
+      <View style={[paired ? styles.savedRow : styles.saved, { backgroundColor: colors.bar }]}>
+        <View style={styles.state}>
+          <SavedState />
+          {remark && (
+            <Text step="tick" tone="ink2" numberOfLines={3}>
+              {remark}
+            </Text>
+          )}
+        </View>
+        <View style={styles.actions}>
+          <HistoryButtons />
+          <Button kind="quiet" label="All settings" onPress={onSettings} />
+        </View>
+        <KeepControl outcome={outcome} onKeep={onKeep} />
+      </View>
+    </View>
+  );
+}
+
+const styles = StyleSheet.create({
+  shelf: { flexDirection: 'row', borderTopWidth: line.head },
+  stacked: { flexDirection: 'column' },
+  gains: { flex: 1, flexDirection: 'row', minWidth: 0 },
+  pairs: { flexWrap: 'wrap', flexGrow: 0, flexBasis: 'auto' },
+  gain: { flex: 1, minWidth: 0, borderRightWidth: line.hair },
+  half: { flexGrow: 0, flexShrink: 0, flexBasis: '50%', borderBottomWidth: line.hair },
+  saved: { width: 246, paddingVertical: 8, paddingHorizontal: 18, gap: 6, justifyContent: 'space-between' },
+  savedRow: { flexDirection: 'row', alignItems: 'center', gap: 16, paddingVertical: 8, paddingHorizontal: 18 },
+  state: { flexShrink: 1, flexGrow: 1 },
+  actions: { flexDirection: 'row', alignItems: 'center', gap: 6 },
+});

@@ -1,0 +1,29 @@
+import { Text } from '@/components/ui/text';
+import { useUnits } from '@/components/ui/units';
+import { useAnswer, useBench, useSettings } from '../bench-context';
+import { budgetWords, samplingWords } from './budget-words';
+
+/** One line about what delays cost at the crossover, and how the loop is sampled. */
+export function BudgetLine({ compact = false }: { compact?: boolean }) {
+  const units = useUnits();
+  const { opened } = useBench().subject;
+  const { statedContinuous } = useSettings();
+  const { input, output } = useAnswer();
+  const budget = input && output ? budgetWords(input.loop, output.analysis, units) : null;
+  const sampling = opened?.sampling;
+  const period = sampling !== null && typeof sampling === 'object' ? sampling.period : null;
+  const step = compact ? 'small' : 'note';
+  return (
+    <Text step={step} tone="ink2" style={{ flexShrink: 1 }}>
+      {budget && (
+        <>
+          <Text step={step} weight={600}>
+            {budget.lead}
+          </Text>{' '}
+          {budget.text}.{' '}
+        </>
+      )}
+      Loop: {samplingWords(statedContinuous, period)}.
+    </Text>
+  );
+}
