@@ -1,11 +1,11 @@
-import type { UseQueryResult } from '@tanstack/react-query';
+import type { FetchStatus } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
 import { hasStatus, NoSignal, sentence } from '@/hooks/api/problem';
 import { Trouble } from './trouble';
 import { Waiting } from './waiting';
 
 export interface QueryViewProps<Data> {
-  query: Pick<UseQueryResult<Data>, 'data' | 'error' | 'fetchStatus' | 'refetch'>;
+  query: { data: Data | undefined; error: Error | null; fetchStatus: FetchStatus; refetch: () => unknown };
   /** What is being waited for, as a line of text. */
   waiting: string;
   /** What to say where it does not exist. */

@@ -33,7 +33,7 @@ export function useCreatePlant(projectId: string) {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (plant: CreatePlant) => request<PlantRevision>('POST', `/projects/${projectId}/plants`, { body: plant }),
-    onSuccess: () => client.invalidateQueries({ queryKey: projectKey(projectId) }),
+    onSuccess: () => void client.invalidateQueries({ queryKey: projectKey(projectId) }),
   });
 }
 
@@ -42,6 +42,6 @@ export function useRevisePlant(projectId: string, plantId: string) {
   return useMutation({
     mutationFn: (plant: RevisePlant) =>
       request<PlantRevision>('POST', `/projects/${projectId}/plants/${plantId}/revisions`, { body: plant }),
-    onSuccess: () => client.invalidateQueries({ queryKey: projectKey(projectId) }),
+    onSuccess: () => void client.invalidateQueries({ queryKey: projectKey(projectId) }),
   });
 }

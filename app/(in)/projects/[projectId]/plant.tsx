@@ -1,1 +1,1 @@
-export { PlantScreen as default } from '@/components/plants/plant-screen';
+export { PlantScreen as default } from '@/components/navigation/loop-screens';

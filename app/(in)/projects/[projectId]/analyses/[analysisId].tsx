@@ -1,5 +1,5 @@
 import { useLocalSearchParams } from 'expo-router';
-import { AnalysisScreen } from '@/components/analyses/analysis-screen';
+import { AnalysisScreen } from '@/components/navigation/loop-screens';
 
 export default function AnalysisRoute() {
   const { analysisId } = useLocalSearchParams<{ analysisId: string }>();

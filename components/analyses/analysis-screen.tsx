@@ -1,0 +1,104 @@
+import { useRouter } from 'expo-router';
+import { type ReactNode, useState } from 'react';
+import { StyleSheet, View } from 'react-native';
+import { useProject } from '@/components/navigation/project-context';
+import { benchPath } from '@/components/navigation/routes';
+import { Banner } from '@/components/ui/banner';
+import { Button } from '@/components/ui/button';
+import { DocumentTitle } from '@/components/ui/document-title';
+import { FactTable } from '@/components/ui/fact-table';
+import { Menu } from '@/components/ui/menu';
+import { moment } from '@/components/ui/moment';
+import { Page } from '@/components/ui/page';
+import { Paper } from '@/components/ui/paper';
+import { QueryView } from '@/components/ui/query-view';
+import { Heading } from '@/components/ui/text';
+import { useUnits } from '@/components/ui/units';
+import { useLayout } from '@/components/ui/use-layout';
+import { VerdictStrip } from '@/components/verdict/verdict-strip';
+import type { KeptAnalysis } from '@/contract';
+import { CaseCurves } from './case-curves';
+import { FrozenInputs } from './frozen-inputs';
+import { marginFacts, responseFacts } from './loop-facts';
+import { Recompute } from './recompute';
+import { useCaseCurves } from './use-case-curves';
+
+/** One kept analysis by its address: its number, curves, numbers, what it was computed from, and the proof that it is still the same. */
+export function AnalysisScreen({ analysisId }: { analysisId: string }) {
+  const project = useProject();
+  const [chosen, choose] = useState<string>();
+  const { kept, curves, design, caseId } = useCaseCurves({ projectId: project.id, analysisId, caseId: chosen });
+  return (
+    <QueryView query={kept} waiting="Fetching the analysis" missing="No such analysis in this project.">
+      {(analysis) => (
+        <AnalysisPage analysis={analysis} caseId={caseId} onCase={choose}>
+          <QueryView query={{ ...curves, data: design }} waiting="Computing the curves">
+            {(a) => <CaseCurves design={a} />}
+          </QueryView>
+        </AnalysisPage>
+      )}
+    </QueryView>
+  );
+}
+
+interface AnalysisPageProps {
+  analysis: KeptAnalysis;
+  caseId: string | undefined;
+  onCase: (caseId: string) => void;
+  children: ReactNode;
+}
+
+function AnalysisPage({ analysis, caseId, onCase, children }: AnalysisPageProps) {
+  const project = useProject();
+  const router = useRouter();
+  const units = useUnits();
+  const phone = useLayout() === 'phone';
+  const result = analysis.results.find((one) => one.case.id === caseId) ?? analysis.results[0];
+  const { id, name, revision } = analysis.design;
+  const title = `${name}, rev ${revision}`;
+  const bench = <Button kind="primary" label="Open on bench" onPress={() => router.push(benchPath(project.id, id, revision))} />;
+  const cases = analysis.results.map((one) => ({
+    key: one.case.id,
+    label: one.case.name,
+    current: one === result,
+    onSelect: () => onCase(one.case.id),
+  }));
+  const column = phone ? styles.stackColumn : styles.column;
+  return (
+    <Page
+      title={title}
+      sub={`computed ${moment(analysis.createdAt, new Date(), true)} by ${analysis.createdBy}, engine ${analysis.engineVersion}`}
+      actions={bench}
+    >
+      <DocumentTitle parts={[title, 'Analyses', project.name]} />
+      <VerdictStrip headline={analysis.headline} caseCount={analysis.results.length} />
+      {phone ? <Paper>{bench}</Paper> : null}
+      {cases.length > 1 ? <Menu label={`Curves show ${result.case.name}`} kind="quiet" items={cases} /> : null}
+      {result.numbers.warnings.map(({ code, message }) => (
+        <Banner key={code} text={message} />
+      ))}
+      {children}
+      <View style={phone ? styles.stack : styles.side}>
+        <Paper style={column}>
+          <Heading level={2}>{`Margins, ${result.case.name}`}</Heading>
+          <FactTable label="Margins" facts={marginFacts(result.numbers, units)} />
+          <Heading level={2}>Responses to a step of 1</Heading>
+          <FactTable label="Responses" facts={responseFacts(result.numbers, units)} />
+        </Paper>
+        <Paper style={column}>
+          <FrozenInputs analysis={analysis} />
+        </Paper>
+        <Paper style={column}>
+          <Recompute projectId={project.id} analysis={analysis} />
+        </Paper>
+      </View>
+    </Page>
+  );
+}
+
+const styles = StyleSheet.create({
+  side: { flexDirection: 'row', flexWrap: 'wrap', gap: 14 },
+  stack: { gap: 8 },
+  column: { flexGrow: 1, flexBasis: 360, gap: 10 },
+  stackColumn: { gap: 10 },
+});

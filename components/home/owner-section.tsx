@@ -1,0 +1,54 @@
+import { useRouter } from 'expo-router';
+import { useState } from 'react';
+import { View } from 'react-native';
+import { useProject } from '@/components/navigation/project-context';
+import { Button } from '@/components/ui/button';
+import { Dialog, DialogActions } from '@/components/ui/dialog';
+import { Field } from '@/components/ui/field';
+import { Form } from '@/components/ui/form';
+import { Heading, Text } from '@/components/ui/text';
+import { sentence } from '@/hooks/api/problem';
+import { type ReadProject, useDeleteProject, useUpdateProject } from '@/hooks/queries/projects';
+
+/** What only the owner may do: put the project away, or end it. */
+export function OwnerSection() {
+  const project = useProject();
+  const update = useUpdateProject(project);
+  const [deleting, setDeleting] = useState(false);
+  return (
+    <View style={{ gap: 8 }}>
+      <Heading level={2}>Yours to end</Heading>
+      <View style={{ flexDirection: 'row', gap: 10, flexWrap: 'wrap' }}>
+        <Button
+          label={project.archived ? 'Take out of the archive' : 'Archive'}
+          busy={update.isPending}
+          onPress={() => update.mutate({ archived: !project.archived })}
+        />
+        <Button label="Delete" onPress={() => setDeleting(true)} />
+      </View>
+      {update.error ? <Text tone="fail">{sentence(update.error)}</Text> : null}
+      <Dialog open={deleting} title={`Delete ${project.name}?`} onClose={() => setDeleting(false)}>
+        <DeleteForm project={project} onClose={() => setDeleting(false)} />
+      </Dialog>
+    </View>
+  );
+}
+
+function DeleteForm({ project, onClose }: { project: ReadProject; onClose: () => void }) {
+  const router = useRouter();
+  const remove = useDeleteProject(project);
+  const [name, setName] = useState('');
+  const submit = () => {
+    if (name === project.name) remove.mutate(name, { onSuccess: () => router.replace('/') });
+  };
+  return (
+    <Form onSubmit={submit} problem={remove.error && sentence(remove.error)}>
+      <Text tone="ink2">Its plants, designs and analyses go with it, for everyone. This cannot be taken back.</Text>
+      <Field label={`Repeat the name: ${project.name}`} value={name} onChangeText={setName} onSubmitEditing={submit} />
+      <DialogActions>
+        <Button label="Not yet" onPress={onClose} />
+        <Button kind="primary" label="Delete it" disabled={name !== project.name} busy={remove.isPending} onPress={submit} />
+      </DialogActions>
+    </Form>
+  );
+}
