@@ -25,7 +25,7 @@ export interface FrequencyAxis {
   readonly minor: readonly FrequencyTick[];
 }
 
-const LABEL_GAP = 14;
+const LABEL_GAP = 10;
 /** Which integers of a decade are named, from most to fewest, and every how many decades. */
 const DENSITIES: readonly { digits: readonly number[]; decades: number }[] = [
   { digits: [1, 2, 5], decades: 1 },

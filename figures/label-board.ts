@@ -1,5 +1,6 @@
 import type { Rect } from './geometry';
 import type { LabelTone, PanelLabel } from './panel';
+import { type Polyline, thinned } from './polyline';
 import { type LabelPlace, type Paper, type PlacedLabel, placeLabel } from './place-label';
 
 export interface LabelBoard {
@@ -11,7 +12,9 @@ export interface LabelBoard {
 }
 
 /** One picture's labels, placed one after the other so that none covers another. */
-export function createLabelBoard(paper: Omit<Paper, 'taken'>): LabelBoard {
+export function createLabelBoard({ bounds, curves, faint = [], shaded }: Omit<Paper, 'taken'>): LabelBoard {
+  const thin = (line: Polyline) => thinned(line, bounds);
+  const paper = { bounds, curves: curves.map(thin), faint: faint.map(thin), shaded };
   const labels: PanelLabel[] = [];
   const taken: Rect[] = [];
   return {

@@ -26,12 +26,15 @@ export function magnitudeAxis(decibels: Iterable<number>, range: Interval, unit:
   return { ...axis, ticks: axis.ticks.map(({ value }) => ({ value, text: shortNumber(fromDecibels(value), 1) })) };
 }
 
-/** The axis of arg L in degrees, −180° or another odd half turn always inside; a span of more than a turn and a half keeps its upper part. */
-export function phaseAxis(degrees: Iterable<number>, range: Interval): Axis {
+/**
+ * The axis of arg L in degrees. An odd half turn (−180° or a copy) is always inside, with `beside` degrees on both sides of it;
+ * of a span of more than a turn and a half the upper part is kept.
+ */
+export function phaseAxis(degrees: Iterable<number>, range: Interval, beside = 45): Axis {
   const [low, high] = finiteExtent(degrees) ?? [-270, -90];
   const reference = nearestOddHalfTurn((Math.max(low, high - LARGEST_PHASE_SPAN) + high) / 2);
-  const top = Math.max(high, reference + 45);
-  const bottom = Math.max(Math.min(low, reference - 45), top - LARGEST_PHASE_SPAN);
+  const top = Math.max(high, reference + beside);
+  const bottom = Math.max(Math.min(low, reference - beside), top - LARGEST_PHASE_SPAN);
   const step = stepFor(DEGREE_STEPS, top - bottom, Math.abs(range[1] - range[0]));
   return axisWithStep([Math.floor(bottom / ROUND_DEGREES) * ROUND_DEGREES, Math.ceil(top / ROUND_DEGREES) * ROUND_DEGREES], step, range);
 }

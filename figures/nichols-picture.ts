@@ -122,7 +122,7 @@ export function nicholsPicture(scene: LoopScene, window: NicholsWindow, plot: Re
   for (const degrees of summits) board.reserve(boxAround(toX(degrees), toY(0), 8));
   const ground = { toPixel, plot, board };
   const worst = worstMark(scene, summitNear, ground);
-  const posts = postMarks(scene, response.frequencies, ground);
+  const posts = postMarks(scene, lineA, ground);
   const mainTurn = turns[turns.length - 1];
   if (mainTurn !== undefined) nameContours(mainTurn, toPlane, board);
   return {

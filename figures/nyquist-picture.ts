@@ -108,7 +108,7 @@ export function nyquistPicture(scene: LoopScene, window: NyquistWindow, plot: Re
   ]);
   const ground = { toPixel, plot, board };
   const worst = worstMark(scene, () => summit, ground);
-  const posts = postMarks(scene, response.frequencies, ground);
+  const posts = postMarks(scene, lineA, ground);
   nameContours(view, board);
   return {
     plot,

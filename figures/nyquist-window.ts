@@ -18,14 +18,18 @@ export interface NyquistView extends NyquistWindow {
 /** −1, its contours, the origin and the way L takes between them. */
 const NEAR: NyquistWindow = { real: [-2.3, 0.6], imaginary: [-1.2, 0.7] };
 /** Where L turns round −1 further out, the picture grows to one of these. */
-const LEFT_STOPS = [2.3, 3, 4, 6, 9, 13];
+const LEFT_STOPS = [2.3, 3, 4, 6];
 const RIGHT_STOPS = [0.6, 1.1];
+/** How far beyond the last crossing the picture reaches. */
+const BEYOND = 1.15;
 
 const stopFor = (stops: readonly number[], needed: number): number => stops.find((stop) => stop >= needed) ?? stops[stops.length - 1];
 
 /** How far left of 0 the curve crosses the real axis, of the crossings that a picture can hold. */
 function furthestCrossing({ margins }: Pick<Analysis, 'margins'>): number {
-  const sizes = margins.phaseCrossovers.map((c) => 1 / c.gainMarginFactor).filter((size) => size <= LEFT_STOPS[LEFT_STOPS.length - 1]);
+  const sizes = margins.phaseCrossovers
+    .map((c) => 1 / c.gainMarginFactor)
+    .filter((size) => size * BEYOND <= LEFT_STOPS[LEFT_STOPS.length - 1]);
   return Math.max(0, ...sizes);
 }
 
@@ -43,7 +47,7 @@ function reach({ loop }: FrequencyResponse, left: number): { right: number; up: 
 
 /** What of the plane is worth drawing for some loops: the surroundings of −1, and where needed the turn that L takes round it. */
 export function nyquistWindow(loops: readonly Pick<Analysis, 'margins' | 'frequencyResponse'>[]): NyquistWindow {
-  const left = stopFor(LEFT_STOPS, Math.max(...loops.map(furthestCrossing)) * 1.15);
+  const left = stopFor(LEFT_STOPS, Math.max(...loops.map(furthestCrossing)) * BEYOND);
   const reaches = loops.flatMap(({ frequencyResponse }) => (frequencyResponse === undefined ? [] : [reach(frequencyResponse, left)]));
   const furthest = (side: 'right' | 'up' | 'down') => Math.max(0, ...reaches.map((r) => r[side]));
   const right = stopFor(RIGHT_STOPS, furthest('right'));

@@ -17,6 +17,10 @@ const degrees: Ordinate = ({ loop }) => loop.phaseDegrees;
 const TELLING_MAGNITUDE = 0.2;
 const telling: Ordinate = ({ loop }) => loop.phaseDegrees.map((phase, i) => (loop.magnitude[i] >= TELLING_MAGNITUDE ? phase : NaN));
 
+/** Degrees drawn beside −180° at least, and beyond what is demanded. */
+const LEAST_BESIDE = 35;
+const ROOM_FOR_KERB = 10;
+
 interface Frame {
   across: FrequencyAxis;
   up: Axis;
@@ -67,7 +71,7 @@ function phaseCrossoverMark(scene: LoopScene, { across, up, plot, board }: Frame
 /** arg L over frequency: every odd half turn is a reference line, the phase margin a bar from it at the crossover. */
 export function phasePanel(scene: LoopScene, across: FrequencyAxis, plot: Rect): PanelPicture {
   const values = [scene.a, scene.b].flatMap((design) => (design === undefined ? [] : ordinatesWithin(responseOf(design), across, telling)));
-  const up = phaseAxis(values, [plot.y + plot.height, plot.y]);
+  const up = phaseAxis(values, [plot.y + plot.height, plot.y], (scene.limits?.phaseMargin ?? LEAST_BESIDE) + ROOM_FOR_KERB);
   const { a, b, paths } = frequencyCurves(scene, degrees, { across, up, plot });
   const board = createLabelBoard({ bounds: plot, curves: b === null ? [a] : [a, b] });
   const frame = { across, up, plot, board };

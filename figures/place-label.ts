@@ -1,5 +1,5 @@
 import type { Point, Rect } from './geometry';
-import { clipSegment, pointAt, type Polyline } from './polyline';
+import type { Polyline } from './polyline';
 import { textWidth } from './text-width';
 
 export type Anchor = 'start' | 'middle' | 'end';
@@ -16,7 +16,7 @@ export interface PlacedLabel extends LabelPlace {
 export interface Paper {
   /** The picture: labels stay inside. */
   readonly bounds: Rect;
-  /** Curves that a label never covers. */
+  /** Curves that a label never covers, thinned. */
   readonly curves: readonly Polyline[];
   /** Labels, marks and kerbs that stand already. */
   readonly taken: readonly Rect[];
@@ -40,10 +40,12 @@ const overlaps = (a: Rect, b: Rect): boolean => a.x < b.x + b.width && b.x < a.x
 const isInside = (box: Rect, bounds: Rect): boolean =>
   box.x >= bounds.x && box.y >= bounds.y && box.x + box.width <= bounds.x + bounds.width && box.y + box.height <= bounds.y + bounds.height;
 
-function crosses(line: Polyline, box: Rect): boolean {
-  for (let i = 1; i < line.x.length; i++) {
-    if (Math.max(line.x[i - 1], line.x[i]) < box.x || Math.min(line.x[i - 1], line.x[i]) > box.x + box.width) continue;
-    if (clipSegment(pointAt(line, i - 1), pointAt(line, i), box) !== null) return true;
+/** Curves are handed in thinned to short segments, so that the box of a segment stands for it. */
+function crosses({ x, y }: Polyline, box: Rect): boolean {
+  const [right, bottom] = [box.x + box.width, box.y + box.height];
+  for (let i = 1; i < x.length; i++) {
+    if (Math.max(x[i - 1], x[i]) < box.x || Math.min(x[i - 1], x[i]) > right) continue;
+    if (Math.max(y[i - 1], y[i]) >= box.y && Math.min(y[i - 1], y[i]) <= bottom) return true;
   }
   return false;
 }
@@ -59,17 +61,17 @@ function costOf(box: Rect, paper: Paper): number {
 
 /** The candidate in the freest paper: inside, on no curve, on nothing that stands already, on grounds and thin curves last. Earlier ones are preferred. */
 export function placeLabel(lines: readonly string[], candidates: readonly LabelPlace[], paper: Paper, size = 13): PlacedLabel {
-  let best: PlacedLabel | null = null;
-  let least = Infinity;
-  candidates.forEach((candidate, i) => {
-    const box = labelBox(candidate, lines, size);
+  if (candidates.length === 0) throw new Error('A label needs at least one place.');
+  let best: PlacedLabel = { ...candidates[0], box: labelBox(candidates[0], lines, size) };
+  let least = costOf(best.box, paper);
+  for (let i = 1; i < candidates.length && least > i * COST.later; i++) {
+    const box = labelBox(candidates[i], lines, size);
     const cost = costOf(box, paper) + i * COST.later;
     if (cost < least) {
       least = cost;
-      best = { ...candidate, box };
+      best = { ...candidates[i], box };
     }
-  });
-  if (best === null) throw new Error('A label needs at least one place.');
+  }
   return best;
 }
 

@@ -1,10 +1,12 @@
+import { bisectRight } from 'd3-array';
 import { type CurveMark, legiblePosts, type Post, postPath } from './curve-marks';
 import { formatFactor, formatFrequency, shortNumber, withUnit } from './format';
 import { contains, type Point, type Rect } from './geometry';
 import { boxAround, type LabelBoard } from './label-board';
-import type { ChartDesign, LoopPoint, LoopScene } from './loop-picture';
+import { type LoopPoint, type LoopScene, responseOf } from './loop-picture';
 import type { WorstMark } from './plane-picture';
 import { type LabelPlace, type PlacedLabel, placesAround } from './place-label';
+import { pointAt, type Polyline } from './polyline';
 import { frequencyFrom, frequencyIn, type FrequencyUnit } from './units';
 
 type ToPixel = (point: LoopPoint) => Point;
@@ -31,12 +33,13 @@ function postFrequencies(frequencies: readonly number[], unit: FrequencyUnit): {
     .map((value) => ({ frequency: frequencyFrom(unit, value), text: shortNumber(value, 1) }));
 }
 
-const STEP = 1.005;
-
-function postAt(design: ChartDesign, frequency: number, toPixel: ToPixel): CurveMark {
-  const point = toPixel(design.at(frequency));
-  const next = toPixel(design.at(frequency * STEP));
-  return { point, angle: (Math.atan2(next.y - point.y, next.x - point.x) * 180) / Math.PI };
+/** A place on a curve by its frequency, interpolated: good to a fraction of a pixel on the engine's grid. */
+function postAt(frequencies: readonly number[], line: Polyline, frequency: number): CurveMark {
+  const i = Math.min(Math.max(bisectRight(frequencies, frequency), 1), frequencies.length - 1);
+  const t = Math.log(frequency / frequencies[i - 1]) / Math.log(frequencies[i] / frequencies[i - 1]);
+  const [from, to] = [pointAt(line, i - 1), pointAt(line, i)];
+  const point = { x: from.x + (to.x - from.x) * t, y: from.y + (to.y - from.y) * t };
+  return { point, angle: (Math.atan2(to.y - from.y, to.x - from.x) * 180) / Math.PI };
 }
 
 function placesAcross({ point, angle }: CurveMark): LabelPlace[] {
@@ -49,9 +52,10 @@ function placesAcross({ point, angle }: CurveMark): LabelPlace[] {
 }
 
 /** Posts at round frequencies along A, their names put on the board; SVG path data of the bars. */
-export function postMarks(scene: LoopScene, frequencies: readonly number[], { toPixel, plot, board }: MarkGround): string {
-  const all: Post[] = postFrequencies(frequencies, scene.units.frequency).map(({ frequency, text }) => ({
-    ...postAt(scene.a, frequency, toPixel),
+export function postMarks({ a, units }: LoopScene, line: Polyline, { plot, board }: MarkGround): string {
+  const { frequencies } = responseOf(a);
+  const all: Post[] = postFrequencies(frequencies, units.frequency).map(({ frequency, text }) => ({
+    ...postAt(frequencies, line, frequency),
     text,
   }));
   const posts = legiblePosts(all, plot);

@@ -82,3 +82,34 @@ export function polylinePath(line: Polyline, bounds: Rect): string {
   }
   return path;
 }
+
+/** Points of a thinned curve are this far apart, and outside the picture there are none. */
+const THIN_STEP = 4;
+
+/** What of a curve is inside `bounds`, in segments just long enough to tell what it covers. NaN parts the pieces. */
+export function thinned(line: Polyline, bounds: Rect): Polyline {
+  const rect = grow(bounds, CUT);
+  const [x, y]: [number[], number[]] = [[], []];
+  for (let i = 1; i < line.x.length; i++) {
+    const [from, to] = [pointAt(line, i - 1), pointAt(line, i)];
+    const part = isFinitePoint(from) && isFinitePoint(to) ? clipSegment(from, to, rect) : null;
+    if (part === null) {
+      if (x.length > 0 && !Number.isNaN(x[x.length - 1])) pushPoint(x, y, { x: NaN, y: NaN });
+      continue;
+    }
+    if (x.length === 0 || Number.isNaN(x[x.length - 1])) pushPoint(x, y, along(from, to, part[0]));
+    const last = part[1] < 1 || i === line.x.length - 1;
+    const end = along(from, to, part[1]);
+    const length = Math.hypot(end.x - x[x.length - 1], end.y - y[y.length - 1]);
+    if (length < THIN_STEP && !last) continue;
+    const pieces = Math.ceil(length / (2 * THIN_STEP));
+    const start = { x: x[x.length - 1], y: y[y.length - 1] };
+    for (let k = 1; k <= pieces; k++) pushPoint(x, y, along(start, end, k / pieces));
+  }
+  return { x: Float64Array.from(x), y: Float64Array.from(y) };
+}
+
+function pushPoint(x: number[], y: number[], point: Point): void {
+  x.push(point.x);
+  y.push(point.y);
+}

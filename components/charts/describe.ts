@@ -41,7 +41,8 @@ export function describePlane(scene: LoopScene, name: string): string {
   const unit = scene.units.frequency;
   const where = ms.frequency === null ? '' : ` at ${withUnit(formatFrequency(ms.frequency, unit), unit)}`;
   const distance = formatFactor(scene.a.analysis.margins.modulus);
-  return `${name} curve with contours of |S|. ${stability(scene)} ${encirclementText(scene).text}. Nearest to \u22121: distance ${distance}, Ms ${formatFactor(ms.value)}${where}.${andB(scene)}`;
+  const count = encirclementText(scene).text;
+  return `${name} curve with contours of |S|. ${stability(scene)} ${count}. Nearest to \u22121: distance ${distance}, Ms ${formatFactor(ms.value)}${where}.${andB(scene)}`;
 }
 
 /** The sentence that stands for a time sheet. */

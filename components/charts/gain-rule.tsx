@@ -54,8 +54,8 @@ export const GainRule = memo(function GainRule(props: GainRuleProps) {
   const { width, onLayout } = useChartFrame(props.width);
   const { style, ...focus } = useFocusRing();
   const resting = scaleFor(props, width);
-  const { moving, frozen, handlers } = useGainDrag(resting, onChange);
-  const { mode, linearSpan } = frozen ?? resting;
+  const { dragged, handlers } = useGainDrag(resting, onChange);
+  const { mode, linearSpan } = dragged ?? resting;
   const { span } = props;
   const scale = useMemo(() => ({ value, width, span, mode, linearSpan }), [value, width, span, mode, linearSpan]);
   const shape = useMemo(
@@ -88,7 +88,7 @@ export const GainRule = memo(function GainRule(props: GainRuleProps) {
     >
       {shape === null ? null : (
         <Svg width={width} height={ruleRows.height} aria-hidden>
-          <GainRuleView shape={shape} width={width} moving={moving} />
+          <GainRuleView shape={shape} width={width} moving={dragged !== null} />
         </Svg>
       )}
     </View>
