@@ -59,7 +59,8 @@ export function hasSettled(bandFor: (peak: number) => Band): Enough {
 
 /** Enough of an unstable response: ten times the unit step, or many swings at a size that hardly grows. */
 export function hasGrown(output: Curve, horizon: number): boolean {
-  return output.size >= GROWN || horizon >= SWINGS * firstTurn(output);
+  const grown = output.values.findIndex((value) => Math.abs(value) >= GROWN);
+  return (grown >= 0 && nodeTime(output, grown) < horizon) || horizon >= SWINGS * firstTurn(output);
 }
 
 /** The first node after which the curve turns back; Infinity where it never does. */

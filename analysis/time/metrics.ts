@@ -22,6 +22,9 @@ type LoadMetrics = Pick<TimeMetrics, 'loadPeak' | 'loadPeakTime' | 'loadSettling
 const RISE_FROM = 0.1;
 const RISE_TO = 0.9;
 
+/** An excursion below this share of the final value is the error of the polynomials. */
+const NO_EXCURSION = 1e-8;
+
 /** Metrics of the response to a reference step of this size, as numerics.md defines them; times are refined between samples. */
 export function referenceMetrics({ output, control, knots, horizon, axisEnd, finalValue }: StepResponse, size: number): ReferenceMetrics {
   const commands = monotoneKnots(control, horizon);
@@ -69,13 +72,15 @@ function swings(knots: Knots, final: number): Pick<TimeMetrics, 'overshootPercen
   const direction = Math.sign(final);
   const peak = extreme(knots, direction);
   const low = extreme(knots, -direction);
-  const overshoot = Math.max(0, peak.value / final - 1);
+  const overshoot = excursion(peak.value / final - 1);
   return {
     overshootPercent: 100 * overshoot,
-    undershootPercent: 100 * Math.max(0, -low.value / final),
+    undershootPercent: 100 * excursion(-low.value / final),
     peakTime: overshoot > 0 ? peak.time : null,
   };
 }
+
+const excursion = (share: number): number => (share > NO_EXCURSION ? share : 0);
 
 /** Σ|Δu| from the rest before the step. */
 function totalVariation({ values }: Knots): number {

@@ -6,8 +6,8 @@ export interface Stage {
   readonly count: number;
 }
 
-/** The widest angle |λ|·width that a panel's polynomial follows to about 1e-9. */
-const PANEL_ANGLE = 1.5;
+/** The widest angle |λ|·width that a panel's polynomial follows to 2e-10: (angle/4)⁹·2/9! bounds the interpolation error. */
+const PANEL_ANGLE = 1.25;
 
 /** A mode has died when it fell by e^−36, double precision. */
 const DEAD_EXPONENT = 36;

@@ -1,12 +1,11 @@
 import type { Curve } from './curve';
 import { zeroBetween, type Knots } from './knots';
 
-/** The first time at which the curve reaches `level` from where it starts, or null. */
+/** The first time at which the curve, at rest at 0 before the step, reaches `level`; null if it never does. */
 export function firstPassage(curve: Curve, { times, values }: Knots, level: number): number | null {
+  if (level * (values[0] - level) >= 0) return 0;
   for (let i = 1; i < times.length; i += 1) {
-    const [before, after] = [values[i - 1] - level, values[i] - level];
-    if (before === 0) return times[i - 1];
-    if (before * after <= 0) return crossing(curve, [times[i - 1], times[i]], level);
+    if ((values[i - 1] - level) * (values[i] - level) <= 0) return crossing(curve, [times[i - 1], times[i]], level);
   }
   return null;
 }

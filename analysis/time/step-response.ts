@@ -1,12 +1,13 @@
 import type { Complex } from '@/analysis/numbers/complex';
 import type { LoopModel } from '@/analysis/loop/model';
+import type { Curve } from './curve';
 import type { FinalValues } from './final-values';
 import { GROWN, hasGrown, hasSettled, isTooFine, simulateTo, simulateUntil, type Failure } from './horizon';
 import { monotoneKnots, type Knots } from './knots';
 import type { LoopSystem } from './loop-system';
 import type { StepResponse } from './metrics';
 import { planPanels } from './panel-plan';
-import { lastOutside } from './passages';
+import { firstPassage, lastOutside } from './passages';
 import { loadBand, referenceBand } from './settling';
 import { Simulation } from './simulation';
 import { Tracks } from './track';
@@ -96,11 +97,12 @@ function watch({ stable, duration }: StepQuestion, { simulation, firstHorizon, f
   const failure = simulateTo(simulation, horizon);
   if (failure) return failure;
   const knots = monotoneKnots(output, horizon);
-  const settled = stable ? AXIS_PER_SETTLING * (lastOutside(output, knots, bandFor(output.size)) ?? 0) : grownAt(knots);
+  const settled = stable ? AXIS_PER_SETTLING * (lastOutside(output, knots, bandFor(output.size)) ?? 0) : grownAt(output, knots);
   return { output, control, knots, horizon, axisEnd: duration ?? (settled || horizon), finalValue };
 }
 
-/** When the response first reached ten times the unit step; 0 if it never did. */
-function grownAt({ times, values }: Knots): number {
-  return times[values.findIndex((value) => Math.abs(value) >= GROWN)] ?? 0;
+/** When the output first reached ten times the unit step; 0 if it never did. */
+function grownAt(output: Curve, knots: Knots): number {
+  const passages = [GROWN, -GROWN].map((level) => firstPassage(output, knots, level) ?? Infinity);
+  return Number.isFinite(Math.min(...passages)) ? Math.min(...passages) : 0;
 }

@@ -1,9 +1,11 @@
-import { Loop, type LoopInput } from '@/contract';
+import { Loop, type LoopInput, type Responses, type TimeResponse } from '@/contract';
 import { buildLoop } from '@/analysis/loop/build-loop';
 import type { LoopModel, Rational } from '@/analysis/loop/model';
 import type { Complex } from '@/analysis/numbers/complex';
 import { polynomialRoots } from '@/analysis/numbers/polynomial-roots';
-import type { KnownStability } from '@/analysis/time';
+import { timeResponse, type KnownStability } from '@/analysis/time';
+import type { StepResponses } from '@/analysis/time/step-response';
+import { respond } from '@/analysis/time/time-response';
 
 /** A contract Loop as the engine's model, defaults filled in. */
 export const modelOf = (loop: LoopInput): LoopModel => buildLoop(Loop.parse(loop));
@@ -33,3 +35,21 @@ function expand(roots: readonly Complex[]): number[] {
   }
   return polynomial;
 }
+
+/** The time response of a loop that has one. */
+export function answer(loop: LoopInput, responses: Partial<Responses> = {}): TimeResponse {
+  const model = modelOf(loop);
+  const { timeResponse: found, warnings } = timeResponse(model, { ...unitSteps, ...responses }, stabilityOf(model));
+  if (!found) throw new Error(warnings[0].message);
+  return found;
+}
+
+/** The same as curves that can be evaluated at any time. */
+export function curvesOf(loop: LoopInput): StepResponses {
+  const model = modelOf(loop);
+  const steps = respond(model, null, stabilityOf(model));
+  if ('code' in steps) throw new Error(steps.message);
+  return steps;
+}
+
+export const unitSteps: Responses = { duration: null, referenceStep: 1, loadStep: 1 };
