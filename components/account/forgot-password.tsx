@@ -2,7 +2,7 @@ import { useForm } from 'react-hook-form';
 import { Banner } from '@/components/ui/banner';
 import { Button } from '@/components/ui/button';
 import { Form } from '@/components/ui/form';
-import { contractResolver } from '@/components/ui/contract-resolver';
+import { contractResolver } from '@/components/forms/contract-resolver';
 import { FormField } from '@/components/ui/form-field';
 import { Link } from '@/components/ui/link';
 import { sentence } from '@/hooks/api/problem';

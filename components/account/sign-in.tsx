@@ -4,7 +4,7 @@ import { View } from 'react-native';
 import { safeNext } from '@/components/navigation/routes';
 import { Button } from '@/components/ui/button';
 import { Form } from '@/components/ui/form';
-import { contractResolver } from '@/components/ui/contract-resolver';
+import { contractResolver } from '@/components/forms/contract-resolver';
 import { FormField } from '@/components/ui/form-field';
 import { Link } from '@/components/ui/link';
 import { Text } from '@/components/ui/text';

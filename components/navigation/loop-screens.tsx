@@ -1,16 +1,11 @@
 import { type ComponentType, lazy, Suspense } from 'react';
 import { Waiting } from '@/components/ui/waiting';
 
-type LoopScreens = typeof import('@/components/loop-screens');
+type OnDemand = typeof import('@/components/on-demand');
 
-/**
- * The engine, the figures and the charts come in one piece, with the first page that draws a loop. One piece, because what several pieces
- * share would be moved into the first load.
- */
-const load = () => import('@/components/loop-screens');
-
-function onDemand<Props extends object>(choose: (screens: LoopScreens) => ComponentType<Props>) {
-  const Screen = lazy(async () => ({ default: choose(await load()) as ComponentType<object> }));
+/** A screen that draws a loop: it comes with the engine, the figures and the charts when the first of them is opened. */
+function onDemand<Props extends object>(choose: (screens: OnDemand) => ComponentType<Props>) {
+  const Screen = lazy(async () => ({ default: choose(await import('@/components/on-demand')) as ComponentType<object> }));
   return function OnDemand(props: Props) {
     return (
       <Suspense fallback={<Waiting text="Fetching the charts" />}>

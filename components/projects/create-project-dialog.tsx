@@ -2,7 +2,7 @@ import { useRouter } from 'expo-router';
 import { useForm } from 'react-hook-form';
 import { projectPath } from '@/components/navigation/routes';
 import { Button } from '@/components/ui/button';
-import { contractResolver } from '@/components/ui/contract-resolver';
+import { contractResolver } from '@/components/forms/contract-resolver';
 import { Dialog, DialogActions } from '@/components/ui/dialog';
 import { Form } from '@/components/ui/form';
 import { FormField } from '@/components/ui/form-field';
