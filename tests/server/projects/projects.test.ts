@@ -1,7 +1,7 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { Me, Project } from '@/contract';
 import { makeProject, made } from '../../support/a-project';
-import type { Client } from '../../support/client';
+import type { Client, Reply } from '../../support/client';
 import { startTestApp, type TestApp } from '../../support/test-app';
 
 let app: TestApp;
@@ -50,10 +50,10 @@ describe('projects', () => {
     const names: string[] = [];
     let cursor: string | null = '';
     while (cursor !== null) {
-      const { body } = await cleo.call<List>('GET', `/api/projects?limit=2${cursor && `&cursor=${cursor}`}`);
-      expect(body.items.length).toBeLessThanOrEqual(2);
-      names.push(...body.items.map(({ name }) => name));
-      cursor = body.nextCursor;
+      const reply: Reply<List> = await cleo.call<List>('GET', `/api/projects?limit=2${cursor && `&cursor=${cursor}`}`);
+      expect(reply.body.items.length).toBeLessThanOrEqual(2);
+      names.push(...reply.body.items.map(({ name }) => name));
+      cursor = reply.body.nextCursor;
     }
     expect(names).toEqual(['Loop 4', 'Loop 3', 'Loop 2', 'Loop 1', 'Loop 0']);
   });
