@@ -7,7 +7,7 @@ import type { EndOfAxis, LoopFunction } from './loop-function';
 import * as S from './sample';
 
 /** More evaluations than any loop needs that a person would draw; past it the loop is refused rather than waited for. */
-const BUDGET = 400_000;
+const BUDGET = 250_000;
 
 /** A continuous LoopModel on the axis s = jω, dead time exact. */
 export class ContinuousLoop implements LoopFunction {
@@ -85,8 +85,8 @@ const forwardController = ({ gains, weights, feedforwardGain, controller }: Loop
 
 const tooMuch = () =>
   new LoopError({
-    pointer: '/plant/deadTime',
-    detail: 'This loop turns through too many crossovers to analyse: its dead time is very long beside its fastest pole.',
+    pointer: '/plant',
+    detail: 'This loop has too many crossovers and peaks to analyse.',
     code: 'tooMuchToCompute',
   });
 

@@ -26,6 +26,8 @@ const LIVE: Fineness = {
   cap: 600,
 };
 
+/** A point of the grid may fall on −1 itself; JSON has no infinity. */
+const LEAST_DISTANCE = 1e-15;
 /** Decades drawn beyond what is worth seeing. */
 const BEYOND = 100;
 /** The turns of the dead time that are drawn, radians, unless a crossover lies further out. */
@@ -55,7 +57,7 @@ export const frequencyResponse = ({ table, count }: Grid): FrequencyResponse => 
     magnitude: column((row) => Math.exp(table[row + log])),
     phaseDegrees: column((row) => table[row + phase] * DEGREES),
   });
-  const distance = (row: number) => Math.hypot(1 + table[row + S.RE], table[row + S.IM]);
+  const distance = (row: number) => Math.max(LEAST_DISTANCE, Math.hypot(1 + table[row + S.RE], table[row + S.IM]));
   return {
     frequencies: column((row) => table[row + S.OMEGA]),
     loop: { ...curve(S.LOG, S.PHASE), real: column((row) => table[row + S.RE]), imaginary: column((row) => table[row + S.IM]) },

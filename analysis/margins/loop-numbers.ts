@@ -14,7 +14,7 @@ export interface LoopNumbers extends Pick<Analysis, 'margins' | 'sensitivity' | 
   readonly crossovers: readonly GainCrossover[];
 }
 
-/** A peak beyond this is a pole on the axis as far as double precision can tell; JSON has no infinity. */
+/** A peak beyond this is a pole on the axis as far as double precision can tell; JSON has no infinity, and no decibels of 0. */
 const HIGHEST_PEAK = 1e15;
 
 /** Margins, peaks and bandwidths of a loop. @throws LoopError where the loop turns through too many crossovers */
@@ -59,5 +59,5 @@ export const loopNumbers = (loop: LoopFunction, detail: Detail): LoopNumbers => 
 
 const reported = ({ value, frequency }: Supremum) => {
   const finite = Math.min(value, HIGHEST_PEAK);
-  return { value: finite, decibels: decibels(finite), frequency };
+  return { value: finite, decibels: decibels(Math.max(finite, 1 / HIGHEST_PEAK)), frequency };
 };

@@ -1,3 +1,4 @@
+import { LoopError } from '@/analysis/loop/loop-error';
 import { ladder, refinedGrid, type Fineness, type Grid } from './grid';
 import type { LoopFunction } from './loop-function';
 
@@ -5,20 +6,29 @@ import type { LoopFunction } from './loop-function';
 const BEYOND = 1e4;
 /** And beyond the crossing that the asymptote promises. */
 const BEYOND_CROSSING = 100;
+/** A neutral loop goes round for ever; it is followed past its last landmark and for the crossovers that are listed. */
+const NEUTRAL_BEYOND = 10;
+const NEUTRAL_TURNS = 205;
 /** How near to an undamped pole or zero the search goes, relatively. */
 const BESIDE_AXIS_POINT = [1e-2, 1e-4, 1e-6, 1e-8, 1e-10, 1e-12];
 /** Below this gain a dead time's crossovers are not listed, numerics.md "Margins". */
 export const LEAST_LISTED_GAIN = 1e-3;
 
+/** Rows beyond which a loop is refused rather than waited for: about 3,000 turns of dead time. */
+const CAP = 40_000;
+
 export type Detail = 'full' | 'live';
 
 /** Coarser than a drawn grid: slopes are known at every row, so that nothing between two rows is overlooked. */
 const FINENESS: Record<Detail, Fineness> = {
-  full: { logStep: 0.23, phaseStep: 0.26, turnStep: 0.52, turnFloor: Math.log(LEAST_LISTED_GAIN), pointsPerDecade: 6, cap: 150_000 },
-  live: { logStep: 0.6, phaseStep: 0.6, turnStep: 0.8, turnFloor: Math.log(LEAST_LISTED_GAIN), pointsPerDecade: 4, cap: 150_000 },
+  full: { logStep: 0.23, phaseStep: 0.26, turnStep: 0.52, turnFloor: Math.log(LEAST_LISTED_GAIN), pointsPerDecade: 6, cap: CAP },
+  live: { logStep: 0.6, phaseStep: 0.6, turnStep: 0.8, turnFloor: Math.log(LEAST_LISTED_GAIN), pointsPerDecade: 4, cap: CAP },
 };
 
-/** The whole axis, sampled finely enough that every crossing and peak lies between two rows that give it away. */
+/**
+ * The whole axis, sampled finely enough that every crossing and peak lies between two rows that give it away.
+ * @throws LoopError where the dead time turns the loop through more crossovers than can be worked through
+ */
 export const searchGrid = (loop: LoopFunction, detail: Detail): Grid => {
   const { low, high } = searchRange(loop);
   const fineness = FINENESS[detail];
@@ -26,7 +36,9 @@ export const searchGrid = (loop: LoopFunction, detail: Detail): Grid => {
   const axis = new Set(loop.axisFrequencies);
   const landmarks = [...loop.landmarks.filter((omega) => !axis.has(omega)), ...beside];
   const frequencies = ladder(low, high, { pointsPerDecade: fineness.pointsPerDecade, landmarks });
-  return refinedGrid(loop, frequencies, fineness);
+  const grid = refinedGrid(loop, frequencies, fineness);
+  if (grid.capped) throw tooManyTurns();
+  return grid;
 };
 
 const searchRange = (loop: LoopFunction): { low: number; high: number } => {
@@ -35,12 +47,19 @@ const searchRange = (loop: LoopFunction): { low: number; high: number } => {
   const last = landmarks[landmarks.length - 1];
   const early = unityOf(loop.atZero.loop);
   const late = unityOf(loop.atInfinity.loop);
-  return {
-    low: Math.min(first / BEYOND, early < first ? early / BEYOND_CROSSING : first),
-    high: Math.max(last * BEYOND, late > last ? late * BEYOND_CROSSING : last),
-  };
+  const low = Math.min(first / BEYOND, early < first ? early / BEYOND_CROSSING : first);
+  const isNeutral = loop.deadTime > 0 && loop.atInfinity.loop.power >= 0;
+  if (isNeutral) return { low, high: last * NEUTRAL_BEYOND + (NEUTRAL_TURNS * 2 * Math.PI) / loop.deadTime };
+  return { low, high: Math.max(last * BEYOND, late > last ? late * BEYOND_CROSSING : last) };
 };
 
 /** Where an asymptote crosses 1; NaN where it is level. */
 const unityOf = ({ coefficient, power }: { coefficient: number; power: number }): number =>
   power === 0 || coefficient === 0 ? NaN : Math.abs(coefficient) ** (-1 / power);
+
+const tooManyTurns = () =>
+  new LoopError({
+    pointer: '/plant/deadTime',
+    detail: 'This loop turns through too many crossovers to analyse: its dead time is very long beside its fastest motion.',
+    code: 'tooMuchToCompute',
+  });
