@@ -85,4 +85,4 @@ export const ChangePassword = z
 export type ChangePassword = z.infer<typeof ChangePassword>;
 export const SendVerification = z.strictObject({ email: Email, callbackURL: LandingPath.optional() }).meta({ id: 'SendVerification' });
 export type SendVerification = z.infer<typeof SendVerification>;
-export const VerifyEmail = z.strictObject({ token: z.string().min(1).max(2000), callbackURL: LandingPath.default('/account') });
+export const VerifyEmail = z.strictObject({ token: z.string().min(1).max(2000), callbackURL: LandingPath.default('/verified') });

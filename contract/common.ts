@@ -7,7 +7,7 @@ export const Timestamp = z.iso.datetime().meta({ description: 'ISO 8601, UTC' })
 export const Name = z.string().trim().min(1, 'A name has at least one character.').max(120, 'A name has at most 120 characters.');
 export const Note = z.string().trim().max(2000, 'A note has at most 2,000 characters.');
 export const Revision = z.int().min(1, 'Revisions are counted from 1.');
-export const Email = z.email('An e-mail address looks like name@team.example.').max(254);
+export const Email = z.email('An e-mail address looks like name@team.example.').max(254).meta({ example: 'name@team.example' });
 
 export const Role = z.enum(['owner', 'editor', 'reviewer', 'viewer']).meta({ id: 'Role' });
 export type Role = z.infer<typeof Role>;

@@ -26,8 +26,9 @@ const server = createServer(createApp(context));
 closeWithGrace({ delay: GRACE_MS, logger: log }, async ({ err, signal }) => {
   if (err) log.fatal({ err }, 'ending after an error nobody caught');
   else log.info({ signal }, 'ending');
-  setTimeout(() => server.closeAllConnections(), PATIENCE_MS).unref();
+  const impatience = setTimeout(() => server.closeAllConnections(), PATIENCE_MS);
   await new Promise((resolve) => server.close(resolve));
+  clearTimeout(impatience);
   await context.close();
 });
 

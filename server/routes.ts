@@ -1,4 +1,6 @@
-import { authRoutes } from './auth/auth-routes';
+import { passwordRoutes } from './auth/password-routes';
+import { signInRoutes } from './auth/sign-in-routes';
+import { verificationRoutes } from './auth/verification-routes';
 import { accountRoutes } from './account/account-routes';
 import { activityRoutes } from './activity/activity-routes';
 import { analysisRoutes } from './analyses/analysis-routes';
@@ -13,7 +15,9 @@ import { systemRoutes } from './system/system-routes';
 /** Every route of the API; what is not listed here does not exist. */
 export const routes: readonly Route[] = [
   ...systemRoutes,
-  ...authRoutes,
+  ...signInRoutes,
+  ...passwordRoutes,
+  ...verificationRoutes,
   ...accountRoutes,
   ...projectRoutes,
   ...plantRoutes,

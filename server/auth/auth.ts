@@ -23,7 +23,7 @@ const HOUR_S = 3600;
 const DAY_S = 24 * HOUR_S;
 
 /**
- * Passwords, sessions and mailed tokens. Only the routes in auth-routes.ts call it: its own router is not mounted, so that
+ * Passwords, sessions and mailed tokens. Only the routes beside this file call it: its own router is not mounted, so that
  * what is reachable is what we validate, limit, describe and test.
  */
 export function createAuth({ config, db, mailer, log }: AuthParts) {

@@ -21,7 +21,7 @@ const page = `<!doctype html>
 `;
 
 /** In a file of its own, because the content security policy lets no script into the page. */
-const script = `SwaggerUIBundle({ url: '/api/openapi.json', dom_id: '#api', deepLinking: true, tryItOutEnabled: false });\n`;
+const script = `SwaggerUIBundle({ url: '/api/openapi.json', dom_id: '#api', deepLinking: true });\n`;
 
 /** The API's description, for programs at /api/openapi.json and for people at /api/docs. */
 export function serveApiPage(app: Express, routes: readonly Route[]): void {

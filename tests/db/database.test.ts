@@ -23,11 +23,11 @@ afterEach(() => {
 });
 
 const newTeam = (name = 'Night shift') => ({ id: randomUUID(), name, createdAt: new Date(0) });
-const raw = <T>(use: (connection: Connection.Database) => T): T => {
+const raw = <T>(read: (connection: Connection.Database) => T): T => {
   const connection = new Connection(file());
   connection.pragma('foreign_keys = on');
   try {
-    return use(connection);
+    return read(connection);
   } finally {
     connection.close();
   }
