@@ -14,7 +14,7 @@ import { useKeep } from './keep/use-keep';
 import { mayKeep } from './keep/saved-words';
 import { useBenchAnalysis } from './live/use-bench-analysis';
 import type { BenchSubject } from './subject/bench-subject';
-import type { BenchLink, ChangeLink } from './subject/use-bench-link';
+import type { BenchLink, ChangeLink } from './subject/bench-link';
 import { useBenchKeys } from './use-bench-keys';
 
 interface BenchDeskProps {

@@ -4,7 +4,7 @@ import type { BenchActions } from './layouts/bench-actions';
 import { BenchLayout } from './layouts/bench-layout';
 import { useDesigns } from './live/use-designs';
 import { SettingsSheet } from './settings/settings-sheet';
-import type { BenchLink, ChangeLink } from './subject/use-bench-link';
+import type { BenchLink, ChangeLink } from './subject/bench-link';
 
 interface BenchSceneProps extends Omit<BenchActions, 'onSettings'> {
   link: BenchLink;

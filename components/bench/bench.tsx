@@ -1,4 +1,5 @@
 import { View } from 'react-native';
+import { useProject } from '@/components/navigation/project-context';
 import { projectPath } from '@/components/navigation/routes';
 import { DocumentTitle } from '@/components/ui/document-title';
 import { Empty } from '@/components/ui/empty';
@@ -17,7 +18,8 @@ const lacks: Readonly<Record<Exclude<Lack, 'plant'>, string>> = {
 };
 
 /** The screen where gains are moved and the loop answers at once. */
-export function Bench({ projectId }: { projectId: string }) {
+export function Bench() {
+  const { id: projectId } = useProject();
   const [link, changeLink] = useBenchLink();
   const state = useBenchSubject(projectId, link);
   if (state.kind === 'waiting') return <Waiting text="Fetching plant and design" />;

@@ -2,7 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import type { DesignRevision } from '@/contract';
 import { designRevisionQuery } from '@/hooks/queries/designs';
 import type { BenchSubject } from '../subject/bench-subject';
-import type { BenchLink } from '../subject/use-bench-link';
+import type { BenchLink } from '../subject/bench-link';
 
 /** What is laid beside, and what could be. */
 export interface Compared {

@@ -2,7 +2,7 @@ import type { Gain } from '../draft/gain';
 import type { KeepOutcome } from '../keep/keep-outcome';
 import type { Designs } from '../live/use-designs';
 import type { ChartSheet } from '../sheets/chart-sheet';
-import type { BenchLink } from '../subject/use-bench-link';
+import type { BenchLink } from '../subject/bench-link';
 
 /** What the dock and the shelf can do besides moving gains. */
 export interface BenchActions {

@@ -7,7 +7,7 @@ import { Heading, Text } from '@/components/ui/text';
 import { useBench, useDraft, useSettings } from '../bench-context';
 import type { Compared } from '../compare/use-compared';
 import type { Settings } from '../draft/settings';
-import type { BenchLink } from '../subject/use-bench-link';
+import type { BenchLink } from '../subject/bench-link';
 import { CompareChoice } from './compare-choice';
 import { KeyList } from './key-list';
 import { StepFields } from './step-fields';

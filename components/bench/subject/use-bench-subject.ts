@@ -6,7 +6,7 @@ import { designRevisionQuery, designsQuery } from '@/hooks/queries/designs';
 import { plantRevisionQuery, plantsQuery } from '@/hooks/queries/plants';
 import { projectQuery } from '@/hooks/queries/projects';
 import { type BenchSubject, benchSubject, caseShown, type Lack, latestDesign, revisionToFetch, wantedBy } from './bench-subject';
-import type { BenchLink } from './use-bench-link';
+import type { BenchLink } from './bench-link';
 
 export type SubjectState =
   | { readonly kind: 'waiting' }

@@ -1,0 +1,83 @@
+import { describe, expect, it } from 'vitest';
+import { analyseLoop } from '@/analysis';
+import { startSettings, type Settings } from '@/components/bench/draft/settings';
+import { benchLoop } from '@/components/bench/live/bench-loop';
+import { judged } from '@/components/bench/live/judged';
+import { budgetWords, samplingWords } from '@/components/bench/strip/budget-words';
+import { marginNumbers } from '@/components/bench/strip/margin-numbers';
+import { stripWords } from '@/components/bench/strip/strip-words';
+import type { BenchSubject } from '@/components/bench/subject/bench-subject';
+import { type Loop, PlantContent } from '@/contract';
+
+const units = { frequency: 'rad/s', magnitude: 'dB' } as const;
+const content = PlantContent.parse({
+  plant: { kind: 'coefficients', numerator: [2.1], denominator: [0.35, 1, 0], deadTime: 0.08 },
+  deadTimeBasis: 'measured',
+});
+const subject = {
+  plant: { ...content, id: 'plant', name: 'Speed', revision: 1 },
+  shownCase: { id: 'nominal', name: 'nominal', parameters: {} },
+  opened: null,
+} as unknown as BenchSubject;
+
+/** The loop whose numbers api.md prints. */
+const settings: Settings = { ...startSettings, kp: 1.2, ki: 0.4, kd: 0.1, filterTime: 0.02, statedContinuous: true };
+
+function strip(changes: Partial<Settings> = {}) {
+  const moved = { ...settings, ...changes };
+  const loop: Loop = benchLoop(subject, moved, { reference: 1, load: 1 });
+  const analysis = analyseLoop(loop);
+  const headline = judged(subject, moved, analysis);
+  return { loop, analysis, headline, words: stripWords(headline, analysis, units) };
+}
+
+describe('the strip', () => {
+  it('without limits shows Ms, not judged, with the reason', () => {
+    const { headline, words } = strip();
+    expect(headline.verdict).toBe('notJudged');
+    expect(words.headline).toMatchObject({ quantity: 'Ms', value: '1.56' });
+    expect(words.lines).toEqual(['at 2.92 rad/s', 'No limits are set.']);
+    expect(words.spoken).toBe('Ms 1.56, not judged.');
+  });
+
+  it('says that nobody stated the sampling', () =>
+    expect(strip({ statedContinuous: false }).words.lines[1]).toContain('Nobody stated the sample time.'));
+
+  it('prints Ms and the margins with their places, as the API example has them', () => {
+    const printed = marginNumbers(strip().analysis, units).map(({ name, value, place }) => [name, value, place]);
+    expect(printed).toEqual([
+      ['Ms', '1.56', 'at 2.92 rad/s'],
+      ['Phase margin', '45.3°', 'at 2.06 rad/s'],
+      ['Gain margin', '21.3 dB', 'at 10.87 rad/s'],
+      ['Delay margin', '0.38 s', 'at 2.06 rad/s'],
+    ]);
+  });
+
+  it('of an unstable loop has the word in the place of the number, and how many poles', () => {
+    const { headline, words } = strip({ kp: 40 });
+    expect(headline.verdict).toBe('fail');
+    expect(words.headline.value).toBe('unstable');
+    expect(words.lines[0]).toMatch(/^\d+ poles? on the wrong side$/);
+    expect(words.spoken).toMatch(/^Unstable, /);
+  });
+
+  it('calls a margin that does not exist "no limit"', () => {
+    const { analysis } = strip();
+    const open = { ...analysis, margins: { ...analysis.margins, gain: null } };
+    expect(marginNumbers(open, units)[2]).toMatchObject({ value: 'no limit', place: '' });
+  });
+});
+
+describe('the delay budget', () => {
+  // 2.0590 rad/s · 0.08 s = 0.16472 rad = 9.4°.
+  it('says what the dead time costs at the crossover', () => {
+    const { loop, analysis } = strip();
+    expect(budgetWords(loop, analysis, units)).toEqual({ lead: 'Phase at crossover 2.06 rad/s:', text: 'dead time 9.4°' });
+  });
+
+  it('says how the loop is sampled', () => {
+    expect(samplingWords(true, null)).toBe('continuous, as stated');
+    expect(samplingWords(false, null)).toBe('nobody said how it is sampled');
+    expect(samplingWords(false, 0.01)).toBe('sampled, 10 ms');
+  });
+});
