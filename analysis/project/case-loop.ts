@@ -6,7 +6,10 @@ import { overridePlant } from './override-plant';
  * A design stated to be continuous and one whose sample time nobody stated are both computed without sampling;
  * only the verdict tells them apart.
  */
-export function caseLoop({ plant, parameters }: { plant: PlantContent; parameters: FrozenCase['parameters'] }, design: DesignContent): Loop {
+export function caseLoop(
+  { plant, parameters }: { plant: PlantContent; parameters: FrozenCase['parameters'] },
+  design: DesignContent,
+): Loop {
   return {
     plant: overridePlant(plant.plant, parameters),
     controller: design.controller,

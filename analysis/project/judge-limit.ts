@@ -1,11 +1,9 @@
 import type { Analysis, Check, Limit, Verdict } from '@/contract';
 import { limitUse } from './limit-use';
-import { quantities } from './quantities';
+import { judgedValue, quantities } from './quantities';
 
-/** Judged by magnitude, as the scale of a signed quantity says. */
 const meets = ({ quantity, bound }: Limit, demanded: number, value: number) => {
-  const signed = quantities[quantity].scale === Math.abs;
-  const judged = signed ? Math.abs(value) : value;
+  const judged = judgedValue(quantity, value);
   return bound === 'min' ? judged >= demanded : judged <= demanded;
 };
 

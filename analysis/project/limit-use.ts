@@ -1,5 +1,5 @@
 import type { Limit } from '@/contract';
-import { quantities } from './quantities';
+import { judgedValue, quantities } from './quantities';
 
 const UNMARKED_TARGET_INSIDE = 0.1;
 
@@ -22,6 +22,6 @@ export function limitUse(demand: Limit, value: number): number | null {
   const { scale } = quantities[demand.quantity];
   const target = scale(rulerTarget(demand));
   const limit = scale(demand.limit);
-  const use = (target - scale(value)) / (target - limit);
+  const use = (target - scale(judgedValue(demand.quantity, value))) / (target - limit);
   return Number.isFinite(use) ? use : null;
 }

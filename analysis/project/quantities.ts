@@ -6,6 +6,8 @@ export interface Reading {
   readonly value: (analysis: Analysis) => number | null;
   /** rad/s where the number was found; null where it has no frequency of its own. */
   readonly frequency: (analysis: Analysis) => number | null;
+  /** Whether it is judged by magnitude: a sign says in which direction, not how well. */
+  readonly byMagnitude: boolean;
   /** The one scale on which limit, target and value are compared. */
   readonly scale: (value: number) => number;
   /** Stability quantities come before performance in the headline. */
@@ -20,11 +22,19 @@ const inverse = (value: number) => 1 / value;
 const decibels = (value: number) => 20 * Math.log10(value);
 
 type Parts = Pick<Reading, 'value'> & Partial<Reading>;
-const stability = (parts: Parts): Reading => ({ frequency: nowhere, scale: asIs, stability: true, nullIsUnlimited: false, ...parts });
+const stability = (parts: Parts): Reading => ({
+  frequency: nowhere,
+  byMagnitude: false,
+  scale: asIs,
+  stability: true,
+  nullIsUnlimited: false,
+  ...parts,
+});
 const performance = (parts: Parts): Reading => ({ ...stability(parts), stability: false });
 
 type Metric = keyof NonNullable<NonNullable<Analysis['timeResponse']>['metrics']>;
-const metric = (name: Metric, scale = asIs) => performance({ value: (analysis) => analysis.timeResponse?.metrics?.[name] ?? null, scale });
+const metric = (name: Metric, parts: Partial<Reading> = {}) =>
+  performance({ value: (analysis) => analysis.timeResponse?.metrics?.[name] ?? null, ...parts });
 
 /** Every quantity that a project can demand a limit for. */
 export const quantities: Readonly<Record<Quantity, Reading>> = {
@@ -43,7 +53,7 @@ export const quantities: Readonly<Record<Quantity, Reading>> = {
   phaseMargin: stability({
     value: ({ margins }) => margins.phase?.degrees ?? null,
     frequency: ({ margins }) => margins.phase?.frequency ?? null,
-    scale: Math.abs,
+    byMagnitude: true,
     nullIsUnlimited: true,
   }),
   delayMargin: stability({
@@ -73,8 +83,11 @@ export const quantities: Readonly<Record<Quantity, Reading>> = {
   settlingTime: metric('settlingTime'),
   overshootPercent: metric('overshootPercent'),
   undershootPercent: metric('undershootPercent'),
-  steadyStateError: metric('steadyStateError', Math.abs),
+  steadyStateError: metric('steadyStateError', { byMagnitude: true }),
   loadPeak: metric('loadPeak'),
   loadSettlingTime: metric('loadSettlingTime'),
   controlPeak: metric('controlPeak'),
 };
+
+/** The number that limit and target are laid against. */
+export const judgedValue = (quantity: Quantity, value: number) => (quantities[quantity].byMagnitude ? Math.abs(value) : value);
