@@ -1,4 +1,5 @@
 import { type Href, Link as RouterLink } from 'expo-router';
+import { StyleSheet } from 'react-native';
 import { Text, type TextProps } from './text';
 
 export interface LinkProps extends TextProps {
@@ -10,7 +11,7 @@ export interface LinkProps extends TextProps {
 export function Link({ href, children, style, ...rest }: LinkProps) {
   return (
     <RouterLink href={href} asChild>
-      <Text role="link" {...rest} style={[{ textDecorationLine: 'underline', paddingVertical: 12 }, style]}>
+      <Text role="link" {...rest} style={StyleSheet.flatten([{ textDecorationLine: 'underline', paddingVertical: 12 }, style])}>
         {children}
       </Text>
     </RouterLink>
