@@ -19,6 +19,10 @@ describe('use of a limit', () => {
     expect(limitUse(demand({}), 42.5)).toBe(1.5);
   });
 
+  it('takes a phase margin by its magnitude', () => {
+    expect(limitUse(demand({}), -47.5)).toBe(0.5);
+  });
+
   it('compares gain margins in decibels', () => {
     const sixOverSeven = demand({ quantity: 'gainMargin', limit: 10 ** (6 / 20), target: 10 ** (7 / 20) });
     expect(limitUse(sixOverSeven, 10 ** (6.5 / 20))).toBeCloseTo(0.5, 12);

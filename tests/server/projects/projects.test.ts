@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { Me, Project } from '@/contract';
+import { addMember } from '@/db/stores/project-store';
 import { makeProject, made } from '../../support/a-project';
 import type { Client, Reply } from '../../support/client';
 import { startTestApp, type TestApp } from '../../support/test-app';
@@ -82,6 +83,17 @@ describe('projects', () => {
     expect([await listed(''), await listed('?archived=true')]).toEqual([false, true]);
     await ada.call('PATCH', `/api/projects/${id}`, { archived: false }, { 'if-match': '"2"' });
     expect([await listed(''), await listed('?archived=true')]).toEqual([true, false]);
+  });
+
+  it('are renamed by an editor, but archived and deleted by an owner alone', async () => {
+    const { id } = await newProject('Shared');
+    const dora = await app.client('dora').signUp();
+    const { body: me } = await dora.call<Me>('GET', '/api/me');
+    addMember(app.db, { projectId: id, userId: me.id, role: 'editor' }, new Date());
+    const change = (body: object) => dora.call('PATCH', `/api/projects/${id}`, body, { 'if-match': '*' });
+    expect((await change({ name: 'Shared loop' })).status).toBe(200);
+    expect((await change({ archived: true })).status).toBe(403);
+    expect((await dora.call('DELETE', `/api/projects/${id}`, { confirmName: 'Shared loop' }, { 'if-match': '*' })).status).toBe(403);
   });
 
   it('go only after their name is repeated, with everything in them', async () => {
