@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { gainRule } from '@/figures/gain-rule';
 import { draggedGain, gainMode, gainScale, linearSpanOf, nudgedGain } from '@/figures/gain-scale';
