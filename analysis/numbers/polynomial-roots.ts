@@ -32,7 +32,7 @@ export const polynomialRoots = (descending: readonly number[]): Complex[] => {
 
 /** Roots of a·s² + b·s + c without cancellation; a and c are not zero. */
 export const quadraticRoots = (a: number, b: number, c: number): Complex[] => {
-  const half = -b / (2 * a);
+  const half = 0 - b / (2 * a);
   const product = c / a;
   const square = half * half - product;
   if (square < 0) return [1, -1].map((sign) => ({ re: half, im: sign * Math.sqrt(-square) }));
