@@ -4,6 +4,7 @@ import Svg from 'react-native-svg';
 import { Segments } from '@/components/ui/segments';
 import { touch } from '@/components/ui/tokens';
 import {
+  frequencyWindow,
   type LoopScene,
   nicholsPicture,
   nicholsWindow,
@@ -80,7 +81,6 @@ export const PlaneChart = memo(function PlaneChart({ a, b, others, limits, units
       {a.analysis.closedLoop.stable ? null : <UnstableMark x={right} y={plot.y + 14} />}
     </Svg>
   );
-  const { frequencies } = responseOf(a);
   return (
     <ChartShell
       name={names[kind]}
@@ -89,7 +89,7 @@ export const PlaneChart = memo(function PlaneChart({ a, b, others, limits, units
       onLayout={onLayout}
       picture={width > 0 ? drawing : null}
       overlay={width > 0 ? <PlaneCursor scene={scene} picture={picture} size={{ width, height }} /> : null}
-      table={() => frequencyTable(scene, [frequencies[0] ?? 1, frequencies[frequencies.length - 1] ?? 10])}
+      table={() => frequencyTable(scene, frequencyWindow([a.analysis], units.frequency))}
       tools={<Segments label="Plane" value={kind} options={options} onChange={onPlane ?? setOwn} />}
     />
   );
