@@ -37,7 +37,7 @@ export function HomeScreen() {
           {phone ? null : <People />}
         </View>
         {layout === 'wide' ? <View style={[column, styles.middle]}>{plane}</View> : null}
-        <View style={[styles.column, phone ? styles.phoneColumn : styles.right]}>
+        <View style={[styles.column, phone ? styles.phoneColumn : layout === 'wide' ? styles.right : styles.rest]}>
           {layout === 'wide' ? null : plane}
           {project.description ? <Text step="prose">{project.description}</Text> : null}
           <Lately />
@@ -53,7 +53,8 @@ const styles = StyleSheet.create({
   side: { flexDirection: 'row', minHeight: 700 },
   column: { padding: gutter.wide, gap: 26 },
   phoneColumn: { padding: 14 },
-  left: { width: 380 },
+  left: { width: 360 },
   middle: { flex: 1 },
-  right: { width: 420, flexGrow: 1 },
+  right: { width: 400 },
+  rest: { flex: 1 },
 });

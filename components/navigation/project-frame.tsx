@@ -23,9 +23,11 @@ import { TopBar } from './top-bar';
 /** What stands round every page of a project: the bars of the layout, the sheet of pages, and the project itself for those inside. */
 export function ProjectFrame({ projectId, children }: PropsWithChildren<{ projectId: string }>) {
   const project = useQuery(projectQuery(projectId));
+  const phone = useLayout() === 'phone';
   if (project.data) return <LoadedFrame project={project.data}>{children}</LoadedFrame>;
   return (
-    <DeskFrame title="Project">
+    <DeskFrame title="Project" up="/">
+      {phone ? null : <HiddenHeading>Project</HiddenHeading>}
       <QueryView query={project} waiting="Fetching the project" missing="No such project, or it is not yours to see.">
         {() => null}
       </QueryView>
