@@ -13,20 +13,23 @@ export interface LoopPoint {
 }
 
 /**
- * L, |S| and |T| at ω > 0 rad/s.
+ * Evaluates one loop at any ω > 0 rad/s: L, |S| and |T|. The loop is prepared once, so that a cursor can ask often.
  * @throws LoopError where the loop has no finite value there
  */
-export const loopAt = (model: LoopModel, omega: number): LoopPoint => {
+export const loopAt = (model: LoopModel): ((omega: number) => LoopPoint) => {
+  const loop = new ContinuousLoop(model);
   const row = new Float64Array(ROW);
-  new ContinuousLoop(model).sampleAt(omega, row, 0);
-  const magnitude = Math.hypot(row[RE], row[IM]);
-  const distance = Math.hypot(1 + row[RE], row[IM]);
-  return {
-    re: row[RE],
-    im: row[IM],
-    magnitude,
-    phaseDegrees: (row[PHASE] * 180) / Math.PI,
-    sensitivity: 1 / distance,
-    complementarySensitivity: magnitude / distance,
+  return (omega) => {
+    loop.sampleAt(omega, row, 0);
+    const magnitude = Math.hypot(row[RE], row[IM]);
+    const distance = Math.hypot(1 + row[RE], row[IM]);
+    return {
+      re: row[RE],
+      im: row[IM],
+      magnitude,
+      phaseDegrees: (row[PHASE] * 180) / Math.PI,
+      sensitivity: 1 / distance,
+      complementarySensitivity: magnitude / distance,
+    };
   };
 };

@@ -1,7 +1,7 @@
 import type { Analysis, FrequencyResponse } from '@/contract';
 import type { ReaderUnits } from './quantity-text';
 
-/** Exact values of a loop at one frequency, as `loopAt(model, frequency)` of the engine gives them. Magnitudes are factors. */
+/** Exact values of a loop at one frequency, as `loopAt(model)(frequency)` of the engine gives them. Magnitudes are factors. */
 export interface LoopPoint {
   re: number;
   im: number;

@@ -10,7 +10,7 @@ import { analysisQuery, caseAnalysisQuery } from '@/hooks/queries/analyses';
 function frozenLoop({ inputs }: KeptAnalysis, caseId: string): ChartDesign['at'] {
   const frozen = inputs.cases.find(({ id }) => id === caseId) ?? inputs.cases[0];
   const model = buildLoop(caseLoop(frozen, inputs.design));
-  return (frequency) => loopAt(model, frequency);
+  return loopAt(model);
 }
 
 export interface CaseChoice {

@@ -33,7 +33,7 @@ function plantAlone(plant: PlantContent['plant']): Loop {
 function designOf(plant: PlantContent['plant']): ChartDesign {
   const loop = plantAlone(plant);
   const model = buildLoop(loop);
-  return { label: 'P', analysis: analyseLoop(loop), at: (frequency) => loopAt(model, frequency) };
+  return { label: 'P', analysis: analyseLoop(loop), at: loopAt(model) };
 }
 
 /** What the plant does by itself, over frequency. */

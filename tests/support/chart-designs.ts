@@ -13,7 +13,7 @@ export function chartDesign(label: string, plant: Plant, gains: Gains): ChartDes
   };
   const loop = Loop.parse(input);
   const model = buildLoop(loop);
-  return { label, analysis: analyseLoop(loop), at: (frequency) => loopAt(model, frequency) };
+  return { label, analysis: analyseLoop(loop), at: loopAt(model) };
 }
 
 /** An integrating plant with a lag and dead time; stable. */

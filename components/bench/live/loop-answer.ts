@@ -12,7 +12,7 @@ export interface LoopAnswer {
 export function answerLoop(loop: Loop, detail: Detail): LoopAnswer {
   const analysis = analyseLoop(loop, { curves: true, detail });
   const model = buildLoop(loop);
-  return { analysis, at: (frequency) => loopAt(model, frequency) };
+  return { analysis, at: loopAt(model) };
 }
 
 /** What the engine says of a loop that has no meaning; anything else is a defect and is thrown on. */
