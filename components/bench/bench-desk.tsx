@@ -51,11 +51,11 @@ export function BenchDesk({ subject, link, onLink }: BenchDeskProps) {
     },
     [store, onLink, activeGain, keep, announce, subject.project.role],
   );
-  const keys = useBenchKeys(obey);
+  const region = useBenchKeys(obey);
   return (
     <BenchContext.Provider value={bench}>
       <CursorProvider>
-        <View {...keys} style={styles.desk}>
+        <View ref={region} style={styles.desk}>
           <BenchScene {...{ link, onLink, compared, outcome, activeGain }} onKeep={keep} onActiveGain={setActiveGain} />
         </View>
       </CursorProvider>
@@ -63,4 +63,4 @@ export function BenchDesk({ subject, link, onLink }: BenchDeskProps) {
   );
 }
 
-const styles = StyleSheet.create({ desk: { flex: 1, minHeight: 0, outlineStyle: 'none' as unknown as undefined } });
+const styles = StyleSheet.create({ desk: { flex: 1, minHeight: 0 } });

@@ -1,25 +1,26 @@
-import { useCallback, useEffect, useRef } from 'react';
+import { useEffect, useRef } from 'react';
 import type { View } from 'react-native';
 import { useMe } from '@/hooks/queries/me';
 import { type BenchCommand, commandOf, isTyping } from './bench-keys';
 
-/** Keys of the bench: what its region is given so that it can have the focus and listen. It takes the focus when it opens. */
+/**
+ * Listens to the keys of the bench while it has the focus or nothing has it. It does not take the focus itself, which would draw a ring
+ * round the whole page. Gives the ref of its region.
+ */
 export function useBenchKeys(obey: (command: BenchCommand) => void) {
   const { singleKeys } = useMe().preferences;
   const region = useRef<View>(null);
   useEffect(() => {
-    const free = document.activeElement === null || document.activeElement === document.body;
-    if (free) (region.current as unknown as HTMLElement).focus({ preventScroll: true });
-  }, []);
-  const onKeyDown = useCallback(
-    (event: KeyboardEvent) => {
-      if (event.defaultPrevented || isTyping(event.target)) return;
+    const onKeyDown = (event: KeyboardEvent) => {
+      const own = event.target === document.body || (region.current as unknown as HTMLElement).contains(event.target as Node);
+      if (!own || event.defaultPrevented || isTyping(event.target)) return;
       const command = commandOf(event, singleKeys);
       if (command === null) return;
       event.preventDefault();
       obey(command);
-    },
-    [singleKeys, obey],
-  );
-  return { ref: region, tabIndex: -1 as const, onKeyDown };
+    };
+    document.addEventListener('keydown', onKeyDown);
+    return () => document.removeEventListener('keydown', onKeyDown);
+  }, [singleKeys, obey]);
+  return region;
 }

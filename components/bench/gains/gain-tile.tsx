@@ -20,6 +20,7 @@ export function GainTile({ gain, value, moved, active, onChoose }: GainTileProps
     <Pressable
       role="radio"
       aria-checked={active}
+      tabIndex={active ? 0 : -1}
       aria-label={`${label} ${formatGain(value)}${moved ? ', moved' : ''}`}
       onPress={onChoose}
       style={[styles.tile, active && { backgroundColor: colors.paper }]}

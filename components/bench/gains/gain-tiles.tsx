@@ -1,3 +1,4 @@
+import { useRef } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { IconButton } from '@/components/ui/icon-button';
 import { useTheme } from '@/components/ui/theme';
@@ -18,15 +19,18 @@ export function GainTiles({ active, onChoose, onSettings }: GainTilesProps) {
   const { colors } = useTheme();
   const settings = useSettings();
   const kept = useDraft(({ base }) => base.settings);
+  const row = useRef<View>(null);
   const walk = (event: KeyboardEvent) => {
     const step = steps[event.key];
     if (!step) return;
     event.preventDefault();
-    onChoose(gains[(gains.indexOf(active) + step + gains.length) % gains.length]);
+    const next = (gains.indexOf(active) + step + gains.length) % gains.length;
+    onChoose(gains[next]);
+    (row.current as unknown as HTMLElement).querySelectorAll<HTMLElement>('[role=radio]')[next].focus();
   };
   return (
     <View style={[styles.row, { backgroundColor: colors.bar }]}>
-      <View role="radiogroup" aria-label="Gain that rule and nudges move" style={styles.tiles} onKeyDown={walk}>
+      <View ref={row} role="radiogroup" aria-label="Gain that rule and nudges move" style={styles.tiles} onKeyDown={walk}>
         {gains.map((gain) => (
           <GainTile
             key={gain}

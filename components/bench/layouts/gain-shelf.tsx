@@ -12,7 +12,7 @@ import { useKeepButton } from '../keep/use-keep-button';
 import { useStabilitySpans } from '../live/use-stability-spans';
 import type { BenchActions } from './bench-actions';
 
-/** All gains along the foot, and at the end whether they are kept. Two by two where there is not room for four. */
+/** All gains along the foot, and at the end whether they are kept. Where there is less room the state stands below, and under 860 the gains two by two. */
 export function GainShelf({ paired = false, onActiveGain, onSettings, outcome, onKeep }: BenchActions & { paired?: boolean }) {
   const { colors } = useTheme();
   const spans = useStabilitySpans(gains);
@@ -26,7 +26,7 @@ export function GainShelf({ paired = false, onActiveGain, onSettings, outcome, o
     >
       <View style={[styles.gains, paired && styles.pairs]}>
         {gains.map((gain) => (
-          <View key={gain} style={[styles.gain, paired && styles.half, edge]}>
+          <View key={gain} style={[styles.gain, paired && styles.quarter, edge]}>
             <GainCell gain={gain} unstable={spans[gain]} onActive={() => onActiveGain(gain)} />
           </View>
         ))}
@@ -56,7 +56,7 @@ const styles = StyleSheet.create({
   gains: { flex: 1, flexDirection: 'row', minWidth: 0 },
   pairs: { flexWrap: 'wrap', flexGrow: 0, flexBasis: 'auto' },
   gain: { flex: 1, minWidth: 0, borderRightWidth: line.hair },
-  half: { flexGrow: 0, flexShrink: 0, flexBasis: '50%', borderBottomWidth: line.hair },
+  quarter: { flexBasis: '25%', minWidth: 215, borderBottomWidth: line.hair },
   saved: { width: 246, paddingVertical: 8, paddingHorizontal: 18, gap: 6, justifyContent: 'space-between' },
   savedRow: { flexDirection: 'row', alignItems: 'center', gap: 16, paddingVertical: 8, paddingHorizontal: 18 },
   state: { flexShrink: 1, flexGrow: 1 },

@@ -73,7 +73,7 @@ const styles = StyleSheet.create({
   middle: { flex: 1, minHeight: 260 },
   columns: { flexGrow: 1, flexDirection: 'row', gap: 1 },
   column: { paddingTop: 10, paddingBottom: 8, paddingLeft: 16, paddingRight: 12, minWidth: 0 },
-  frequency: { flexGrow: 1, flexShrink: 1, flexBasis: 508, maxWidth: 720 },
-  time: { flexGrow: 1, flexShrink: 1, flexBasis: 432, maxWidth: 720 },
-  share: { flex: 1 },
+  frequency: { flexGrow: 0, flexShrink: 1, flexBasis: 508 },
+  time: { flexGrow: 0, flexShrink: 1, flexBasis: 432 },
+  share: { flexGrow: 1, flexShrink: 1, flexBasis: 400 },
 });

@@ -11,9 +11,9 @@ interface SpanSearch {
   readonly stableAt: (value: number) => boolean;
 }
 
-/** A hundred times the gain, in steps that no edge of a real loop slips through between. */
-const GROWTH = 1.25;
-const STEPS = 21;
+/** Nearly thirty times the gain, in steps that no edge of a real loop slips through between. */
+const GROWTH = 1.4;
+const STEPS = 10;
 /** Of the edge, relative: the rule prints two figures. */
 const TOLERANCE = 2e-3;
 /** Of the gain itself: an edge at 0 has no relative tolerance. */
@@ -35,7 +35,7 @@ function* edgeBetween(stable: number, unstable: number, { value, size, stableAt 
 function places(value: number, size: number, side: 1 | -1): number[] {
   const towardsZero = value !== 0 && Math.sign(value) !== side;
   const walk = Array.from({ length: STEPS }, (_, n) => {
-    if (value === 0) return side * size * 0.01 * GROWTH ** (2 * n);
+    if (value === 0) return side * size * 0.01 * GROWTH ** (3 * n);
     return towardsZero ? value / GROWTH ** (n + 1) : value * GROWTH ** (n + 1);
   });
   return towardsZero ? [...walk, 0] : walk;

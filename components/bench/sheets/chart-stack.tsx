@@ -1,4 +1,4 @@
-import { useEffect, useMemo, useRef, useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { ScrollView, StyleSheet, View } from 'react-native';
 import { type ChartDesign, CurveKey } from '@/components/charts';
 import { useAnswer } from '../bench-context';
@@ -45,24 +45,27 @@ export function ChartStack({ active, onActive, a, b, steps }: ChartStackProps) {
     shown.current = sheet;
     onActive(sheet);
   };
-  const key = useMemo(() => <CurveKey a={a.label} b={b?.label} />, [a.label, b?.label]);
   return (
-    <View style={styles.viewport} onLayout={onLayout}>
-      <ScrollView
-        ref={scroll}
-        pagingEnabled
-        showsVerticalScrollIndicator={false}
-        scrollEventThrottle={50}
-        onScroll={({ nativeEvent }) => follow(nativeEvent.contentOffset.y)}
-      >
-        {chartSheets.map((sheet) => (
-          <View key={sheet} style={[styles.sheet, { height }]}>
-            <View style={styles.key}>{key}</View>
-            {viewport > 0 && <SheetChart sheet={sheet} a={sheet === active ? a : rested} b={b} steps={steps} height={height - 26} />}
-          </View>
-        ))}
-        <View style={{ height: PEEK }} />
-      </ScrollView>
+    <View style={styles.viewport}>
+      <View style={styles.key}>
+        <CurveKey a={a.label} b={b?.label} />
+      </View>
+      <View style={styles.viewport} onLayout={onLayout}>
+        <ScrollView
+          ref={scroll}
+          pagingEnabled
+          showsVerticalScrollIndicator={false}
+          scrollEventThrottle={50}
+          onScroll={({ nativeEvent }) => follow(nativeEvent.contentOffset.y)}
+        >
+          {chartSheets.map((sheet) => (
+            <View key={sheet} style={[styles.sheet, { height }]}>
+              {viewport > 0 && <SheetChart sheet={sheet} a={sheet === active ? a : rested} b={b} steps={steps} height={height - 4} />}
+            </View>
+          ))}
+          <View style={{ height: PEEK }} />
+        </ScrollView>
+      </View>
     </View>
   );
 }

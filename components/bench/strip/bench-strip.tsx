@@ -43,10 +43,12 @@ export function BenchStrip() {
       ]}
     >
       <View style={styles.head}>
-        <VerdictBlock verdict={headline.verdict} quantity={quantity ?? undefined} value={value} words={inWords} />
+        <View style={styles.block}>
+          <VerdictBlock verdict={headline.verdict} quantity={quantity ?? undefined} value={value} words={inWords} />
+        </View>
         <View style={styles.about}>
           <Text step="note" weight={600} numberOfLines={1}>
-            {subject.shownCase.name}, {subject.plant.name} rev {subject.plant.revision}
+            {phone ? `${subject.shownCase.name}, ${subject.plant.name}` : subject.shownCase.name}
           </Text>
           {words.lines.map((text) => (
             <Text key={text} step={phone ? 'small' : 'note'} tone="ink2" numberOfLines={2}>
@@ -82,6 +84,7 @@ const styles = StyleSheet.create({
     borderBottomWidth: line.hair,
   },
   head: { flexDirection: 'row', alignItems: 'center', gap: 12 },
+  block: { flexShrink: 0 },
   about: { flexShrink: 1, gap: 1 },
   problem: { flexShrink: 1 },
 });
