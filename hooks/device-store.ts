@@ -3,9 +3,9 @@
 const PREFIX = 'kerbline.';
 const DRAFT = `${PREFIX}draft.`;
 
-function withStorage<Result>(use: (storage: Storage) => Result, otherwise: Result): Result {
+function withStorage<Result>(act: (storage: Storage) => Result, otherwise: Result): Result {
   try {
-    return use(window.localStorage);
+    return act(window.localStorage);
   } catch {
     return otherwise;
   }

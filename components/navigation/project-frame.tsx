@@ -40,7 +40,7 @@ function LoadedFrame({ project, children }: PropsWithChildren<{ project: ReadPro
   const pathname = usePathname();
   const current = pageOf(pathname);
   const [sheet, setSheet] = useState(false);
-  const context = useMemo(() => ({ project, openPages: () => setSheet(true) }), [project]);
+  const context = useMemo(() => ({ project, openPages: () => setSheet(true) }), [project, setSheet]);
   const place = { projectId: project.id, current };
   const pageName = pages.find(({ page }) => page === current)?.name ?? 'Home';
   const home = current === 'home';

@@ -5,10 +5,18 @@ import { QueryView } from '@/components/ui/query-view';
 import { meQuery } from '@/hooks/queries/me';
 import { signInPath } from './routes';
 
-/** Lets those in who are signed in, and sends the others to sign in and back here. */
+const address = () => window.location.pathname + window.location.search;
+
+/**
+ * Lets those in who are signed in, and sends the others to sign in and back here. Until the pages behind it are shown the router knows
+ * only "/", so the address asked for is read once, as the gate is first drawn; of a session that ends later it is where one is then.
+ */
 export function SignedInGate({ children }: PropsWithChildren) {
   const me = useQuery(meQuery);
-  if (me.data === null) return <ToSignIn />;
+  const [arrived] = useState(address);
+  const [entered, setEntered] = useState(false);
+  if (me.data && !entered) setEntered(true);
+  if (me.data === null) return <ToSignIn next={entered ? address() : arrived} />;
   return (
     <QueryView query={me} waiting="Looking who is signed in">
       {() => children}
@@ -16,8 +24,8 @@ export function SignedInGate({ children }: PropsWithChildren) {
   );
 }
 
-/** The address is read from the window, and once: the router's own is not settled while it starts, and changes as it leads away. */
-function ToSignIn() {
-  const [asked] = useState(() => window.location.pathname + window.location.search);
+/** Keeps the first address it was given: the window's own changes as it leads away. */
+function ToSignIn({ next }: { next: string }) {
+  const [asked] = useState(next);
   return <Redirect href={signInPath(asked)} />;
 }
