@@ -17,7 +17,7 @@ const useStepSizes = ({ reference, load }: StepSizes): StepSizes => useMemo(() =
 
 /** Answers for what is on the bench, gesture under way included. */
 export function useBenchAnalysis(subject: BenchSubject, store: DraftStore, sizes: StepSizes): BenchAnalyser {
-  const analyser = useMemo(createBenchAnalyser, []);
+  const analyser = useMemo(() => createBenchAnalyser(), []);
   const steps = useStepSizes(sizes);
   const { plant, shownCase, opened } = subject;
   useEffect(() => {
@@ -37,7 +37,7 @@ export function useBenchAnalysis(subject: BenchSubject, store: DraftStore, sizes
 
 /** The answer for settings that do not move (design B); null while there is none. */
 export function useSettledAnalysis(subject: BenchSubject, settings: Settings | null, sizes: StepSizes): LoopAnswer | null {
-  const analyser = useMemo(createBenchAnalyser, []);
+  const analyser = useMemo(() => createBenchAnalyser(), []);
   const steps = useStepSizes(sizes);
   const { plant, shownCase, opened } = subject;
   useEffect(() => {

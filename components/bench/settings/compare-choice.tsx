@@ -21,7 +21,7 @@ export function CompareChoice({ compared, onLink }: Pick<SettingsSheetProps, 'co
           Nothing is kept yet that could lie beside.
         </Text>
       ) : (
-        <View style={{ alignItems: 'flex-start' }}>
+        <View style={{ flexDirection: 'row' }}>
           <Menu label={revision === null ? 'Nothing' : `Rev ${revision.revision}`} items={[none, ...items]} />
         </View>
       )}
