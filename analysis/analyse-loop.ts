@@ -31,8 +31,8 @@ export const analyseLoop = (input: Loop, { curves = true, detail = 'full' }: Ana
   const model = buildLoop(input);
   const loop = new ContinuousLoop(model);
   refuseSingular(loop);
-  const { margins, sensitivity, bandwidth, crossovers } = loopNumbers(loop, detail);
-  const stability = judgeStability(model, loop, { crossovers, modulus: margins.modulus });
+  const { margins, sensitivity, bandwidth, crossovers, startsOutside } = loopNumbers(loop, detail);
+  const stability = judgeStability(model, loop, { crossovers, startsOutside, modulus: margins.modulus });
   const grid = curves ? drawnGrid(loop, { crossovers, detail }) : null;
   const { stable, unstablePoles, encirclements, encirclementsNeeded, poles } = stability;
   const points = curves && detail === 'full' ? {} : { points: FEW_POINTS };

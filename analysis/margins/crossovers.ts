@@ -23,8 +23,8 @@ const ZERO_GAIN = 1e-12;
 /** A neutral loop's crossovers never end; the list does. */
 export const MOST_NEUTRAL_CROSSOVERS = 200;
 const TURN = 2 * Math.PI;
-/** Phases nearer than this to −180° are on it: the crossing is not a crossing but a stretch, or rounding. */
-const ON_AXIS = 1e-13;
+/** A phase that changes less than this between two rows stands still: L on the real axis is then a stretch, not a crossing. */
+const STRETCH = 1e-12;
 
 /** All ω > 0 with |L(jω)| = 1, ascending. */
 export const gainCrossovers = (probe: Probe): GainCrossover[] => {
@@ -66,12 +66,13 @@ export const phaseCrossovers = (loop: LoopFunction, probe: Probe): PhaseCrossove
 };
 
 /** The least −π − 2πk that is not below `phase`. */
-const firstLevel = (phase: number): number => Math.ceil((phase + ON_AXIS + Math.PI) / TURN) * TURN - Math.PI;
+const firstLevel = (phase: number): number => Math.ceil((phase + Math.PI) / TURN) * TURN - Math.PI;
 
-/** Every −π − 2πk strictly between two phases, in the order in which they are met. */
+/** Every −π − 2πk after one phase up to and including another, in the order in which they are met. */
 const levelsBetween = (from: number, to: number): number[] => {
+  if (Math.abs(to - from) < STRETCH) return [];
   const levels: number[] = [];
-  const high = Math.max(from, to);
-  for (let level = firstLevel(Math.min(from, to)); level < high - ON_AXIS; level += TURN) levels.push(level);
-  return from <= to ? levels : levels.reverse();
+  const [low, high] = from < to ? [from, to] : [to, from];
+  for (let level = firstLevel(low); level <= high; level += TURN) if (level !== from) levels.push(level);
+  return from < to ? levels : levels.reverse();
 };

@@ -1,8 +1,13 @@
-import { limitOf } from './end-values';
 import type { GainCrossover } from './crossovers';
 import type { LoopFunction } from './loop-function';
 
 const TURN = 2 * Math.PI;
+
+/** Where |L| passes 1: every crossover, and on which side of 1 the axis starts. */
+export interface GainPassages {
+  readonly crossovers: readonly GainCrossover[];
+  readonly startsOutside: boolean;
+}
 
 /**
  * Clockwise encirclements of −1 by L on the whole contour, indented to the right of imaginary-axis poles.
@@ -13,10 +18,9 @@ const TURN = 2 * Math.PI;
  *
  * @see REFERENCES Nyquist1932
  */
-export const clockwiseEncirclements = (loop: LoopFunction, crossovers: readonly GainCrossover[]): number => {
-  const start = startOfContour(loop);
-  let outside = start.gain > 1;
-  let entered = start.passes;
+export const clockwiseEncirclements = (loop: LoopFunction, { crossovers, startsOutside }: GainPassages): number => {
+  let outside = startsOutside;
+  let entered = loop.atZero.loop.coefficient < 0 ? -0.5 : 0;
   let upward = 0;
   for (const { phase } of crossovers) {
     const passes = passesBelow(phase);
@@ -30,11 +34,6 @@ export const clockwiseEncirclements = (loop: LoopFunction, crossovers: readonly 
 
 /** Passes of the ray between phase 0 and this one, upward; half a pass where the phase is on the ray. */
 const passesBelow = (phase: number): number => Math.floor((phase + Math.PI) / TURN);
-
-const startOfContour = (loop: LoopFunction): { gain: number; passes: number } => {
-  const limit = limitOf(loop.atZero.loop, 'zero');
-  return { gain: Math.abs(limit), passes: loop.atZero.loop.coefficient < 0 ? -0.5 : 0 };
-};
 
 /** Where |L| > 1 as ω → ∞ the contour closes on the real axis, at the phase multiple of 180° nearest the last crossover. */
 const endOfContour = (crossovers: readonly GainCrossover[]): number => {

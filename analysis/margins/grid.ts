@@ -9,6 +9,8 @@ export interface Fineness {
   readonly phaseStep: number;
   /** Largest change of the phase with dead time, radians. */
   readonly turnStep: number;
+  /** The same where |L| is below QUIET: L then goes round a small circle, and S with it, smoothly. */
+  readonly quietTurnStep: number;
   /** The dead time's turning is followed only where ln|L| is above this. */
   readonly turnFloor: number;
   readonly pointsPerDecade: number;
@@ -23,6 +25,8 @@ export interface Grid {
   readonly capped: boolean;
 }
 
+/** ln|L| below which the turns of dead time need fewer rows. */
+const QUIET = Math.log(0.3);
 /** An interval is cut into at most this many pieces at once, so that wide intervals are judged again on the way. */
 const MOST_PIECES = 8;
 /** Neighbours nearer than this, relatively, are not parted further: L jumps there (an undamped pole or zero). */
@@ -65,11 +69,12 @@ const piecesWanted = (table: Table, { count, fineness, deadTime }: { count: numb
     const span = table[next + OMEGA] - table[row + OMEGA];
     const turn = Math.abs(table[next + PHASE] - table[row + PHASE]);
     const bend = Math.abs(table[next + PHASE] - table[row + PHASE] + span * deadTime);
-    const turning = Math.max(table[row + LOG], table[next + LOG]) > fineness.turnFloor;
+    const log = Math.max(table[row + LOG], table[next + LOG]);
+    const turnStep = log > QUIET ? fineness.turnStep : fineness.quietTurnStep;
     const excess = Math.max(
       Math.abs(table[next + LOG] - table[row + LOG]) / fineness.logStep,
       bend / fineness.phaseStep,
-      turning ? turn / fineness.turnStep : 0,
+      log > fineness.turnFloor ? turn / turnStep : 0,
     );
     const done = !(excess > 1) || span <= CLOSEST * table[next + OMEGA];
     pieces[i] = done ? 1 : Math.min(MOST_PIECES, Math.ceil(excess));

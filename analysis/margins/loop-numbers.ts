@@ -1,18 +1,18 @@
 import type { Analysis } from '@/contract';
 import { fallsFrom, risesThroughHalfPower } from './bandwidth';
-import { gainCrossovers, phaseCrossovers, type GainCrossover } from './crossovers';
+import { gainCrossovers, phaseCrossovers } from './crossovers';
+import type { GainPassages } from './encirclements';
 import { limitOf, valuesAtInfinity, valuesAtZero, type EndValues } from './end-values';
 import type { LoopFunction } from './loop-function';
 import { decibels, delayMargin, diskMargin, gainMargin, phaseMargin, phaseMarginDegrees } from './margins';
 import { supremum, type Supremum } from './peak';
 import { Probe } from './probe';
 import * as quantities from './quantities';
+import { LOG } from './sample';
 import { searchGrid, type Detail } from './search-grid';
 
 /** Everything that is read off the frequency axis, each number refined on the exact function. */
-export interface LoopNumbers extends Pick<Analysis, 'margins' | 'sensitivity' | 'bandwidth'> {
-  readonly crossovers: readonly GainCrossover[];
-}
+export type LoopNumbers = Pick<Analysis, 'margins' | 'sensitivity' | 'bandwidth'> & GainPassages;
 
 /** A peak beyond this is a pole on the axis as far as double precision can tell; JSON has no infinity, and no decibels of 0. */
 const HIGHEST_PEAK = 1e15;
@@ -31,6 +31,7 @@ export const loopNumbers = (loop: LoopFunction, detail: Detail): LoopNumbers => 
   const noise = peak('noiseSensitivity');
   return {
     crossovers,
+    startsOutside: grid.table[LOG] > 0,
     margins: {
       gain: gainMargin(phase, 'upward'),
       gainReduction: gainMargin(phase, 'downward'),

@@ -14,15 +14,31 @@ const BESIDE_AXIS_POINT = [1e-2, 1e-4, 1e-6, 1e-8, 1e-10, 1e-12];
 /** Below this gain a dead time's crossovers are not listed, numerics.md "Margins". */
 export const LEAST_LISTED_GAIN = 1e-3;
 
-/** Rows beyond which a loop is refused rather than waited for: about 3,000 turns of dead time. */
-const CAP = 40_000;
+/** Rows beyond which a loop is refused rather than waited for: about 10,000 turns of dead time. */
+const CAP = 60_000;
 
 export type Detail = 'full' | 'live';
 
 /** Coarser than a drawn grid: slopes are known at every row, so that nothing between two rows is overlooked. */
 const FINENESS: Record<Detail, Fineness> = {
-  full: { logStep: 0.23, phaseStep: 0.26, turnStep: 0.52, turnFloor: Math.log(LEAST_LISTED_GAIN), pointsPerDecade: 6, cap: CAP },
-  live: { logStep: 0.6, phaseStep: 0.6, turnStep: 0.8, turnFloor: Math.log(LEAST_LISTED_GAIN), pointsPerDecade: 4, cap: CAP },
+  full: {
+    logStep: 0.23,
+    phaseStep: 0.26,
+    turnStep: 0.52,
+    quietTurnStep: 1.2,
+    turnFloor: Math.log(LEAST_LISTED_GAIN),
+    pointsPerDecade: 6,
+    cap: CAP,
+  },
+  live: {
+    logStep: 0.6,
+    phaseStep: 0.6,
+    turnStep: 0.8,
+    quietTurnStep: 1.2,
+    turnFloor: Math.log(LEAST_LISTED_GAIN),
+    pointsPerDecade: 4,
+    cap: CAP,
+  },
 };
 
 /**

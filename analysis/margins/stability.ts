@@ -2,8 +2,7 @@ import type { ClosedLoop } from '@/contract';
 import type { LoopModel } from '@/analysis/loop/model';
 import type { Complex } from '@/analysis/numbers/complex';
 import { closedLoopPoles } from './closed-loop-poles';
-import type { GainCrossover } from './crossovers';
-import { clockwiseEncirclements } from './encirclements';
+import { clockwiseEncirclements, type GainPassages } from './encirclements';
 import { limitOf } from './end-values';
 import { hiddenModes } from './hidden-modes';
 import type { LoopFunction } from './loop-function';
@@ -20,8 +19,7 @@ export interface Stability extends Omit<ClosedLoop, 'poles'> {
   readonly onBoundary: boolean;
 }
 
-export interface Crossings {
-  readonly crossovers: readonly GainCrossover[];
+export interface Crossings extends GainPassages {
   /** Least |1 + L| on the axis. */
   readonly modulus: number;
 }
@@ -56,7 +54,7 @@ const byEncirclements = (
   crossings: Crossings,
   open: { openUnstable: number; hidden: readonly Complex[] },
 ): Stability => {
-  const encirclements = clockwiseEncirclements(loop, crossings.crossovers) || 0;
+  const encirclements = clockwiseEncirclements(loop, crossings) || 0;
   const hiddenOnAxis = open.hidden.filter((mode) => mode.re === 0).length;
   const onBoundary = crossings.modulus < ON_BOUNDARY;
   const endless = Math.abs(limitOf(loop.atInfinity.loop, 'infinity')) >= 1;

@@ -1,4 +1,7 @@
-import { analyseLoop } from '@/analysis';
+import { analyseLoop, buildLoop } from '@/analysis';
+import { ContinuousLoop } from '@/analysis/margins/continuous-loop';
+import { loopNumbers } from '@/analysis/margins/loop-numbers';
+import { judgeStability } from '@/analysis/margins/stability';
 import { Loop, type Analysis, type LoopInput } from '@/contract';
 
 type Plant = LoopInput['plant'];
@@ -43,3 +46,12 @@ export const loopOf = (plant: Plant, controller: Controller = pid(1), rest: Part
 /** The numbers alone: no curves. */
 export const numbersOf = (plant: Plant, controller: Controller = pid(1), rest: Partial<LoopInput> = {}): Analysis =>
   analyseLoop(loopOf(plant, controller, rest), { curves: false });
+
+/** What the frequency axis says, without time responses: for properties that ask hundreds of loops. */
+export const frequencyNumbersOf = (plant: Plant, controller: Controller = pid(1), detail: 'full' | 'live' = 'full') => {
+  const model = buildLoop(loopOf(plant, controller));
+  const loop = new ContinuousLoop(model);
+  const numbers = loopNumbers(loop, detail);
+  const closedLoop = judgeStability(model, loop, { ...numbers, modulus: numbers.margins.modulus });
+  return { ...numbers, closedLoop, evaluations: loop.evaluations };
+};
