@@ -11,12 +11,19 @@ export type StabilitySpans = Partial<Record<Gain, StabilitySpan>>;
 /** Milliseconds of one slice: short enough that a finger put down meanwhile is answered in its own frame. */
 const SLICE_MS = 6;
 
+/** Seconds of a response that nobody looks at: the shortest saves the time to find how long it would be. */
+const UNSEEN = 0.01;
+
 const fields = { kp: 'kp', ki: 'ki', kd: 'kd', filterTime: 'derivativeFilterTime' } as const;
 
 function stableWith(loop: Loop, gain: Gain, value: number): boolean {
   if (gain === 'filterTime' && value < 0) return true;
   try {
-    const changed = { ...loop, controller: { ...loop.controller, [fields[gain]]: value } };
+    const changed = {
+      ...loop,
+      controller: { ...loop.controller, [fields[gain]]: value },
+      responses: { ...loop.responses, duration: UNSEEN },
+    };
     return analyseLoop(changed, { curves: false, detail: 'live' }).closedLoop.stable;
   } catch (error) {
     // Where a loop has no meaning there is no edge to draw either.
