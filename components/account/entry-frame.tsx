@@ -24,7 +24,7 @@ export function EntryFrame({ title, lead, children }: PropsWithChildren<EntryFra
       <DocumentTitle parts={[title]} />
       {phone && (
         <View style={[styles.band, border]}>
-          <EntryPicture />
+          <EntryPicture view="near" />
         </View>
       )}
       <ScrollView

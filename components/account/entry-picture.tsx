@@ -8,7 +8,8 @@ import { entryLoop, nearestMs, nearestPoint } from './entry-loop';
 
 const SCALE = 323;
 const LIMIT = 1.7;
-const box = { x: -660, y: -370, width: 940, height: 920 };
+/** What is seen of the plane: the whole, and on a phone the place where the loop comes nearest. */
+const views = { whole: '-660 -370 940 920', near: '-330 -60 390 150' };
 
 const at = ({ re, im }: { re: number; im: number }) => ({ x: re * SCALE, y: -im * SCALE });
 const summit = at({ re: -1, im: 0 });
@@ -18,14 +19,14 @@ const kerb = circleKerb(contourRadius(LIMIT) * SCALE);
 const contours = [...contourLevels.fine, ...contourLevels.strong];
 
 /** A loop on the contours of |S|, and the kerb round −1: what the product is about, computed like everything else in it. */
-export function EntryPicture() {
+export function EntryPicture({ view = 'whole' }: { view?: keyof typeof views }) {
   const { colors } = useTheme();
   const label = { fontFamily: fonts.narrow[600], fontSize: 13, fill: colors.ink };
   return (
     <Svg
       width="100%"
       height="100%"
-      viewBox={`${box.x} ${box.y} ${box.width} ${box.height}`}
+      viewBox={views[view]}
       preserveAspectRatio="xMidYMid slice"
       role="img"
       aria-label={`A loop's Nyquist curve on contours of the sensitivity. It comes nearest to −1 with Ms ${formatFactor(nearestMs)}, just outside the kerb at ${formatFactor(LIMIT)}.`}

@@ -34,7 +34,7 @@ export function FieldFrame({ id, label, unit, hint, error, compact, children }: 
       >
         {children}
         {unit ? (
-          <Text step="small" tone="ink3" style={styles.unit}>
+          <Text step="small" tone="ink3" style={styles.unit} selectable={false}>
             {unit}
           </Text>
         ) : null}
@@ -61,6 +61,7 @@ const styles = StyleSheet.create({
   box: { height: 52, borderWidth: line.field, borderRadius: corner, flexDirection: 'row', alignItems: 'center' },
   compact: { height: 48 },
   wrong: { borderWidth: 2 },
-  unit: { paddingRight: 12 },
+  // Over the field's own right end, so that the focus ring goes round both.
+  unit: { position: 'absolute', right: 12, pointerEvents: 'none' },
   error: { borderLeftWidth: 4, paddingLeft: 8 },
 });

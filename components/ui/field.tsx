@@ -22,7 +22,7 @@ export function Field({ label, unit, hint, error, compact, numeric, ...input }: 
         aria-invalid={error ? true : undefined}
         aria-describedby={describedBy}
         autoCapitalize={input.autoCapitalize ?? 'none'}
-        style={[styles.input, numeric ? styles.number : styles.text, { color: colors.ink }]}
+        style={[styles.input, numeric ? styles.number : styles.text, unit ? styles.besideUnit : null, { color: colors.ink }]}
       />
     </FieldFrame>
   );
@@ -30,6 +30,7 @@ export function Field({ label, unit, hint, error, compact, numeric, ...input }: 
 
 const styles = StyleSheet.create({
   input: { flex: 1, minWidth: 0, height: '100%', paddingHorizontal: 12, borderRadius: 3 },
+  besideUnit: { paddingRight: 52 },
   text: { fontFamily: fonts.text[400], fontSize: 16 },
   number: { fontFamily: fonts.narrow[600], fontSize: 19 },
 });
