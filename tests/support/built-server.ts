@@ -12,6 +12,9 @@ export interface BuiltServer {
   readonly stop: () => Promise<number | null>;
 }
 
+/** What the test runner puts into the environment; a newcomer starts without it. */
+const runnersOwn = ['NODE_ENV', 'BASE_URL', 'MODE', 'DEV', 'PROD', 'SSR'];
+
 const START_TIMEOUT_MS = 240_000;
 
 function freePort(): Promise<number> {
@@ -30,9 +33,8 @@ export async function startBuiltServer({ demo = true } = {}): Promise<BuiltServe
   const port = await freePort();
   const dataDir = mkdtempSync(join(tmpdir(), 'kerbline-browser-'));
   const url = `http://127.0.0.1:${port}`;
-  // A test runner's own NODE_ENV is not what a newcomer starts with.
   const env = { ...process.env, PORT: String(port), HOST: '127.0.0.1', DATA_DIR: dataDir, DEMO: demo ? '1' : '0' };
-  Reflect.deleteProperty(env, 'NODE_ENV');
+  for (const name of runnersOwn) Reflect.deleteProperty(env, name);
   const child = spawn(process.execPath, ['scripts/start.mjs'], {
     env,
     stdio: ['ignore', 'pipe', 'pipe'],

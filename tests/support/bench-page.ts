@@ -1,0 +1,76 @@
+import type { SizeName } from './browser';
+import type { Visitor } from './visitor';
+
+/** The bench as a person works it, at either size. */
+export class BenchPage {
+  constructor(
+    readonly visitor: Visitor,
+    readonly size: SizeName,
+  ) {}
+
+  private get page() {
+    return this.visitor.page;
+  }
+
+  async open(projectId: string): Promise<void> {
+    await this.visitor.open(`/projects/${projectId}/bench`);
+    await this.ready();
+  }
+
+  async ready(): Promise<void> {
+    await this.page.getByRole('region', { name: 'Gains' }).waitFor();
+    await this.chart(/Nyquist curve/).waitFor({ state: 'attached' });
+  }
+
+  chart(name: RegExp) {
+    return this.page.getByRole('img', { name }).first();
+  }
+
+  /** What every chart says of itself: moves with the loop. */
+  descriptions(): Promise<string[]> {
+    const charts = this.page.getByRole('img', { name: /A, now/ });
+    return charts.evaluateAll((images) => images.map((image) => image.getAttribute('aria-label') ?? ''));
+  }
+
+  strip(): Promise<string> {
+    return this.page.getByRole('region', { name: 'Verdict and margins' }).innerText();
+  }
+
+  rule(gain: string) {
+    return this.page.getByRole('slider', { name: new RegExp(`^${gain},`) }).first();
+  }
+
+  /** Makes one gain the one that rule and nudges move; on a wide screen each has its own. */
+  async choose(gain: string): Promise<void> {
+    if (this.size === 'phone') await this.page.getByRole('radio', { name: new RegExp(`^${gain} `) }).click();
+  }
+
+  async nudgeUp(gain: string): Promise<void> {
+    await this.choose(gain);
+    await this.visitor.press(`${gain} up 1 %`);
+  }
+
+  /** Types a gain: into its field on a wide screen, on the keypad of a phone. */
+  async type(gain: string, text: string): Promise<void> {
+    if (this.size === 'wide') {
+      const field = this.page.getByRole('textbox', { name: new RegExp(`^${gain},`) });
+      await field.fill(text);
+      await field.press('Enter');
+      return;
+    }
+    await this.choose(gain);
+    await this.visitor.press(new RegExp(`^${gain} .*enter a number`));
+    const keypad = this.page.getByRole('dialog');
+    await keypad.waitFor();
+    for (const key of text) await keypad.getByRole('button', { name: key === '.' ? 'Decimal point' : key, exact: true }).click();
+    await keypad.getByRole('button', { name: `Set ${gain} to ${text}` }).click();
+  }
+
+  keep() {
+    return this.visitor.button(/^Keep/);
+  }
+
+  status() {
+    return this.page.getByRole('region', { name: 'Gains' }).getByRole('status').first();
+  }
+}
