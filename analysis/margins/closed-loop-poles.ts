@@ -12,7 +12,7 @@ import { add, expandRoots } from '@/analysis/numbers/polynomial';
  * Both stay factored. The expanded sum only gives starting points; the iteration itself reads 1 + L and its derivative
  * from the factors, which keeps digits that expanded coefficients of twelve poles over three decades no longer hold.
  *
- * @see REFERENCES Aberth1973
+ * @see REFERENCES Aberth 1973
  */
 export const closedLoopPoles = (model: LoopModel): Complex[] => {
   const parts = [model.plant, model.filters, model.controller, model.sensor];

@@ -16,7 +16,7 @@ export interface GainPassages {
  * their two ends: no grid, no step size. The phase starts on the real axis at s = 0 (or on the small arc round it) and falls
  * by 180° at an undamped pole, as the indented contour does. The lower half of the contour mirrors the upper.
  *
- * @see REFERENCES Nyquist1932
+ * @see REFERENCES Nyquist 1932
  */
 export const clockwiseEncirclements = (loop: LoopFunction, { crossovers, startsOutside }: GainPassages): number => {
   let outside = startsOutside;

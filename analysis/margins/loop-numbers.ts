@@ -2,12 +2,12 @@ import type { Analysis } from '@/contract';
 import { fallsFrom, risesThroughHalfPower } from './bandwidth';
 import { gainCrossovers, phaseCrossovers } from './crossovers';
 import type { GainPassages } from './encirclements';
-import { limitOf, valuesAtInfinity, valuesAtZero, type EndValues } from './end-values';
+import { limitOf, valuesAtInfinity, valuesAtZero } from './end-values';
 import type { LoopFunction } from './loop-function';
 import { decibels, delayMargin, diskMargin, gainMargin, phaseMargin, phaseMarginDegrees } from './margins';
 import { supremum, type Supremum } from './peak';
 import { Probe } from './probe';
-import * as quantities from './quantities';
+import { balancedSensitivity, complementarySensitivity, noiseSensitivity, referenceResponse, sensitivity } from './quantities';
 import { LOG } from './sample';
 import { searchGrid, type Detail } from './search-grid';
 
@@ -17,6 +17,8 @@ export type LoopNumbers = Pick<Analysis, 'margins' | 'sensitivity' | 'bandwidth'
 /** A peak beyond this is a pole on the axis as far as double precision can tell; JSON has no infinity, and no decibels of 0. */
 const HIGHEST_PEAK = 1e15;
 
+const PEAKING = { sensitivity, complementarySensitivity, balancedSensitivity, noiseSensitivity };
+
 /** Margins, peaks and bandwidths of a loop. @throws LoopError where the loop turns through too many crossovers */
 export const loopNumbers = (loop: LoopFunction, detail: Detail): LoopNumbers => {
   const grid = searchGrid(loop, detail);
@@ -25,8 +27,7 @@ export const loopNumbers = (loop: LoopFunction, detail: Detail): LoopNumbers => 
   const phase = loop.isZero ? [] : phaseCrossovers(loop, probe);
   const zero = valuesAtZero(loop);
   const infinity = valuesAtInfinity(loop);
-  const peak = (name: Exclude<keyof EndValues, 'referenceResponse'>) =>
-    supremum(probe, quantities[name], { atZero: zero[name], atInfinity: infinity[name] });
+  const peak = (name: keyof typeof PEAKING) => supremum(probe, PEAKING[name], { atZero: zero[name], atInfinity: infinity[name] });
   const ms = reported(peak('sensitivity'));
   const noise = peak('noiseSensitivity');
   return {
@@ -51,9 +52,9 @@ export const loopNumbers = (loop: LoopFunction, detail: Detail): LoopNumbers => 
       noiseGain: { value: Number.isFinite(noise.value) ? noise.value : null, frequency: noise.frequency },
     },
     bandwidth: {
-      closedLoop: fallsFrom(probe, quantities.complementarySensitivity, zero.complementarySensitivity),
-      reference: fallsFrom(probe, quantities.referenceResponse, zero.referenceResponse),
-      sensitivity: risesThroughHalfPower(probe, quantities.sensitivity),
+      closedLoop: fallsFrom(probe, complementarySensitivity, zero.complementarySensitivity),
+      reference: fallsFrom(probe, referenceResponse, zero.referenceResponse),
+      sensitivity: risesThroughHalfPower(probe, sensitivity),
     },
   };
 };

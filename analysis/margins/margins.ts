@@ -46,7 +46,7 @@ export const delayMargin = (crossovers: readonly GainCrossover[], gainAtInfinity
   return best;
 };
 
-/** The balanced disk margin from the peak of |(S − T)/2|. @see REFERENCES Seiler2020, section "Symmetric disk margin" */
+/** The balanced disk margin from the peak of |(S − T)/2|. @see REFERENCES Seiler 2020, section "Symmetric disk margin" */
 export const diskMargin = (peak: number): Margins['disk'] => {
   const alpha = 1 / peak;
   return {

@@ -42,7 +42,7 @@ export const complementarySensitivity: Quantity = {
   },
 };
 
-/** |(S − T)/2| = |1 − L|/(2·|1 + L|), whose slope is −2·Re(λ·L/(1 − L²)). @see REFERENCES Seiler2020 */
+/** |(S − T)/2| = |1 − L|/(2·|1 + L|), whose slope is −2·Re(λ·L/(1 − L²)). @see REFERENCES Seiler 2020 */
 export const balancedSensitivity: Quantity = {
   value: (t, row) => logAbsolute(1 - t[row + S.RE], t[row + S.IM]) - Math.LN2 - logDifference(t, row),
   slope: (t, row) => {

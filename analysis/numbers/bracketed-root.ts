@@ -15,7 +15,7 @@ export interface Bracket {
  * bracket, bisection where they do not. Typically 6 to 9 evaluations.
  *
  * @returns the zero, within four roundings
- * @see REFERENCES Brent1973, chapter 4
+ * @see REFERENCES Brent 1973, chapter 4
  * @example bracketedRoot((x) => x * x - 2, { a: 1, fa: -1, b: 2, fb: 2 }) // 1.414213562373095
  */
 export const bracketedRoot = (f: (x: number) => number, bracket: Bracket): number => {

@@ -18,7 +18,7 @@ export type NewtonStep = (re: number, im: number, step: Float64Array) => boolean
  * All zeros of an analytic function with as many zeros as starting points, found together:
  * Newton's step with the other approximations deflated implicitly. Cubic at simple roots, linear at multiple ones.
  *
- * @see REFERENCES Aberth1973, equation (4)
+ * @see REFERENCES Aberth 1973, equation (4)
  */
 export const ehrlichAberth = (start: readonly Complex[], newtonStep: NewtonStep): Complex[] => {
   const re = Float64Array.from(start, (z) => z.re);

@@ -14,7 +14,7 @@ const NEWTON_STEPS = 4;
  *
  * @param roots with exactly paired conjugates
  * @param ascending the coefficients they came from
- * @see REFERENCES Zeng2005
+ * @see REFERENCES Zeng 2005
  */
 export const collapseClusters = (roots: readonly Complex[], ascending: readonly number[]): Complex[] => {
   const upper = roots.filter((root) => root.im >= 0);

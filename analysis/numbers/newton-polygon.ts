@@ -8,7 +8,7 @@ const OFFSET = 0.7;
  * They have the right magnitudes even where the roots spread over many decades.
  *
  * @param ascending coefficients from the constant term up; first and last are not zero
- * @see REFERENCES Bini1996, section 3
+ * @see REFERENCES Bini 1996, section 3
  */
 export const startingPoints = (ascending: readonly number[]): Complex[] => {
   const hull: number[] = [];

@@ -13,7 +13,7 @@ const ROUNDINGS = 4 * 2 ** -53;
  * coefficients allow it. The variable is scaled to the roots' geometric mean first, so that no power overflows.
  *
  * @param descending coefficients, highest power first; not all zero
- * @see REFERENCES Aberth1973, Bini1996
+ * @see REFERENCES Aberth 1973, Bini 1996
  * @example polynomialRoots([0.35, 1, 0]) // [{ re: 0, im: 0 }, { re: -2.857142857142857, im: 0 }]
  */
 export const polynomialRoots = (descending: readonly number[]): Complex[] => {

@@ -16,7 +16,8 @@ const TABLE = [
   [0.8, 69.8599989, 1, 0.870896319, 1.223030095],
 ];
 
-describe.each(TABLE)('a second-order loop with damping %d', (damping, phase, mt, bandwidth, ms) => {
+describe.each(TABLE)('a second-order loop with damping %d', (...row) => {
+  const [damping, phase, mt, bandwidth, ms] = row;
   const { margins, sensitivity, bandwidth: found, closedLoop } = numbersOf(coefficients([1], [1, 2 * damping, 0]));
 
   it('has the phase margin, peaks and bandwidth of the closed forms', () => {

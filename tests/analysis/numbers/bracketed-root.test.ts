@@ -21,7 +21,8 @@ describe('a root in a bracket', () => {
     ['a ninefold root', (x: number) => x ** 9, -1, 4, 0, 125],
     ['a step of 1e12', (x: number) => Math.atan(1e12 * (x - 0.3)), 0, 1, 0.3, 60],
     ['a pole beside the root', (x: number) => 1 / (x - 1.0000001) + 1e7, 1.0000000000001, 1.00000009, 1.0, 60],
-  ])('%s, within its ceiling of evaluations', (_, f, a, b, want, ceiling) => {
+  ])('%s, within its ceiling of evaluations', (...row) => {
+    const [, f, a, b, want, ceiling] = row;
     const { root, evaluations } = solve(f, a, b);
     expect(Math.abs(root - want)).toBeLessThan(1e-7);
     expect(Math.abs(f(root))).toBeLessThanOrEqual(Math.max(Math.abs(f(root * (1 + 1e-15))), Math.abs(f(root * (1 - 1e-15))), 1e-300));
