@@ -1,10 +1,16 @@
 import { View } from 'react-native';
 import { Menu } from '@/components/ui/menu';
 import { Text } from '@/components/ui/text';
-import type { SettingsSheetProps } from './settings-sheet';
+import type { Compared } from '../compare/use-compared';
+import type { ChangeLink } from '../subject/bench-link';
+
+interface CompareChoiceProps {
+  compared: Compared;
+  onLink: ChangeLink;
+}
 
 /** Which kept revision lies beside as B, dashed. */
-export function CompareChoice({ compared, onLink }: Pick<SettingsSheetProps, 'compared' | 'onLink'>) {
+export function CompareChoice({ compared, onLink }: CompareChoiceProps) {
   const { revision, choices } = compared;
   const none = { key: 'none', label: 'Nothing', current: revision === null, onSelect: () => onLink({ b: 'none' }) };
   const items = choices.map((number) => ({

@@ -7,16 +7,16 @@ import { Heading, Text } from '@/components/ui/text';
 import { useBench, useDraft, useSettings } from '../bench-context';
 import type { Compared } from '../compare/use-compared';
 import type { Settings } from '../draft/settings';
-import type { BenchLink } from '../subject/bench-link';
+import type { BenchLink, ChangeLink } from '../subject/bench-link';
 import { CompareChoice } from './compare-choice';
 import { KeyList } from './key-list';
 import { StepFields } from './step-fields';
 
-export interface SettingsSheetProps {
+interface SettingsSheetProps {
   open: boolean;
   onClose: () => void;
   link: BenchLink;
-  onLink: (change: { b?: string; step?: string; load?: string }) => void;
+  onLink: ChangeLink;
   compared: Compared;
 }
 

@@ -1,13 +1,18 @@
 import { StyleSheet, View } from 'react-native';
 import { NumberField } from '@/components/ui/number-field';
 import { useBench } from '../bench-context';
-import type { SettingsSheetProps } from './settings-sheet';
+import type { BenchLink, ChangeLink } from '../subject/bench-link';
+
+interface StepFieldsProps {
+  link: BenchLink;
+  onLink: ChangeLink;
+}
 
 const refuse = (value: number) => (Math.abs(value) <= 1e12 ? null : 'Of magnitude at most 1e12.');
 const written = (size: number): string | undefined => (size === 1 ? undefined : String(size));
 
 /** How large the steps are whose responses are drawn. They stand in the address, since they are how one looks and not what is kept. */
-export function StepFields({ link, onLink }: Pick<SettingsSheetProps, 'link' | 'onLink'>) {
+export function StepFields({ link, onLink }: StepFieldsProps) {
   const { units } = useBench().subject.plant;
   return (
     <View style={styles.row}>
