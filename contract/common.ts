@@ -4,8 +4,22 @@ import { z } from 'zod';
 
 export const Id = z.uuid().meta({ description: 'UUID made by the server' });
 export const Timestamp = z.iso.datetime().meta({ description: 'ISO 8601, UTC' });
-export const Name = z.string().trim().min(1, 'A name has at least one character.').max(120, 'A name has at most 120 characters.');
-export const Note = z.string().trim().max(2000, 'A note has at most 2,000 characters.');
+
+/** No control characters, no half characters, nothing that turns the direction of what stands beside it. */
+export const ONE_LINE = /^[^\p{Cc}\p{Cs}\u2028\u2029\u202a-\u202e\u2066-\u2069]*$/u;
+const SEVERAL_LINES = /^(?:[^\p{Cc}\p{Cs}]|[\n\r\t])*$/u;
+
+export const Name = z
+  .string()
+  .trim()
+  .min(1, 'A name has at least one character.')
+  .max(120, 'A name has at most 120 characters.')
+  .regex(ONE_LINE, 'A name is one line of text, without control characters.');
+export const Note = z
+  .string()
+  .trim()
+  .max(2000, 'A note has at most 2,000 characters.')
+  .regex(SEVERAL_LINES, 'A note is text, without control characters.');
 export const Revision = z.int().min(1, 'Revisions are counted from 1.');
 export const Email = z.email('An e-mail address looks like name@team.example.').max(254).meta({ example: 'name@team.example' });
 

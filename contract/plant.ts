@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { Id, Name, Note, Revision, Timestamp } from './common';
+import { Id, Name, Note, ONE_LINE, Revision, Timestamp } from './common';
 import { PlantModel, Sensor } from './plant-model';
 
 const Seconds = z.number().min(0, 'A delay is 0 or more.').max(1e4);
@@ -7,12 +7,14 @@ export const DelayRow = z
   .strictObject({ source: Name, nominal: Seconds, worst: Seconds, basis: z.enum(['measured', 'assumed']), included: z.boolean() })
   .meta({ id: 'DelayRow' });
 
+const Unit = z.string().trim().max(20, 'A unit has at most 20 characters.').regex(ONE_LINE, 'A unit is one line of text.');
+
 const content = {
   plant: PlantModel,
   sensor: Sensor.nullable().default(null),
   deadTimeBasis: z.enum(['measured', 'assumed']).nullable().default(null).meta({ description: 'null: nobody said' }),
   delayBudget: z.array(DelayRow).max(20, 'At most 20 rows.').default([]),
-  units: z.strictObject({ input: z.string().trim().max(20), output: z.string().trim().max(20) }).default({ input: '', output: '' }),
+  units: z.strictObject({ input: Unit, output: Unit }).default({ input: '', output: '' }),
 };
 
 export const PlantContent = z.strictObject(content);

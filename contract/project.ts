@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { Id, Name, Note, Quantity, Role, Timestamp, Verdict } from './common';
+import { Id, Name, Note, ONE_LINE, Quantity, Role, Timestamp, Verdict } from './common';
 
 /** The number that stands first: the worst over the cases of the newest analysis. */
 export const Headline = z
@@ -18,7 +18,7 @@ export const Headline = z
 export type Headline = z.infer<typeof Headline>;
 
 const Description = Note;
-const Vehicle = z.string().trim().max(120, 'At most 120 characters.');
+const Vehicle = z.string().trim().max(120, 'At most 120 characters.').regex(ONE_LINE, 'One line of text, without control characters.');
 
 export const CreateProject = z
   .strictObject({ name: Name, vehicle: Vehicle.optional(), description: Description.optional(), teamId: Id.optional() })

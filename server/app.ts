@@ -34,6 +34,9 @@ export function createApp(context: Context, routes: readonly Route[] = allRoutes
     throw new NotFound('There is no such address in this API.');
   });
   serveClient(app, config.clientDir);
+  app.use(() => {
+    throw new NotFound('There is nothing at this address.');
+  });
   app.use(problemHandler(log));
   return app;
 }

@@ -14,6 +14,9 @@ const BESIDE_AXIS_POINT = [1e-2, 1e-4, 1e-6, 1e-8, 1e-10, 1e-12];
 /** Below this gain a dead time's crossovers are not listed, numerics.md "Margins". */
 export const LEAST_LISTED_GAIN = 1e-3;
 
+/** Beyond this ratio of the fastest to the slowest motion a frequency's powers leave the range of numbers. */
+const WIDEST_SPAN = 1e150;
+
 /** Rows beyond which a loop is refused rather than waited for: about 10,000 turns of dead time. */
 const CAP = 60_000;
 
@@ -43,10 +46,11 @@ const FINENESS: Record<Detail, Fineness> = {
 
 /**
  * The whole axis, sampled finely enough that every crossing and peak lies between two rows that give it away.
- * @throws LoopError where the dead time turns the loop through more crossovers than can be worked through
+ * @throws LoopError where the dead time turns the loop through more crossovers than can be worked through, or its motions are too far apart
  */
 export const searchGrid = (loop: LoopFunction, detail: Detail): Grid => {
   const { low, high } = searchRange(loop);
+  if (!(low > 0 && high / low <= WIDEST_SPAN)) throw tooFarApart();
   const fineness = FINENESS[detail];
   const beside = loop.axisFrequencies.flatMap((omega) => BESIDE_AXIS_POINT.flatMap((gap) => [omega * (1 - gap), omega * (1 + gap)]));
   const axis = new Set(loop.axisFrequencies);
@@ -78,4 +82,11 @@ const tooManyTurns = () =>
     pointer: '/plant/deadTime',
     detail: 'This loop turns through too many crossovers to analyse: its dead time is very long beside its fastest motion.',
     code: 'tooMuchToCompute',
+  });
+
+const tooFarApart = () =>
+  new LoopError({
+    pointer: '/plant',
+    detail: 'The fastest and the slowest motion of this loop are too far apart: a coefficient or a time is all but zero beside the others.',
+    code: 'outOfRange',
   });

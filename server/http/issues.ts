@@ -37,9 +37,11 @@ function isMalformed(issue: Issue, value: unknown): boolean {
   return issue.code === 'invalid_union' && kindOf(value) !== 'string';
 }
 
+const NO_BODY = 'A body is needed: JSON, sent with Content-Type: application/json.';
+
 function detailOf(issue: Issue, value: unknown): string {
   if (issue.code === 'unrecognized_keys') return issue.message;
-  if (value === undefined) return 'This field is needed.';
+  if (value === undefined) return issue.path.length === 0 ? NO_BODY : 'This field is needed.';
   if (issue.code === 'invalid_type') return `This is ${kindOf(value)}; ${issue.expected} is needed.`;
   if (issue.code === 'invalid_value') return `One of ${issue.values.map(String).join(', ')} is needed.`;
   if (issue.code === 'invalid_union') return 'This is none of the kinds known here.';

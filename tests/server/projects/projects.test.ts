@@ -152,6 +152,23 @@ describe('projects', () => {
     });
   });
 
+  it('carry any name of one line as it was written', async () => {
+    for (const name of ['Ω, αβγ, 速度', '<b>bold</b> & "quoted"', 'x'.repeat(120), 'smile 🙂'])
+      expect((await ada.call<Project>('POST', '/api/projects', { name })).body.name).toBe(name);
+  });
+
+  it.each([
+    ['a zero byte', '"a\\u0000b"'],
+    ['half a character', '"a\\ud800b"'],
+    ['a line end', '"a\\nb"'],
+    ['a turn of direction', '"a\\u202eb"'],
+    ['121 characters', JSON.stringify('x'.repeat(121))],
+    ['blanks alone', '"   "'],
+  ])('refuse a name with %s', async (_what, name) => {
+    const { body } = await ada.call('POST', '/api/projects', `{"name":${name}}`);
+    expect(body).toMatchObject({ status: 422, errors: [{ pointer: '/name' }] });
+  });
+
   it('are made once per Idempotency-Key', async () => {
     const headers = { 'idempotency-key': 'first-light' };
     const first = await ada.call<Project>('POST', '/api/projects', { name: 'Once' }, headers);
