@@ -1,6 +1,12 @@
+const path = require('node:path');
 const { getDefaultConfig } = require('expo/metro-config');
 
 const config = getDefaultConfig(__dirname);
+
+// Builds and data come and go while Metro runs; it must neither watch them nor bundle from them.
+const ours = (folder) => new RegExp(`^${path.join(__dirname, folder).replace(/[\\^$.*+?()[\]{}|/]/g, '\\$&')}(/|$)`);
+config.resolver.blockList = [config.resolver.blockList, ...['dist', 'data', 'screenshots', '.git'].map(ours)].flat().filter(Boolean);
+
 const resolve = config.resolver.resolveRequest;
 
 // What is imported by packages but never rendered here, as [who imports, what]. Each resolves to an empty module; together they are a

@@ -23,7 +23,13 @@ const children = [
   }),
 ];
 
-const stop = () => children.forEach((child) => child.kill('SIGTERM'));
+// One that ends takes the other with it; the server treats a second signal as impatience.
+let stopping = false;
+function stop() {
+  if (stopping) return;
+  stopping = true;
+  for (const child of children) if (child.exitCode === null) child.kill('SIGTERM');
+}
 process.on('SIGINT', stop);
 process.on('SIGTERM', stop);
-children.forEach((child) => child.on('exit', stop));
+for (const child of children) child.on('exit', stop);
