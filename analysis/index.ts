@@ -1,9 +1,10 @@
 /** The contents page of the engine: what others may use. */
-export { analyseLoop, engineVersion, type AnalyseOptions } from './analyse-loop';
+export { analyseLoop, engineVersion, withResponses, type AnalyseOptions } from './analyse-loop';
 export { loopAt, type LoopPoint } from './loop-at';
 export { buildLoop } from './loop/build-loop';
 export { describePlant, type PlantDescription } from './loop/describe-plant';
 export { LoopError, type LoopErrorCode } from './loop/loop-error';
 export type { LoopModel, ParallelGains, Rational } from './loop/model';
 export { toParallelGains } from './loop/parallel-gains';
+export { plantResponse, type PlantResponse } from './plant-response';
 export type { Complex } from './numbers/complex';

@@ -7,7 +7,7 @@ import type { EndOfAxis, LoopFunction } from './loop-function';
 import * as S from './sample';
 
 /** More evaluations than any loop needs that a person would draw; past it the loop is refused rather than waited for. */
-const BUDGET = 400_000;
+export const MOST_EVALUATIONS = 400_000;
 
 /** L has no value at an undamped pole or zero itself; this near to it, it has. */
 const BESIDE = 1 + 2 ** -44;
@@ -50,7 +50,7 @@ export class ContinuousLoop implements LoopFunction {
 
   sampleAt(omega: number, table: S.Table, offset: number): void {
     this.evaluations += 1;
-    if (this.evaluations > BUDGET) throw tooMuch();
+    if (this.evaluations > MOST_EVALUATIONS) throw tooMuch();
     const { plant, command, sensor, forward, deadTime } = this;
     const beside = this.axisFrequencies.includes(omega) ? omega * BESIDE : omega;
     plant.evaluate(beside);

@@ -11,7 +11,7 @@ import type { LoopFunction } from './loop-function';
 const ON_BOUNDARY = 1e-9;
 
 export interface Stability extends Omit<ClosedLoop, 'poles'> {
-  /** null with dead time: infinitely many. */
+  /** null with dead time in the loop: infinitely many. */
   readonly poles: readonly Complex[] | null;
   /** Modes of Re s ≥ 0 that the loop cancels inside itself. */
   readonly hidden: readonly Complex[];
@@ -26,7 +26,7 @@ export interface Crossings extends GainPassages {
 
 /**
  * Closed-loop stability by numerics.md "Stability": roots of numerator + denominator without dead time, Z = N + P with it.
- * Boundary poles and hidden modes count as unstable.
+ * Boundary poles and hidden modes count as unstable. A loop whose gain is zero is open: its poles are those of its parts.
  */
 export const judgeStability = (model: LoopModel, loop: LoopFunction, crossings: Crossings): Stability => {
   const parts = [model.plant, model.filters, model.controller, model.sensor];
@@ -34,8 +34,8 @@ export const judgeStability = (model: LoopModel, loop: LoopFunction, crossings: 
   const openUnstable = openPoles.filter((pole) => pole.re > 0).length;
   const hidden = hiddenModes(parts);
   const size = smallestMagnitude([...openPoles, ...parts.flatMap((part) => part.zeros)]);
-  if (loop.deadTime > 0) return byEncirclements(loop, crossings, { openUnstable, hidden });
-  const poles = closedLoopPoles(model);
+  if (loop.deadTime > 0 && !loop.isZero) return byEncirclements(loop, crossings, { openUnstable, hidden });
+  const poles = loop.isZero ? openPoles : closedLoopPoles(model);
   const boundary = poles.filter((pole) => isOnBoundary(pole, size)).length;
   const inside = poles.filter((pole) => pole.re > 0 && !isOnBoundary(pole, size)).length;
   return {

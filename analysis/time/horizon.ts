@@ -13,7 +13,14 @@ const HORIZON_GROWTH = 1.5;
 export const GROWN = 10;
 const SWINGS = 60;
 
-/** Panels of time that one response may cost: well under a second of work. */
+/** An unstable response whose input does not wake what is unstable is watched for so many times the time it takes to rest. */
+const WATCH_PER_REST = 50;
+const RESTING = 1e-6;
+
+/** Past this many first horizons, time itself has no digits left beside the first panels. */
+const LONGEST = 1e15;
+
+/** Panels of time that one response may fill. */
 const MAX_PANELS = 60_000;
 
 /** An output beyond this many times the step is no longer followed. */
@@ -27,17 +34,18 @@ export type Enough = (output: Curve, horizon: number) => boolean;
 
 /** Simulates on and on, each time half as far again, until enough was seen; answers how far that is. */
 export function simulateUntil(simulation: Simulation, firstHorizon: number, enough: Enough): number | Failure {
-  for (let horizon = firstHorizon; ; horizon *= HORIZON_GROWTH) {
+  for (let horizon = firstHorizon; horizon < LONGEST * firstHorizon; horizon *= HORIZON_GROWTH) {
     const failure = simulateTo(simulation, horizon);
     if (failure) return failure;
     if (enough(simulation.output, horizon)) return horizon;
   }
+  return 'long';
 }
 
 /** Simulates up to `horizon`, and says if that failed. */
 export function simulateTo(simulation: Simulation, horizon: number): Failure | null {
   const known = simulation.panels;
-  const arrived = simulation.advanceTo(horizon, MAX_PANELS);
+  const arrived = simulation.advanceTo(horizon, { panels: MAX_PANELS, size: MAX_SIZE });
   if (!(simulation.output.size < MAX_SIZE && simulation.control.size < MAX_SIZE)) return 'boundless';
   if (!isResolved(simulation.output, known) || !isResolved(simulation.control, known)) return 'coarse';
   return arrived ? null : 'long';
@@ -57,10 +65,18 @@ export function hasSettled(bandFor: (peak: number) => Band): Enough {
   };
 }
 
-/** Enough of an unstable response: ten times the unit step, or many swings at a size that hardly grows. */
+/** Enough of an unstable response: ten times the unit step, many swings at a size that hardly grows, or a long rest. */
 export function hasGrown(output: Curve, horizon: number): boolean {
   const grown = output.values.findIndex((value) => Math.abs(value) >= GROWN);
-  return (grown >= 0 && nodeTime(output, grown) < horizon) || horizon >= SWINGS * firstTurn(output);
+  return (grown >= 0 && nodeTime(output, grown) < horizon) || horizon >= SWINGS * firstTurn(output) || hasRested(output, horizon);
+}
+
+/** Whether the output came to stand still and stood for long: its input does not wake what is unstable. */
+function hasRested(output: Curve, horizon: number): boolean {
+  const { values, size } = output;
+  const end = values[values.length - 1];
+  const moved = values.findLastIndex((value) => Math.abs(value - end) > RESTING * size);
+  return size > 0 && horizon >= WATCH_PER_REST * nodeTime(output, moved + 1);
 }
 
 /** The first node after which the curve turns back; Infinity where it never does. */

@@ -13,7 +13,7 @@ const INPUTS = 3;
  *
  * The chain runs from reference, load and delayed measurement to control, plant output and measurement. Because a dead
  * time commutes with H, both dead times stand together between measurement and controller, where the signal is smoothest;
- * the output is then only shifted by the plant's own.
+ * the output is then only shifted by the plant's own. A controller without gains closes no loop, and no dead time is in it.
  */
 export function linearLoop(model: LoopModel): LoopSystem | null {
   const { gains, weights, filters } = model;
@@ -31,7 +31,16 @@ export function linearLoop(model: LoopModel): LoopSystem | null {
   const control = combine([1, feed(filters, unfiltered)], [derivative.afterFilters ? 1 : 0, derivativePart]);
   const output = feed(model.plant, combine([1, control], [1, assembly.input(LOAD)]));
   const measurement = feed(model.sensor, output);
-  return assembleSystem({ derivatives: assembly.derivatives, output, control, measurement }, model.plantDeadTime + model.sensorDeadTime);
+  const deadTime = feedsBack(model) ? model.plantDeadTime + model.sensorDeadTime : 0;
+  return assembleSystem({ derivatives: assembly.derivatives, output, control, measurement }, deadTime);
+}
+
+/** Whether the controller listens to the measurement at all. */
+const feedsBack = ({ gains: { kp, ki, kd } }: LoopModel): boolean => kp !== 0 || ki !== 0 || kd !== 0;
+
+/** Whether a reference step moves anything: without integral action, set-point weights and feedforward may leave nothing. */
+export function answersReference({ gains: { kp, ki, kd }, weights, feedforwardGain }: LoopModel): boolean {
+  return ki !== 0 || kp * weights.proportional + feedforwardGain !== 0 || kd * weights.derivative !== 0;
 }
 
 /** The poles of all blocks that take part, cancelled or not: the modes of the loop cut open at its dead time. */

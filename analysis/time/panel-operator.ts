@@ -2,6 +2,7 @@ import { exponential } from '@/analysis/numbers/matrix-exponential';
 import { columnNorm, zeroMatrix, type Matrix } from '@/analysis/numbers/matrix';
 import type { LoopSystem } from './loop-system';
 import { NODES, NODE_COUNT, TAYLOR } from './nodes';
+import type { WorkBudget } from './work-budget';
 
 /** Signals at the nodes of one panel, one after the other. */
 export const WATCHED = ['output', 'control', 'measurement'] as const;
@@ -15,15 +16,19 @@ export interface PanelOperator {
   readonly matrix: Matrix;
 }
 
+/** Matrix products that one exponential costs, its squarings by and large. */
+const PRODUCTS_PER_EXPONENTIAL = 20;
+
 /**
  * Solves ẋ = A·x + b·m(t) exactly for a polynomial m: its Taylor coefficients w become states with ẇₖ = (k + 1)·wₖ₊₁,
  * so that one exponential per node holds e^(A·t) and every φ-function at once.
  *
  * @see REFERENCES.md [Van Loan 1978], [Hochbruck & Ostermann 2010] section 2.1
  */
-export function panelOperator(system: LoopSystem, width: number): PanelOperator {
+export function panelOperator(system: LoopSystem, width: number, budget: WorkBudget): PanelOperator {
   const size = system.dynamics.rows;
   const delayed = system.deadTime > 0;
+  budget.spend(NODE_COUNT * PRODUCTS_PER_EXPONENTIAL * (size + (delayed ? NODE_COUNT : 0)) ** 3);
   const matrix = zeroMatrix(WATCHED.length * NODE_COUNT + size, size + (delayed ? NODE_COUNT : 0));
   const flowAt = delayed ? drivenFlow(system, width) : (share: number) => exponential(scaled(system.dynamics, width * share));
   for (let node = 0; node < NODE_COUNT; node += 1) {

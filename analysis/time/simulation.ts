@@ -4,9 +4,13 @@ import { NODE_COUNT } from './nodes';
 import { WATCHED } from './panel-operator';
 import { renode } from './renode';
 import type { Track, Tracks } from './track';
+import type { WorkBudget } from './work-budget';
 
 /** Turns of a track before wider panels are tried; doubled each time they do not do. */
 const TURNS_BETWEEN_TRIALS = 4;
+
+/** What a panel costs beside its map: three curves grow by it, and knots, integrals and drawing read it again. */
+const WORK_BESIDE_MAP = 2000;
 
 interface Run {
   readonly system: LoopSystem;
@@ -17,6 +21,7 @@ interface Run {
   readonly outputDelay: number;
   /** Whether panels may widen as the response calms down. */
   readonly widening: boolean;
+  readonly budget: WorkBudget;
 }
 
 /**
@@ -52,9 +57,13 @@ export class Simulation {
     return this.control.panels;
   }
 
-  /** Simulates until output and control are known up to `end`, or `maxPanels` is reached; says whether it got there. */
-  advanceTo(end: number, maxPanels: number): boolean {
-    while (this.time < end && this.panels < maxPanels) {
+  /**
+   * Simulates until output and control are known up to `end`, or until there are `panels` of them or a signal passes
+   * `size`; says whether it got there.
+   * @throws OutOfWork
+   */
+  advanceTo(end: number, most: { panels: number; size: number }): boolean {
+    while (this.time < end && this.panels < most.panels && this.output.size < most.size && this.control.size < most.size) {
       this.step();
       if (this.slot === this.track.panels) this.endTurn();
     }
@@ -64,6 +73,7 @@ export class Simulation {
   private step(): void {
     const { width, matrix } = this.track.operatorAt(this.slot);
     const { state, result, delayLine } = this;
+    this.run.budget.spend(matrix.data.length + WORK_BESIDE_MAP);
     const history = this.slot * NODE_COUNT;
     for (let i = 0; i < matrix.rows; i += 1) {
       const row = i * matrix.columns;

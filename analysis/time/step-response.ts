@@ -1,16 +1,19 @@
 import type { Complex } from '@/analysis/numbers/complex';
 import type { LoopModel } from '@/analysis/loop/model';
-import type { Curve } from './curve';
+import { Curve } from './curve';
 import type { FinalValues } from './final-values';
 import { GROWN, hasGrown, hasSettled, isTooFine, simulateTo, simulateUntil, type Failure } from './horizon';
 import { monotoneKnots, type Knots } from './knots';
+import { answersReference } from './linear-loop';
 import type { LoopSystem } from './loop-system';
 import type { StepResponse } from './metrics';
+import { NODE_COUNT } from './nodes';
 import { planPanels } from './panel-plan';
 import { firstPassage, lastOutside } from './passages';
 import { loadBand, referenceBand } from './settling';
 import { Simulation } from './simulation';
 import { Tracks } from './track';
+import { OutOfWork, WorkBudget } from './work-budget';
 
 /** How panels are chosen, one way after the other until a response is resolved: as the poles ask and widening, then finer. */
 const MANNERS: readonly Manner[] = [
@@ -51,17 +54,22 @@ export interface StepResponses {
 
 /** The responses to a unit reference and a unit load step, or why there are none. */
 export function stepResponses(question: StepQuestion): StepResponses | 'long' | 'boundless' {
-  for (const manner of MANNERS) {
-    const attempt = attemptResponses(question, manner);
-    if (attempt !== 'coarse') return attempt;
+  const budget = new WorkBudget();
+  try {
+    for (const manner of MANNERS) {
+      const attempt = attemptResponses(question, manner, budget);
+      if (attempt !== 'coarse') return attempt;
+    }
+  } catch (error) {
+    if (!(error instanceof OutOfWork)) throw error;
   }
   return 'long';
 }
 
-function attemptResponses(question: StepQuestion, { fineness, widening }: Manner): StepResponses | Failure {
+function attemptResponses(question: StepQuestion, { fineness, widening }: Manner, budget: WorkBudget): StepResponses | Failure {
   const { system, finalValues, model } = question;
   const stages = planPanels(question.poles, system.deadTime || Infinity, fineness);
-  const tracks = new Tracks(system, stages);
+  const tracks = new Tracks(system, stages, budget);
   if (isTooFine(tracks.first)) return 'long';
   const firstHorizon = 2 * system.deadTime + FIRST_PANELS * stages[0].width;
   const respond = (kind: StepKind) => {
@@ -71,13 +79,21 @@ function attemptResponses(question: StepQuestion, { fineness, widening }: Manner
       initial: kind === 'reference' ? system.initial(1, 0) : system.initial(0, 1),
       outputDelay: model.plantDeadTime,
       widening: widening && question.stable && system.deadTime > 0,
+      budget,
     });
     return watch(question, { simulation, firstHorizon, finalValue: finalValues[kind], bandOf: bands[kind] });
   };
-  const reference = respond('reference');
-  if (typeof reference === 'string') return reference;
   const load = respond('load');
-  return typeof load === 'string' ? load : { reference, load };
+  if (typeof load === 'string') return load;
+  const reference = answersReference(model) ? respond('reference') : silence(load);
+  return typeof reference === 'string' ? reference : { reference, load };
+}
+
+/** No response at all, on the axis of one that there is. */
+function silence({ horizon, axisEnd }: StepResponse): StepResponse {
+  const nothing = new Curve();
+  nothing.append({ start: 0, width: horizon }, new Float64Array(NODE_COUNT), 0);
+  return { output: nothing, control: nothing, knots: monotoneKnots(nothing, horizon), horizon, axisEnd, finalValue: 0 };
 }
 
 interface Run {

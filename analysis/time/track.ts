@@ -3,6 +3,7 @@ import { longPanelOperator } from './long-panel-operator';
 import { isStablePanel } from './panel-stability';
 import { panelOperator, type PanelOperator } from './panel-operator';
 import type { Stage } from './panel-plan';
+import type { WorkBudget } from './work-budget';
 
 /** A sequence of panels that a simulation runs through: again and again with dead time, once and for all without. */
 export interface Track {
@@ -19,8 +20,9 @@ export class Tracks {
   constructor(
     private readonly system: LoopSystem,
     stages: readonly Stage[],
+    private readonly budget: WorkBudget,
   ) {
-    this.first = trackOf(stages.map(({ width, count }) => ({ operator: panelOperator(system, width), count })));
+    this.first = trackOf(stages.map(({ width, count }) => ({ operator: panelOperator(system, width, budget), count })));
   }
 
   /** Panels all of `width`, a whole fraction or multiple of the dead time; null where they would not stay stable. */
@@ -35,7 +37,7 @@ export class Tracks {
 
   private makeEven(width: number): Track | null {
     const { deadTime } = this.system;
-    const direct = panelOperator(this.system, width);
+    const direct = panelOperator(this.system, width, this.budget);
     if (width < deadTime) return trackOf([{ operator: direct, count: Math.round(deadTime / width) }]);
     const operator = width > deadTime ? longPanelOperator(direct, deadTime) : direct;
     return isStablePanel(operator) ? trackOf([{ operator, count: 1 }]) : null;
