@@ -59,5 +59,11 @@ export function frequencyWindow(loops: readonly LoopNumbers[], unit: FrequencyUn
   const middle = drawn.length > 1 ? Math.sqrt(drawn[0] * drawn[drawn.length - 1]) : 1;
   const matters = telltales.length > 0 ? telltales : [middle];
   const wide = withDecades([Math.max(limits[0], Math.min(...matters) / BELOW), Math.min(limits[1], Math.max(...matters) * ABOVE)]);
-  return [frequencyFrom(unit, stopBelow(frequencyIn(unit, wide[0]))), frequencyFrom(unit, stopAbove(frequencyIn(unit, wide[1])))];
+  return betweenStops(wide, unit);
 }
+
+/** An interval of frequencies (rad/s) widened to end on 1, 2 or 5 of the reader's unit. */
+export const betweenStops = ([low, high]: Interval, unit: FrequencyUnit): Interval => [
+  frequencyFrom(unit, stopBelow(frequencyIn(unit, low))),
+  frequencyFrom(unit, stopAbove(frequencyIn(unit, high))),
+];

@@ -27,6 +27,7 @@ export * from './phase-panel';
 export * from './place-label';
 export * from './plane-marks';
 export * from './plane-picture';
+export * from './plant-panels';
 export * from './polyline';
 export * from './quantity-text';
 export * from './sensitivity-contours';

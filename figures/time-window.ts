@@ -2,15 +2,20 @@ import { tickStep } from 'd3-array';
 import type { Analysis } from '@/contract';
 import type { Interval } from './geometry';
 
-const endOf = ({ timeResponse }: Pick<Analysis, 'timeResponse'>): number => {
-  const ends = [timeResponse?.reference, timeResponse?.load].map((series) => series?.time.at(-1) ?? 0);
-  return Math.max(...ends);
-};
+type Responses = Pick<Analysis, 'timeResponse'>;
+export type ResponseKind = 'reference' | 'load';
 
-/** From 0 to where the longer response of a loop ends, rounded up to a half step of its ticks. Seconds; one second where there is no response. */
-export function timeWindow(loop: Pick<Analysis, 'timeResponse'>): Interval {
-  const end = endOf(loop);
-  if (end === 0) return [0, 1];
+/** Where a response ends, s; 0 where there is none. */
+export const endOfResponse = ({ timeResponse }: Responses, kind: ResponseKind): number => timeResponse?.[kind]?.time.at(-1) ?? 0;
+
+/** A time axis that ends at `end` s or a little later, at a half step of its ticks; one second where there is nothing to show. */
+export function wholeTimes(end: number): number {
+  if (end === 0) return 1;
   const step = tickStep(0, end, 4) / 2;
-  return [0, Math.ceil((end / step) * (1 - 1e-9)) * step];
+  return Math.ceil((end / step) * (1 - 1e-9)) * step;
+}
+
+/** From 0 to where the longer response of a loop ends, rounded up to a half step of its ticks. Seconds. */
+export function timeWindow(loop: Responses): Interval {
+  return [0, wholeTimes(Math.max(endOfResponse(loop, 'reference'), endOfResponse(loop, 'load')))];
 }

@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { View } from 'react-native';
 import Svg, { Path } from 'react-native-svg';
 import { Text } from '@/components/ui/text';
@@ -17,7 +18,7 @@ export function CurveSwatch({ design }: { design: 'a' | 'b' }) {
 }
 
 /** The key line above a chart: which curve is which. */
-export function CurveKey({ a, b }: { a: string; b?: string }) {
+export const CurveKey = memo(function CurveKey({ a, b }: { a: string; b?: string }) {
   const entries = [{ design: 'a' as const, label: a }, ...(b === undefined ? [] : [{ design: 'b' as const, label: b }])];
   return (
     <View style={{ flexDirection: 'row', flexWrap: 'wrap', columnGap: 20, rowGap: 4 }}>
@@ -31,4 +32,4 @@ export function CurveKey({ a, b }: { a: string; b?: string }) {
       ))}
     </View>
   );
-}
+});

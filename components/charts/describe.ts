@@ -1,4 +1,15 @@
-import { formatDegrees, formatFactor, formatFrequency, formatMagnitude, formatSeconds, type LoopScene, withUnit } from '@/figures';
+import type { TimeMetrics } from '@/contract';
+import {
+  formatDegrees,
+  formatFactor,
+  formatFrequency,
+  formatMagnitude,
+  formatNumber,
+  formatSeconds,
+  type LoopScene,
+  type TimePanel,
+  withUnit,
+} from '@/figures';
 
 const andB = ({ b }: LoopScene): string => (b === undefined ? '' : ` Beside it, dashed: ${b.label}.`);
 
@@ -45,14 +56,29 @@ export function describePlane(scene: LoopScene, name: string): string {
   return `${name} curve with contours of |S|. ${stability(scene)} ${count}. Nearest to \u22121: distance ${distance}, Ms ${formatFactor(ms.value)}${where}.${andB(scene)}`;
 }
 
-/** The sentence that stands for a time sheet. */
-export function describeTime(scene: LoopScene, titles: readonly string[]): string {
+type Metrics = TimeMetrics | null;
+const said = (value: number | null | undefined, words: (value: number) => string): string => (value == null ? '' : ` ${words(value)}`);
+
+/** What is said of each panel's response, from the numbers that belong to it. */
+const responseWords: Record<TimePanel['kind'], (metrics: Metrics, unit: string) => string> = {
+  reference: (metrics) =>
+    said(metrics?.settlingTime, (time) => `Settles in ${formatSeconds(time)} s.`) +
+    said(metrics?.overshootPercent, (percent) => `Overshoot ${formatDegrees(percent)} %.`),
+  load: (metrics, unit) => {
+    const at = said(metrics?.loadPeakTime, (time) => `at ${formatSeconds(time)} s`);
+    return (
+      said(metrics?.loadPeak, (peak) => `The load moves it by at most ${withUnit(formatNumber(peak, 2), unit)}${at}.`) +
+      said(metrics?.loadSettlingTime, (time) => `Back after ${formatSeconds(time)} s.`)
+    );
+  },
+  control: (metrics, unit) =>
+    said(metrics?.controlPeak, (peak) => `The command moves by at most ${withUnit(formatNumber(peak, 2), unit)}.`),
+};
+
+/** The sentence that stands for a time sheet, with the numbers of the panels it has. */
+export function describeTime(scene: LoopScene, panels: readonly TimePanel[]): string {
   const metrics = scene.a.analysis.timeResponse?.metrics ?? null;
-  const settling = metrics?.settlingTime ?? null;
-  const overshoot = metrics?.overshootPercent ?? null;
-  const parts = [
-    settling === null ? '' : ` Settles in ${formatSeconds(settling)} s.`,
-    overshoot === null ? '' : ` Overshoot ${formatDegrees(overshoot)} %.`,
-  ];
-  return `${titles.join(', ')}, over time. ${stability(scene)}${parts.join('')}${andB(scene)}`;
+  const titles = panels.map(({ title }) => title).join(', ');
+  const words = panels.map(({ kind, unit }) => responseWords[kind](metrics, unit)).join('');
+  return `${titles}, over time. ${stability(scene)}${words}${andB(scene)}`;
 }

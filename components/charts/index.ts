@@ -4,6 +4,8 @@ export { CursorProvider, useCursor, useCursorStore } from './cursor-provider';
 export { FrequencySheet, type FrequencySheetProps } from './frequency-sheet';
 export { PlaneChart, type PlaneChartProps } from './plane-chart';
 export { TimeSheet, type TimeSheetProps } from './time-sheet';
+export { PlantSheet, type PlantSheetProps } from './plant-sheet';
+export { PlantReadOut } from './plant-cursor';
 export { ReadOut, type ReadOutProps, TimeReadOut, type TimeReadOutProps } from './read-out';
 export { CurveKey, CurveSwatch } from './curve-key';
 export { EdgeRuler, type EdgeRulerProps } from './edge-ruler';

@@ -3,8 +3,9 @@ import Svg from 'react-native-svg';
 import { clamp, contains, frequencyAtPlace, type LoopScene, nearestPlace, type PlanePicture, responseOf } from '@/figures';
 import { CursorDisc } from './cursor-marks';
 import { useCursor } from './cursor-provider';
-import { frequencyCursorText, steppedFrequency } from './frequency-cursor';
+import { frequencyCursorText } from './frequency-cursor';
 import { PointerLayer } from './pointer-layer';
+import { steppedFrequency } from './stack-cursor';
 
 /** The cursor on a plane: the frequency of the point of A that is nearest to the finger. */
 export function PlaneCursor({

@@ -1,7 +1,7 @@
 import { memo, useMemo } from 'react';
 import { StyleSheet } from 'react-native';
 import Svg from 'react-native-svg';
-import { stackLayout, stackMargins, timeAxis, timePanel, timeWindow } from '@/figures';
+import { type Interval, stackLayout, stackMargins, timeAxis, timePanel, timeWindow } from '@/figures';
 import { ChartShell } from './chart-shell';
 import type { LoopChartProps, TimePanel } from './chart-types';
 import { describeTime } from './describe';
@@ -17,6 +17,8 @@ export interface TimeSheetProps extends Omit<LoopChartProps, 'others'> {
   /** From top to foot, each with its title and unit; a panel's height is its weight in the stack, 1 where absent. */
   panels: readonly TimePanel[];
   height: number;
+  /** Where the axis ends, s; chosen from A's responses where absent. */
+  end?: number;
   /** Measured where absent. */
   width?: number;
 }
@@ -24,11 +26,12 @@ export interface TimeSheetProps extends Omit<LoopChartProps, 'others'> {
 const itself = (value: number): number => value;
 
 /** Reference step, load step and control in a stack over one time axis, with their own cursor. */
-export const TimeSheet = memo(function TimeSheet({ a, b, limits, units, panels: asked, height, width: fixed }: TimeSheetProps) {
+export const TimeSheet = memo(function TimeSheet({ a, b, limits, units, panels: asked, height, end, width: fixed }: TimeSheetProps) {
   const { width, onLayout } = useChartFrame(fixed);
   const scene = useMemo(() => ({ a, b, limits, units }), [a, b, limits, units]);
   const wanted = useMemo(() => timeWindow(a.analysis), [a]);
-  const domain = useSteadyInterval(wanted, itself);
+  const steady = useSteadyInterval(wanted, itself);
+  const domain = useMemo<Interval>(() => (end === undefined ? steady : [0, end]), [steady, end]);
   const layout = useMemo(
     () =>
       stackLayout(
@@ -57,11 +60,10 @@ export const TimeSheet = memo(function TimeSheet({ a, b, limits, units, panels: 
       {stable ? null : <UnstableMark x={width - 60} y={12} />}
     </Svg>
   );
-  const titles = asked.map(({ title }) => title);
   return (
     <ChartShell
-      name={titles.join(', ')}
-      description={describeTime(scene, titles)}
+      name={asked.map(({ title }) => title).join(', ')}
+      description={describeTime(scene, asked)}
       height={height}
       onLayout={onLayout}
       picture={width > 0 ? picture : null}

@@ -1,10 +1,10 @@
-import { StyleSheet, View } from 'react-native';
+import { View } from 'react-native';
 import { useProject } from '@/components/navigation/project-context';
 import { Banner } from '@/components/ui/banner';
 import { Button } from '@/components/ui/button';
+import { Column, Columns } from '@/components/ui/columns';
 import { Form } from '@/components/ui/form';
-import { Page } from '@/components/ui/page';
-import { Paper } from '@/components/ui/paper';
+import { SheetPage } from '@/components/ui/sheet-page';
 import { useLayout } from '@/components/ui/use-layout';
 import type { PlantRevision } from '@/contract';
 import { useSignal } from '@/hooks/use-signal';
@@ -14,38 +14,42 @@ import { PlantFields } from './plant-fields';
 import { RevisionList } from './revision-list';
 import { usePlantEditor } from './use-plant-editor';
 
+const FIELDS = { middle: 390, wide: 420 };
+const CURVES = 420;
+
 /** Enter or change a plant: fields at the left, what they say in the middle, what that does at the right. */
 export function PlantEditor({ latest }: { latest?: PlantRevision }) {
   const project = useProject();
-  const phone = useLayout() === 'phone';
+  const layout = useLayout();
+  const phone = layout === 'phone';
+  const wide = layout === 'wide';
   const signal = useSignal();
   const editor = usePlantEditor(project.id, latest);
   const next = (latest?.revision ?? 0) + 1;
-  const keep = (
-    <Button
-      kind="primary"
-      label={`Keep as plant rev ${next}`}
-      busyLabel="Keeping"
-      busy={editor.busy}
-      disabled={!editor.changed || !signal}
-      onPress={editor.submit}
-      stretch={phone}
-      tall={phone}
-    />
-  );
-  const discard =
-    editor.changed && latest ? <Button kind="quiet" label={`Back to rev ${latest.revision}`} onPress={editor.discard} /> : null;
   const actions = (
     <>
-      {discard}
-      {keep}
+      {editor.changed && latest ? <Button kind="quiet" label={`Back to rev ${latest.revision}`} onPress={editor.discard} /> : null}
+      <View style={phone ? { flex: 1 } : null}>
+        <Button
+          kind="primary"
+          label={`Keep as plant rev ${next}`}
+          busyLabel="Keeping"
+          busy={editor.busy}
+          disabled={!editor.changed || !signal}
+          onPress={editor.submit}
+          stretch={phone}
+          tall={phone}
+        />
+      </View>
     </>
   );
+  const curves = editor.preview ? <PlantBode plant={editor.preview} /> : null;
   return (
-    <Page
+    <SheetPage
       title={latest ? `Plant, ${latest.name}` : 'Plant'}
-      sub={latest ? `rev ${latest.revision}. Every case builds on it.` : undefined}
+      sub={latest ? `rev ${latest.revision}. Every case builds on it.` : 'What the loop drives.'}
       actions={actions}
+      footed={editor.changed}
     >
       {editor.overtaken && latest ? (
         <Banner
@@ -55,31 +59,23 @@ export function PlantEditor({ latest }: { latest?: PlantRevision }) {
         />
       ) : null}
       {editor.changed ? <Banner lead="Not kept." text="A draft stays on this device." /> : null}
-      <View style={phone ? styles.stack : styles.side}>
-        <Paper style={phone ? null : styles.fields}>
+      <Columns>
+        <Column width={wide ? FIELDS.wide : FIELDS.middle}>
           <Form onSubmit={editor.submit} problem={editor.problem}>
             <PlantFields control={editor.control} />
           </Form>
-        </Paper>
-        <Paper style={[styles.column, !phone && styles.share]}>
+        </Column>
+        <Column last={!wide}>
           {editor.preview ? <PlantEquation plant={editor.preview} /> : null}
+          {wide ? null : curves}
           {latest ? <RevisionList plantId={latest.id} /> : null}
-        </Paper>
-        {editor.preview ? (
-          <Paper style={phone ? null : styles.share}>
-            <PlantBode plant={editor.preview} />
-          </Paper>
+        </Column>
+        {wide ? (
+          <Column width={CURVES} last>
+            {curves}
+          </Column>
         ) : null}
-      </View>
-      {phone ? <Paper style={styles.column}>{actions}</Paper> : null}
-    </Page>
+      </Columns>
+    </SheetPage>
   );
 }
-
-const styles = StyleSheet.create({
-  side: { flexDirection: 'row', flexWrap: 'wrap', gap: 14, alignItems: 'flex-start' },
-  stack: { gap: 8 },
-  fields: { width: 400 },
-  column: { gap: 20 },
-  share: { flexGrow: 1, flexBasis: 380, minWidth: 0 },
-});

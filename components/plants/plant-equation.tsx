@@ -54,6 +54,7 @@ export function PlantEquation({ plant }: { plant: PlantContent['plant'] }) {
         {under === '1' ? <Mathematics text={over} /> : <Fraction over={over} under={under} />}
         {delay ? (
           <View style={styles.delay}>
+            <Mathematics text="·" />
             <Text step="h2" weight={500} style={{ fontStyle: 'italic' }}>
               e
             </Text>
@@ -75,6 +76,6 @@ const styles = StyleSheet.create({
   line: { flexDirection: 'row', alignItems: 'center', flexWrap: 'wrap', gap: 10, rowGap: 6 },
   fraction: { alignItems: 'center', gap: 4 },
   bar: { height: 1.5, alignSelf: 'stretch', minWidth: 40 },
-  delay: { flexDirection: 'row', alignItems: 'center' },
+  delay: { flexDirection: 'row', alignItems: 'center', gap: 4 },
   exponent: { marginBottom: 16 },
 });

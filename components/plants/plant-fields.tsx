@@ -41,7 +41,7 @@ export function PlantFields({ control }: { control: Control<PlantForm> }) {
           <FormField control={control} name="sensorLag" label="Lag" unit="s" inputMode="decimal" numeric compact />
         </View>
         <View style={styles.half}>
-          <FormField control={control} name="sensorDeadTime" label="Dead time of the sensor" unit="s" inputMode="decimal" numeric compact />
+          <FormField control={control} name="sensorDeadTime" label="Sensor’s dead time" unit="s" inputMode="decimal" numeric compact />
         </View>
       </View>
       <Heading level={2}>Units</Heading>

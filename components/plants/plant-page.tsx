@@ -1,27 +1,25 @@
-import { View } from 'react-native';
-import { Page } from '@/components/ui/page';
-import { Paper } from '@/components/ui/paper';
-import { useLayout } from '@/components/ui/use-layout';
+import { Column, Columns } from '@/components/ui/columns';
+import { SheetPage } from '@/components/ui/sheet-page';
 import type { PlantRevision } from '@/contract';
 import { PlantBode } from './plant-bode';
 import { PlantReading } from './plant-reading';
 import { RevisionList } from './revision-list';
 
+const CURVES = 420;
+
 /** The plant's page for those who may not change it. */
 export function PlantPage({ plant }: { plant: PlantRevision }) {
-  const phone = useLayout() === 'phone';
-  const share = phone ? { gap: 20 } : { flex: 1, gap: 20 };
   return (
-    <Page title={`Plant, ${plant.name}`} sub={`rev ${plant.revision}`}>
-      <View style={phone ? { gap: 8 } : { flexDirection: 'row', gap: 14 }}>
-        <Paper style={share}>
+    <SheetPage title={`Plant, ${plant.name}`} sub={`rev ${plant.revision}. Every case builds on it.`}>
+      <Columns>
+        <Column>
           <PlantReading plant={plant} />
           <RevisionList plantId={plant.id} />
-        </Paper>
-        <Paper style={share}>
+        </Column>
+        <Column width={CURVES} last>
           <PlantBode plant={plant.plant} />
-        </Paper>
-      </View>
-    </Page>
+        </Column>
+      </Columns>
+    </SheetPage>
   );
 }

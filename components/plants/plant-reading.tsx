@@ -1,12 +1,15 @@
 import { View } from 'react-native';
 import { type Fact, FactTable } from '@/components/ui/fact-table';
-import type { PlantRevision } from '@/contract';
+import type { FrozenCase, PlantRevision } from '@/contract';
 import { PlantEquation } from './plant-equation';
 import { coefficientText } from './polynomial-text';
 
 const basisWords = { measured: 'measured', assumed: 'assumed' };
 
-function facts({ plant, deadTimeBasis, sensor, units }: PlantRevision): Fact[] {
+/** A plant of the project, or as an analysis froze it. */
+type ReadablePlant = PlantRevision | FrozenCase['plant'];
+
+function facts({ plant, deadTimeBasis, sensor, units }: ReadablePlant): Fact[] {
   const deadTime = 'deadTime' in plant ? `${coefficientText(plant.deadTime)} s` : 'as in the formula';
   return [
     { name: 'Dead time', value: deadTime, aside: deadTimeBasis ? basisWords[deadTimeBasis] : 'nobody said where from' },
@@ -18,7 +21,7 @@ function facts({ plant, deadTimeBasis, sensor, units }: PlantRevision): Fact[] {
 }
 
 /** A plant to be read, not changed. */
-export function PlantReading({ plant }: { plant: PlantRevision }) {
+export function PlantReading({ plant }: { plant: ReadablePlant }) {
   return (
     <View style={{ gap: 12 }}>
       <PlantEquation plant={plant.plant} />
