@@ -27,7 +27,7 @@ export function nextOf(hasPlant: boolean, headline: Headline | null): Next {
     return { title: 'make the loop stable', text: 'What was kept last is not stable in every case.', ...bench };
   if (headline.verdict === 'fail') return { title: 'meet the limits', text: 'What was kept last does not meet a limit.', ...bench };
   if (headline.verdict === 'notJudged')
-    return { title: 'look at what is not judged', text: headline.reason ?? 'Nothing is demanded of the loop yet.', ...bench };
+    return { title: 'read the margins', text: `Not judged. ${headline.reason ?? 'Nothing is demanded of the loop yet.'}`, ...bench };
   return { title: 'look closer', text: 'Every limit is met. See what more gain or less of it would do.', ...bench };
 }
 

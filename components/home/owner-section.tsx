@@ -38,16 +38,32 @@ function DeleteForm({ project, onClose }: { project: ReadProject; onClose: () =>
   const router = useRouter();
   const remove = useDeleteProject(project);
   const [name, setName] = useState('');
+  const [wrong, setWrong] = useState(false);
+  const type = (text: string) => {
+    setName(text);
+    setWrong(false);
+  };
   const submit = () => {
-    if (name === project.name) remove.mutate(name, { onSuccess: () => router.replace('/') });
+    if (name.trim() === project.name) remove.mutate(project.name, { onSuccess: () => router.replace('/') });
+    else setWrong(true);
   };
   return (
     <Form onSubmit={submit} problem={remove.error && sentence(remove.error)}>
       <Text tone="ink2">Its plants, designs and analyses go with it, for everyone. This cannot be taken back.</Text>
-      <Field label={`Repeat the name: ${project.name}`} value={name} onChangeText={setName} onSubmitEditing={submit} />
+      <Text>
+        Its name is <Text weight={600}>{project.name}</Text>
+      </Text>
+      <Field
+        label="Repeat the name"
+        error={wrong ? 'That is not its name. Nothing was deleted.' : undefined}
+        value={name}
+        onChangeText={type}
+        autoFocus
+        onSubmitEditing={submit}
+      />
       <DialogActions>
         <Button label="Not yet" onPress={onClose} />
-        <Button kind="primary" label="Delete it" disabled={name !== project.name} busy={remove.isPending} onPress={submit} />
+        <Button kind="primary" label="Delete it" busyLabel="Deleting" busy={remove.isPending} onPress={submit} />
       </DialogActions>
     </Form>
   );

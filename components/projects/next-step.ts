@@ -7,6 +7,6 @@ export function nextStep({ headline, archived }: Pick<Project, 'headline' | 'arc
   if (headline.unstableCases > 0) return 'The loop is not stable. Open it on the bench.';
   if (headline.verdict === 'fail') return `A limit is not met. Open it on the bench.`;
   if (headline.verdict === 'tight') return 'Limits are met, a target is missed.';
-  if (headline.verdict === 'notJudged') return headline.reason ?? 'Nobody judged it yet.';
+  if (headline.verdict === 'notJudged') return 'Read its margins on the bench.';
   return 'Targets are met.';
 }

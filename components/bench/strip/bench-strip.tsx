@@ -1,4 +1,4 @@
-import { useEffect, useMemo, useRef } from 'react';
+import { memo, useEffect, useMemo, useRef } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { useAnnounce } from '@/components/ui/announcements';
 import { Text } from '@/components/ui/text';
@@ -7,14 +7,14 @@ import { gutter, line } from '@/components/ui/tokens';
 import { useUnits } from '@/components/ui/units';
 import { useLayout } from '@/components/ui/use-layout';
 import { VerdictBlock } from '@/components/ui/verdict-block';
+import { marginNumbers } from '@/components/verdict/margin-numbers';
+import { MarginRow } from '@/components/verdict/margin-row';
 import { useAnswer, useBench } from '../bench-context';
 import { judged } from '../live/judged';
-import { marginNumbers } from './margin-numbers';
-import { MarginRow } from './margin-row';
 import { stripWords } from './strip-words';
 
 /** The number first: verdict, the case that it comes from, Ms and the margins. It follows the gain and is said politely when it changes. */
-export function BenchStrip() {
+export const BenchStrip = memo(function BenchStrip() {
   const { colors } = useTheme();
   const units = useUnits();
   const announce = useAnnounce();
@@ -66,7 +66,7 @@ export function BenchStrip() {
       )}
     </View>
   );
-}
+});
 
 const styles = StyleSheet.create({
   waiting: { minHeight: 104 },

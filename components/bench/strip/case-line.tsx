@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { Menu } from '@/components/ui/menu';
 import { Text } from '@/components/ui/text';
@@ -11,7 +12,7 @@ interface CaseLineProps {
 }
 
 /** Which case the curves show, and its delay budget. */
-export function CaseLine({ onCase }: CaseLineProps) {
+export const CaseLine = memo(function CaseLine({ onCase }: CaseLineProps) {
   const { colors } = useTheme();
   const { shownCase, cases, plant } = useBench().subject;
   const label = `Curves show ${shownCase.name}`;
@@ -28,7 +29,7 @@ export function CaseLine({ onCase }: CaseLineProps) {
       <BudgetLine />
     </View>
   );
-}
+});
 
 const styles = StyleSheet.create({
   line: {

@@ -4,7 +4,7 @@ import { startSettings, type Settings } from '@/components/bench/draft/settings'
 import { benchLoop } from '@/components/bench/live/bench-loop';
 import { judged } from '@/components/bench/live/judged';
 import { budgetWords, samplingWords } from '@/components/bench/strip/budget-words';
-import { marginNumbers } from '@/components/bench/strip/margin-numbers';
+import { marginNumbers } from '@/components/verdict/margin-numbers';
 import { stripWords } from '@/components/bench/strip/strip-words';
 import type { BenchSubject } from '@/components/bench/subject/bench-subject';
 import { type Loop, PlantContent } from '@/contract';

@@ -1,0 +1,14 @@
+import { useQuery } from '@tanstack/react-query';
+import { useProject } from '@/components/navigation/project-context';
+import { VerdictStrip } from '@/components/verdict/verdict-strip';
+import { analysisQuery } from '@/hooks/queries/analyses';
+
+/** The headline of the newest analysis; nothing until something was analysed. */
+export function HomeStrip() {
+  const { id, headline, latestAnalysis } = useProject();
+  const { data: analysis } = useQuery({ ...analysisQuery(id, latestAnalysis?.id ?? ''), enabled: latestAnalysis !== null });
+  if (!analysis || !headline) return null;
+  const { results } = analysis;
+  const worst = results.find((result) => result.case.id === headline.case?.id) ?? results[0];
+  return <VerdictStrip headline={headline} caseCount={results.length} numbers={worst.numbers} />;
+}
