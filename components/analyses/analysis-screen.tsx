@@ -6,20 +6,17 @@ import { benchPath } from '@/components/navigation/routes';
 import { Banner } from '@/components/ui/banner';
 import { Button } from '@/components/ui/button';
 import { DocumentTitle } from '@/components/ui/document-title';
-import { FactTable } from '@/components/ui/fact-table';
 import { Menu } from '@/components/ui/menu';
 import { moment } from '@/components/ui/moment';
 import { Page } from '@/components/ui/page';
 import { Paper } from '@/components/ui/paper';
 import { QueryView } from '@/components/ui/query-view';
-import { Heading } from '@/components/ui/text';
-import { useUnits } from '@/components/ui/units';
 import { useLayout } from '@/components/ui/use-layout';
 import { VerdictStrip } from '@/components/verdict/verdict-strip';
 import type { KeptAnalysis } from '@/contract';
 import { CaseCurves } from './case-curves';
+import { LoopNumbers, ResponseNumbers } from './case-numbers';
 import { FrozenInputs } from './frozen-inputs';
-import { marginFacts, responseFacts } from './loop-facts';
 import { Recompute } from './recompute';
 import { useCaseCurves } from './use-case-curves';
 
@@ -51,9 +48,10 @@ interface AnalysisPageProps {
 function AnalysisPage({ analysis, caseId, onCase, children }: AnalysisPageProps) {
   const project = useProject();
   const router = useRouter();
-  const units = useUnits();
   const phone = useLayout() === 'phone';
   const result = analysis.results.find((one) => one.case.id === caseId) ?? analysis.results[0];
+  const worst = analysis.results.find((one) => one.case.id === analysis.headline.case?.id) ?? analysis.results[0];
+  const { units } = (analysis.inputs.cases.find((one) => one.id === result.case.id) ?? analysis.inputs.cases[0]).plant;
   const { id, name, revision } = analysis.design;
   const title = `${name}, rev ${revision}`;
   const bench = <Button kind="primary" label="Open on bench" onPress={() => router.push(benchPath(project.id, id, revision))} />;
@@ -71,7 +69,7 @@ function AnalysisPage({ analysis, caseId, onCase, children }: AnalysisPageProps)
       actions={bench}
     >
       <DocumentTitle parts={[title, 'Analyses', project.name]} />
-      <VerdictStrip headline={analysis.headline} caseCount={analysis.results.length} />
+      <VerdictStrip headline={analysis.headline} caseCount={analysis.results.length} numbers={worst.numbers} />
       {phone ? <Paper>{bench}</Paper> : null}
       {cases.length > 1 ? <Menu label={`Curves show ${result.case.name}`} kind="quiet" items={cases} /> : null}
       {result.numbers.warnings.map(({ code, message }) => (
@@ -80,16 +78,14 @@ function AnalysisPage({ analysis, caseId, onCase, children }: AnalysisPageProps)
       {children}
       <View style={phone ? styles.stack : styles.side}>
         <Paper style={column}>
-          <Heading level={2}>{`Margins, ${result.case.name}`}</Heading>
-          <FactTable label="Margins" facts={marginFacts(result.numbers, units)} />
-          <Heading level={2}>Responses to a step of 1</Heading>
-          <FactTable label="Responses" facts={responseFacts(result.numbers, units)} />
+          <LoopNumbers name={result.case.name} numbers={result.numbers} />
+        </Paper>
+        <Paper style={column}>
+          <ResponseNumbers numbers={result.numbers} plantUnits={units} />
+          <Recompute projectId={project.id} analysis={analysis} />
         </Paper>
         <Paper style={column}>
           <FrozenInputs analysis={analysis} />
-        </Paper>
-        <Paper style={column}>
-          <Recompute projectId={project.id} analysis={analysis} />
         </Paper>
       </View>
     </Page>
@@ -99,6 +95,6 @@ function AnalysisPage({ analysis, caseId, onCase, children }: AnalysisPageProps)
 const styles = StyleSheet.create({
   side: { flexDirection: 'row', flexWrap: 'wrap', gap: 14 },
   stack: { gap: 8 },
-  column: { flexGrow: 1, flexBasis: 360, gap: 10 },
-  stackColumn: { gap: 10 },
+  column: { flexGrow: 1, flexBasis: 360, gap: 26 },
+  stackColumn: { gap: 20 },
 });

@@ -1,5 +1,5 @@
 import { View } from 'react-native';
-import { PlantEquation } from '@/components/plants/plant-equation';
+import { PlantReading } from '@/components/plants/plant-reading';
 import { type Fact, FactTable } from '@/components/ui/fact-table';
 import { Heading, Text } from '@/components/ui/text';
 import type { Controller, FrozenInputs as Inputs, KeptAnalysis } from '@/contract';
@@ -29,19 +29,19 @@ function sampled({ sampling }: Inputs['design']): string {
 
 /** Everything the numbers came from, as it was then. */
 export function FrozenInputs({ analysis }: { analysis: KeptAnalysis }) {
-  const { design, cases } = analysis.inputs;
+  const { design, cases, limits } = analysis.inputs;
   return (
     <View style={{ gap: 10 }}>
       <Heading level={2}>Computed from</Heading>
       <Text weight={600}>{`${design.name}, rev ${design.revision}, ${design.controller.form} form`}</Text>
       <FactTable label="Gains" facts={gains(design.controller)} />
       <Text step="note" tone="ink2">
-        {sampled(design)}
+        {`${sampled(design)}${limits.length === 0 ? ' No limits were set.' : ''}`}
       </Text>
       {cases.map((frozen) => (
         <View key={frozen.id} style={{ gap: 6 }}>
           <Text weight={600}>{`${frozen.name}: ${frozen.plant.name}, rev ${frozen.plant.revision}`}</Text>
-          <PlantEquation plant={frozen.plant.plant} />
+          <PlantReading plant={frozen.plant} />
         </View>
       ))}
     </View>

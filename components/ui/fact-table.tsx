@@ -30,15 +30,15 @@ export function FactTable({ label, facts }: { label: string; facts: readonly Fac
             backgroundColor: i % 2 === 0 ? colors.bar : colors.paper,
           }}
         >
-          <View role="rowheader" style={{ flex: 3 }}>
+          <View role="rowheader" style={{ flex: 4 }}>
             <Text>{name}</Text>
           </View>
-          <View role="cell" style={{ flex: 2, alignItems: 'flex-end' }}>
+          <View role="cell" style={{ flex: 3, alignItems: 'flex-end' }}>
             <Text step="h3" tone={struck ? 'ink3' : 'ink'} style={struck && { textDecorationLine: 'line-through' }}>
               {value}
             </Text>
           </View>
-          <View role="cell" style={{ flex: 2 }}>
+          <View role="cell" style={{ flex: 4 }}>
             <Text step="note" tone="ink2">
               {aside ?? ''}
             </Text>

@@ -25,7 +25,7 @@ const inside = (project: string, analysis: string) => ({
   '/account': 'Sign out',
   [`/projects/${project}`]: 'Where it stands',
   [`/projects/${project}/plant`]: 'Revisions',
-  [`/projects/${project}/bench`]: 'encirclements 0, needed 0',
+  [`/projects/${project}/bench`]: 'Delay margin',
   [`/projects/${project}/analyses`]: 'An analysis never changes.',
   [`/projects/${project}/analyses/${analysis}`]: 'Compute again',
   '/no-such-page': /not here|no such|no page/i,
