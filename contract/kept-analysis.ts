@@ -4,7 +4,7 @@ import { CaseAxes, CaseParameters } from './case';
 import { Id, Quantity, Revision, Timestamp, Verdict } from './common';
 import { Controller } from './controller';
 import { Actuator, Sampling } from './loop';
-import { PlantContent } from './plant';
+import { KeptPlant } from './plant';
 import { Headline } from './project';
 
 /** A frozen result: this design revision over these cases against these limits, by this engine. */
@@ -30,7 +30,7 @@ export type Check = z.infer<typeof Check>;
 export const FrozenCase = z.object({
   id: Id,
   name: z.string(),
-  plant: PlantContent.extend({ id: Id, name: z.string(), revision: z.int() }),
+  plant: KeptPlant.extend({ id: Id, name: z.string(), revision: z.int() }),
   parameters: CaseParameters,
   axes: CaseAxes,
 });

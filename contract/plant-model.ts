@@ -76,6 +76,9 @@ export const PlantReading = z
     deadTime: z.number().meta({ description: 's' }),
     numerator: z.array(z.number()),
     denominator: z.array(z.number()),
+    factored: z.boolean().meta({
+      description: 'true: zeros and poles are what was given, and the coefficients are multiplied out of them; false: the other way round',
+    }),
     words: z.string(),
   })
   .meta({ id: 'PlantReading' });

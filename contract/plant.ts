@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { Id, Name, Note, ONE_LINE, Revision, Timestamp } from './common';
-import { PlantModel, Sensor } from './plant-model';
+import { PlantModel, PlantReading, Sensor } from './plant-model';
 
 const Seconds = z.number().min(0, 'A delay is 0 or more.').max(1e4);
 export const DelayRow = z
@@ -20,6 +20,11 @@ const content = {
 export const PlantContent = z.strictObject(content);
 export type PlantContent = z.infer<typeof PlantContent>;
 
+/** What the server keeps beside a formula, so that neither a recomputation nor a page needs a parser to run it. */
+const kept = { ...content, reading: PlantReading.optional().meta({ description: 'of a formula, as it was read when it was entered' }) };
+export const KeptPlant = z.strictObject(kept);
+export type KeptPlant = z.infer<typeof KeptPlant>;
+
 export const CreatePlant = z.strictObject({ name: Name, ...content, note: Note.optional() }).meta({ id: 'CreatePlant' });
 export type CreatePlant = z.input<typeof CreatePlant>;
 export const RevisePlant = z
@@ -32,7 +37,7 @@ export const PlantRevision = z
     id: Id,
     name: z.string(),
     revision: z.int(),
-    ...content,
+    ...kept,
     note: z.string().nullable(),
     createdAt: Timestamp,
     createdBy: z.string(),

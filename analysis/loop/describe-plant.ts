@@ -15,6 +15,8 @@ export interface PlantDescription {
   /** Descending powers of s. */
   numerator: number[];
   denominator: number[];
+  /** Roots are what was given and the coefficients are multiplied out of them; otherwise the other way round. */
+  factored: boolean;
   words: string;
 }
 
@@ -36,6 +38,7 @@ export const describeRational = (rational: Rational, deadTime: number): PlantDes
     deadTime,
     numerator: coefficients ? [...coefficients.numerator] : expandRoots(zeros).map((c) => c * gain),
     denominator: coefficients ? [...coefficients.denominator] : expandRoots(poles),
+    factored: coefficients === undefined,
     words: plantInWords(rational, deadTime),
   };
 };

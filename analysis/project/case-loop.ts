@@ -1,17 +1,15 @@
-import type { DesignContent, FrozenCase, Loop, PlantContent } from '@/contract';
+import type { DesignContent, FrozenCase, KeptPlant, Loop } from '@/contract';
 import { overridePlant } from './override-plant';
+import { runnablePlant } from './runnable-plant';
 
 /**
  * The loop that a design makes in one case: the case's plant with its overrides, under the design's controller.
  * A design stated to be continuous and one whose sample time nobody stated are both computed without sampling;
  * only the verdict tells them apart.
  */
-export function caseLoop(
-  { plant, parameters }: { plant: PlantContent; parameters: FrozenCase['parameters'] },
-  design: DesignContent,
-): Loop {
+export function caseLoop({ plant, parameters }: { plant: KeptPlant; parameters: FrozenCase['parameters'] }, design: DesignContent): Loop {
   return {
-    plant: overridePlant(plant.plant, parameters),
+    plant: overridePlant(runnablePlant(plant), parameters),
     controller: design.controller,
     sensor: plant.sensor,
     sampling: design.sampling === 'continuous' ? null : design.sampling,

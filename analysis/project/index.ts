@@ -3,5 +3,6 @@ export { caseLoop } from './case-loop';
 export { headline } from './headline';
 export { judgeCase, type Judgement, type Stated } from './judge-case';
 export { limitUse } from './limit-use';
+export { runnablePlant } from './runnable-plant';
 export { quantities, type Reading } from './quantities';
 export { worstVerdict } from './worst-verdict';

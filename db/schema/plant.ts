@@ -1,5 +1,5 @@
 import { index, integer, primaryKey, sqliteTable, text } from 'drizzle-orm/sqlite-core';
-import type { PlantContent } from '@/contract';
+import type { KeptPlant } from '@/contract';
 import { user } from './account';
 import { id, json, time } from './columns';
 import { project } from './project';
@@ -27,7 +27,7 @@ export const plantRevision = sqliteTable(
       .notNull()
       .references(() => plant.id, { onDelete: 'cascade' }),
     revision: integer().notNull(),
-    content: json<PlantContent>().notNull(),
+    content: json<KeptPlant>().notNull(),
     note: text(),
     createdBy: text()
       .notNull()

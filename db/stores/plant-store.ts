@@ -1,5 +1,5 @@
 import { and, count, desc, eq } from 'drizzle-orm';
-import type { Case, PageQuery, PlantContent, PlantRevision } from '@/contract';
+import type { Case, KeptPlant, PageQuery, PlantRevision } from '@/contract';
 import type { Database } from '../open';
 import { plant, plantRevision, user } from '../tables';
 import { transact } from '../transact';
@@ -15,7 +15,7 @@ export interface PlantKey {
 
 interface NewRevision extends PlantKey {
   readonly name: string;
-  readonly content: PlantContent;
+  readonly content: KeptPlant;
   readonly note?: string;
   readonly activity: ActivityEntry;
   readonly stamp: Stamp;
@@ -38,7 +38,7 @@ const revisions = (db: Database) =>
     .innerJoin(plant, eq(plant.id, plantRevision.plantId))
     .innerJoin(user, eq(user.id, plantRevision.createdBy));
 
-type Row = Omit<PlantRevision, keyof PlantContent | 'createdAt'> & { content: PlantContent; createdAt: Date };
+type Row = Omit<PlantRevision, keyof KeptPlant | 'createdAt'> & { content: KeptPlant; createdAt: Date };
 const toRevision = ({ content, createdAt, ...row }: Row): PlantRevision => ({ ...row, ...content, createdAt: createdAt.toISOString() });
 
 const owned = ({ projectId, plantId }: PlantKey) => and(eq(plant.projectId, projectId), eq(plant.id, plantId));

@@ -22,8 +22,8 @@ function chosenCases(db: Database, projectId: string, caseIds: readonly string[]
 function freezeCase(db: Database, projectId: string, { plantId, plantRevision, ...kept }: Case): FrozenCase {
   const found = findPlant(db, { projectId, plantId }, plantRevision);
   if (!found) throw new NotFound(`The plant revision of the case “${kept.name}” is not there.`);
-  const { id, name, revision, plant, sensor, deadTimeBasis, delayBudget, units } = found;
-  return { ...kept, plant: { id, name, revision, plant, sensor, deadTimeBasis, delayBudget, units } };
+  const { note: _note, createdAt: _createdAt, createdBy: _createdBy, ...plant } = found;
+  return { ...kept, plant };
 }
 
 /**

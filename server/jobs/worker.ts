@@ -1,4 +1,5 @@
-import { analyseLoop, describePlant, LoopError } from '@/analysis';
+import { analyseLoop, LoopError } from '@/analysis';
+import { describeFormula, resolveFormula } from '@/analysis/formula';
 import type { Analysis, PlantReading } from '@/contract';
 import type { AnalyseTask, DescribeTask, Outcome } from './task';
 
@@ -15,10 +16,10 @@ function outcomeOf<Value>(compute: () => Value): Outcome<Value> {
 
 export function analyse({ loop, curves, started }: AnalyseTask): Outcome<Analysis> {
   started.postMessage(null);
-  return outcomeOf(() => analyseLoop(loop, { curves }));
+  return outcomeOf(() => analyseLoop(resolveFormula(loop), { curves }));
 }
 
 export function describe({ plant, started }: DescribeTask): Outcome<PlantReading> {
   started.postMessage(null);
-  return outcomeOf(() => describePlant(plant));
+  return outcomeOf(() => describeFormula(plant));
 }

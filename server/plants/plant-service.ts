@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import type { z } from 'zod';
-import type { CreatePlant, PlantRevision, RevisePlant } from '@/contract';
+import type { CreatePlant, KeptPlant, PlantContent, PlantRevision, RevisePlant } from '@/contract';
 import { createPlant, findPlant, revisePlant, type PlantKey } from '@/db/stores/plant-store';
 import type { Stamp } from '@/db/stores/stamp';
 import { activityEntry } from '../activity/activity-entry';
@@ -17,6 +17,12 @@ export function openPlant({ db }: Pick<Parts, 'db'>, key: PlantKey, revision: nu
   return found;
 }
 
+/** The plant as it is kept: a formula with what it reads as. @throws LoopRefused where the plant has no meaning */
+async function read({ jobs }: Pick<Parts, 'jobs'>, content: PlantContent): Promise<KeptPlant> {
+  const reading = await jobs.describe(content.plant);
+  return content.plant.kind === 'formula' ? { ...content, reading } : content;
+}
+
 /**
  * Enters a plant with its first revision. The project's first plant brings the case “nominal”, which follows its latest revision.
  * @throws LoopRefused where the plant has no meaning
@@ -24,10 +30,10 @@ export function openPlant({ db }: Pick<Parts, 'db'>, key: PlantKey, revision: nu
 export async function enterPlant(
   parts: Parts,
   projectId: string,
-  { name, note, ...content }: z.output<typeof CreatePlant>,
+  { name, note, ...entered }: z.output<typeof CreatePlant>,
   stamp: Stamp,
 ): Promise<PlantRevision> {
-  await parts.jobs.describe(content.plant);
+  const content = await read(parts, entered);
   const plantId = randomUUID();
   const nominal = { id: randomUUID(), name: 'nominal', plantId, plantRevision: null, parameters: {}, axes: {} };
   const activity = activityEntry('plant.created', `entered the plant ${name}`, note);
@@ -42,12 +48,12 @@ export async function enterPlant(
 export async function addPlantRevision(
   parts: Parts,
   key: PlantKey,
-  { baseRevision, note, name, ...content }: z.output<typeof RevisePlant>,
+  { baseRevision, note, name, ...entered }: z.output<typeof RevisePlant>,
   stamp: Stamp,
 ): Promise<PlantRevision> {
   const before = openPlant(parts, key);
   if (before.revision !== baseRevision) throw staleRevision(before.revision);
-  await parts.jobs.describe(content.plant);
+  const content = await read(parts, entered);
   const revised = { ...key, name: name ?? before.name, content, note, stamp };
   const activity = activityEntry('plant.revised', `changed the plant ${revised.name} to revision ${baseRevision + 1}`, note);
   if (!revisePlant(parts.db, { ...revised, activity }, baseRevision)) throw staleRevision(openPlant(parts, key).revision);

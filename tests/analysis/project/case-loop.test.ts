@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { caseLoop } from '@/analysis/project';
-import { DesignContent, Loop, PlantContent } from '@/contract';
+import { describeFormula, resolvePlant } from '@/analysis/formula';
+import { DesignContent, KeptPlant, Loop, PlantContent } from '@/contract';
 
 const plant = PlantContent.parse({
   plant: { kind: 'coefficients', numerator: [2.1, -4], denominator: [0.35, 1, 0], deadTime: 0.08 },
@@ -33,7 +34,19 @@ describe('the loop of a case', () => {
     expect(caseLoop({ plant: roots, parameters: { gainFactor: 2 } }, design).plant).toMatchObject({ gain: 12, deadTime: 0.1 });
   });
 
-  it('refuses to override a formula, whose dead time stands in its text', () => {
+  it.each([
+    ['a product', '2.1 exp(-0.08 s)/(s (0.35 s + 1))', 'roots'],
+    ['one polynomial over another', '(s + 3)/(s^2 + 0.2 s + 7)', 'coefficients'],
+  ])('runs a formula written as %s by its reading, exactly as a parser would', (_, text, kind) => {
+    const entered = PlantContent.parse({ plant: { kind: 'formula', text } });
+    const formula = KeptPlant.parse({ ...entered, reading: describeFormula(entered.plant) });
+    const { plant: run } = caseLoop({ plant: formula, parameters: {} }, design);
+    expect(run.kind).toBe(kind);
+    expect(run).toEqual(resolvePlant(entered.plant));
+    expect(caseLoop({ plant: formula, parameters: { deadTime: 2 } }, design).plant).toEqual({ ...run, deadTime: 2 });
+  });
+
+  it('refuses to override a formula that nobody read, whose dead time stands in its text', () => {
     const formula = PlantContent.parse({ plant: { kind: 'formula', text: 'exp(-s)/(s+1)' } });
     expect(caseLoop({ plant: formula, parameters: {} }, design).plant).toEqual(formula.plant);
     expect(() => caseLoop({ plant: formula, parameters: { deadTime: 2 } }, design)).toThrow(TypeError);

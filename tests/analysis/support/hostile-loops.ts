@@ -15,8 +15,13 @@ const time = fc.oneof(fc.constantFrom(0, 1, 1e-6, 1e6), decades(-6, 6), decades(
 const positiveTime = time.filter((value) => value > 0);
 const deadTime = fc.oneof(fc.constantFrom(0, 0, 1, 1e4, 1e-9), decades(-6, 4), decades(-2, 1));
 
+interface Root {
+  re: number;
+  im: number;
+}
+
 /** One real root or a pair: left, right, on the axis or at the origin. */
-const rootGroup = fc.oneof(
+const rootGroup: fc.Arbitrary<Root[]> = fc.oneof(
   fc.constant([{ re: 0, im: 0 }]),
   signed(decades(-5, 5)).map((re) => [{ re, im: 0 }]),
   signed(decades(-1, 1)).map((re) => [{ re, im: 0 }]),
