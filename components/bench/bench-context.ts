@@ -1,9 +1,11 @@
 import { createContext, useContext, useSyncExternalStore } from 'react';
 import { useStore } from 'zustand';
 import { current } from './draft/draft';
+import type { Warning } from '@/contract';
 import type { DraftState, DraftStore } from './draft/draft-store';
 import type { Settings } from './draft/settings';
 import type { LiveAnalyser, LiveAnswer } from './live/live-analyser';
+import type { LookedAtStore } from './live/looked-at';
 import type { LoopAnswer } from './live/loop-answer';
 import type { BenchSubject } from './subject/bench-subject';
 import type { BenchQuestion } from './live/bench-loop';
@@ -13,6 +15,7 @@ export interface BenchValue {
   readonly subject: BenchSubject;
   readonly store: DraftStore;
   readonly analyser: LiveAnalyser<BenchQuestion, LoopAnswer>;
+  readonly lookedAt: LookedAtStore;
 }
 
 export const BenchContext = createContext<BenchValue | null>(null);
@@ -33,4 +36,30 @@ export const useSettings = (): Settings => useDraft(current);
 export function useAnswer(): LiveAnswer<BenchQuestion, LoopAnswer> {
   const { analyser } = useBench();
   return useSyncExternalStore(analyser.subscribe, analyser.get);
+}
+
+/** What is kept of the engine's answers from one rest to the next: what calls this is not rendered while a gain moves. */
+export function useRestedAnswer(): LoopAnswer | null {
+  const { analyser } = useBench();
+  return useSyncExternalStore(analyser.subscribe, () => analyser.get().rested);
+}
+
+/** The question whose answer stands in full; null while a gain moves. */
+export function useRestingQuestion(): BenchQuestion | null {
+  const { analyser } = useBench();
+  return useSyncExternalStore(analyser.subscribe, () => {
+    const { input, detail, problem } = analyser.get();
+    return detail === 'full' && problem === null ? input : null;
+  });
+}
+
+const NO_WARNINGS: readonly Warning[] = [];
+
+/** What the engine warns of, as of the newest answer that looked at everything. */
+export function useWarnings(): readonly Warning[] {
+  const { analyser } = useBench();
+  return useSyncExternalStore(analyser.subscribe, () => {
+    const warnings = analyser.get().complete?.analysis.warnings ?? NO_WARNINGS;
+    return warnings.length === 0 ? NO_WARNINGS : warnings;
+  });
 }

@@ -15,6 +15,7 @@ import { mayKeep } from './keep/saved-words';
 import { useBenchAnalysis } from './live/use-bench-analysis';
 import type { BenchSubject } from './subject/bench-subject';
 import type { BenchLink, ChangeLink } from './subject/bench-link';
+import { focusChart } from './sheets/focus-chart';
 import { useBenchKeys } from './use-bench-keys';
 
 interface BenchDeskProps {
@@ -26,11 +27,11 @@ interface BenchDeskProps {
 /** The bench with something on it: its draft, the engine that answers, what can be kept, and its keys. */
 export function BenchDesk({ subject, link, onLink }: BenchDeskProps) {
   const store = useDraftStore(subject);
-  const analyser = useBenchAnalysis(subject, store, link.steps);
+  const live = useBenchAnalysis(subject, store, link.steps);
   const compared = useCompared(subject, link);
   const { outcome, keep } = useKeep(subject, store);
   const [activeGain, setActiveGain] = useState<Gain>('kp');
-  const bench = useMemo(() => ({ subject, store, analyser }), [subject, store, analyser]);
+  const bench = useMemo(() => ({ subject, store, ...live }), [subject, store, live]);
   const keptRevision = outcome.kind === 'kept' ? outcome.revision : null;
   useEffect(() => {
     // What a link pinned is no longer what is on the bench once a newer revision was kept here.
@@ -41,8 +42,10 @@ export function BenchDesk({ subject, link, onLink }: BenchDeskProps) {
   const obey = useCallback(
     (command: BenchCommand) => {
       const draft = store.getState();
-      if (command.kind === 'chart') onLink({ chart: command.sheet });
-      else if (command.kind === 'undo') undo(store);
+      if (command.kind === 'chart') {
+        onLink({ chart: command.sheet });
+        focusChart(command.sheet);
+      } else if (command.kind === 'undo') undo(store);
       else if (command.kind === 'redo') redo(store);
       else if (command.kind === 'nudge')
         draft.move({ [activeGain]: nudged(activeGain, current(draft), draft.base.settings, command.fraction) });

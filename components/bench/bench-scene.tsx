@@ -1,9 +1,10 @@
-import { useState } from 'react';
+import { useCallback, useState } from 'react';
 import type { Compared } from './compare/use-compared';
 import type { BenchActions } from './layouts/bench-actions';
 import { BenchLayout } from './layouts/bench-layout';
 import { useDesigns } from './live/use-designs';
 import { SettingsSheet } from './settings/settings-sheet';
+import type { ChartSheet } from './sheets/chart-sheet';
 import type { BenchLink, ChangeLink } from './subject/bench-link';
 
 interface BenchSceneProps extends Omit<BenchActions, 'onSettings'> {
@@ -16,16 +17,20 @@ interface BenchSceneProps extends Omit<BenchActions, 'onSettings'> {
 export function BenchScene({ link, onLink, compared, ...actions }: BenchSceneProps) {
   const designs = useDesigns(compared, link.steps);
   const [settings, setSettings] = useState(false);
+  const openSettings = useCallback(() => setSettings(true), []);
+  const showChart = useCallback((chart: ChartSheet) => onLink({ chart }), [onLink]);
+  const showCase = useCallback((id: string) => onLink({ case: id }), [onLink]);
+  const follow = useCallback(() => onLink({ revision: undefined, analysis: undefined }), [onLink]);
   return (
     <>
       <BenchLayout
         {...actions}
         link={link}
         designs={designs}
-        onSettings={() => setSettings(true)}
-        onChart={(chart) => onLink({ chart })}
-        onCase={(id) => onLink({ case: id })}
-        onFollow={() => onLink({ revision: undefined, analysis: undefined })}
+        onSettings={openSettings}
+        onChart={showChart}
+        onCase={showCase}
+        onFollow={follow}
       />
       <SettingsSheet open={settings} onClose={() => setSettings(false)} link={link} onLink={onLink} compared={compared} />
     </>

@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { IconButton } from '@/components/ui/icon-button';
 import { Text } from '@/components/ui/text';
@@ -11,15 +12,15 @@ import { useGain } from './use-gain';
 interface GainCellProps {
   gain: Gain;
   unstable: StabilitySpan | undefined;
-  onActive: () => void;
+  onActive: (gain: Gain) => void;
 }
 
 /** One gain of the shelf: its rule, its field, and a step down and up. */
-export function GainCell({ gain, unstable, onActive }: GainCellProps) {
+export const GainCell = memo(function GainCell({ gain, unstable, onActive }: GainCellProps) {
   const control = useGain(gain);
   const { label } = gainWords[gain];
   return (
-    <View style={styles.cell} onFocus={onActive}>
+    <View style={styles.cell} onFocus={() => onActive(gain)}>
       <View style={styles.head}>
         <Text step="h3">{label}</Text>
         <Text step="small" tone="ink2" numberOfLines={1}>
@@ -39,7 +40,7 @@ export function GainCell({ gain, unstable, onActive }: GainCellProps) {
       </View>
     </View>
   );
-}
+});
 
 const styles = StyleSheet.create({
   cell: { flex: 1, minWidth: 0, paddingHorizontal: 14, paddingTop: 8, paddingBottom: 10 },

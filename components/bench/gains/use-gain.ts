@@ -1,5 +1,5 @@
 import { useCallback } from 'react';
-import { useBench, useDraft, useSettings } from '../bench-context';
+import { useBench, useDraft } from '../bench-context';
 import { clampGain, type Gain, gainUnit, nudged, roundedGain } from '../draft/gain';
 import { current } from '../draft/draft';
 
@@ -21,7 +21,7 @@ export interface GainControl {
 /** One gain of the draft, and the ways to move it. */
 export function useGain(gain: Gain): GainControl {
   const { store, subject } = useBench();
-  const value = useSettings()[gain];
+  const value = useDraft((draft) => current(draft)[gain]);
   const kept = useDraft(({ base }) => base.settings[gain]);
   const hold = useCallback((next: number) => store.getState().hold({ [gain]: clampGain(gain, roundedGain(next)) }), [store, gain]);
   const release = useCallback(() => store.getState().release(), [store]);

@@ -1,8 +1,9 @@
+import { memo } from 'react';
 import { IconButton } from '@/components/ui/icon-button';
 import { useHistory } from '../draft/use-history';
 
 /** Undo and redo, each named after what it would change. */
-export function HistoryButtons() {
+export const HistoryButtons = memo(function HistoryButtons() {
   const { undo, redo } = useHistory();
   return (
     <>
@@ -10,4 +11,4 @@ export function HistoryButtons() {
       <IconButton icon="redo" outlined label={redo.label} disabled={!redo.possible} onPress={redo.take} />
     </>
   );
-}
+});

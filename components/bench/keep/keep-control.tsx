@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { Button } from '@/components/ui/button';
 import type { KeepOutcome } from './keep-outcome';
 import { useKeepButton } from './use-keep-button';
@@ -9,7 +10,7 @@ interface KeepControlProps {
 }
 
 /** Keeps what is on the bench as the next revision. */
-export function KeepControl({ outcome, onKeep, compact = false }: KeepControlProps) {
+export const KeepControl = memo(function KeepControl({ outcome, onKeep, compact = false }: KeepControlProps) {
   const { revision, disabled } = useKeepButton();
   const label = compact ? `Keep rev ${revision}` : `Keep as rev ${revision}`;
   return (
@@ -23,4 +24,4 @@ export function KeepControl({ outcome, onKeep, compact = false }: KeepControlPro
       onPress={onKeep}
     />
   );
-}
+});

@@ -1,9 +1,9 @@
-import { useEffect } from 'react';
+import { memo, useEffect } from 'react';
 import { View } from 'react-native';
 import { useAnnounce } from '@/components/ui/announcements';
 import { Banner } from '@/components/ui/banner';
 import { useUnits } from '@/components/ui/units';
-import { useAnswer, useBench, useDraft } from '../bench-context';
+import { useBench, useDraft, useWarnings } from '../bench-context';
 import { isMoved } from '../draft/draft';
 import { isOvertaken } from '../draft/meet-latest';
 import { type KeepOutcome, keepWords, type KeepWords } from './keep-outcome';
@@ -15,10 +15,10 @@ interface NoticesProps {
 }
 
 /** What has to be said beside the numbers: what became of keeping, a newer revision, and what the engine warns of. */
-export function Notices({ outcome, onFollow }: NoticesProps) {
+export const Notices = memo(function Notices({ outcome, onFollow }: NoticesProps) {
   const announce = useAnnounce();
   const words = useOutcomeWords(outcome);
-  const { output } = useAnswer();
+  const warnings = useWarnings();
   const spoken = words && `${words.lead} ${words.text}`;
   useEffect(() => {
     if (spoken) announce(spoken);
@@ -27,12 +27,12 @@ export function Notices({ outcome, onFollow }: NoticesProps) {
     <View>
       {words && <Banner {...words} />}
       <OvertakenBanner onFollow={onFollow} />
-      {output?.analysis.warnings.map(({ code, message }) => (
+      {warnings.map(({ code, message }) => (
         <Banner key={code} text={message} />
       ))}
     </View>
   );
-}
+});
 
 /** "Kept as" holds until the next move; a refusal for being late is told by the newer revision itself once that is known. */
 function useOutcomeWords(outcome: KeepOutcome): KeepWords | null {

@@ -52,7 +52,7 @@ export function useKeep(subject: BenchSubject, store: DraftStore): { outcome: Ke
     return { revision, analysis };
   }, [subject.opened, store, create, revise, analyse]);
 
-  const keep = useCallback(async () => {
+  const attempt = useCallback(async () => {
     store.getState().release();
     const sent = store.getState().settings;
     setOutcome({ kind: 'keeping' });
@@ -64,7 +64,8 @@ export function useKeep(subject: BenchSubject, store: DraftStore): { outcome: Ke
       setOutcome(refusal(error));
     }
   }, [store, send, subject]);
-  return { outcome, keep: () => void keep() };
+  const keep = useCallback(() => void attempt(), [attempt]);
+  return { outcome, keep };
 }
 
 function refusal(error: unknown): KeepOutcome {

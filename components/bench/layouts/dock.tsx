@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { memo, useState } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { useOpenPages } from '@/components/navigation/project-context';
 import { IconButton } from '@/components/ui/icon-button';
@@ -21,7 +21,7 @@ import type { BenchActions } from './bench-actions';
 const only: Readonly<Record<Gain, readonly Gain[]>> = { kp: ['kp'], ki: ['ki'], kd: ['kd'], filterTime: ['filterTime'] };
 
 /** The gains in reach of a thumb: one is active, its rule is dragged, its nudges pressed, its number entered. */
-export function Dock({ activeGain, onActiveGain, onSettings, outcome, onKeep }: BenchActions) {
+export const Dock = memo(function Dock({ activeGain, onActiveGain, onSettings, outcome, onKeep }: BenchActions) {
   const { colors } = useTheme();
   const openPages = useOpenPages();
   const [entering, setEntering] = useState(false);
@@ -58,7 +58,7 @@ export function Dock({ activeGain, onActiveGain, onSettings, outcome, onKeep }: 
       />
     </View>
   );
-}
+});
 
 const styles = StyleSheet.create({
   dock: { borderTopWidth: line.head, paddingBottom: 8 },

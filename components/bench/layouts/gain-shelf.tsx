@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { Button } from '@/components/ui/button';
 import { Text } from '@/components/ui/text';
@@ -13,7 +14,13 @@ import { useStabilitySpans } from '../live/use-stability-spans';
 import type { BenchActions } from './bench-actions';
 
 /** All gains along the foot, and at the end whether they are kept. Where there is less room the state stands below, and under 860 the gains two by two. */
-export function GainShelf({ paired = false, onActiveGain, onSettings, outcome, onKeep }: BenchActions & { paired?: boolean }) {
+export const GainShelf = memo(function GainShelf({
+  paired = false,
+  onActiveGain,
+  onSettings,
+  outcome,
+  onKeep,
+}: BenchActions & { paired?: boolean }) {
   const { colors } = useTheme();
   const spans = useStabilitySpans(gains);
   const { remark } = useKeepButton();
@@ -27,7 +34,7 @@ export function GainShelf({ paired = false, onActiveGain, onSettings, outcome, o
       <View style={[styles.gains, paired && styles.pairs]}>
         {gains.map((gain) => (
           <View key={gain} style={[styles.gain, paired && styles.quarter, edge]}>
-            <GainCell gain={gain} unstable={spans[gain]} onActive={() => onActiveGain(gain)} />
+            <GainCell gain={gain} unstable={spans[gain]} onActive={onActiveGain} />
           </View>
         ))}
       </View>
@@ -48,7 +55,7 @@ export function GainShelf({ paired = false, onActiveGain, onSettings, outcome, o
       </View>
     </View>
   );
-}
+});
 
 const styles = StyleSheet.create({
   shelf: { flexDirection: 'row', borderTopWidth: line.head },

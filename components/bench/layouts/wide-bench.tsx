@@ -5,6 +5,8 @@ import { useTheme } from '@/components/ui/theme';
 import { useUnits } from '@/components/ui/units';
 import { useBench } from '../bench-context';
 import { Notices } from '../keep/notices';
+import { useLookingAt } from '../live/use-looking-at';
+import { chartsId } from '../sheets/focus-chart';
 import { timePanels } from '../sheets/time-panels';
 import { BenchStrip } from '../strip/bench-strip';
 import { CaseLine } from '../strip/case-line';
@@ -27,8 +29,16 @@ function roomFor(paired: boolean, height: number) {
 }
 
 /** Everything at once: numbers on top, the charts side by side, all gains along the foot. Two columns where `paired`. */
-export function WideBench({ paired = false, ...props }: BenchLayoutProps & { paired?: boolean }) {
-  const { link, designs, onCase, onFollow, outcome } = props;
+export function WideBench({
+  paired = false,
+  link,
+  designs,
+  onChart: _,
+  onCase,
+  onFollow,
+  ...actions
+}: BenchLayoutProps & { paired?: boolean }) {
+  const { outcome } = actions;
   const { colors } = useTheme();
   const units = useUnits();
   const plantUnits = useBench().subject.plant.units;
@@ -38,9 +48,14 @@ export function WideBench({ paired = false, ...props }: BenchLayoutProps & { pai
     const { reference, load, control } = timePanels(plantUnits, link.steps);
     return [reference, load, control];
   }, [plantUnits, link.steps]);
-  const { a, b } = designs;
+  const { a, timed, b, ends } = designs;
+  useLookingAt('all');
   const column = { backgroundColor: colors.paper };
-  const time = a && <TimeSheet a={a} b={b} units={units} panels={panels} height={room.time} />;
+  const time = timed && (
+    <View id={chartsId('time')}>
+      <TimeSheet a={timed} b={b} units={units} panels={panels} end={ends?.both} height={room.time} />
+    </View>
+  );
   return (
     <View style={styles.page}>
       <BenchStrip />
@@ -51,11 +66,15 @@ export function WideBench({ paired = false, ...props }: BenchLayoutProps & { pai
           {a && height > 0 && (
             <>
               <View style={[styles.column, paired ? styles.share : styles.frequency, column]}>
-                <FrequencySheet a={a} b={b} units={units} height={room.frequency} />
+                <View id={chartsId('frequency')}>
+                  <FrequencySheet a={a} b={b} units={units} height={room.frequency} />
+                </View>
                 {paired && time}
               </View>
               <View style={[styles.column, styles.share, column]}>
-                <PlaneChart a={a} b={b} units={units} height={room.plane} />
+                <View id={chartsId('plane')}>
+                  <PlaneChart a={a} b={b} units={units} height={room.plane} />
+                </View>
                 <ReadOut a={a} b={b} units={units} layout="table" />
               </View>
               {!paired && <View style={[styles.column, styles.time, column]}>{time}</View>}
@@ -63,7 +82,7 @@ export function WideBench({ paired = false, ...props }: BenchLayoutProps & { pai
           )}
         </ScrollView>
       </View>
-      <GainShelf {...props} paired={paired} />
+      <GainShelf {...actions} paired={paired} />
     </View>
   );
 }

@@ -1,23 +1,33 @@
 import { useEffect, useMemo, useSyncExternalStore } from 'react';
+import type { BenchValue } from '../bench-context';
 import { current } from '../draft/draft';
 import type { DraftStore } from '../draft/draft-store';
 import type { Settings } from '../draft/settings';
 import type { BenchSubject } from '../subject/bench-subject';
 import { benchLoop, type BenchQuestion, type StepSizes } from './bench-loop';
 import { createLiveAnalyser, type LiveAnalyser } from './live-analyser';
+import { createLookedAt, type LookedAtStore, stepsFor } from './looked-at';
 import { answerLoop, explainLoopError, type LoopAnswer } from './loop-answer';
 import { pageSchedule } from './page-schedule';
 
-export type BenchAnalyser = LiveAnalyser<BenchQuestion, LoopAnswer>;
+type BenchAnalyser = LiveAnalyser<BenchQuestion, LoopAnswer>;
 
-const createBenchAnalyser = (): BenchAnalyser =>
-  createLiveAnalyser({ compute: ({ loop }, detail) => answerLoop(loop, detail), explain: explainLoopError, schedule: pageSchedule });
+const createBenchAnalyser = (lookedAt: LookedAtStore): BenchAnalyser =>
+  createLiveAnalyser({
+    compute: ({ loop }, detail, outline) => answerLoop(loop, detail, { outline, end: lookedAt.get().end }),
+    steps: () => stepsFor(lookedAt.get()),
+    explain: explainLoopError,
+    schedule: pageSchedule,
+  });
+
+const settled = createLookedAt({ parts: 'frequency', end: null });
 
 const useStepSizes = ({ reference, load }: StepSizes): StepSizes => useMemo(() => ({ reference, load }), [reference, load]);
 
 /** Answers for what is on the bench, gesture under way included. */
-export function useBenchAnalysis(subject: BenchSubject, store: DraftStore, sizes: StepSizes): BenchAnalyser {
-  const analyser = useMemo(() => createBenchAnalyser(), []);
+export function useBenchAnalysis(subject: BenchSubject, store: DraftStore, sizes: StepSizes): Pick<BenchValue, 'analyser' | 'lookedAt'> {
+  const lookedAt = useMemo(() => createLookedAt({ parts: 'all', end: null }), []);
+  const analyser = useMemo(() => createBenchAnalyser(lookedAt), [lookedAt]);
   const steps = useStepSizes(sizes);
   const { plant, shownCase, opened } = subject;
   useEffect(() => {
@@ -32,18 +42,18 @@ export function useBenchAnalysis(subject: BenchSubject, store: DraftStore, sizes
     return store.subscribe(ask);
   }, [analyser, store, plant, shownCase, opened, steps]);
   useEffect(() => () => analyser.stop(), [analyser]);
-  return analyser;
+  return useMemo(() => ({ analyser, lookedAt }), [analyser, lookedAt]);
 }
 
-/** The answer for settings that do not move (design B); null while there is none. */
+/** The answer in full for settings that do not move (design B); null while there is none. */
 export function useSettledAnalysis(subject: BenchSubject, settings: Settings | null, sizes: StepSizes): LoopAnswer | null {
-  const analyser = useMemo(() => createBenchAnalyser(), []);
+  const analyser = useMemo(() => createBenchAnalyser(settled), []);
   const steps = useStepSizes(sizes);
   const { plant, shownCase, opened } = subject;
   useEffect(() => {
     if (settings !== null) analyser.ask({ settings, loop: benchLoop({ plant, shownCase, opened }, settings, steps) });
   }, [analyser, settings, plant, shownCase, opened, steps]);
   useEffect(() => () => analyser.stop(), [analyser]);
-  const { output } = useSyncExternalStore(analyser.subscribe, analyser.get);
-  return settings === null ? null : output;
+  const { complete } = useSyncExternalStore(analyser.subscribe, analyser.get);
+  return settings === null ? null : complete;
 }

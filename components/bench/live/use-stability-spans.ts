@@ -1,7 +1,7 @@
 import { useEffect, useState } from 'react';
 import { analyseLoop, LoopError } from '@/analysis';
 import type { Loop } from '@/contract';
-import { useAnswer } from '../bench-context';
+import { useRestingQuestion } from '../bench-context';
 import type { Gain } from '../draft/gain';
 import type { Settings } from '../draft/settings';
 import { stabilitySpan, type StabilitySpan } from './stability-span';
@@ -11,20 +11,13 @@ export type StabilitySpans = Partial<Record<Gain, StabilitySpan>>;
 /** Milliseconds of one slice: short enough that a finger put down meanwhile is answered in its own frame. */
 const SLICE_MS = 6;
 
-/** Seconds of a response that nobody looks at: the shortest saves the time to find how long it would be. */
-const UNSEEN = 0.01;
-
 const fields = { kp: 'kp', ki: 'ki', kd: 'kd', filterTime: 'derivativeFilterTime' } as const;
 
 function stableWith(loop: Loop, gain: Gain, value: number): boolean {
   if (gain === 'filterTime' && value < 0) return true;
   try {
-    const changed = {
-      ...loop,
-      controller: { ...loop.controller, [fields[gain]]: value },
-      responses: { ...loop.responses, duration: UNSEEN },
-    };
-    return analyseLoop(changed, { curves: false, detail: 'live' }).closedLoop.stable;
+    const changed = { ...loop, controller: { ...loop.controller, [fields[gain]]: value } };
+    return analyseLoop(changed, { curves: false, responses: false, detail: 'live' }).closedLoop.stable;
   } catch (error) {
     // Where a loop has no meaning there is no edge to draw either.
     if (error instanceof LoopError) return true;
@@ -39,11 +32,11 @@ const sizeOf = (settings: Settings, gain: Gain): number => Math.abs(settings[gai
  * between which the page goes on; a gain that moves again ends the search. What was found stays shown until it is found anew.
  */
 export function useStabilitySpans(gains: readonly Gain[]): StabilitySpans {
-  const { input, detail, problem } = useAnswer();
+  const question = useRestingQuestion();
   const [spans, setSpans] = useState<StabilitySpans>({});
   useEffect(() => {
-    if (input === null || detail !== 'full' || problem !== null) return;
-    const { loop, settings } = input;
+    if (question === null) return;
+    const { loop, settings } = question;
     const searches = gains.map((gain) => {
       const search = stabilitySpan({
         value: settings[gain],
@@ -66,6 +59,6 @@ export function useStabilitySpans(gains: readonly Gain[]): StabilitySpans {
     };
     timer = setTimeout(slice, 60);
     return () => clearTimeout(timer);
-  }, [gains, input, detail, problem]);
+  }, [gains, question]);
   return spans;
 }

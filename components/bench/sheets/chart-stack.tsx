@@ -1,17 +1,17 @@
-import { useEffect, useRef, useState } from 'react';
+import { useEffect, useRef } from 'react';
 import { ScrollView, StyleSheet, View } from 'react-native';
 import { type ChartDesign, CurveKey } from '@/components/charts';
-import { useAnswer } from '../bench-context';
 import { useHeight } from '../layouts/use-height';
 import type { StepSizes } from '../live/bench-loop';
+import type { Designs } from '../live/use-designs';
 import { type ChartSheet, chartSheets } from './chart-sheet';
+import { chartsId } from './focus-chart';
 import { SheetChart } from './sheet-chart';
 
 interface ChartStackProps {
   active: ChartSheet;
   onActive: (sheet: ChartSheet) => void;
-  a: ChartDesign;
-  b: ChartDesign | undefined;
+  designs: Designs;
   steps: StepSizes;
 }
 
@@ -19,19 +19,17 @@ interface ChartStackProps {
 const PEEK = 18;
 const LEAST_HEIGHT = 240;
 
-/** A as it stood when it last rested: sheets that nobody looks at are not drawn again while a gain moves. */
-function useRested(a: ChartDesign): ChartDesign {
-  const { detail } = useAnswer();
-  const [rested, setRested] = useState(a);
-  if (detail === 'full' && rested !== a) setRested(a);
-  return rested;
+/** What a sheet draws: A as it moves on the sheet that is looked at, A as it last rested on the others. */
+function drawnOn(sheet: ChartSheet, active: ChartSheet, { a, timed, rested }: Designs): ChartDesign | null {
+  if (sheet !== active) return rested;
+  return sheet === 'step' || sheet === 'load' ? timed : a;
 }
 
 /** All chart sheets in one column that snaps to each: swipe up for the next. */
-export function ChartStack({ active, onActive, a, b, steps }: ChartStackProps) {
+export function ChartStack({ active, onActive, designs, steps }: ChartStackProps) {
+  const { a, b, ends } = designs;
   const scroll = useRef<ScrollView>(null);
   const [viewport, onLayout] = useHeight();
-  const rested = useRested(a);
   const height = Math.max(LEAST_HEIGHT, viewport - PEEK);
   const shown = useRef<ChartSheet>('bode');
   useEffect(() => {
@@ -47,9 +45,7 @@ export function ChartStack({ active, onActive, a, b, steps }: ChartStackProps) {
   };
   return (
     <View style={styles.viewport}>
-      <View style={styles.key}>
-        <CurveKey a={a.label} b={b?.label} />
-      </View>
+      <View style={styles.key}>{a && <CurveKey a={a.label} b={b?.label} />}</View>
       <View style={styles.viewport} onLayout={onLayout}>
         <ScrollView
           ref={scroll}
@@ -58,11 +54,15 @@ export function ChartStack({ active, onActive, a, b, steps }: ChartStackProps) {
           scrollEventThrottle={50}
           onScroll={({ nativeEvent }) => follow(nativeEvent.contentOffset.y)}
         >
-          {chartSheets.map((sheet) => (
-            <View key={sheet} style={[styles.sheet, { height }]}>
-              {viewport > 0 && <SheetChart sheet={sheet} a={sheet === active ? a : rested} b={b} steps={steps} height={height - 4} />}
-            </View>
-          ))}
+          {chartSheets.map((sheet) => {
+            const drawn = drawnOn(sheet, active, designs);
+            const shown = { b, steps, height: height - 4, ends: ends ?? undefined };
+            return (
+              <View key={sheet} id={chartsId(sheet)} style={[styles.sheet, { height }]}>
+                {viewport > 0 && drawn && <SheetChart sheet={sheet} a={drawn} {...shown} />}
+              </View>
+            );
+          })}
           <View style={{ height: PEEK }} />
         </ScrollView>
       </View>

@@ -4,6 +4,7 @@ import { type ChartDesign, type FrequencyPanel, FrequencySheet, PlaneChart, Time
 import { useUnits } from '@/components/ui/units';
 import { useBench } from '../bench-context';
 import type { StepSizes } from '../live/bench-loop';
+import type { TimeEnds } from '../live/time-ends';
 import { BudgetLine } from '../strip/budget-line';
 import type { ChartSheet } from './chart-sheet';
 import { timePanels } from './time-panels';
@@ -14,6 +15,7 @@ interface SheetChartProps {
   b: ChartDesign | undefined;
   steps: StepSizes;
   height: number;
+  ends: TimeEnds | undefined;
 }
 
 const bode: readonly FrequencyPanel[] = ['magnitude', 'phase'];
@@ -21,7 +23,7 @@ const sensitivity: readonly FrequencyPanel[] = ['sensitivity'];
 const BUDGET_HEIGHT = 42;
 
 /** The chart of one sheet on a phone. */
-export const SheetChart = memo(function SheetChart({ sheet, a, b, steps, height }: SheetChartProps) {
+export const SheetChart = memo(function SheetChart({ sheet, a, b, steps, height, ends }: SheetChartProps) {
   const units = useUnits();
   const plantUnits = useBench().subject.plant.units;
   const panels = useMemo(() => timePanels(plantUnits, steps), [plantUnits, steps]);
@@ -43,8 +45,8 @@ export const SheetChart = memo(function SheetChart({ sheet, a, b, steps, height 
     case 'sensitivity':
       return <FrequencySheet {...scene} panels={sensitivity} />;
     case 'step':
-      return <TimeSheet {...scene} panels={stepPanels} />;
+      return <TimeSheet {...scene} panels={stepPanels} end={ends?.reference} />;
     case 'load':
-      return <TimeSheet {...scene} panels={loadPanels} />;
+      return <TimeSheet {...scene} panels={loadPanels} end={ends?.load} />;
   }
 });

@@ -1,4 +1,4 @@
-import { useRef } from 'react';
+import { memo, useRef } from 'react';
 import { Pressable, StyleSheet, View } from 'react-native';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
@@ -13,7 +13,7 @@ interface SheetTabsProps {
 const steps: Readonly<Record<string, number>> = { ArrowRight: 1, ArrowLeft: -1 };
 
 /** The names of the chart sheets. Tap one, or walk them with the arrows. */
-export function SheetTabs({ active, onChoose }: SheetTabsProps) {
+export const SheetTabs = memo(function SheetTabs({ active, onChoose }: SheetTabsProps) {
   const { colors } = useTheme();
   const row = useRef<View>(null);
   const walk = (event: KeyboardEvent) => {
@@ -46,7 +46,7 @@ export function SheetTabs({ active, onChoose }: SheetTabsProps) {
       })}
     </View>
   );
-}
+});
 
 const styles = StyleSheet.create({
   row: { flexDirection: 'row', paddingHorizontal: 4, borderBottomWidth: line.hair },
