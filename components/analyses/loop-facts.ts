@@ -78,9 +78,9 @@ export function closedLoopFacts({ closedLoop, bandwidth, sensitivity }: Analysis
       aside: closedLoop.stable ? undefined : unstableWords(closedLoop.unstablePoles),
     },
     { name: 'Encirclements of −1', value: count(closedLoop.encirclements), aside: `needed ${count(closedLoop.encirclementsNeeded)}` },
-    band('Bandwidth, |T|', bandwidth.closedLoop, '|T| at −3 dB'),
-    band('Bandwidth, reference', bandwidth.reference, 'its response at −3 dB'),
-    band('Bandwidth, |S|', bandwidth.sensitivity, '|S| at −3 dB'),
+    band('Bandwidth, |T|', bandwidth.closedLoop, 'falls to 0.71 of |T(0)|'),
+    band('Bandwidth, reference', bandwidth.reference, 'of its response, likewise'),
+    band('Bandwidth, |S|', bandwidth.sensitivity, 'rises through 0.71'),
     read({ quantity: 'noiseGain', ...noiseGain, none: 'without bound' }, units),
   ];
 }

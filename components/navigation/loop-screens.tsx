@@ -1,5 +1,6 @@
 import { type ComponentType, lazy, Suspense } from 'react';
 import { Waiting } from '@/components/ui/waiting';
+import { PageBoundary } from './page-boundary';
 
 type OnDemand = typeof import('@/components/on-demand');
 
@@ -8,9 +9,11 @@ function onDemand<Props extends object>(choose: (screens: OnDemand) => Component
   const Screen = lazy(async () => ({ default: choose(await import('@/components/on-demand')) as ComponentType<object> }));
   return function OnDemand(props: Props) {
     return (
-      <Suspense fallback={<Waiting text="Fetching the charts" />}>
-        <Screen {...props} />
-      </Suspense>
+      <PageBoundary>
+        <Suspense fallback={<Waiting text="Fetching the charts" />}>
+          <Screen {...props} />
+        </Suspense>
+      </PageBoundary>
     );
   };
 }

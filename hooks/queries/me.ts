@@ -41,7 +41,10 @@ export function useUpdateMe() {
       }
       return before;
     },
-    onError: (_error, _change, before) => client.setQueryData(meKey, before),
+    onError: (error, _change, before) => {
+      const signedOut = hasStatus(error, 401);
+      if (!signedOut) client.setQueryData(meKey, before);
+    },
     onSuccess: (me) => client.setQueryData(meKey, me),
   });
 }

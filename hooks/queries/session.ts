@@ -1,7 +1,7 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import type { SignIn, SignUp } from '@/contract';
 import { request } from '../api/request';
-import { meQuery } from './me';
+import { meQuery, sessionsQuery } from './me';
 
 /** What follows every sign-in: nothing of whoever was signed in before stays. */
 function useEntry<Input>(path: string) {
@@ -37,11 +37,14 @@ export const useResetPassword = () =>
   });
 
 /** The other devices are signed out with it. */
-export const useChangePassword = () =>
-  useMutation({
+export function useChangePassword() {
+  const client = useQueryClient();
+  return useMutation({
     mutationFn: (input: { currentPassword: string; newPassword: string }) =>
       request<unknown>('POST', '/auth/change-password', { body: { ...input, revokeOtherSessions: true } }),
+    onSuccess: () => client.invalidateQueries(sessionsQuery),
   });
+}
 
 export const useSendVerification = () =>
   useMutation({
