@@ -40,19 +40,23 @@ async function signIn(page: Page, url: string) {
   if (!answer.ok()) throw new Error(`sign-in answered ${answer.status()}`);
 }
 
+async function picture(page: Page, path: string, name: string) {
+  await page.goto(`${server.url}${path}`, { waitUntil: 'networkidle' });
+  await page.getByRole('heading', { level: 1 }).first().waitFor({ state: 'attached' });
+  await page.waitForTimeout(SETTLE_MS);
+  await page.screenshot({ path: join(OUT, `${name}.png`) });
+}
+
 mkdirSync(OUT, { recursive: true });
 const server = await startBuiltServer();
 const browser = await launchBrowser();
 for (const size of ['phone', 'wide'] as SizeName[]) {
   for (const theme of ['light', 'dark'] as const) {
     const { page, context } = await openPage(browser, size, theme);
-    await page.goto(`${server.url}/sign-in`, { waitUntil: 'networkidle' });
-    await page.screenshot({ path: join(OUT, `sign-in-${size}-${theme}.png`) });
+    await picture(page, '/sign-in', `sign-in-${size}-${theme}`);
     await signIn(page, server.url);
     for (const [name, path] of Object.entries(await screens(page))) {
-      await page.goto(`${server.url}${path}`, { waitUntil: 'networkidle' });
-      await page.waitForTimeout(SETTLE_MS);
-      await page.screenshot({ path: join(OUT, `${name}-${size}-${theme}.png`) });
+      await picture(page, path, `${name}-${size}-${theme}`);
     }
     await context.close();
   }
