@@ -1,5 +1,6 @@
 import { parse } from 'mathjs/number';
 import { refusal } from './refusal';
+import { refuseBrackets } from './refuse-brackets';
 
 /** The only kinds of node that a formula may consist of. Whatever else the parser knows is refused by name. */
 export type FormulaNode =
@@ -17,6 +18,7 @@ const LONGEST = 500;
  */
 export const parseFormula = (text: string): FormulaNode => {
   if (text.length > LONGEST) throw refusal(`A formula has at most ${LONGEST} characters.`, LONGEST);
+  refuseBrackets(text);
   try {
     return parse(text) as FormulaNode;
   } catch (error) {

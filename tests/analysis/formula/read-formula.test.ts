@@ -62,7 +62,7 @@ describe('a formula is read', () => {
 
 describe('a formula is refused, with the place and the reason', () => {
   it.each([
-    ['1/(s+1', /^\/plant\/text Character 6: This cannot be read/],
+    ['1/(s+1', /^\/plant\/text A bracket is open at character 3/],
     ['1/(s + tau)', /Character 8: “tau” is neither s nor a parameter/],
     ['1/(s + 1) + exp(-s)/(s + 2)', /Character 11: Parts with different dead times/],
     ['exp(-s^2)/(s+1)', /Character 1: Dead time is exp of a number times s/],

@@ -59,7 +59,11 @@ describe('a plant given as a formula', () => {
 
 describe('a formula that has no meaning', () => {
   it.each([
-    ['a bracket that is not closed', '1/(s + 1', /^Character \d+:/],
+    [
+      'a bracket that is not closed',
+      '2.1 exp(-0.08 s)/(s (0.35 s + 1)',
+      /^A bracket is open at character 18\. Close it, or take it out\.$/,
+    ],
     ['a letter without a value', '1/(tau s + 1)', /^Character 4: “tau”/],
     ['a function that is none', 'sqrt(s)/(s + 1)', /^Character 1:/],
     ['two dead times in a sum', 'exp(-s)/(s + 1) + exp(-2 s)/(s + 1)', /^Character 17:.*dead time/],
