@@ -9,7 +9,7 @@ import { useLayout } from '@/components/ui/use-layout';
 import type { PlantRevision } from '@/contract';
 import { useSignal } from '@/hooks/use-signal';
 import { PlantBode } from './plant-bode';
-import { PlantEquation } from './plant-equation';
+import { PlantEquation } from './equation/plant-equation';
 import { PlantFields } from './plant-fields';
 import { RevisionList } from './revision-list';
 import { usePlantEditor } from './use-plant-editor';

@@ -1,7 +1,7 @@
 import { describePlant, LoopError } from '@/analysis';
 import { parseNumber } from '@/components/ui/parse-number';
 import type { PlantContent, PlantRevision } from '@/contract';
-import { parseCoefficients } from './parse-coefficients';
+import { parseCoefficients } from './notation/parse-coefficients';
 
 export type Basis = 'measured' | 'assumed' | 'unsaid';
 

@@ -1,8 +1,8 @@
 import { View } from 'react-native';
 import { type Fact, FactTable } from '@/components/ui/fact-table';
 import type { FrozenCase, PlantRevision } from '@/contract';
-import { PlantEquation } from './plant-equation';
-import { coefficientText } from './polynomial-text';
+import { PlantEquation } from './equation/plant-equation';
+import { coefficientText } from './equation/polynomial-text';
 
 const basisWords = { measured: 'measured', assumed: 'assumed' };
 

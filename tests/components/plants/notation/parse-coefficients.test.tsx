@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { parseCoefficients } from '@/components/plants/parse-coefficients';
+import { parseCoefficients } from '@/components/plants/notation/parse-coefficients';
 
 describe('coefficients are read as people write them', () => {
   it.each([

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { polynomialText } from '@/components/plants/polynomial-text';
+import { polynomialText } from '@/components/plants/equation/polynomial-text';
 
 describe('a polynomial is printed as it is read', () => {
   it.each([
