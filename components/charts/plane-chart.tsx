@@ -13,6 +13,7 @@ import {
   type PlanePicture,
   type Rect,
   responseOf,
+  textWidth,
 } from '@/figures';
 import { ChartShell } from './chart-shell';
 import { ChartText } from './chart-text';
@@ -36,6 +37,10 @@ export interface PlaneChartProps extends LoopChartProps {
 const names: Record<PlaneKind, string> = { nyquist: 'Nyquist', nichols: 'Nichols' };
 const options = (['nyquist', 'nichols'] as const).map((value) => ({ value, label: names[value] }));
 const FOOT = 24;
+/** Width of the switch and the table's button at the right end of the title's line. */
+const TOOLS = 206;
+const TITLE_PITCH = 52;
+const CONTOUR_WORDS = 'contours are |S|';
 const insets: Record<PlaneKind, { left: number; right: number; foot: number }> = {
   nyquist: { left: 6, right: 6, foot: FOOT },
   nichols: { left: 40, right: 6, foot: FOOT + 22 },
@@ -52,6 +57,25 @@ function pictureOf(kind: PlaneKind, scene: LoopScene, plot: Rect): PlanePicture 
   return nicholsPicture(scene, nicholsWindow(designs.map(responseOf)), plot);
 }
 
+/** The name and what the contours are; where the chart is narrow the words give way to the switch, the longer ones first. */
+function PlaneTitle({ name, x, free }: { name: string; x: number; free: number }) {
+  const after = x + TITLE_PITCH;
+  return (
+    <>
+      {x + textWidth(name) <= free && (
+        <ChartText x={x} y={26} tone="title">
+          {name}
+        </ChartText>
+      )}
+      {after + textWidth(CONTOUR_WORDS) <= free && (
+        <ChartText x={after} y={26} tone="contour">
+          {CONTOUR_WORDS}
+        </ChartText>
+      )}
+    </>
+  );
+}
+
 /** L on the contours of |S|, as Nyquist or Nichols: how near it comes to −1, in which direction it runs, and how often it goes round. */
 export const PlaneChart = memo(function PlaneChart({ a, b, others, limits, units, height, width: fixed, plane, onPlane }: PlaneChartProps) {
   const { width, onLayout } = useChartFrame(fixed);
@@ -66,12 +90,7 @@ export const PlaneChart = memo(function PlaneChart({ a, b, others, limits, units
   const drawing = (
     <Svg width={width} height={height} style={StyleSheet.absoluteFill} aria-hidden>
       <PlaneView picture={picture} />
-      <ChartText x={plot.x} y={26} tone="title">
-        {names[kind]}
-      </ChartText>
-      <ChartText x={plot.x + 52} y={26} tone="contour">
-        contours are |S|
-      </ChartText>
+      <PlaneTitle name={names[kind]} x={plot.x} free={width - TOOLS} />
       <ChartText x={plot.x} y={height - 6}>
         {foot}
       </ChartText>

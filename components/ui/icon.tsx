@@ -7,6 +7,7 @@ type Stroke = string | readonly [path: string, width: number];
 
 const icons = {
   back: ['M15 5l-7 7 7 7'],
+  erase: ['M9 6h11v12H9l-6-6z', 'M12 9.500l5 5M17 9.500l-5 5'],
   next: ['M9 5l7 7-7 7'],
   down: ['M6 9l6 6 6-6'],
   undo: ['M8 5L4 9l4 4M4 9h10a5 5 0 015 5a5 5 0 01-5 5H9'],

@@ -22,16 +22,17 @@ export const mayBeNegative = (gain: Gain): boolean => gain !== 'filterTime';
 export const clampGain = (gain: Gain, value: number): number => (mayBeNegative(gain) ? value : Math.max(0, value));
 
 /**
- * The unit of a gain, from those of the plant: command per output, over or times seconds. Empty where the plant names none.
- * @example gainUnit('ki', { input: 'kN·m', output: 'm/s' }) // 'kN·m/(m/s)/s'
+ * The unit of a gain, from those of the plant: command per output, over or times seconds, with one fraction bar outside brackets.
+ * Empty where the plant names none.
+ * @example gainUnit('ki', { input: 'kN·m', output: 'm/s' }) // 'kN·m/((m/s)·s)'
  */
-export function gainUnit(gain: Gain, units: { input: string; output: string }): string {
+export function gainUnit(gain: Gain, { input, output }: { input: string; output: string }): string {
   if (gain === 'filterTime') return 's';
-  if (!units.input || !units.output) return '';
-  const output = /[/·]/.test(units.output) ? `(${units.output})` : units.output;
-  const ratio = `${units.input}/${output}`;
-  if (gain === 'kp') return ratio;
-  return gain === 'ki' ? `${ratio}/s` : `${ratio}·s`;
+  if (!input || !output) return '';
+  const per = /[/·]/.test(output) ? `(${output})` : output;
+  const command = input.includes('/') ? `(${input})` : input;
+  if (gain === 'kp') return `${command}/${per}`;
+  return gain === 'ki' ? `${command}/(${per}·s)` : `${command}·s/${per}`;
 }
 
 /** Step of a nudge where the gain is too near zero for a percentage of it to be seen. */

@@ -100,7 +100,7 @@ function Key({ name, onPress }: { name: KeypadKey; onPress: () => void }) {
       onPress={onPress}
       style={({ pressed: down }) => [styles.key, { borderColor: colors.rule2, backgroundColor: down ? colors.bar : colors.paper }]}
     >
-      {name === 'erase' ? <Icon name="back" /> : <Text style={styles.digit}>{name === 'sign' ? '±' : name}</Text>}
+      {name === 'erase' ? <Icon name="erase" size={26} /> : <Text style={styles.digit}>{name === 'sign' ? '±' : name}</Text>}
     </Pressable>
   );
 }

@@ -23,15 +23,22 @@ export const CaseLine = memo(function CaseLine({ onCase }: CaseLineProps) {
         <Menu label={label} kind="quiet" items={items} />
       ) : (
         <Text step="note" weight={600} numberOfLines={1}>
-          {label}, {plant.name} rev {plant.revision}
+          {label}.
         </Text>
       )}
+      <Text step="note" tone="ink2" numberOfLines={1} style={styles.plant}>
+        <Text step="note" weight={600}>
+          Plant
+        </Text>{' '}
+        {plant.name}, rev {plant.revision}.
+      </Text>
       <BudgetLine />
     </View>
   );
 });
 
 const styles = StyleSheet.create({
+  plant: { flexShrink: 1 },
   line: {
     flexDirection: 'row',
     alignItems: 'center',

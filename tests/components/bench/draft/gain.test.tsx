@@ -22,10 +22,12 @@ describe('a gain', () => {
   it('has the unit that the plant gives it', () => {
     const units = { input: 'kN·m', output: 'm/s' };
     expect(gainUnit('kp', units)).toBe('kN·m/(m/s)');
-    expect(gainUnit('ki', units)).toBe('kN·m/(m/s)/s');
-    expect(gainUnit('kd', units)).toBe('kN·m/(m/s)·s');
+    expect(gainUnit('ki', units)).toBe('kN·m/((m/s)·s)');
+    expect(gainUnit('kd', units)).toBe('kN·m·s/(m/s)');
     expect(gainUnit('filterTime', units)).toBe('s');
     expect(gainUnit('kp', { input: '', output: 'm/s' })).toBe('');
+    expect(gainUnit('ki', { input: '%', output: 'rad' })).toBe('%/(rad·s)');
+    expect(gainUnit('kd', { input: 'N/mm', output: 'rad' })).toBe('(N/mm)·s/rad');
   });
 });
 
