@@ -10,8 +10,8 @@ export const PHASE_SLOPE = 4;
 export const WIDTH = 5;
 
 export const startProduct = (product: Float64Array): void => {
-  product.fill(0);
   product[RE] = 1;
+  product[IM] = product[TURNS] = product[LOG_SLOPE] = product[PHASE_SLOPE] = 0;
 };
 
 /**

@@ -54,20 +54,34 @@ export const drawnGrid = (
 
 /** The curves of the contract, read off a grid of exact samples. */
 export const frequencyResponse = ({ table, count }: Grid): FrequencyResponse => {
-  const column = (read: (row: number) => number) => Array.from({ length: count }, (_, i) => read(i * S.ROW));
+  const column = (read: (row: number) => number) => {
+    const values = new Array<number>(count);
+    for (let i = 0; i < count; i += 1) values[i] = read(i * S.ROW);
+    return values;
+  };
   const curve = (log: number, phase: number) => ({
     magnitude: column((row) => Math.exp(table[row + log])),
     phaseDegrees: column((row) => table[row + phase] * DEGREES),
   });
-  const distance = (row: number) => Math.max(LEAST_DISTANCE, Math.hypot(1 + table[row + S.RE], table[row + S.IM]));
+  const plant = curve(S.PLANT_LOG, S.PLANT_PHASE);
+  const controller = curve(S.COMMAND_LOG, S.COMMAND_PHASE);
+  const loop = curve(S.LOG, S.PHASE);
+  const sensitivity = column((row) => 1 / Math.max(LEAST_DISTANCE, length(1 + table[row + S.RE], table[row + S.IM])));
+  const times = (values: readonly number[]) => values.map((value, i) => value * sensitivity[i]);
   return {
     frequencies: column((row) => table[row + S.OMEGA]),
-    loop: { ...curve(S.LOG, S.PHASE), real: column((row) => table[row + S.RE]), imaginary: column((row) => table[row + S.IM]) },
-    plant: curve(S.PLANT_LOG, S.PLANT_PHASE),
-    controller: curve(S.COMMAND_LOG, S.COMMAND_PHASE),
-    sensitivity: column((row) => 1 / distance(row)),
-    complementarySensitivity: column((row) => Math.hypot(table[row + S.RE], table[row + S.IM]) / distance(row)),
-    loadSensitivity: column((row) => Math.exp(table[row + S.PLANT_LOG]) / distance(row)),
-    noiseSensitivity: column((row) => Math.exp(table[row + S.COMMAND_LOG]) / distance(row)),
+    loop: { ...loop, real: column((row) => table[row + S.RE]), imaginary: column((row) => table[row + S.IM]) },
+    plant,
+    controller,
+    sensitivity,
+    complementarySensitivity: times(loop.magnitude),
+    loadSensitivity: times(plant.magnitude),
+    noiseSensitivity: times(controller.magnitude),
   };
+};
+
+/** √(re² + im²), by the slow safe way only where the squares overflow. */
+const length = (re: number, im: number): number => {
+  const square = re * re + im * im;
+  return square < Infinity ? Math.sqrt(square) : Math.hypot(re, im);
 };

@@ -48,7 +48,7 @@ export const refinedGrid = (loop: LoopFunction, frequencies: readonly number[], 
     const next: Table = new Float64Array(wanted * ROW);
     let end = 0;
     for (let i = 0; i < count; i += 1) {
-      next.set(table.subarray(i * ROW, (i + 1) * ROW), end * ROW);
+      for (let k = 0; k < ROW; k += 1) next[end * ROW + k] = table[i * ROW + k];
       end += 1;
       const n = i < count - 1 ? pieces[i] : 1;
       const from = table[i * ROW + OMEGA];

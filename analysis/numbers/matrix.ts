@@ -22,6 +22,12 @@ export function matrixOf(rows: readonly ArrayLike<number>[]): Matrix {
   return matrix;
 }
 
+export function scaledBy(matrix: Matrix, factor: number): Matrix {
+  const scaled = zeroMatrix(matrix.rows, matrix.columns);
+  for (let i = 0; i < scaled.data.length; i += 1) scaled.data[i] = factor * matrix.data[i];
+  return scaled;
+}
+
 export function multiply(a: Matrix, b: Matrix): Matrix {
   const product = zeroMatrix(a.rows, b.columns);
   for (let i = 0; i < a.rows; i += 1) {

@@ -53,6 +53,15 @@ export class Curve {
     return this.valueIn(panel > 0 && this.starts[panel] === time ? panel - 1 : panel, time);
   }
 
+  /** The values at ascending times. */
+  valuesAt(times: readonly number[]): number[] {
+    let panel = 0;
+    return times.map((time) => {
+      while (panel + 1 < this.panels && this.starts[panel + 1] <= time) panel += 1;
+      return this.valueIn(panel, time);
+    });
+  }
+
   /** The polynomial of one panel, also at the panel's ends. */
   valueIn(panel: number, time: number): number {
     return interpolate(this.values, panel * NODE_COUNT, (time - this.starts[panel]) / this.widths[panel]);

@@ -32,19 +32,26 @@ interface Drawing {
 function bendTimes(curve: Curve, { end, spacing, tolerance }: Drawing): number[] {
   const times: number[] = [];
   const allowed = tolerance * rangeUntil(curve, end);
+  const [slopes, bends] = [new Float64Array(NODE_COUNT), new Float64Array(NODE_COUNT)];
   let [before, slopeBefore] = [curve.values[0], 0];
   for (let panel = 0; panel < curve.panels && curve.starts[panel] < end; panel += 1) {
     const [start, width, offset] = [curve.starts[panel], curve.widths[panel], panel * NODE_COUNT];
-    const slopes = derivativeAtNodes(curve.values, offset);
+    derivativeAtNodes(curve.values, offset, slopes);
     if (Math.abs(curve.values[offset] - before) > allowed) times.push(start - INSTANT * end, start);
     else if ((Math.abs(slopes[0] / width - slopeBefore) * spacing) / 4 > allowed) times.push(start);
-    const bend = derivativeAtNodes(slopes, 0).reduce((most, value) => Math.max(most, Math.abs(value)), 0);
+    const bend = greatest(derivativeAtNodes(slopes, 0, bends));
     const pieces = Math.ceil(Math.sqrt(bend / (8 * allowed)));
     if (width / pieces < spacing) for (let k = 0; k <= pieces; k += 1) times.push(start + (width * k) / pieces);
     [before, slopeBefore] = [curve.values[offset + NODE_COUNT - 1], slopes[NODE_COUNT - 1] / width];
     if (times.length > MAX_POINTS) break;
   }
   return times;
+}
+
+function greatest(values: Float64Array): number {
+  let most = 0;
+  for (let i = 0; i < values.length; i += 1) most = Math.max(most, Math.abs(values[i]));
+  return most;
 }
 
 function rangeUntil(curve: Curve, end: number): number {

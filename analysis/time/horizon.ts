@@ -17,6 +17,9 @@ const SWINGS = 60;
 const WATCH_PER_REST = 50;
 const RESTING = 1e-6;
 
+/** Changes below this share of a curve's size are rounding, not motion. */
+const MOTION = 1e-9;
+
 /** Past this many first horizons, time itself has no digits left beside the first panels. */
 const LONGEST = 1e15;
 
@@ -83,9 +86,10 @@ function hasRested(output: Curve, horizon: number): boolean {
 function firstTurn(curve: Curve): number {
   let direction = 0;
   for (let k = 1; k < curve.values.length; k += 1) {
-    const now = Math.sign(curve.values[k] - curve.values[k - 1]);
-    if (direction !== 0 && now === -direction) return nodeTime(curve, k - 1);
-    if (now !== 0) direction = now;
+    const change = curve.values[k] - curve.values[k - 1];
+    if (Math.abs(change) <= MOTION * curve.size) continue;
+    if (direction !== 0 && Math.sign(change) === -direction) return nodeTime(curve, k - 1);
+    direction = Math.sign(change);
   }
   return Infinity;
 }

@@ -15,9 +15,10 @@ export interface Knots {
 export function monotoneKnots(curve: Curve, end: number): Knots {
   const times: number[] = [];
   const values: number[] = [];
+  const room = new Float64Array(NODE_COUNT);
   for (let panel = 0; panel < curve.panels && curve.starts[panel] < end; panel += 1) {
     const [start, width, offset] = [curve.starts[panel], curve.widths[panel], panel * NODE_COUNT];
-    const slopes = isFlat(curve, offset) ? null : derivativeAtNodes(curve.values, offset);
+    const slopes = isFlat(curve, offset) ? null : derivativeAtNodes(curve.values, offset, room);
     for (let i = 0; i < NODE_COUNT; i += 1) {
       if (slopes && i > 0 && slopes[i - 1] * slopes[i] < 0) {
         const turn = zeroBetween((x) => interpolate(slopes, 0, x), NODES[i - 1], NODES[i]);

@@ -37,19 +37,20 @@ export function interpolationWeights(position: number): Float64Array {
 }
 
 /** Row i gives the derivative at node i from the values at the nodes. @see REFERENCES.md [Berrut & Trefethen 2004], equation 9.4 */
-const DIFFERENTIATION = Array.from(NODES, (_, i) => {
-  const row = new Float64Array(NODE_COUNT);
-  for (let j = 0; j < NODE_COUNT; j += 1) if (j !== i) row[j] = WEIGHTS[j] / WEIGHTS[i] / (NODES[i] - NODES[j]);
-  row[i] = -row.reduce((sum, x) => sum + x, 0);
-  return row;
-});
+const DIFFERENTIATION = Float64Array.from(
+  Array.from(NODES).flatMap((node, i) => {
+    const row = Array.from(NODES, (other, j) => (j === i ? 0 : WEIGHTS[j] / WEIGHTS[i] / (node - other)));
+    row[i] = -row.reduce((sum, x) => sum + x, 0);
+    return row;
+  }),
+);
 
-/** Derivative at the nodes, per panel width, of the polynomial through `values` from `offset`. */
-export function derivativeAtNodes(values: ArrayLike<number>, offset: number): Float64Array {
-  const slopes = new Float64Array(NODE_COUNT);
+/** Derivative at the nodes, per panel width, of the polynomial through `values` from `offset`, written into `slopes`. */
+export function derivativeAtNodes(values: ArrayLike<number>, offset: number, slopes: Float64Array): Float64Array {
   for (let i = 0; i < NODE_COUNT; i += 1) {
-    const row = DIFFERENTIATION[i];
-    for (let j = 0; j < NODE_COUNT; j += 1) slopes[i] += row[j] * values[offset + j];
+    let slope = 0;
+    for (let j = 0; j < NODE_COUNT; j += 1) slope += DIFFERENTIATION[i * NODE_COUNT + j] * values[offset + j];
+    slopes[i] = slope;
   }
   return slopes;
 }

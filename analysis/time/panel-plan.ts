@@ -12,6 +12,9 @@ const PANEL_ANGLE = 1.25;
 /** A mode has died when it fell by e^−36, double precision. */
 const DEAD_EXPONENT = 36;
 
+/** Panels become wider only where they become this much wider: each width costs an operator of its own. */
+const WORTH_WIDENING = 2;
+
 /** Width where nothing moves: any does. */
 const STILL_WIDTH = 1;
 
@@ -25,21 +28,32 @@ export function planPanels(poles: readonly Complex[], period: number, fineness =
   const modes = poles
     .map(({ re, im }) => ({ rate: Math.hypot(re, im), death: re < 0 ? DEAD_EXPONENT / -re : Infinity }))
     .sort((a, b) => a.death - b.death);
-  const stages: Stage[] = [];
+  const spans: Span[] = [];
   let start = 0;
+  const lastUntil = (end: number, widest: number) => {
+    const last = spans[spans.length - 1];
+    if (last && widest < WORTH_WIDENING * last.widest) last.length += end - start;
+    else spans.push({ length: end - start, widest });
+    start = end;
+  };
   modes.forEach(({ death }, k) => {
     const end = Math.min(death, period);
     if (end <= start) return;
     const fastest = Math.max(...modes.slice(k).map(({ rate }) => rate));
-    stages.push(stageOf(end - start, fastest > 0 ? PANEL_ANGLE / fastest : Math.min(end - start, STILL_WIDTH), fineness));
-    start = end;
+    lastUntil(end, fastest > 0 ? PANEL_ANGLE / fastest : Math.min(end - start, STILL_WIDTH));
   });
-  if (start < period) stages.push(stageOf(period - start, start || Math.min(period, STILL_WIDTH), fineness));
-  return stages;
+  if (start < period) lastUntil(period, start || Math.min(period, STILL_WIDTH));
+  return spans.map((span) => stageOf(span, fineness));
+}
+
+/** A stretch of time and the widest panel that follows what is alive in it. */
+interface Span {
+  length: number;
+  readonly widest: number;
 }
 
 /** Panels of at most the given width that fill the length evenly; without end where it has none. */
-function stageOf(length: number, widest: number, fineness: number): Stage {
+function stageOf({ length, widest }: Span, fineness: number): Stage {
   if (length === Infinity) return { width: widest / fineness, count: Infinity };
   const count = Math.ceil((length / widest) * fineness);
   return { width: length / count, count };

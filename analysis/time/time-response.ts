@@ -83,5 +83,6 @@ export function timeResponse(
 
 function drawn({ output, control, axisEnd }: StepResponse, size: number, points: number): TimeSeries {
   const time = drawnTimes([output, control], axisEnd, points);
-  return { time, output: time.map((t) => size * output.valueAt(t)), control: time.map((t) => size * control.valueAt(t)) };
+  const sized = (values: number[]) => (size === 1 ? values : values.map((value) => size * value));
+  return { time, output: sized(output.valuesAt(time)), control: sized(control.valuesAt(time)) };
 }

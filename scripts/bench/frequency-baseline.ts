@@ -1,6 +1,5 @@
 import type { LoopModel, Rational } from '@/analysis';
 import { expandRoots } from '@/analysis/numbers/polynomial';
-import type { Loop } from '@/contract';
 
 /** Columns of the contract's frequency response beside the frequencies themselves. */
 const COLUMNS = 12;
