@@ -4,9 +4,12 @@ import { PageBoundary } from './page-boundary';
 
 type OnDemand = typeof import('@/components/on-demand');
 
+/** Fetches what draws a loop, once. */
+export const fetchLoopScreens = (): Promise<OnDemand> => import('@/components/on-demand');
+
 /** A screen that draws a loop: it comes with the engine, the figures and the charts when the first of them is opened. */
 function onDemand<Props extends object>(choose: (screens: OnDemand) => ComponentType<Props>) {
-  const Screen = lazy(async () => ({ default: choose(await import('@/components/on-demand')) as ComponentType<object> }));
+  const Screen = lazy(async () => ({ default: choose(await fetchLoopScreens()) as ComponentType<object> }));
   return function OnDemand(props: Props) {
     return (
       <PageBoundary>
