@@ -1,15 +1,16 @@
 import { useMemo } from 'react';
 import { View } from 'react-native';
 import { LoopError, plantResponse, type PlantResponse } from '@/analysis';
+import { runnablePlant } from '@/analysis/project';
 import { CursorProvider, PlantReadOut, PlantSheet } from '@/components/charts';
 import { Heading, Text } from '@/components/ui/text';
 import { useUnits } from '@/components/ui/units';
-import type { PlantContent } from '@/contract';
 import { frequencyFrom } from '@/figures';
+import type { ReadablePlant } from './equation/read-back';
 
-function responseOrReason(plant: PlantContent['plant']): { response: PlantResponse } | { reason: string } {
+function responseOrReason(plant: ReadablePlant): { response: PlantResponse } | { reason: string } {
   try {
-    return { response: plantResponse(plant) };
+    return { response: plantResponse(runnablePlant(plant)) };
   } catch (error) {
     if (error instanceof LoopError) return { reason: error.detail };
     throw error;
@@ -17,7 +18,7 @@ function responseOrReason(plant: PlantContent['plant']): { response: PlantRespon
 }
 
 /** What the plant does by itself, over frequency. */
-export function PlantBode({ plant }: { plant: PlantContent['plant'] }) {
+export function PlantBode({ plant }: { plant: ReadablePlant }) {
   const units = useUnits();
   const drawn = useMemo(() => responseOrReason(plant), [plant]);
   return (

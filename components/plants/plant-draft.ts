@@ -12,14 +12,15 @@ const keyOf = (projectId: string, plantId: string | undefined) => `draft.plant.$
 const isForm = (value: unknown): value is PlantForm =>
   typeof value === 'object' &&
   value !== null &&
-  Object.keys(emptyPlantForm).every((field) => typeof (value as Record<string, unknown>)[field] === 'string');
+  Object.entries(emptyPlantForm).every(([field, empty]) => typeof (value as Record<string, unknown>)[field] === typeof empty);
 
 /** The draft of a plant on this device; what an older version kept otherwise is left alone. */
 export function recallPlantDraft(projectId: string, plantId?: string): PlantDraft | null {
   const kept = recall(keyOf(projectId, plantId));
   if (typeof kept !== 'object' || kept === null) return null;
   const { base, form } = kept as Record<string, unknown>;
-  return typeof base === 'number' && isForm(form) ? { base, form } : null;
+  const filled = { ...emptyPlantForm, ...(form as object) };
+  return typeof base === 'number' && isForm(filled) ? { base, form: filled } : null;
 }
 
 export const keepPlantDraft = (projectId: string, plantId: string | undefined, draft: PlantDraft): void =>

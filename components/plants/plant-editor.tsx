@@ -8,6 +8,7 @@ import { SheetPage } from '@/components/ui/sheet-page';
 import { useLayout } from '@/components/ui/use-layout';
 import type { PlantRevision } from '@/contract';
 import { useSignal } from '@/hooks/use-signal';
+import { OtherNotations } from './notation/other-notations';
 import { PlantBode } from './plant-bode';
 import { PlantEquation } from './equation/plant-equation';
 import { PlantFields } from './plant-fields';
@@ -43,7 +44,9 @@ export function PlantEditor({ latest }: { latest?: PlantRevision }) {
       </View>
     </>
   );
-  const curves = editor.preview ? <PlantBode plant={editor.preview} /> : null;
+  const { plant } = editor.preview;
+  const equation = plant ? <PlantEquation plant={plant} /> : null;
+  const curves = plant ? <PlantBode plant={plant} /> : null;
   return (
     <SheetPage
       title={latest ? `Plant, ${latest.name}` : 'Plant'}
@@ -62,11 +65,22 @@ export function PlantEditor({ latest }: { latest?: PlantRevision }) {
       <Columns>
         <Column width={wide ? FIELDS.wide : FIELDS.middle}>
           <Form onSubmit={editor.submit} problem={editor.problem}>
-            <PlantFields control={editor.control} />
+            <PlantFields
+              control={editor.control}
+              form={editor.form}
+              choice={editor.notation}
+              reading={editor.preview.formula}
+              readBack={
+                <>
+                  {phone ? equation : null}
+                  {plant ? <OtherNotations plant={plant} /> : null}
+                </>
+              }
+            />
           </Form>
         </Column>
         <Column last={!wide}>
-          {editor.preview ? <PlantEquation plant={editor.preview} /> : null}
+          {phone ? null : equation}
           {wide ? null : curves}
           {latest ? <RevisionList plantId={latest.id} /> : null}
         </Column>

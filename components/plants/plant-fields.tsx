@@ -1,8 +1,10 @@
+import type { ReactNode } from 'react';
 import { type Control, useController } from 'react-hook-form';
 import { StyleSheet, View } from 'react-native';
 import { FormField } from '@/components/ui/form-field';
 import { Segments } from '@/components/ui/segments';
 import { Heading, Text } from '@/components/ui/text';
+import { NotationFields, type NotationFieldsProps } from './notation/notation-fields';
 import type { PlantForm } from './plant-form';
 
 const bases = [
@@ -26,14 +28,19 @@ function BasisField({ control }: { control: Control<PlantForm> }) {
   );
 }
 
-/** What makes a plant: its name, its coefficients, its delays and units. */
-export function PlantFields({ control }: { control: Control<PlantForm> }) {
+interface PlantFieldsProps extends NotationFieldsProps {
+  /** Stands below what is typed, where there is no other column for it. */
+  readBack: ReactNode;
+}
+
+/** What makes a plant: its name, what is typed of it, its delays and units. */
+export function PlantFields({ readBack, ...typed }: PlantFieldsProps) {
+  const { control } = typed;
   return (
     <View style={styles.fields}>
       <FormField control={control} name="name" label="Name" autoCapitalize="sentences" compact />
-      <FormField control={control} name="numerator" label="Numerator, highest power first" inputMode="text" numeric compact />
-      <FormField control={control} name="denominator" label="Denominator, highest power first" inputMode="text" numeric compact />
-      <FormField control={control} name="deadTime" label="Dead time" unit="s" inputMode="decimal" numeric compact />
+      <NotationFields {...typed} />
+      {readBack}
       <BasisField control={control} />
       <Heading level={2}>Sensor</Heading>
       <View style={styles.pair}>

@@ -1,6 +1,7 @@
 import { Column, Columns } from '@/components/ui/columns';
 import { SheetPage } from '@/components/ui/sheet-page';
 import type { PlantRevision } from '@/contract';
+import { OtherNotations } from './notation/other-notations';
 import { PlantBode } from './plant-bode';
 import { PlantReading } from './plant-reading';
 import { RevisionList } from './revision-list';
@@ -14,10 +15,11 @@ export function PlantPage({ plant }: { plant: PlantRevision }) {
       <Columns>
         <Column>
           <PlantReading plant={plant} />
+          <OtherNotations plant={plant} />
           <RevisionList plantId={plant.id} />
         </Column>
         <Column width={CURVES} last>
-          <PlantBode plant={plant.plant} />
+          <PlantBode plant={plant} />
         </Column>
       </Columns>
     </SheetPage>

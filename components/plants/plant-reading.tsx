@@ -2,17 +2,31 @@ import { View } from 'react-native';
 import { type Fact, FactTable } from '@/components/ui/fact-table';
 import type { FrozenCase, PlantRevision } from '@/contract';
 import { PlantEquation } from './equation/plant-equation';
+import { readBack } from './equation/read-back';
 import { coefficientText } from './equation/polynomial-text';
 
 const basisWords = { measured: 'measured', assumed: 'assumed' };
 
 /** A plant of the project, or as an analysis froze it. */
-type ReadablePlant = PlantRevision | FrozenCase['plant'];
+type NamedPlant = PlantRevision | FrozenCase['plant'];
 
-function facts({ plant, deadTimeBasis, sensor, units }: ReadablePlant): Fact[] {
-  const deadTime = 'deadTime' in plant ? `${coefficientText(plant.deadTime)} s` : 'as in the formula';
+/** What was typed, where the equation does not show it as it was. */
+const typedFacts = ({ plant }: NamedPlant): Fact[] => {
+  if (plant.kind !== 'formula') return [];
+  const values = Object.entries(plant.parameters).map(([name, value]) => ({ name, value: coefficientText(value) }));
+  return [{ name: 'Formula', value: plant.text }, ...values];
+};
+
+function facts(named: NamedPlant): Fact[] {
+  const { deadTimeBasis, sensor, units } = named;
+  const read = readBack(named);
   return [
-    { name: 'Dead time', value: deadTime, aside: deadTimeBasis ? basisWords[deadTimeBasis] : 'nobody said where from' },
+    ...typedFacts(named),
+    {
+      name: 'Dead time',
+      value: read ? `${coefficientText(read.deadTime)} s` : 'as in the formula',
+      aside: deadTimeBasis ? basisWords[deadTimeBasis] : 'nobody said where from',
+    },
     { name: 'Sensor lag', value: `${coefficientText(sensor?.timeConstant ?? 0)} s` },
     { name: 'Sensor dead time', value: `${coefficientText(sensor?.deadTime ?? 0)} s` },
     { name: 'Command', value: units.input || 'no unit' },
@@ -21,10 +35,10 @@ function facts({ plant, deadTimeBasis, sensor, units }: ReadablePlant): Fact[] {
 }
 
 /** A plant to be read, not changed. */
-export function PlantReading({ plant }: { plant: ReadablePlant }) {
+export function PlantReading({ plant }: { plant: NamedPlant }) {
   return (
     <View style={{ gap: 12 }}>
-      <PlantEquation plant={plant.plant} />
+      <PlantEquation plant={plant} />
       <FactTable label={`${plant.name}, rev ${plant.revision}`} facts={facts(plant)} />
     </View>
   );

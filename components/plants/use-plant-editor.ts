@@ -1,29 +1,20 @@
-import { useDeferredValue, useEffect, useMemo, useState } from 'react';
-import { type FieldErrors, type Resolver, useForm, useWatch } from 'react-hook-form';
+import { useEffect, useState } from 'react';
+import { type FieldErrors, type FieldPath, type Resolver, set, useForm, useWatch } from 'react-hook-form';
 import { useAnnounce } from '@/components/ui/announcements';
-import type { PlantContent, PlantRevision } from '@/contract';
+import type { PlantRevision } from '@/contract';
 import { ApiProblem, hasStatus, sentence } from '@/hooks/api/problem';
 import { useCreatePlant, useRevisePlant } from '@/hooks/queries/plants';
 import { forgetPlantDraft, keepPlantDraft, recallPlantDraft } from './plant-draft';
-import { emptyPlantForm, fieldOf, type PlantForm, plantForm, readPlantForm } from './plant-form';
+import { useNotation } from './notation/use-notation';
+import { emptyPlantForm, hasTyped, isChanged, type PlantForm, plantForm } from './plant-form';
+import { fieldOf, readPlantForm } from './read-plant-form';
+import { usePreview } from './use-preview';
 
 const resolver: Resolver<PlantForm> = (form) => {
-  const { errors } = readPlantForm(form);
-  const said = Object.entries(errors).map(([field, message]) => [field, { type: 'read', message }]);
-  return said.length > 0 ? { values: {}, errors: Object.fromEntries(said) as FieldErrors<PlantForm> } : { values: form, errors: {} };
+  const said: FieldErrors<PlantForm> = {};
+  for (const [field, message] of Object.entries(readPlantForm(form).errors)) set(said, field, { type: 'read', message });
+  return Object.keys(said).length > 0 ? { values: {}, errors: said } : { values: form, errors: {} };
 };
-
-/** The plant that the fields describe, as far as they can be read: the last one that could be stays. */
-function usePreview(form: PlantForm, before: PlantContent['plant'] | null): PlantContent['plant'] | null {
-  const text = useDeferredValue(`${form.numerator}\n${form.denominator}\n${form.deadTime}`);
-  const [last, setLast] = useState(before);
-  const plant = useMemo(() => {
-    const [numerator, denominator, deadTime] = text.split('\n');
-    return readPlantForm({ ...emptyPlantForm, numerator, denominator, deadTime }).content?.plant ?? null;
-  }, [text]);
-  if (plant && plant !== last) setLast(plant);
-  return plant ?? last;
-}
 
 /** The editor of one plant, or of a plant to be: its form, its preview, its draft on this device, and keeping. */
 export function usePlantEditor(projectId: string, latest: PlantRevision | undefined) {
@@ -33,17 +24,19 @@ export function usePlantEditor(projectId: string, latest: PlantRevision | undefi
     return { kept, draft: recallPlantDraft(projectId, plantId), revision: latest?.revision ?? 0 };
   });
   const [base, setBase] = useState(start.draft?.base ?? start.revision);
-  const { control, handleSubmit, reset, setError } = useForm<PlantForm>({
+  const { control, getValues, handleSubmit, reset, setError } = useForm<PlantForm>({
     resolver,
     mode: 'onChange',
     defaultValues: start.draft?.form ?? start.kept,
   });
   const form = useWatch({ control }) as PlantForm;
-  const changed = (Object.keys(emptyPlantForm) as (keyof PlantForm)[]).some((field) => form[field] !== start.kept[field]);
+  const preview = usePreview(form, latest);
+  const notation = useNotation({ read: getValues, write: (next) => reset(next, { keepDefaultValues: true }), shown: preview.plant });
+  const typed = hasTyped(form, start.kept);
   useEffect(() => {
-    if (changed) keepPlantDraft(projectId, plantId, { base, form });
+    if (typed) keepPlantDraft(projectId, plantId, { base, form });
     else forgetPlantDraft(projectId, plantId);
-  }, [changed, projectId, plantId, base, form]);
+  }, [typed, projectId, plantId, base, form]);
 
   const create = useCreatePlant(projectId);
   const revise = useRevisePlant(projectId, plantId ?? '');
@@ -58,7 +51,7 @@ export function usePlantEditor(projectId: string, latest: PlantRevision | undefi
       if (!(problem instanceof ApiProblem)) return;
       for (const { pointer, detail } of problem.details.errors ?? []) {
         const field = fieldOf(pointer);
-        if (field) setError(field, { message: detail });
+        if (field) setError(field as FieldPath<PlantForm>, { message: detail });
       }
     },
   };
@@ -72,8 +65,10 @@ export function usePlantEditor(projectId: string, latest: PlantRevision | undefi
   return {
     control,
     submit,
-    preview: usePreview(form, latest?.plant ?? null),
-    changed,
+    form,
+    notation,
+    preview,
+    changed: isChanged(form, start.kept),
     busy: create.isPending || revise.isPending,
     problem: error && !hasStatus(error, 409) ? sentence(error) : null,
     /** Somebody kept a revision after the one that this was begun on. */

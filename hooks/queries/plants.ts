@@ -1,5 +1,5 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import type { CreatePlant, PlantRevision, RevisePlant } from '@/contract';
+import type { CreatePlant, PlantModel, PlantReading, PlantRevision, RevisePlant } from '@/contract';
 import { staleTimes } from '../api/query-client';
 import { request } from '../api/request';
 import type { Page } from './page';
@@ -29,6 +29,14 @@ export const plantRevisionQuery = (projectId: string, plantId: string, revision:
     queryFn: () => request<PlantRevision>('GET', `/projects/${projectId}/plants/${plantId}/revisions/${revision}`),
   });
 
+/** What a plant reads as. The same text always reads the same, so it is asked for once. */
+export const plantReadingQuery = (plant: PlantModel) =>
+  queryOptions({
+    queryKey: ['plantReading', plant],
+    staleTime: staleTimes.frozen,
+    queryFn: ({ signal }) => request<PlantReading>('POST', '/plants/read', { body: { plant }, signal }),
+  });
+
 export function useCreatePlant(projectId: string) {
   const client = useQueryClient();
   return useMutation({
@@ -42,6 +50,7 @@ export function useRevisePlant(projectId: string, plantId: string) {
   return useMutation({
     mutationFn: (plant: RevisePlant) =>
       request<PlantRevision>('POST', `/projects/${projectId}/plants/${plantId}/revisions`, { body: plant }),
-    onSuccess: () => void client.invalidateQueries({ queryKey: projectKey(projectId) }),
+    // Also where it was refused: someone may have kept a revision meanwhile, and the editor has to say so.
+    onSettled: () => void client.invalidateQueries({ queryKey: projectKey(projectId) }),
   });
 }

@@ -1,55 +1,21 @@
 import { StyleSheet, View } from 'react-native';
-import { describePlant, LoopError } from '@/analysis';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
-import type { PlantContent } from '@/contract';
-import { coefficientText, polynomialText } from './polynomial-text';
-
-/** Text in which every s, the variable, leans. */
-function Mathematics({ text, small = false }: { text: string; small?: boolean }) {
-  return (
-    <Text step={small ? 'body' : 'h2'} weight={500}>
-      {text.split(/(s)/).map((piece, i) => (
-        <Text key={i} step={small ? 'body' : 'h2'} weight={500} style={piece === 's' && { fontStyle: 'italic' }}>
-          {piece}
-        </Text>
-      ))}
-    </Text>
-  );
-}
-
-function Fraction({ over, under }: { over: string; under: string }) {
-  const { colors } = useTheme();
-  return (
-    <View style={styles.fraction}>
-      <Mathematics text={over} />
-      <View style={[styles.bar, { backgroundColor: colors.ink }]} />
-      <Mathematics text={under} />
-    </View>
-  );
-}
-
-function describe(plant: PlantContent['plant']) {
-  try {
-    return describePlant(plant);
-  } catch (error) {
-    if (error instanceof LoopError) return null;
-    throw error;
-  }
-}
+import { equationParts } from './equation-parts';
+import { Fraction, Mathematics } from './fraction';
+import { readBack, type ReadablePlant } from './read-back';
+import { spokenEquation } from './spoken-mathematics';
 
 /** P(s) typeset, and read back in words: poles, zeros, gain and dead time. */
-export function PlantEquation({ plant }: { plant: PlantContent['plant'] }) {
+export function PlantEquation({ plant }: { plant: ReadablePlant }) {
   const { colors } = useTheme();
-  const read = describe(plant);
+  const read = readBack(plant);
   if (!read) return null;
-  const over = polynomialText(read.numerator);
-  const under = polynomialText(read.denominator);
-  const delay = read.deadTime > 0 ? `−${coefficientText(read.deadTime)} s` : null;
-  const spoken = `P of s is (${over}) over (${under})${delay ? `, times e to the power of ${delay}` : ''}`;
+  const parts = equationParts(plant.plant.kind, read);
+  const { over, under, delay } = parts;
   return (
     <View style={[styles.box, { backgroundColor: colors.bar }]}>
-      <View role="img" aria-label={spoken} style={styles.line}>
+      <View role="img" aria-label={spokenEquation(parts)} style={styles.line}>
         <Mathematics text="P(s) =" />
         {under === '1' ? <Mathematics text={over} /> : <Fraction over={over} under={under} />}
         {delay ? (
@@ -74,8 +40,6 @@ export function PlantEquation({ plant }: { plant: PlantContent['plant'] }) {
 const styles = StyleSheet.create({
   box: { padding: 16, gap: 12 },
   line: { flexDirection: 'row', alignItems: 'center', flexWrap: 'wrap', gap: 10, rowGap: 6 },
-  fraction: { alignItems: 'center', gap: 4 },
-  bar: { height: 1.5, alignSelf: 'stretch', minWidth: 40 },
   delay: { flexDirection: 'row', alignItems: 'center', gap: 4 },
   exponent: { marginBottom: 16 },
 });

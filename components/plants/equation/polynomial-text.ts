@@ -1,14 +1,17 @@
 import { typographicMinus } from '@/figures/format';
 
-const superscripts = '⁰¹²³⁴⁵⁶⁷⁸⁹';
+export const superscripts = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 const FIGURES = 6;
 
 /** A coefficient as it is printed: six significant figures, no idle zeros, a true minus. */
 export const coefficientText = (value: number): string => typographicMinus(String(Number(value.toPrecision(FIGURES))).replace('e+', 'e'));
 
+/** A whole number as a raised figure. */
+export const superscript = (exponent: number): string => [...String(exponent)].map((digit) => superscripts[Number(digit)]).join('');
+
 const power = (exponent: number): string => {
   if (exponent === 0) return '';
-  return exponent === 1 ? 's' : `s${[...String(exponent)].map((digit) => superscripts[Number(digit)]).join('')}`;
+  return exponent === 1 ? 's' : `s${superscript(exponent)}`;
 };
 
 /**

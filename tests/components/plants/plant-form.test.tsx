@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { emptyPlantForm, fieldOf, readPlantForm } from '@/components/plants/plant-form';
+import { emptyPlantForm } from '@/components/plants/plant-form';
+import { fieldOf, readPlantForm } from '@/components/plants/read-plant-form';
 
 const typed = { ...emptyPlantForm, name: 'Car', numerator: '2.1', denominator: '0.35, 1, 0', deadTime: '0,08' };
 
