@@ -1,5 +1,6 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
 import type { CreateDesign, DesignRevision, ReviseDesign, RevisedDesign } from '@/contract';
+import { hasStatus } from '../api/problem';
 import { staleTimes } from '../api/query-client';
 import { request } from '../api/request';
 import { analysisKey } from './analyses';
@@ -39,6 +40,10 @@ export function useReviseDesign(projectId: string, designId: string) {
     onSuccess: ({ analysis }) => {
       if (analysis) client.setQueryData(analysisKey(projectId, analysis.id), analysis);
       return client.invalidateQueries({ queryKey: projectKey(projectId), refetchType: 'active' });
+    },
+    // Someone kept a newer revision: what it is must be seen before there is anything to decide.
+    onError: (error) => {
+      if (hasStatus(error, 409)) void client.invalidateQueries({ queryKey: projectKey(projectId), refetchType: 'active' });
     },
   });
 }

@@ -44,11 +44,11 @@ describe.each(Object.keys(sizes) as SizeName[])('the bench at the %s size', (siz
     const later = new BenchPage(new Visitor(again, server.url), size);
     await later.open(project);
     await expect.poll(() => later.strip()).toBe(moved);
-    await later.visitor.press('Undo');
-    await later.visitor.press('Undo');
+    await later.visitor.press(/^Undo/);
+    await later.visitor.press(/^Undo/);
     await expect.poll(() => later.strip()).toBe(kept);
-    await later.visitor.press('Redo');
-    await later.visitor.press('Redo');
+    await later.visitor.press(/^Redo/);
+    await later.visitor.press(/^Redo/);
     await expect.poll(() => later.strip()).toBe(moved);
     expect(visitor.url).toBe(server.url);
     await context.close();
@@ -68,7 +68,9 @@ describe.each(Object.keys(sizes) as SizeName[])('the bench at the %s size', (siz
     const { page, context, bench } = await atTheBench(size);
     await bench.type('Kp', '25');
     await expect.poll(() => bench.strip()).toMatch(/unstable/i);
-    expect(await bench.strip()).toMatch(/no meaning while unstable/i);
+    expect(await bench.strip()).toMatch(/Margins have no meaning/);
+    const struck = page.getByRole('region', { name: 'Verdict and margins' }).getByLabel(/no meaning while unstable/);
+    expect(await struck.count()).toBe(4);
     await page
       .getByText(/encirclements 2, needed 0/)
       .first()
@@ -120,7 +122,65 @@ describe.each(Object.keys(sizes) as SizeName[])('the bench at the %s size', (siz
   it('lets a viewer look and keep nothing', async () => {
     const { page, context, bench } = await atTheBench(size, crew);
     await bench.nudgeUp('Kp');
-    await expect.poll(() => page.getByRole('button', { name: /^Keep/ }).count()).toBe(0);
+    await page.getByText(/You are a viewer here/).waitFor();
+    expect(await page.getByRole('button', { name: /^Keep/ }).count()).toBe(0);
     await context.close();
+  });
+
+  it('shows no focus before a key is pressed', async () => {
+    const { page, context } = await atTheBench(size);
+    const ringed = () => page.evaluate(() => document.querySelectorAll(':focus-visible').length);
+    expect(await ringed()).toBe(0);
+    await page.keyboard.press('Tab');
+    expect(await page.evaluate(() => document.activeElement?.matches('a, button, input, [role=slider], [role=tab]'))).toBe(true);
+    await context.close();
+  });
+
+  it('gives the keyboard to the chart whose letter is pressed', async () => {
+    const { page, context } = await atTheBench(size);
+    const focused = () => page.evaluate(() => document.activeElement?.getAttribute('aria-label') ?? '');
+    await page.getByRole('slider', { name: 'Cursor, frequency along L' }).waitFor({ state: 'attached' });
+    await page.keyboard.press('n');
+    await expect.poll(focused).toBe('Cursor, frequency along L');
+    await page.keyboard.press('t');
+    await expect.poll(focused).toBe('Cursor, time');
+    await page.keyboard.press('b');
+    await expect.poll(focused).toBe('Cursor, frequency');
+    await context.close();
+  });
+
+  it('draws A, B and every panel to the end of one time axis', async () => {
+    const { page, context, bench } = await atTheBench(size);
+    await bench.type('Kp', '0.7');
+    await page.keyboard.press('Escape');
+    if (size === 'phone') await page.getByRole('tab', { name: 'Load' }).click();
+    const ends = () =>
+      page.evaluate(() => {
+        const chart = [...document.querySelectorAll('[role=img]')]
+          .filter((image) => /load at the command/.test(image.ariaLabel ?? ''))
+          .at(-1);
+        const curves = [...(chart?.querySelectorAll('path[stroke-linejoin=round]') ?? [])];
+        return curves.map((path) => Math.round((path as SVGPathElement).getBBox().x + (path as SVGPathElement).getBBox().width));
+      });
+    await expect.poll(async () => (await ends()).length).toBeGreaterThanOrEqual(2);
+    await expect.poll(async () => new Set(await ends()).size).toBe(1);
+    await context.close();
+  });
+
+  it('keeps nothing over what was kept meanwhile on another device, and puts the draft on top when told to', async () => {
+    const here = await atTheBench(size);
+    const there = await atTheBench(size);
+    await there.bench.nudgeUp('Kd');
+    await there.bench.keep().click();
+    await there.visitor.sees(/Kept as rev/);
+    await here.bench.nudgeUp('Ki');
+    await here.bench.keep().click();
+    await here.visitor.sees(/You kept rev \d+ meanwhile\./);
+    expect(await here.bench.status().innerText()).toMatch(/Not kept/);
+    await here.visitor.press(/^Put mine on top of rev/);
+    await here.bench.keep().click();
+    await here.visitor.sees(/Server and bench agree to 6 digits/);
+    await here.context.close();
+    await there.context.close();
   });
 });

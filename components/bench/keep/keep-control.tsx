@@ -9,9 +9,10 @@ interface KeepControlProps {
   compact?: boolean;
 }
 
-/** Keeps what is on the bench as the next revision. */
+/** Keeps what is on the bench as the next revision; nothing for those who may not. */
 export const KeepControl = memo(function KeepControl({ outcome, onKeep, compact = false }: KeepControlProps) {
-  const { revision, disabled } = useKeepButton();
+  const { offered, revision, disabled } = useKeepButton();
+  if (!offered) return null;
   const label = compact ? `Keep rev ${revision}` : `Keep as rev ${revision}`;
   return (
     <Button

@@ -5,6 +5,8 @@ import { isOvertaken } from '../draft/meet-latest';
 import { mayKeep, nextRevision } from './saved-words';
 
 export interface KeepButton {
+  /** false for those who may never keep here: they are told why, and offered nothing to press. */
+  readonly offered: boolean;
   readonly revision: number;
   readonly disabled: boolean;
   /** Why it cannot be pressed, or what pressing it needs; null where there is nothing to say. */
@@ -25,5 +27,5 @@ export function useKeepButton(): KeepButton {
     if (!online) return 'No signal. The draft stays on this device; keeping it needs signal.';
     return null;
   })();
-  return { revision, disabled: remark !== null || nothingToKeep || overtaken, remark };
+  return { offered: mayKeep(subject.project.role), revision, disabled: remark !== null || nothingToKeep || overtaken, remark };
 }

@@ -28,7 +28,8 @@ function* edgeBetween(stable: number, unstable: number, { value, size, stableAt 
     if (stableAt(middle)) inner = middle;
     else outer = middle;
   }
-  return outer;
+  // Nearer to 0 than the search can tell is 0: a gain that must not change its sign.
+  return Math.abs(outer) <= TOLERANCE * least ? 0 : outer;
 }
 
 /** The places to look at on one side: by a constant factor away from 0, and last 0 itself where the walk leads to it. */

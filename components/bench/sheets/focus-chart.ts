@@ -18,6 +18,8 @@ const together: Readonly<Record<ChartSheet, Place>> = {
 export function focusChart(sheet: ChartSheet): void {
   const region = document.getElementById(chartsId(sheet)) ?? document.getElementById(chartsId(together[sheet]));
   if (region === null) return;
-  region.querySelector<HTMLElement>('[role=slider], [tabindex="0"]')?.focus({ preventScroll: true });
+  // A chart that shows its table has no cursor.
+  const keyed = region.querySelector<HTMLElement>('[role=slider]') ?? region.querySelector<HTMLElement>('[role=region]');
+  keyed?.focus({ preventScroll: true });
   region.scrollIntoView({ block: 'nearest' });
 }

@@ -1,7 +1,7 @@
 import { memo, useEffect, useMemo, useRef } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { useAnnounce } from '@/components/ui/announcements';
-import { Text } from '@/components/ui/text';
+import { Heading, Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
 import { gutter, line } from '@/components/ui/tokens';
 import { useUnits } from '@/components/ui/units';
@@ -30,7 +30,7 @@ export const BenchStrip = memo(function BenchStrip() {
     if (first.current) first.current = false;
     else announce(spoken);
   }, [spoken, announce]);
-  if (!output || !headline || !words) return <View style={styles.waiting} />;
+  if (!output || !headline || !words) return <View style={styles.waiting}>{problem !== null && <NoAnswer problem={problem} />}</View>;
   const { stable } = output.analysis.closedLoop;
   const { quantity, value, words: inWords } = words.headline;
   return (
@@ -68,7 +68,18 @@ export const BenchStrip = memo(function BenchStrip() {
   );
 });
 
+/** These gains have no answer, and there is none before them to look at. */
+function NoAnswer({ problem }: { problem: string }) {
+  return (
+    <View role="alert" style={styles.noAnswer}>
+      <Heading level={2}>No curves for these gains</Heading>
+      <Text tone="fail">{problem} Move a gain to go on.</Text>
+    </View>
+  );
+}
+
 const styles = StyleSheet.create({
+  noAnswer: { paddingHorizontal: gutter.wide, paddingVertical: 16, gap: 4 },
   waiting: { minHeight: 104 },
   phone: { paddingHorizontal: gutter.phone, paddingBottom: 8, gap: 8 },
   wide: {

@@ -13,7 +13,7 @@ function handSchedule() {
   return { schedule, frame: turn('frame'), rest: turn('rest'), waiting };
 }
 
-function bench(compute = (input: number) => input * 2) {
+function bench(compute = (input: number) => input * 2, steps?: () => readonly Detail[]) {
   const clock = handSchedule();
   const calls: [number, Detail][] = [];
   const analyser = createLiveAnalyser<number, number>({
@@ -21,6 +21,7 @@ function bench(compute = (input: number) => input * 2) {
       calls.push([input, detail]);
       return compute(input);
     },
+    ...(steps && { steps }),
     explain(error) {
       if (error instanceof RangeError) return error.message;
       throw error;
@@ -106,5 +107,35 @@ describe('the live analyser', () => {
     frame();
     rest();
     expect(calls.map(([input]) => input)).toEqual([1, 1]);
+  });
+
+  it('ends what it began before it takes up a newer input, so that moves at the rate of frames starve no step', () => {
+    const { analyser, calls, frame } = bench(undefined, () => ['outline', 'live']);
+    for (const input of [1, 2, 3, 4]) {
+      analyser.ask(input);
+      frame();
+    }
+    expect(calls).toEqual([
+      [1, 'outline'],
+      [1, 'live'],
+      [3, 'outline'],
+      [3, 'live'],
+    ]);
+    frame();
+    expect(calls.at(-1)).toEqual([4, 'outline']);
+  });
+
+  it('keeps the newest complete answer beside an outline, and the newest full one while a gain moves', () => {
+    const { analyser, frame, rest } = bench(undefined, () => ['outline', 'live']);
+    analyser.ask(1);
+    frame();
+    expect(analyser.get()).toMatchObject({ output: 2, complete: null, rested: null });
+    frame();
+    rest();
+    analyser.ask(5);
+    frame();
+    expect(analyser.get()).toMatchObject({ output: 10, complete: 2, rested: 2, detail: 'outline' });
+    frame();
+    expect(analyser.get()).toMatchObject({ output: 10, complete: 10, rested: 2, detail: 'live' });
   });
 });

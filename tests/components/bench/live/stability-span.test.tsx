@@ -44,6 +44,8 @@ describe('the span of stable gains', () => {
     expect(span.below).toBeLessThan(0);
   });
 
+  it('is zero where a gain of zero must not change its sign', () => expect(spanOf(0, (ki) => ki >= 0).span.below).toBe(0));
+
   it('has nothing to say of a loop that is unstable to begin with', () => expect(spanOf(1, () => false).span).toEqual({}));
 
   it('takes a bounded number of looks', () => expect(spanOf(1, (kp) => kp > 0.05 && kp < 25).looks).toBeLessThan(45));
