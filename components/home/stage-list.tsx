@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { StyleSheet, View } from 'react-native';
 import { useProject } from '@/components/navigation/project-context';
+import { QueryView } from '@/components/ui/query-view';
 import { Heading, Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
 import { casesQuery } from '@/hooks/queries/cases';
@@ -26,19 +27,23 @@ function StageRow({ stage, last }: { stage: Stage; last: boolean }) {
 /** Where the project stands between a plant and a driven car. */
 export function StageList() {
   const { id, latestAnalysis } = useProject();
-  const plants = useQuery(plantsQuery(id)).data;
-  const cases = useQuery(casesQuery(id)).data;
-  const designs = useQuery(designsQuery(id)).data;
-  const list =
-    plants && cases && designs ? stages({ plants, cases, designs, analysedAt: latestAnalysis?.createdAt ?? null, now: new Date() }) : [];
+  const plants = useQuery(plantsQuery(id));
+  const cases = useQuery(casesQuery(id));
+  const designs = useQuery(designsQuery(id));
+  const known = plants.data && cases.data && designs.data && { plants: plants.data, cases: cases.data, designs: designs.data };
+  const awaited = [plants, cases, designs].find(({ data }) => data === undefined) ?? plants;
   return (
     <View style={styles.section}>
       <Heading level={2}>Where it stands</Heading>
-      <View role="list">
-        {list.map((stage, i) => (
-          <StageRow key={stage.name} stage={stage} last={i === list.length - 1} />
-        ))}
-      </View>
+      <QueryView query={{ ...awaited, data: known }} waiting="Fetching the stages">
+        {(facts) => (
+          <View role="list">
+            {stages({ ...facts, analysedAt: latestAnalysis?.createdAt ?? null, now: new Date() }).map((stage, i, { length }) => (
+              <StageRow key={stage.name} stage={stage} last={i === length - 1} />
+            ))}
+          </View>
+        )}
+      </QueryView>
     </View>
   );
 }

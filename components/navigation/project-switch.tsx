@@ -1,5 +1,6 @@
 import { useInfiniteQuery } from '@tanstack/react-query';
 import { useRouter } from 'expo-router';
+import { StyleSheet, View } from 'react-native';
 import { Menu } from '@/components/ui/menu';
 import { projectsQuery, type ReadProject } from '@/hooks/queries/projects';
 import { projectPath } from './routes';
@@ -16,5 +17,11 @@ export function ProjectSwitch({ project }: { project: ReadProject }) {
     onSelect: () => router.push(projectPath(id)),
   }));
   const all = { key: 'all', label: 'All projects', onSelect: () => router.push('/') };
-  return <Menu label={project.name} kind="quiet" items={[...items, all]} />;
+  return (
+    <View style={styles.name}>
+      <Menu label={project.name} kind="quiet" items={[...items, all]} />
+    </View>
+  );
 }
+
+const styles = StyleSheet.create({ name: { flexShrink: 1, minWidth: 0, maxWidth: 340 } });

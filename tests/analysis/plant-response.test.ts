@@ -1,6 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { LoopError, plantResponse } from '@/analysis';
-import { coefficients } from './support/cast';
+
+const coefficients = (numerator: number[], denominator: number[], deadTime = 0) =>
+  ({ kind: 'coefficients', numerator, denominator, deadTime }) as const;
 
 describe('a plant by itself', () => {
   const { at, corners, curves } = plantResponse(coefficients([2.1], [0.35, 1, 0], 0.08));
