@@ -3,6 +3,7 @@ export { analyseLoop, engineVersion, withResponses, type AnalyseOptions } from '
 export { loopAt, type LoopPoint } from './loop-at';
 export { buildLoop } from './loop/build-loop';
 export { describePlant, type PlantDescription } from './loop/describe-plant';
+export { filterPhaseDegrees } from './loop/filter-phase';
 export { gainsInForm, type Rewritten, type TimedGains } from './loop/gains-in-form';
 export { LoopError, type LoopErrorCode } from './loop/loop-error';
 export type { LoopModel, ParallelGains, Rational } from './loop/model';

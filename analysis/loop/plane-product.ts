@@ -1,4 +1,5 @@
 import type { Complex } from '@/analysis/numbers/complex';
+import { hornerRoom, hornerWithSlope, SIZE, SLOPE_IM, SLOPE_RE, VALUE_IM, VALUE_RE } from '@/analysis/numbers/horner';
 import type { Rational } from './model';
 
 const ROUNDING = 2 ** -53;
@@ -47,6 +48,7 @@ class SideInPlane {
   roundings = 0;
   private readonly roots: readonly Complex[];
   private readonly polynomials: readonly (readonly number[])[];
+  private readonly room = hornerRoom();
 
   constructor(parts: readonly { roots: readonly Complex[]; coefficients?: readonly number[] }[]) {
     this.roots = parts.filter((part) => !part.coefficients).flatMap((part) => part.roots);
@@ -66,19 +68,10 @@ class SideInPlane {
   }
 
   private multiplyPolynomial(descending: readonly number[], re: number, im: number): void {
-    const size = Math.hypot(re, im);
-    let [valueRe, valueIm, slopeRe, slopeIm, sum] = [0, 0, 0, 0, 0];
-    for (const c of descending) {
-      const nextSlopeRe = slopeRe * re - slopeIm * im + valueRe;
-      slopeIm = slopeRe * im + slopeIm * re + valueIm;
-      slopeRe = nextSlopeRe;
-      const nextValueRe = valueRe * re - valueIm * im + c;
-      valueIm = valueRe * im + valueIm * re;
-      valueRe = nextValueRe;
-      sum = sum * size + Math.abs(c);
-    }
-    this.roundings += (2 * descending.length * sum) / Math.hypot(valueRe, valueIm);
-    this.multiply(valueRe, valueIm, slopeRe, slopeIm);
+    const { room } = this;
+    hornerWithSlope(descending, re, im, room);
+    this.roundings += (2 * descending.length * room[SIZE]) / Math.hypot(room[VALUE_RE], room[VALUE_IM]);
+    this.multiply(room[VALUE_RE], room[VALUE_IM], room[SLOPE_RE], room[SLOPE_IM]);
   }
 
   /** Multiplies in a factor with its derivative, and takes powers of two out before they overflow. */

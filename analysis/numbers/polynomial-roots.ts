@@ -1,6 +1,7 @@
 import type { Complex } from './complex';
 import { pairConjugates } from './conjugates';
-import { ehrlichAberth } from './ehrlich-aberth';
+import { ehrlichAberth, type NewtonStep } from './ehrlich-aberth';
+import { hornerRoom, hornerWithSlope } from './horner';
 import { collapseClusters } from './multiple-roots';
 import { startingPoints } from './newton-polygon';
 import { withoutLeadingZeros } from './polynomial';
@@ -51,15 +52,17 @@ const scaleVariable = (ascending: readonly number[]) => {
 };
 
 /** Newton's step p/p′ by Horner's rule, in 1/z outside the unit circle so that powers stay small. */
-const hornerStep = (ascending: readonly number[]) => {
+const hornerStep = (ascending: readonly number[]): NewtonStep => {
   const degree = ascending.length - 1;
-  const descending = [...ascending].reverse();
-  return (re: number, im: number, step: Float64Array): boolean => {
+  const room = hornerRoom();
+  const inward = newtonStep([...ascending].reverse(), room);
+  const outward = newtonStep(ascending, room);
+  return (re, im, step) => {
     const square = re * re + im * im;
-    if (square <= 1) return horner(descending, re, im, step);
+    if (square <= 1) return inward(re, im, step);
     const x = re / square;
     const y = -im / square;
-    const done = horner(ascending, x, y, step);
+    const done = outward(x, y, step);
     // p(z) = zⁿ·q(w), w = 1/z: p/p′ = z/(n − w·q′/q), with q/q′ in `step`.
     const length = step[0] * step[0] + step[1] * step[1];
     const ratioRe = degree - (x * step[0] + y * step[1]) / length;
@@ -75,20 +78,13 @@ const hornerStep = (ascending: readonly number[]) => {
 };
 
 /** p/p′ into `step`; true where |p| is within rounding of 0. Leading coefficient first. */
-const horner = (coefficients: readonly number[], re: number, im: number, step: Float64Array): boolean => {
-  const size = Math.hypot(re, im);
-  let [valueRe, valueIm, slopeRe, slopeIm, sum] = [0, 0, 0, 0, 0];
-  for (const c of coefficients) {
-    const nextSlopeRe = slopeRe * re - slopeIm * im + valueRe;
-    slopeIm = slopeRe * im + slopeIm * re + valueIm;
-    slopeRe = nextSlopeRe;
-    const nextValueRe = valueRe * re - valueIm * im + c;
-    valueIm = valueRe * im + valueIm * re;
-    valueRe = nextValueRe;
-    sum = sum * size + Math.abs(c);
-  }
-  const square = slopeRe * slopeRe + slopeIm * slopeIm;
-  step[0] = (valueRe * slopeRe + valueIm * slopeIm) / square;
-  step[1] = (valueIm * slopeRe - valueRe * slopeIm) / square;
-  return Math.hypot(valueRe, valueIm) <= ROUNDINGS * sum;
-};
+const newtonStep =
+  (descending: readonly number[], room: Float64Array): NewtonStep =>
+  (re, im, step) => {
+    hornerWithSlope(descending, re, im, room);
+    const [valueRe, valueIm, slopeRe, slopeIm, sum] = room;
+    const square = slopeRe * slopeRe + slopeIm * slopeIm;
+    step[0] = (valueRe * slopeRe + valueIm * slopeIm) / square;
+    step[1] = (valueIm * slopeRe - valueRe * slopeIm) / square;
+    return Math.hypot(valueRe, valueIm) <= ROUNDINGS * sum;
+  };

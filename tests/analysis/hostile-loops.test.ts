@@ -6,7 +6,7 @@ import { MOST_WORK, WorkBudget } from '@/analysis/time/work-budget';
 import { Analysis } from '@/contract';
 import { hostileLoop } from './support/hostile-loops';
 
-const RUNS = 150;
+const RUNS = 100;
 
 /** One step past a budget is what ends a computation: an exponential of the largest matrix at most. */
 const LAST_STEP = 3e7;

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { coefficients, numbersOf, pid, roots } from '../support/cast';
+import { coefficients, frequencyNumbersOf, numbersOf, pid, roots } from '../support/cast';
 
 const codes = (analysis: ReturnType<typeof numbersOf>) => analysis.warnings.map(({ code }) => code);
 
@@ -57,9 +57,9 @@ describe('open-loop unstable and conditionally stable loops', () => {
     ];
     for (const [numerator, denominator] of plants)
       for (const gain of [0.01, 0.1, 1, 10, 100, -1]) {
-        const exact = numbersOf(coefficients(numerator, denominator), pid(gain)).closedLoop;
+        const exact = frequencyNumbersOf(coefficients(numerator, denominator), pid(gain)).closedLoop;
         if (exact.poles!.some(({ re, im }) => Math.abs(re) < 1e-6 * (1 + Math.abs(im)))) continue;
-        const counted = numbersOf(coefficients(numerator, denominator, 1e-9), pid(gain)).closedLoop;
+        const counted = frequencyNumbersOf(coefficients(numerator, denominator, 1e-9), pid(gain)).closedLoop;
         expect([numerator, denominator, gain, counted.unstablePoles]).toEqual([numerator, denominator, gain, exact.unstablePoles]);
         expect(counted.encirclements).toBe(exact.encirclements);
       }
