@@ -1,16 +1,19 @@
 import { useQuery } from '@tanstack/react-query';
 import { useMemo } from 'react';
-import { buildLoop, loopAt } from '@/analysis';
+import { buildLoop, loopAt, withResponses } from '@/analysis';
 import { caseLoop } from '@/analysis/project';
 import type { ChartDesign } from '@/components/charts';
-import type { KeptAnalysis } from '@/contract';
+import type { Analysis, KeptAnalysis } from '@/contract';
+import { timeWindow } from '@/figures';
 import { analysisQuery, caseAnalysisQuery } from '@/hooks/queries/analyses';
 
-/** The frozen loop of one case at any frequency, for the cursor. */
-function frozenLoop({ inputs }: KeptAnalysis, caseId: string): ChartDesign['at'] {
+/** The frozen loop of one case, for the cursor at any frequency, and its responses until the end of the axis that they share. */
+function frozenDesign({ inputs, design }: KeptAnalysis, caseId: string, analysis: Analysis): ChartDesign {
   const frozen = inputs.cases.find(({ id }) => id === caseId) ?? inputs.cases[0];
-  const model = buildLoop(caseLoop(frozen, inputs.design));
-  return loopAt(model);
+  const loop = caseLoop(frozen, inputs.design);
+  const [, duration] = timeWindow(analysis);
+  const shown = analysis.closedLoop.stable ? withResponses(analysis, { ...loop, responses: { ...loop.responses, duration } }) : analysis;
+  return { label: `${design.name}, rev ${design.revision}`, analysis: shown, at: loopAt(buildLoop(loop)) };
 }
 
 export interface CaseChoice {
@@ -27,8 +30,7 @@ export function useCaseCurves({ projectId, analysisId, caseId }: CaseChoice) {
   const curves = useQuery({ ...caseAnalysisQuery(projectId, analysisId, chosen ?? ''), enabled: chosen !== undefined });
   const design = useMemo<ChartDesign | null>(() => {
     if (!kept.data || !curves.data || !chosen) return null;
-    const { name, revision } = kept.data.design;
-    return { label: `${name}, rev ${revision}`, analysis: curves.data, at: frozenLoop(kept.data, chosen) };
+    return frozenDesign(kept.data, chosen, curves.data);
   }, [kept.data, curves.data, chosen]);
   return { kept, curves, design, caseId: chosen };
 }
