@@ -63,10 +63,14 @@ export function Button({
     >
       <View style={styles.content}>
         {icon && <Icon name={icon} tone={tone} />}
-        <Text weight={600} tone={tone} numberOfLines={1}>
+        <Text weight={600} tone={tone} numberOfLines={1} style={styles.label}>
           {busy ? (busyLabel ?? label) : label}
         </Text>
-        {iconAfter && <Icon name={iconAfter} tone={tone} size={16} />}
+        {iconAfter && (
+          <View style={styles.icon}>
+            <Icon name={iconAfter} tone={tone} size={16} />
+          </View>
+        )}
       </View>
     </Pressable>
   );
@@ -76,6 +80,7 @@ const styles = StyleSheet.create({
   box: {
     minHeight: touch,
     minWidth: touch,
+    maxWidth: '100%',
     paddingHorizontal: 14,
     borderWidth: line.field,
     borderRadius: corner,
@@ -85,6 +90,8 @@ const styles = StyleSheet.create({
   tall: { minHeight: 52 },
   hug: { alignSelf: 'flex-start' },
   stretch: { alignSelf: 'stretch' },
-  content: { flexDirection: 'row', alignItems: 'center', gap: 8 },
+  content: { flexDirection: 'row', alignItems: 'center', gap: 8, maxWidth: '100%' },
+  label: { flexShrink: 1 },
+  icon: { flexShrink: 0 },
   pressed: { opacity: 0.8 },
 });

@@ -87,7 +87,7 @@ export function Menu({ label, items, kind = 'secondary', align = 'left' }: MenuP
 }
 
 const styles = StyleSheet.create({
-  box: { zIndex: 20, alignSelf: 'center' },
+  box: { zIndex: 20, alignSelf: 'center', maxWidth: '100%' },
   list: {
     position: 'absolute',
     top: touch + 2,
