@@ -21,8 +21,8 @@ interface FrameWatch {
 }
 
 const THROTTLE = 4;
-const MOVES = 120;
-const WARM_UP = 20;
+const MOVES = 60;
+const WARM_UP = 15;
 /** Between two moves: longer than a frame, so that each is answered by itself. */
 const PAUSE_MS = 45;
 
