@@ -14,10 +14,15 @@ const INSTANT = 1e-9;
  * curve bends, and a pair about each jump. Where that came to more than 4,000 the tolerance is loosened.
  */
 export function drawnTimes(curves: readonly Curve[], end: number, points: number): number[] {
-  const even = Array.from({ length: points }, (_, k) => (end * k) / (points - 1));
+  const even = new Array<number>(points);
+  for (let k = 0; k < points; k += 1) even[k] = (end * k) / (points - 1);
   for (let tolerance = DRAWING_TOLERANCE; tolerance < 1; tolerance *= LOOSER) {
     const extra = curves.flatMap((curve) => bendTimes(curve, { end, spacing: end / (points - 1), tolerance }));
-    const times = ascending([...even, ...extra], end);
+    const times = merged(
+      even,
+      extra.sort((a, b) => a - b),
+      end,
+    );
     if (times.length <= Math.max(points, MAX_POINTS)) return times;
   }
   return even;
@@ -62,7 +67,15 @@ function rangeUntil(curve: Curve, end: number): number {
   return size;
 }
 
-function ascending(times: number[], end: number): number[] {
-  const sorted = times.filter((time) => time >= 0 && time < end * (1 - INSTANT / 2)).sort((a, b) => a - b);
-  return [...sorted.filter((time, k) => k === 0 || time - sorted[k - 1] > (INSTANT * end) / 2), end];
+/** Two ascending lists as one from 0 to `end`, nearer neighbours than an instant told once. */
+function merged(even: readonly number[], extra: readonly number[], end: number): number[] {
+  const apart = (INSTANT * end) / 2;
+  const times: number[] = [];
+  for (let [i, j] = [0, 0]; i < even.length || j < extra.length;) {
+    const time = j >= extra.length || even[i] <= extra[j] ? even[i++] : extra[j++];
+    const isNew = times.length === 0 || time - times[times.length - 1] > apart;
+    if (isNew && time >= 0 && time < end - apart) times.push(time);
+  }
+  times.push(end);
+  return times;
 }

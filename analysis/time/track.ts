@@ -22,7 +22,7 @@ export class Tracks {
     stages: readonly Stage[],
     private readonly budget: WorkBudget,
   ) {
-    this.first = trackOf(stages.map(({ width, count }) => ({ operator: panelOperator(system, width, budget), count })));
+    this.first = trackOf(stages.map(({ width, count }) => ({ count, make: () => panelOperator(system, width, budget) })));
   }
 
   /** Panels all of `width`, a whole fraction or multiple of the dead time; null where they would not stay stable. */
@@ -38,14 +38,27 @@ export class Tracks {
   private makeEven(width: number): Track | null {
     const { deadTime } = this.system;
     const direct = panelOperator(this.system, width, this.budget);
-    if (width < deadTime) return trackOf([{ operator: direct, count: Math.round(deadTime / width) }]);
+    if (width < deadTime) return trackOf([{ make: () => direct, count: Math.round(deadTime / width) }]);
     const operator = width > deadTime ? longPanelOperator(direct, deadTime) : direct;
-    return isStablePanel(operator) ? trackOf([{ operator, count: 1 }]) : null;
+    return isStablePanel(operator) ? trackOf([{ make: () => operator, count: 1 }]) : null;
   }
 }
 
-function trackOf(stages: readonly { operator: PanelOperator; count: number }[]): Track {
+interface Stretch {
+  readonly count: number;
+  /** Called when a simulation first gets there: most end before the last. */
+  readonly make: () => PanelOperator;
+}
+
+function trackOf(stretches: readonly Stretch[]): Track {
   const ends: number[] = [];
-  const panels = stages.reduce((sum, { count }, k) => (ends[k] = sum + count), 0);
-  return { panels, operatorAt: (slot) => stages[ends.findIndex((end) => slot < end)].operator };
+  const operators: PanelOperator[] = [];
+  const panels = stretches.reduce((sum, { count }, k) => (ends[k] = sum + count), 0);
+  return {
+    panels,
+    operatorAt: (slot) => {
+      const k = ends.findIndex((end) => slot < end);
+      return (operators[k] ??= stretches[k].make());
+    },
+  };
 }
