@@ -44,8 +44,8 @@ export function PlantEditor({ latest }: { latest?: PlantRevision }) {
       </View>
     </>
   );
-  const { plant } = editor.preview;
-  const equation = plant ? <PlantEquation plant={plant} /> : null;
+  const { plant, outdated } = editor.preview;
+  const equation = plant ? <PlantEquation plant={plant} outdated={outdated} /> : null;
   const curves = plant ? <PlantBode plant={plant} /> : null;
   return (
     <SheetPage

@@ -11,6 +11,8 @@ export interface PlantForm extends NotationText {
   notation: Notation;
   /** What stood in each notation, and as dead time, when they last said the same plant. */
   agreed: Partial<Record<Notation | 'deadTime', string>>;
+  /** What the editor wrote in a notation by itself. */
+  written: Partial<Record<Notation, string>>;
   /** What was typed in a notation before another was written over it. */
   replaced: Partial<Record<Notation, Partial<NotationText>>>;
   basis: Basis;
@@ -32,6 +34,7 @@ export const emptyPlantForm: PlantForm = {
   formula: '',
   parameters: {},
   agreed: {},
+  written: {},
   replaced: {},
   deadTime: '0',
   basis: 'unsaid',
@@ -75,5 +78,5 @@ export const hasTyped = (form: PlantForm, kept: PlantForm): boolean =>
   isChanged(form, kept) ||
   notations.some(({ value }) => {
     const text = textIn(form, value);
-    return text !== textIn(kept, value) && text !== form.agreed[value];
+    return text !== textIn(kept, value) && text !== form.written[value];
   });

@@ -8,6 +8,8 @@ import type { PlantForm } from './plant-form';
 export interface Preview {
   /** What the fields describe, as far as they can be read: the last one that could be stays. */
   plant: ReadablePlant | null;
+  /** What is typed now says no plant, or one that could not be read. */
+  outdated: boolean;
   formula: FormulaReading;
 }
 
@@ -26,5 +28,6 @@ export function usePreview(form: PlantForm, kept: ReadablePlant | undefined): Pr
   }, [written, reading]);
   const [last, setLast] = useState<ReadablePlant | null>(kept ?? null);
   if (plant && plant !== last) setLast(plant);
-  return { plant: plant ?? last, formula };
+  const unread = written === null || formula.problem !== null || formula.needsSignal;
+  return { plant: plant ?? last, outdated: plant === null && unread, formula };
 }

@@ -6,8 +6,14 @@ import { Fraction, Mathematics } from './fraction';
 import { readBack, type ReadablePlant } from './read-back';
 import { spokenEquation } from './spoken-mathematics';
 
+interface PlantEquationProps {
+  plant: ReadablePlant;
+  /** What is typed says another plant, which cannot be read. */
+  outdated?: boolean;
+}
+
 /** P(s) typeset, and read back in words: poles, zeros, gain and dead time. */
-export function PlantEquation({ plant }: { plant: ReadablePlant }) {
+export function PlantEquation({ plant, outdated = false }: PlantEquationProps) {
   const { colors } = useTheme();
   const read = readBack(plant);
   if (!read) return null;
@@ -15,6 +21,11 @@ export function PlantEquation({ plant }: { plant: ReadablePlant }) {
   const { over, under, delay } = parts;
   return (
     <View style={[styles.box, { backgroundColor: colors.bar }]}>
+      {outdated ? (
+        <Text step="note" weight={600}>
+          The last that could be read:
+        </Text>
+      ) : null}
       <View role="img" aria-label={spokenEquation(parts)} style={styles.line}>
         <Mathematics text="P(s) =" />
         {under === '1' ? <Mathematics text={over} /> : <Fraction over={over} under={under} />}

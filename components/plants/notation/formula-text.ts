@@ -19,14 +19,19 @@ function polynomial(coefficients: readonly number[]): string {
   return terms.join(' ').replace(/^\+ /, '').replace(/^- /, '-');
 }
 
-/** The least product of factors in s with these roots: powers of s, (s + a), and a pair as one quadratic. */
-const factors = (roots: readonly ComplexNumber[]): string[] => {
-  const integrators = roots.filter(({ re, im }) => re === 0 && im === 0).length;
-  const others = roots
-    .filter(({ re, im }) => im >= 0 && (re !== 0 || im !== 0))
-    .map(({ re, im }) => `(${polynomial(im === 0 ? [1, -re] : [1, -2 * re, re * re + im * im])})`);
-  return integrators === 0 ? others : [power(integrators), ...others];
-};
+/** The product of factors in s with these roots: powers of s, (s + a), a pair as one quadratic, each with its multiplicity as a power. */
+function factors(roots: readonly ComplexNumber[]): string[] {
+  const texts = roots
+    .filter(({ im }) => im >= 0)
+    .map(({ re, im }) => {
+      if (im !== 0) return `(${polynomial([1, -2 * re, re * re + im * im])})`;
+      return re === 0 ? 's' : `(${polynomial([1, -re])})`;
+    });
+  return [...new Set(texts)].map((text) => {
+    const times = texts.filter((other) => other === text).length;
+    return times === 1 ? text : `${text}^${times}`;
+  });
+}
 
 const delay = (deadTime: number): string => (deadTime > 0 ? ` exp(-${exactText(deadTime)} s)` : '');
 

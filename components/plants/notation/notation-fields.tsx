@@ -69,7 +69,7 @@ export function NotationFields({ control, form, choice, reading }: NotationField
   return (
     <View style={styles.fields}>
       <Segments label="How the plant is written" value={notation} options={notations} onChange={choice.choose} stretch />
-      <View aria-live="polite">
+      <View aria-live="polite" style={choice.reason ? null : styles.silent}>
         {choice.reason ? <Note lead={`Not written as ${notationWords[notation]}.`}>{choice.reason}</Note> : null}
       </View>
       {notation === 'coefficients' ? <PolynomialFields control={control} /> : null}
@@ -82,5 +82,7 @@ export function NotationFields({ control, form, choice, reading }: NotationField
 
 const styles = StyleSheet.create({
   fields: { gap: 14 },
+  // A live region stands before it speaks; empty, it takes no gap.
+  silent: { position: 'absolute' },
   aside: { gap: 4, alignItems: 'flex-start' },
 });

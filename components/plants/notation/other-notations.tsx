@@ -17,10 +17,12 @@ function said(plant: ReadablePlant): Readonly<Record<Notation, string>> | null {
   const listed = (roots: typeof poles) => (roots.length === 0 ? 'none' : `${rootsText(roots)} rad/s`);
   return {
     coefficients: `${polynomialText(numerator)} over ${polynomialText(denominator)}${delay}`,
-    roots: `Poles ${listed(poles)}. Zeros ${listed(zeros)}. Gain ${coefficientText(gain)}${delay}`,
+    roots: `${listed(poles)}. Zeros ${listed(zeros)}. Gain ${coefficientText(gain)}${delay}`,
     formula: formulaText(runs),
   };
 }
+
+const leads: Readonly<Record<Notation, string>> = { coefficients: 'Polynomials', roots: 'Poles', formula: 'Formula' };
 
 /** The same plant in the notations in which it was not written. */
 export function OtherNotations({ plant }: { plant: ReadablePlant }) {
@@ -33,9 +35,9 @@ export function OtherNotations({ plant }: { plant: ReadablePlant }) {
       </Heading>
       {notations
         .filter(({ value }) => value !== plant.plant.kind)
-        .map(({ value, label }) => (
+        .map(({ value }) => (
           <Text key={value} step="note" tone="ink2">
-            <Text step="note" weight={600}>{`${label} `}</Text>
+            <Text step="note" weight={600}>{`${leads[value]} `}</Text>
             {texts[value]}
           </Text>
         ))}

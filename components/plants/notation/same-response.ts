@@ -12,7 +12,8 @@ export function sameResponse(one: WorkedOut, other: WorkedOut): boolean {
     const a = at(frequency);
     const b = otherAt(frequency);
     if (!Number.isFinite(a.magnitude) || a.magnitude === 0) return true;
-    const turned = 2 * Math.abs(Math.sin(((a.phaseDegrees - b.phaseDegrees) * RADIANS) / 2));
+    // Unwrapped, so that a pole that crossed the axis shows as half a turn.
+    const turned = (a.phaseDegrees - b.phaseDegrees) * RADIANS;
     return Math.hypot(b.magnitude / a.magnitude - 1, turned) <= LARGEST_DIFFERENCE;
   });
 }

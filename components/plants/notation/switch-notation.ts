@@ -39,17 +39,18 @@ export function switchNotation(form: PlantForm, to: Notation, plant: WorkedOut |
   const shown = { ...form, notation: to };
   if (to === from || isBlankIn(form, from) || sayTheSame(form, from, to)) return { form: shown, reason: null };
   if (plant === null) return { form: shown, reason: `What stands under ${notationWords[from]} cannot be read yet.` };
-  const written = { ...shown, ...writePlant(plant, to) };
-  const reason = unfaithful(plant, written, to);
+  const next = { ...shown, ...writePlant(plant, to) };
+  const reason = unfaithful(plant, next, to);
   if (reason !== null) return { form: shown, reason };
-  const others = form.agreed[from] === textIn(form, from) && sharesDeadTime(form, from) ? form.agreed : {};
-  const agreed = { ...others, [from]: textIn(form, from), [to]: textIn(written, to), deadTime: written.deadTime };
-  const typedBefore = !isBlankIn(form, to) && form.agreed[to] !== textIn(form, to);
+  const others = form.agreed[from] === textIn(form, from) && holdsDeadTime(form, from) ? form.agreed : {};
+  const agreed = { ...others, [from]: textIn(form, from), [to]: textIn(next, to), deadTime: next.deadTime };
+  const written = { ...form.written, [to]: textIn(next, to) };
+  const typedBefore = !isBlankIn(form, to) && form.written[to] !== textIn(form, to);
   const replaced = typedBefore ? { ...form.replaced, [to]: fieldsIn(form, to) } : form.replaced;
-  return { form: { ...written, agreed, replaced }, reason: null };
+  return { form: { ...next, agreed, written, replaced }, reason: null };
 }
 
-const sharesDeadTime = (form: PlantForm, from: Notation): boolean => from === 'formula' || form.agreed.deadTime === form.deadTime;
+const holdsDeadTime = (form: PlantForm, from: Notation): boolean => from === 'formula' || form.agreed.deadTime === form.deadTime;
 
 /** Brings back what was typed in the notation that is shown, before another was written over it. What stands there now is laid aside. */
 export function bringBack(form: PlantForm): PlantForm {

@@ -19,6 +19,7 @@ describe('a plant written as a formula', () => {
       '-1 (s - 3)/(s^2 (s^2 + s + 4.25))',
     ],
     [{ ...roots, zeros: [], poles: [...pair(0, 3)], deadTime: 0 }, '6/(s^2 + 9)'],
+    [{ ...roots, zeros: [], poles: [real(-2), real(0), real(-2)], deadTime: 0 }, '6/((s + 2)^2 s)'],
     [{ ...roots, zeros: [], poles: [], deadTime: 0 }, '6'],
     [{ kind: 'coefficients' as const, numerator: [2.1], denominator: [0.35, 1, 0], deadTime: 0.08 }, '2.1 exp(-0.08 s)/(0.35 s^2 + s)'],
     [{ kind: 'coefficients' as const, numerator: [-1, 0, 2], denominator: [1, 0, 0], deadTime: 0 }, '(-s^2 + 2)/(s^2)'],
@@ -46,7 +47,11 @@ describe('a plant written as a formula', () => {
   });
 
   it('reads as the roots that it was written from', () => {
-    const plant = { ...roots, zeros: [real(0.7)], poles: [real(0), real(-1 / 0.35), ...pair(-0.01, 3)] };
+    const plant = {
+      ...roots,
+      zeros: [real(0.7)],
+      poles: [real(0), real(-1 / 0.35), real(-2), real(-2), ...pair(-0.01, 3), ...pair(-0.01, 3)],
+    };
     const read = resolvePlant({ kind: 'formula', text: formulaText(plant), parameters: {} });
     expect(read).toMatchObject({ kind: 'roots', gain: 6, deadTime: 0.08 });
     if (read.kind !== 'roots') return;
