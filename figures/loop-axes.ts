@@ -5,6 +5,8 @@ import { fromDecibels, type MagnitudeUnit } from './units';
 import { axisWithStep } from './value-axis';
 
 const DECIBEL_LIMITS: Interval = [-60, 60];
+const LEAST_PLANT_SPAN = 20;
+const LARGEST_PLANT_SPAN = 120;
 const DECIBEL_STEPS = [5, 10, 20, 40, 60];
 const DEGREE_STEPS = [45, 90, 180, 360];
 const ROUND_DEGREES = 15;
@@ -17,8 +19,16 @@ const stepFor = (steps: readonly number[], span: number, pixels: number): number
 /** The axis of |L|, in decibels inside: from the least to the greatest value, 0 dB always among them, no further than ±60 dB. */
 export function magnitudeAxis(decibels: Iterable<number>, range: Interval, unit: MagnitudeUnit): Axis {
   const [low, high] = finiteExtent(decibels) ?? [-20, 20];
-  const bottom = clamp(low, DECIBEL_LIMITS[0], -10);
-  const top = clamp(high, 10, DECIBEL_LIMITS[1]);
+  return decibelAxis([clamp(low, DECIBEL_LIMITS[0], -10), clamp(high, 10, DECIBEL_LIMITS[1])], range, unit);
+}
+
+/** The axis of |P|: its size depends on the plant's units, so it lies where the values are. Of a wide span the upper part is kept. */
+export function plantMagnitudeAxis(decibels: Iterable<number>, range: Interval, unit: MagnitudeUnit): Axis {
+  const [low, high] = finiteExtent(decibels) ?? [-20, 20];
+  return decibelAxis([Math.max(Math.min(low, high - LEAST_PLANT_SPAN), high - LARGEST_PLANT_SPAN), high], range, unit);
+}
+
+function decibelAxis([bottom, top]: Interval, range: Interval, unit: MagnitudeUnit): Axis {
   const pixels = Math.abs(range[1] - range[0]);
   const step = stepFor(unit === 'dB' ? DECIBEL_STEPS : [20, 40, 60], top - bottom, pixels);
   const axis = axisWithStep([Math.floor(bottom / 10) * 10, Math.ceil(top / 10) * 10], step, range);

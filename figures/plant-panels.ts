@@ -4,7 +4,7 @@ import { frequencyPolyline, type Ordinate, ordinatesWithin } from './frequency-c
 import { betweenStops } from './frequency-window';
 import type { Interval, Rect } from './geometry';
 import type { Axis } from './linear-axis';
-import { magnitudeAxis, oddHalfTurns, phaseAxis } from './loop-axes';
+import { oddHalfTurns, phaseAxis, plantMagnitudeAxis } from './loop-axes';
 import type { PanelPicture } from './panel';
 import { polylinePath } from './polyline';
 import type { ReaderUnits } from './quantity-text';
@@ -58,14 +58,14 @@ function picture({ curves }: PlantScene, across: FrequencyAxis, plot: Rect, pane
   };
 }
 
-/** |P| over frequency, 0 dB its reference. */
+/** |P| over frequency, 0 dB its reference where it comes near. */
 export const plantMagnitudePanel = (scene: PlantScene, across: FrequencyAxis, plot: Rect): PanelPicture =>
   picture(scene, across, plot, {
     title: '|P|',
     unit: scene.units.magnitude,
     ordinate: decibels,
-    axis: (values, range) => magnitudeAxis(values, range, scene.units.magnitude),
-    strong: () => [0],
+    axis: (values, range) => plantMagnitudeAxis(values, range, scene.units.magnitude),
+    strong: ({ domain: [low, high] }) => (low <= 0 && high >= 0 ? [0] : []),
   });
 
 /** arg P over frequency, dead time included, every odd half turn a reference. */

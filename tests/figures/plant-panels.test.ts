@@ -33,4 +33,14 @@ describe('the sheet of a plant', () => {
       expect(curves.a).toMatch(/^M/);
     }
   });
+
+  it('shows a plant whose unit makes it small, where it is', () => {
+    const small = { ...plantResponse({ kind: 'coefficients', numerator: [2.1e-6], denominator: [0.35, 1, 0], deadTime: 0 }), units };
+    const across = frequencyAxis(plantWindow(small.corners, 'rad/s'), [plot.x, plot.x + plot.width], 'rad/s');
+    const { axis, curves, strong } = plantMagnitudePanel(small, across, plot);
+    expect(axis.domain[1]).toBeLessThan(-90);
+    expect(axis.domain[1] - axis.domain[0]).toBeLessThanOrEqual(130);
+    expect(curves.a).toMatch(/^M/);
+    expect(strong).toEqual([]);
+  });
 });
