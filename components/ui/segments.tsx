@@ -58,7 +58,7 @@ export function Segments<Value extends string>({ label, value, options, onChange
 const styles = StyleSheet.create({
   group: { flexDirection: 'row', alignSelf: 'flex-start' },
   stretch: { alignSelf: 'stretch' },
-  share: { flex: 1 },
+  share: { flex: 1, paddingHorizontal: 6 },
   option: {
     minHeight: touch,
     minWidth: 60,
