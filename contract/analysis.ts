@@ -27,7 +27,6 @@ export const SensitivityPeaks = z
     id: 'SensitivityPeaks',
     description: 'noiseGain.value is null where the command answers noise without bound (an improper controller)',
   });
-export type SensitivityPeaks = z.infer<typeof SensitivityPeaks>;
 
 const numbers = z.array(z.number());
 const Curve = z.object({ magnitude: numbers, phaseDegrees: numbers });

@@ -49,4 +49,3 @@ export const SeriesController = z.strictObject({ form: z.literal('series'), ...b
 
 export const Controller = z.discriminatedUnion('form', [ParallelController, IdealController, SeriesController]).meta({ id: 'Controller' });
 export type Controller = z.infer<typeof Controller>;
-export type ControllerInput = z.input<typeof Controller>;

@@ -63,7 +63,6 @@ export const FormulaPlant = z
 
 export const PlantModel = z.discriminatedUnion('kind', [CoefficientsPlant, RootsPlant, FormulaPlant]).meta({ id: 'PlantModel' });
 export type PlantModel = z.infer<typeof PlantModel>;
-export type PlantModelInput = z.input<typeof PlantModel>;
 
 export const ReadPlant = z.strictObject({ plant: PlantModel }).meta({ id: 'ReadPlant' });
 
