@@ -40,7 +40,7 @@ export function panelOperator(system: LoopSystem, width: number, budget: WorkBud
   const matrix = zeroMatrix(WATCHED.length * NODE_COUNT + size, size + (delayed ? NODE_COUNT : 0));
   const place = (target: number, row: Float64Array) => setRow(matrix, target, { row, size, driveSize });
   WATCHED.forEach((signal, s) => {
-    let row = new Float64Array(generator.rows);
+    let row: Float64Array = new Float64Array(generator.rows);
     row.set(system.rows[signal]);
     for (let node = 0; node < NODE_COUNT; node += 1) {
       if (node > 0) row = carried(row, gaps[gapBefore(node)]);

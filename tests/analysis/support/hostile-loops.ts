@@ -22,7 +22,7 @@ interface Root {
 
 /** One real root or a pair: left, right, on the axis or at the origin. */
 const rootGroup: fc.Arbitrary<Root[]> = fc.oneof(
-  fc.constant([{ re: 0, im: 0 }]),
+  fc.constant<Root[]>([{ re: 0, im: 0 }]),
   signed(decades(-5, 5)).map((re) => [{ re, im: 0 }]),
   signed(decades(-1, 1)).map((re) => [{ re, im: 0 }]),
   fc
