@@ -1,5 +1,6 @@
 export * from './curve-marks';
 export * from './edge-ruler';
+export * from './filter-text';
 export * from './format';
 export * from './frequency-axis';
 export * from './frequency-curves';
@@ -7,6 +8,7 @@ export * from './frequency-window';
 export * from './gain-rule-ticks';
 export * from './gain-rule';
 export * from './gain-scale';
+export * from './gain-unit';
 export * from './geometry';
 export * from './interpolate';
 export * from './kerb';

@@ -6,10 +6,10 @@ import { BenchContext } from './bench-context';
 import type { BenchCommand } from './bench-keys';
 import { BenchScene } from './bench-scene';
 import { useCompared } from './compare/use-compared';
-import { type Gain, nudged } from './draft/gain';
-import { current } from './draft/draft';
+import type { Gain } from './draft/gain';
 import { redo, undo } from './draft/draft-store';
 import { useDraftStore } from './draft/use-draft-store';
+import { nudgeDraft } from './gains/use-gain';
 import { useKeep } from './keep/use-keep';
 import { mayKeep } from './keep/saved-words';
 import { useBenchAnalysis } from './live/use-bench-analysis';
@@ -41,14 +41,12 @@ export function BenchDesk({ subject, link, onLink }: BenchDeskProps) {
   const announce = useAnnounce();
   const obey = useCallback(
     (command: BenchCommand) => {
-      const draft = store.getState();
       if (command.kind === 'chart') {
         onLink({ chart: command.sheet });
         focusChart(command.sheet);
       } else if (command.kind === 'undo') undo(store);
       else if (command.kind === 'redo') redo(store);
-      else if (command.kind === 'nudge')
-        draft.move({ [activeGain]: nudged(activeGain, current(draft), draft.base.settings, command.fraction) });
+      else if (command.kind === 'nudge') nudgeDraft(store.getState(), activeGain, command.fraction);
       else if (mayKeep(subject.project.role)) keep();
       else announce('Keeping is for editors of this project.');
     },

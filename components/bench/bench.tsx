@@ -7,7 +7,6 @@ import { Link } from '@/components/ui/link';
 import { Trouble } from '@/components/ui/trouble';
 import { Waiting } from '@/components/ui/waiting';
 import { BenchDesk } from './bench-desk';
-import { settingsOf } from './draft/settings';
 import type { Lack } from './subject/bench-subject';
 import { useBenchLink } from './subject/use-bench-link';
 import { useBenchSubject } from './subject/use-bench-subject';
@@ -27,7 +26,6 @@ export function Bench() {
   if (state.kind === 'lacking')
     return state.lack === 'plant' ? <NoPlant projectId={projectId} /> : <Trouble title="Not here" text={lacks[state.lack]} />;
   const { subject } = state;
-  if (subject.opened !== null && settingsOf(subject.opened) === null) return <OtherForm projectId={projectId} />;
   return (
     <>
       <DocumentTitle parts={['Bench', subject.project.name]} />
@@ -43,18 +41,6 @@ function NoPlant({ projectId }: { projectId: string }) {
         title="No plant yet"
         text="The bench needs to know what the loop drives. Enter the plant first; gains can be moved as soon as it is kept."
         action={<Link href={projectPath(projectId, 'plant')}>Enter the plant</Link>}
-      />
-    </View>
-  );
-}
-
-function OtherForm({ projectId }: { projectId: string }) {
-  return (
-    <View style={{ padding: 20 }}>
-      <Empty
-        title="This design is not in parallel form"
-        text="The bench moves Kp, Ki, Kd and Tf. Designs written with times are shown with their analyses."
-        action={<Link href={projectPath(projectId, 'analyses')}>Open the analyses</Link>}
       />
     </View>
   );

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { Filter } from '@/contract';
 import type { Draft, Place } from './draft';
 
 /** A draft as this device keeps it: with its history, so that a gain moved by mistake can be taken back after a reload too. */
@@ -10,17 +11,22 @@ export interface StoredDraft {
 
 const finite = z.number();
 const StoredSettings = z.object({
+  form: z.enum(['parallel', 'ideal', 'series']),
   kp: finite,
-  ki: finite,
-  kd: finite,
+  integral: finite.nullable(),
+  derivative: finite,
   filterTime: finite,
   proportionalWeight: finite,
   derivativeWeight: finite,
   feedforward: finite,
+  filters: z.array(Filter),
   statedContinuous: z.boolean(),
 });
 const StoredPlace = z.object({ settings: StoredSettings, step: z.int() });
+/** Raised where the shape changes: a draft of another shape would be read wrongly, and is none. */
+const VERSION = 2;
 const Stored = z.object({
+  version: z.literal(VERSION),
   base: z.object({ revision: z.int().nullable(), settings: StoredSettings }),
   baseStep: z.int(),
   place: StoredPlace,
@@ -48,7 +54,7 @@ export function writeDraft(storage: Storage | null, key: string, { draft, past, 
   const { base, baseStep, settings, step, note } = draft;
   try {
     if (storage === null) return false;
-    storage.setItem(key, JSON.stringify({ base, baseStep, place: { settings, step }, note, past, future }));
+    storage.setItem(key, JSON.stringify({ version: VERSION, base, baseStep, place: { settings, step }, note, past, future }));
     return true;
   } catch {
     return false;

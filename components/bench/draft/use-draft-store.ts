@@ -8,7 +8,7 @@ import { settingsOf, startSettings } from './settings';
 
 const baseOf = (revision: DesignRevision | null): KeptBase => ({
   revision: revision?.revision ?? null,
-  settings: (revision && settingsOf(revision)) ?? startSettings,
+  settings: revision ? settingsOf(revision) : startSettings,
 });
 
 /** The store lives as long as its key: a newer revision is met by the same draft. */

@@ -3,6 +3,7 @@ import { GainRule } from '@/components/charts';
 import { gainSpans } from '@/figures';
 import { type Gain, gainWords } from '../draft/gain';
 import type { StabilitySpan } from '../live/stability-span';
+import { IntegralOff } from './integral-off';
 import type { GainControl } from './use-gain';
 
 interface BenchGainRuleProps {
@@ -12,7 +13,7 @@ interface BenchGainRuleProps {
   wide?: boolean;
 }
 
-/** The rule of one gain: dragging it moves the draft, lifting the finger ends the step. */
+/** The rule of one gain: dragging it moves the draft, lifting the finger ends the step. Without integral action Ti has none. */
 export function BenchGainRule({ gain, control, unstable, wide = false }: BenchGainRuleProps) {
   const { hold, release } = control;
   const change = useCallback(
@@ -22,7 +23,8 @@ export function BenchGainRule({ gain, control, unstable, wide = false }: BenchGa
     },
     [hold, release],
   );
-  const { label, name } = gainWords[gain];
+  const { label, name } = gainWords(gain, control.form);
+  if (control.value === null) return <IntegralOff />;
   return (
     <GainRule
       name={`${label}, ${name}`}

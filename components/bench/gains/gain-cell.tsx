@@ -18,7 +18,7 @@ interface GainCellProps {
 /** One gain of the shelf: its rule, its field, and a step down and up. */
 export const GainCell = memo(function GainCell({ gain, unstable, onActive }: GainCellProps) {
   const control = useGain(gain);
-  const { label } = gainWords[gain];
+  const { label } = gainWords(gain, control.form);
   return (
     <View style={styles.cell} onFocus={() => onActive(gain)}>
       <View style={styles.head}>
@@ -26,7 +26,7 @@ export const GainCell = memo(function GainCell({ gain, unstable, onActive }: Gai
         <Text step="small" tone="ink2" numberOfLines={1}>
           {control.unit}
         </Text>
-        {control.moved && (
+        {control.moved && control.kept !== null && (
           <Text step="small" tone="ink2" style={styles.was}>
             was {formatGain(control.kept)}
           </Text>
@@ -34,9 +34,15 @@ export const GainCell = memo(function GainCell({ gain, unstable, onActive }: Gai
       </View>
       <BenchGainRule gain={gain} control={control} unstable={unstable} wide />
       <View style={styles.row}>
-        <IconButton icon="minus" outlined label={`${label} down 1 %`} onPress={() => control.nudge(-0.01)} />
-        <GainInput gain={gain} value={control.value} unit={control.unit} onSet={control.set} onNudge={control.nudge} />
-        <IconButton icon="plus" outlined label={`${label} up 1 %`} onPress={() => control.nudge(0.01)} />
+        <IconButton
+          icon="minus"
+          outlined
+          label={`${label} down 1 %`}
+          disabled={control.value === null}
+          onPress={() => control.nudge(-0.01)}
+        />
+        <GainInput key={control.form} gain={gain} control={control} />
+        <IconButton icon="plus" outlined label={`${label} up 1 %`} disabled={control.value === null} onPress={() => control.nudge(0.01)} />
       </View>
     </View>
   );

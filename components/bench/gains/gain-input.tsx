@@ -3,16 +3,14 @@ import { StyleSheet, TextInput, View } from 'react-native';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
 import { corner, fonts, line } from '@/components/ui/tokens';
-import { formatGain } from '@/figures/format';
 import { type Gain, gainWords } from '../draft/gain';
+import { gainText } from './gain-text';
 import { readGain } from './read-gain';
+import type { GainControl } from './use-gain';
 
 interface GainInputProps {
   gain: Gain;
-  value: number;
-  unit: string;
-  onSet: (value: number) => void;
-  onNudge: (fraction: number) => void;
+  control: GainControl;
 }
 
 const stepOf = ({ shiftKey, altKey }: KeyboardEvent): number => (shiftKey ? 0.1 : altKey ? 0.001 : 0.01);
@@ -21,31 +19,33 @@ const stepOf = ({ shiftKey, altKey }: KeyboardEvent): number => (shiftKey ? 0.1 
  * A gain's field. What is typed counts at Enter or when the field is left, and one that is no number stays as typed with the
  * reason under it. Arrows up and down move by 1 %, with Shift 10 %, with Alt 0.1 %.
  */
-export function GainInput({ gain, value, unit, onSet, onNudge }: GainInputProps) {
+export function GainInput({ gain, control }: GainInputProps) {
+  const { form, value, unit } = control;
   const { colors } = useTheme();
   const problemId = useId();
   const [typed, setTyped] = useState<string | null>(null);
   const [problem, setProblem] = useState<string | null>(null);
-  const { label, name } = gainWords[gain];
+  const { label, name } = gainWords(gain, form);
 
-  const settle = () => {
-    if (typed === null) return;
-    const read = readGain(gain, typed);
-    if ('problem' in read) return setProblem(read.problem);
+  const untouched = value === null ? '' : String(value);
+  const forget = () => {
     setTyped(null);
     setProblem(null);
-    if (read.value !== value) onSet(read.value);
+  };
+  const settle = () => {
+    if (typed === null || typed === untouched) return forget();
+    const read = readGain(gain, form, typed);
+    if ('problem' in read) return setProblem(read.problem);
+    forget();
+    if (read.value !== value) control.set(read.value);
   };
   const onKeyDown = (event: KeyboardEvent) => {
     if (event.key === 'Enter') return settle();
-    if (event.key === 'Escape') {
-      setTyped(null);
-      return setProblem(null);
-    }
+    if (event.key === 'Escape') return forget();
     if (event.key !== 'ArrowUp' && event.key !== 'ArrowDown') return;
     event.preventDefault();
     settle();
-    onNudge(event.key === 'ArrowUp' ? stepOf(event) : -stepOf(event));
+    control.nudge(event.key === 'ArrowUp' ? stepOf(event) : -stepOf(event));
   };
   return (
     <View style={styles.box} onKeyDown={onKeyDown}>
@@ -54,8 +54,8 @@ export function GainInput({ gain, value, unit, onSet, onNudge }: GainInputProps)
         aria-invalid={problem !== null || undefined}
         aria-describedby={problem === null ? undefined : problemId}
         inputMode="decimal"
-        value={typed ?? formatGain(value)}
-        onFocus={() => setTyped(String(value))}
+        value={typed ?? gainText(value)}
+        onFocus={() => setTyped((before) => before ?? untouched)}
         selectTextOnFocus
         onChangeText={setTyped}
         onBlur={settle}
@@ -67,7 +67,7 @@ export function GainInput({ gain, value, unit, onSet, onNudge }: GainInputProps)
           role="alert"
           step="tick"
           tone="fail"
-          numberOfLines={1}
+          numberOfLines={3}
           style={[styles.problem, { backgroundColor: colors.paper }]}
         >
           {problem}

@@ -6,17 +6,16 @@ import { ModalFrame } from '@/components/ui/modal-frame';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
 import { corner, line } from '@/components/ui/tokens';
-import { type Gain, gainWords, mayBeNegative } from '../draft/gain';
+import { type Gain, gainWords, isTime } from '../draft/gain';
 import { type Entry, entryOf, type KeypadKey, keypadKeyOf, pressed } from './keypad-entry';
 import { readGain } from './read-gain';
+import type { GainControl } from './use-gain';
 
 interface GainKeypadProps {
   gain: Gain;
-  value: number;
-  unit: string;
+  control: GainControl;
   open: boolean;
   onClose: () => void;
-  onSet: (value: number) => void;
 }
 
 const rows: readonly (readonly KeypadKey[])[] = [
@@ -28,7 +27,7 @@ const rows: readonly (readonly KeypadKey[])[] = [
 
 /** Enters a gain with the thumb that holds the phone, or from a keyboard; nothing moves until it is set. */
 export function GainKeypad({ open, onClose, ...rest }: GainKeypadProps) {
-  const { label } = gainWords[rest.gain];
+  const { label } = gainWords(rest.gain, rest.control.form);
   return (
     <ModalFrame open={open} label={`Enter ${label}`} onClose={onClose} place="sheet">
       <KeypadBody {...rest} onClose={onClose} />
@@ -36,15 +35,16 @@ export function GainKeypad({ open, onClose, ...rest }: GainKeypadProps) {
   );
 }
 
-function KeypadBody({ gain, value, unit, onClose, onSet }: Omit<GainKeypadProps, 'open'>) {
+function KeypadBody({ gain, control, onClose }: Omit<GainKeypadProps, 'open'>) {
   const { colors } = useTheme();
-  const [entry, setEntry] = useState<Entry>(() => entryOf(value));
+  const [entry, setEntry] = useState<Entry>(() => entryOf(control.value));
   const press = (key: KeypadKey) => setEntry((before) => pressed(before, key));
-  const read = readGain(gain, entry.text);
-  const { label } = gainWords[gain];
+  const { form, unit } = control;
+  const read = readGain(gain, form, entry.text);
+  const { label, name } = gainWords(gain, form);
   const set = () => {
     if ('problem' in read) return;
-    onSet(read.value);
+    control.set(read.value);
     onClose();
   };
   const onKeyDown = (event: KeyboardEvent) => {
@@ -65,7 +65,7 @@ function KeypadBody({ gain, value, unit, onClose, onSet }: Omit<GainKeypadProps,
         <Text tone="ink2">{unit}</Text>
       </View>
       <Text step="note" tone={'problem' in read ? 'fail' : 'ink2'}>
-        {'problem' in read ? read.problem : `${gainWords[gain].name}, the other gains as they are.`}
+        {'problem' in read ? read.problem : `${name}, the other gains as they are.`}
       </Text>
       {rows.map((row) => (
         <View key={row.join()} style={styles.row}>
@@ -75,7 +75,7 @@ function KeypadBody({ gain, value, unit, onClose, onSet }: Omit<GainKeypadProps,
         </View>
       ))}
       <View style={styles.row}>
-        {mayBeNegative(gain) && (
+        {!isTime(gain, form) && (
           <View style={styles.sign}>
             <Key name="sign" onPress={() => press('sign')} />
           </View>

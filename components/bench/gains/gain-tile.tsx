@@ -1,27 +1,25 @@
 import { Pressable, StyleSheet, View } from 'react-native';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
-import { formatGain } from '@/figures/format';
-import { type Gain, gainWords } from '../draft/gain';
+import { gainText } from './gain-text';
 
 interface GainTileProps {
-  gain: Gain;
-  value: number;
+  label: string;
+  value: number | null;
   moved: boolean;
   active: boolean;
   onChoose: () => void;
 }
 
 /** A gain's name and value; the dot says that it was moved since it was kept. The active one is the one that rule and nudges move. */
-export function GainTile({ gain, value, moved, active, onChoose }: GainTileProps) {
+export function GainTile({ label, value, moved, active, onChoose }: GainTileProps) {
   const { colors } = useTheme();
-  const { label } = gainWords[gain];
   return (
     <Pressable
       role="radio"
       aria-checked={active}
       tabIndex={active ? 0 : -1}
-      aria-label={`${label} ${formatGain(value)}${moved ? ', moved' : ''}`}
+      aria-label={`${label} ${gainText(value)}${moved ? ', moved' : ''}`}
       onPress={onChoose}
       style={[styles.tile, active && { backgroundColor: colors.paper }]}
     >
@@ -33,7 +31,7 @@ export function GainTile({ gain, value, moved, active, onChoose }: GainTileProps
         {moved && <View style={[styles.dot, { backgroundColor: colors.ink }]} />}
       </View>
       <Text step="value" style={styles.value} numberOfLines={1}>
-        {formatGain(value)}
+        {gainText(value)}
       </Text>
     </Pressable>
   );

@@ -3,7 +3,8 @@ import { StyleSheet, View } from 'react-native';
 import { IconButton } from '@/components/ui/icon-button';
 import { useTheme } from '@/components/ui/theme';
 import { useDraft, useSettings } from '../bench-context';
-import { type Gain, gains } from '../draft/gain';
+import { writtenIn, sameGain } from '../draft/form';
+import { type Gain, gains, gainWords } from '../draft/gain';
 import { GainTile } from './gain-tile';
 
 interface GainTilesProps {
@@ -18,7 +19,8 @@ const steps: Readonly<Record<string, number>> = { ArrowRight: 1, ArrowLeft: -1 }
 export function GainTiles({ active, onChoose, onSettings }: GainTilesProps) {
   const { colors } = useTheme();
   const settings = useSettings();
-  const kept = useDraft(({ base }) => base.settings);
+  const base = useDraft((draft) => draft.base.settings);
+  const kept = writtenIn(settings.form, base);
   const row = useRef<View>(null);
   const walk = (event: KeyboardEvent) => {
     const step = steps[event.key];
@@ -34,9 +36,9 @@ export function GainTiles({ active, onChoose, onSettings }: GainTilesProps) {
         {gains.map((gain) => (
           <GainTile
             key={gain}
-            gain={gain}
+            label={gainWords(gain, settings.form).label}
             value={settings[gain]}
-            moved={settings[gain] !== kept[gain]}
+            moved={'refusal' in kept || !sameGain(settings[gain], kept.gains[gain])}
             active={gain === active}
             onChoose={() => onChoose(gain)}
           />

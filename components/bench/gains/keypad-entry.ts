@@ -9,7 +9,10 @@ export interface Entry {
   readonly untouched: boolean;
 }
 
-export const entryOf = (value: number): Entry => ({ text: String(value).replace('-', MINUS), untouched: true });
+export const entryOf = (value: number | null): Entry => ({
+  text: value === null ? '' : String(value).replace('-', MINUS),
+  untouched: true,
+});
 
 const toggled = (text: string): string => (text.startsWith(MINUS) ? text.slice(1) : MINUS + text);
 

@@ -1,7 +1,7 @@
 import { Pressable, StyleSheet, View } from 'react-native';
 import { Text } from '@/components/ui/text';
-import { formatGain } from '@/figures/format';
 import { type Gain, gainWords } from '../draft/gain';
+import { gainText } from './gain-text';
 import { NudgeButton } from './nudge-button';
 import type { GainControl } from './use-gain';
 
@@ -13,20 +13,22 @@ interface NudgeRowProps {
 
 /** The value between its nudges; a tap on it opens the keypad. */
 export function NudgeRow({ gain, control, onEnter }: NudgeRowProps) {
-  const { label } = gainWords[gain];
-  const nudge = (percent: number) => <NudgeButton gainLabel={label} percent={percent} onNudge={control.nudge} />;
+  const { label } = gainWords(gain, control.form);
+  const nudge = (percent: number) => (
+    <NudgeButton gainLabel={label} percent={percent} disabled={control.value === null} onNudge={control.nudge} />
+  );
   return (
     <View style={styles.row}>
       {nudge(-10)}
       {nudge(-1)}
       <Pressable
         role="button"
-        aria-label={`${label} ${formatGain(control.value)} ${control.unit}, enter a number`}
+        aria-label={`${label} ${gainText(control.value)} ${control.unit}, enter a number`}
         onPress={onEnter}
         style={styles.value}
       >
         <Text step="big" style={styles.number} numberOfLines={1}>
-          {formatGain(control.value)}
+          {gainText(control.value)}
         </Text>
         <Text step="tick" tone="ink2" numberOfLines={1}>
           {control.unit || 'factor'}

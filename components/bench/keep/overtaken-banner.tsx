@@ -16,9 +16,8 @@ export function OvertakenBanner({ onFollow }: { onFollow: () => void }) {
   const overtaken = useDraft((draft) => isOvertaken(draft, latest?.revision ?? null));
   const moved = useDraft(isMoved);
   const from = useDraft(({ base }) => base.revision);
-  const settings = latest && settingsOf(latest);
-  if (!overtaken || !latest || !settings) return null;
-  const newest = { revision: latest.revision, settings };
+  if (!overtaken || !latest) return null;
+  const newest = { revision: latest.revision, settings: settingsOf(latest) };
   const take = () => {
     store.getState().take(newest);
     onFollow();

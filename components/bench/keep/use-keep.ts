@@ -24,9 +24,8 @@ function serverNumbers(kept: KeptAnalysis, { plant, shownCase }: BenchSubject): 
 
 function agreementWith(kept: KeptAnalysis | undefined, subject: BenchSubject, revision: DesignRevision): Agreement | null {
   const server = kept && serverNumbers(kept, subject);
-  const settings = settingsOf(revision);
-  if (!server || !settings) return null;
-  return agreementOf(answerLoop(benchLoop(subject, settings, UNIT_STEPS), 'full').analysis, server);
+  if (!server) return null;
+  return agreementOf(answerLoop(benchLoop(subject, settingsOf(revision), UNIT_STEPS), 'full').analysis, server);
 }
 
 /**
@@ -54,11 +53,10 @@ export function useKeep(subject: BenchSubject, store: DraftStore): { outcome: Ke
 
   const attempt = useCallback(async () => {
     store.getState().release();
-    const sent = store.getState().settings;
     setOutcome({ kind: 'keeping' });
     try {
       const { revision, analysis } = await send();
-      store.getState().keep({ revision: revision.revision, settings: settingsOf(revision) ?? sent });
+      store.getState().keep({ revision: revision.revision, settings: settingsOf(revision) });
       setOutcome({ kind: 'kept', revision: revision.revision, agreement: agreementWith(analysis, subject, revision) });
     } catch (error) {
       setOutcome(refusal(error));

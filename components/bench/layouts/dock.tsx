@@ -18,7 +18,12 @@ import { useKeepButton } from '../keep/use-keep-button';
 import { useStabilitySpans } from '../live/use-stability-spans';
 import type { BenchActions } from './bench-actions';
 
-const only: Readonly<Record<Gain, readonly Gain[]>> = { kp: ['kp'], ki: ['ki'], kd: ['kd'], filterTime: ['filterTime'] };
+const only: Readonly<Record<Gain, readonly Gain[]>> = {
+  kp: ['kp'],
+  integral: ['integral'],
+  derivative: ['derivative'],
+  filterTime: ['filterTime'],
+};
 
 /** The gains in reach of a thumb: one is active, its rule is dragged, its nudges pressed, its number entered. */
 export const Dock = memo(function Dock({ activeGain, onActiveGain, onSettings, outcome, onKeep }: BenchActions) {
@@ -48,14 +53,7 @@ export const Dock = memo(function Dock({ activeGain, onActiveGain, onSettings, o
           </Text>
         )}
       </View>
-      <GainKeypad
-        gain={activeGain}
-        value={control.value}
-        unit={control.unit}
-        open={entering}
-        onClose={() => setEntering(false)}
-        onSet={control.set}
-      />
+      <GainKeypad gain={activeGain} control={control} open={entering} onClose={() => setEntering(false)} />
     </View>
   );
 });

@@ -1,4 +1,5 @@
-import type { Analysis, Loop } from '@/contract';
+import { filterPhaseDegrees } from '@/analysis';
+import type { Analysis, Filter, Loop } from '@/contract';
 import { formatDegrees, formatFrequency, withUnit } from '@/figures/format';
 import type { ReaderUnits } from '@/figures/quantity-text';
 
@@ -10,7 +11,21 @@ export interface BudgetWords {
 const DEGREES = 180 / Math.PI;
 const deadTimeOf = ({ plant }: Loop): number => ('deadTime' in plant ? plant.deadTime : 0);
 
-/** What delays cost at the crossover that gives the phase margin: dead time, the sensor's, its lag. Null where there is none. */
+const filterNames: Readonly<Record<Filter['kind'], string>> = { lowPass: 'low-pass', notch: 'notch', leadLag: 'lead-lag' };
+
+/** What the filters of each kind cost together. */
+function filterCosts({ controller: { filters } }: Loop, frequency: number): readonly (readonly [string, number])[] {
+  return (Object.keys(filterNames) as Filter['kind'][]).map((kind) => {
+    const degrees = filters.filter((filter) => filter.kind === kind).map((filter) => -filterPhaseDegrees(filter, frequency));
+    return [filterNames[kind], degrees.reduce((sum, cost) => sum + cost, 0)];
+  });
+}
+
+/** Of a cost in degrees of lag, what is printed: lead is called so. */
+const told = ([name, degrees]: readonly [string, number]): string =>
+  degrees > 0 ? `${name} ${formatDegrees(degrees)}°` : `${name} ${formatDegrees(-degrees)}° lead`;
+
+/** What delays and filters cost at the crossover that gives the phase margin. Null where there is none. */
 export function budgetWords(loop: Loop, { margins }: Analysis, units: ReaderUnits): BudgetWords | null {
   const frequency = margins.phase?.frequency;
   if (frequency === undefined) return null;
@@ -19,10 +34,11 @@ export function budgetWords(loop: Loop, { margins }: Analysis, units: ReaderUnit
     ['dead time', frequency * deadTimeOf(loop) * DEGREES],
     ['sensor delay', frequency * sensor.deadTime * DEGREES],
     ['sensor lag', Math.atan(frequency * sensor.timeConstant) * DEGREES],
+    ...filterCosts(loop, frequency),
   ];
-  const told = costs.filter(([, degrees]) => degrees > 0).map(([name, degrees]) => `${name} ${formatDegrees(degrees)}°`);
+  const named = costs.filter(([, degrees]) => degrees !== 0).map(told);
   const place = withUnit(formatFrequency(frequency, units.frequency), units.frequency);
-  return { lead: `Phase at crossover ${place}:`, text: told.length > 0 ? told.join(', ') : 'no dead time' };
+  return { lead: `Phase at crossover ${place}:`, text: named.length > 0 ? named.join(', ') : 'no dead time' };
 }
 
 /** How the loop is sampled, or that nobody said. */

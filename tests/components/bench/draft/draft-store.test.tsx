@@ -2,6 +2,8 @@ import { describe, expect, it } from 'vitest';
 import { current, isMoved, type KeptBase, movesSinceKept } from '@/components/bench/draft/draft';
 import { createDraftStore, meetNewest, redo, undo } from '@/components/bench/draft/draft-store';
 import { isOvertaken } from '@/components/bench/draft/meet-latest';
+import { changeWords } from '@/components/bench/draft/draft-words';
+import { switchedTo } from '@/components/bench/draft/form';
 import { startSettings } from '@/components/bench/draft/settings';
 
 const rev = (revision: number, kp: number): KeptBase => ({ revision, settings: { ...startSettings, kp } });
@@ -52,6 +54,22 @@ describe('a gesture', () => {
     expect(store.getState().held).toBeNull();
   });
 
+  it('on the form or the filters is taken back as one too', () => {
+    const pid = { ...startSettings, kp: 1.05, integral: 0.42, derivative: 0.3, filterTime: 0.035 };
+    const store = open({ revision: 6, settings: pid });
+    const ideal = switchedTo('ideal', pid, pid);
+    if ('gains' in ideal) store.getState().move(ideal.gains);
+    expect(isMoved(store.getState())).toBe(true);
+    const filtered = { ...store.getState().settings, filters: [{ kind: 'lowPass' as const, timeConstant: 0.02 }] };
+    store.getState().move(filtered);
+    expect(changeWords(filtered, pid)).toBe('Form, Filters');
+    undo(store);
+    expect(changeWords(current(store.getState()), pid)).toBe('Form ideal to parallel');
+    undo(store);
+    expect(current(store.getState())).toEqual(pid);
+    expect(isMoved(store.getState())).toBe(false);
+  });
+
   it('can be taken back a hundred times', () => {
     const store = open(rev(6, 0));
     for (let kp = 1; kp <= 130; kp++) store.getState().move({ kp });
@@ -64,7 +82,7 @@ describe('moves since the kept revision', () => {
   it('count gestures, and undo counts back', () => {
     const store = open(rev(6, 1));
     store.getState().move({ kp: 2 });
-    store.getState().move({ ki: 1 });
+    store.getState().move({ integral: 1 });
     expect(movesSinceKept(store.getState())).toBe(2);
     undo(store);
     expect(movesSinceKept(store.getState())).toBe(1);
@@ -156,6 +174,30 @@ describe('a draft on this device', () => {
     expect(store.getState().settings.kp).toBe(2);
     expect(store.getState().stored).toBe(false);
     expect(() => open(rev(6, 1), null).getState().move({ kp: 2 })).not.toThrow();
+  });
+
+  it('finds filters and form again, and no move in filters that equal the kept ones', () => {
+    const storage = memory();
+    const settings = {
+      ...startSettings,
+      form: 'ideal' as const,
+      integral: null,
+      filters: [{ kind: 'lowPass' as const, timeConstant: 0.02 }],
+    };
+    open(rev(6, 1), storage).getState().move(settings);
+    expect(open(rev(6, 1), storage).getState().settings).toEqual(settings);
+    const kept = { revision: 7, settings: { ...settings, filters: [{ timeConstant: 0.02, kind: 'lowPass' as const }] } };
+    expect(isMoved(open(kept, storage).getState())).toBe(false);
+  });
+
+  it('written before there were forms is none', () => {
+    const storage = memory();
+    const old = { kp: 2, ki: 1, kd: 0, filterTime: 0, proportionalWeight: 1, derivativeWeight: 0, feedforward: 0, statedContinuous: false };
+    const place = { settings: old, step: 1 };
+    storage.setItem('draft', JSON.stringify({ base: { revision: 6, settings: old }, baseStep: 0, place, note: '', past: [], future: [] }));
+    const store = open(rev(6, 1), storage);
+    expect(store.getState().settings).toEqual(rev(6, 1).settings);
+    expect(isMoved(store.getState())).toBe(false);
   });
 
   it('that is not readable is left alone', () => {

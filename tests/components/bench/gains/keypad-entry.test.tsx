@@ -25,13 +25,21 @@ describe('the keypad', () => {
 
 describe('a typed gain', () => {
   it('is read with either minus', () => {
-    expect(readGain('kp', '−0.25')).toEqual({ value: -0.25 });
-    expect(readGain('kp', '-0.25')).toEqual({ value: -0.25 });
+    expect(readGain('kp', 'parallel', '−0.25')).toEqual({ value: -0.25 });
+    expect(readGain('kp', 'parallel', '-0.25')).toEqual({ value: -0.25 });
   });
-  it('that is no number says how one looks', () => expect(readGain('kp', '1.2.3')).toEqual({ problem: 'A number, as in 0.35.' }));
-  it('may be negative, but not as a time', () => expect(readGain('filterTime', '-1')).toEqual({ problem: 'Tf is 0 or more.' }));
+  it('that is no number says how one looks', () =>
+    expect(readGain('kp', 'parallel', '1.2.3')).toEqual({ problem: 'A number, as in 0.35.' }));
+  it('may be negative, but not as a time', () => expect(readGain('filterTime', 'parallel', '-1')).toEqual({ problem: 'Tf is 0 or more.' }));
+  it('may be 0 as a derivative time, not as an integral time: that says how integral action is switched off', () => {
+    expect(readGain('derivative', 'ideal', '0')).toEqual({ value: 0 });
+    expect(readGain('derivative', 'ideal', '-1')).toEqual({ problem: 'Td is 0 or more.' });
+    for (const text of ['0', '', '-2'])
+      expect(readGain('integral', 'series', text)).toEqual({ problem: 'Ti is more than 0. All settings switch integral action off.' });
+    expect(readGain('integral', 'parallel', '0')).toEqual({ value: 0 });
+  });
   it('is within what a design can hold', () => {
-    expect(readGain('kp', '1e13')).toHaveProperty('problem');
-    expect(readGain('filterTime', '2e6')).toHaveProperty('problem');
+    expect(readGain('kp', 'parallel', '1e13')).toHaveProperty('problem');
+    expect(readGain('filterTime', 'parallel', '2e6')).toHaveProperty('problem');
   });
 });

@@ -14,7 +14,7 @@ describe('what stands of the draft', () => {
   it('is not kept, with the moves counted', () => {
     const once = moved(kept, { kp: 2 });
     expect(savedWords(once).detail).toBe('1 move since rev 6');
-    expect(savedWords(moved(once, { ki: 1 }))).toEqual({ state: 'Not kept', detail: '2 moves since rev 6' });
+    expect(savedWords(moved(once, { integral: 1 }))).toEqual({ state: 'Not kept', detail: '2 moves since rev 6' });
   });
   it('is not kept where the project has no design', () => {
     expect(savedWords(freshDraft({ revision: null, settings: startSettings }))).toEqual({ state: 'Not kept', detail: 'no design yet' });
@@ -54,7 +54,7 @@ describe('a step of the history', () => {
   it('is named after the gain that it changes', () => {
     expect(changeWords({ ...startSettings, kp: 1.05 }, startSettings)).toBe('Kp 1.05 to 1.00');
   });
-  it('of several settings names them', () => expect(changeWords({ ...startSettings, kp: 2, ki: 1 }, startSettings)).toBe('Kp, Ki'));
+  it('of several settings names them', () => expect(changeWords({ ...startSettings, kp: 2, integral: 1 }, startSettings)).toBe('Kp, Ki'));
 });
 
 describe('what lies beside when nobody chose', () => {

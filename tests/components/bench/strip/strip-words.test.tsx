@@ -21,7 +21,7 @@ const subject = {
 } as unknown as BenchSubject;
 
 /** The loop whose numbers api.md prints. */
-const settings: Settings = { ...startSettings, kp: 1.2, ki: 0.4, kd: 0.1, filterTime: 0.02, statedContinuous: true };
+const settings: Settings = { ...startSettings, kp: 1.2, integral: 0.4, derivative: 0.1, filterTime: 0.02, statedContinuous: true };
 
 function strip(changes: Partial<Settings> = {}) {
   const moved = { ...settings, ...changes };
