@@ -77,6 +77,6 @@ export const hostileLoop: fc.Arbitrary<Loop> = fc
     controller,
     sensor: fc.option(fc.record({ timeConstant: time.filter((value) => value <= 1e4), deadTime })),
     responses: fc.constantFrom({}, {}, { duration: 1e-6 }, { duration: 1e7 }, { duration: 10, referenceStep: 0 }),
-    at: fc.constantFrom([], [1e-9, 1, 1e12]),
+    at: fc.constantFrom<number[][]>([], [1e-9, 1, 1e12]),
   })
   .map((loop) => Loop.parse(loop satisfies LoopInput));
