@@ -23,13 +23,13 @@ const roots = (gain: number, zeros: ReturnType<typeof real>[], poles: ReturnType
 });
 
 describe('a plant is typeset as it was given', () => {
-  it.each([
+  it.each<[PlantModel, string, string]>([
     [roots(2, [], [real(0), real(-0.5), ...pair(-0.5, Math.sqrt(8.75))]), '2', 's (s + 0.5)(s² + s + 9)'],
     [roots(1, [real(3)], [real(0), real(0), real(-1), real(-1)]), 's − 3', 's² (s + 1)²'],
     [roots(-1, [real(3)], [...pair(0, 3)]), '−(s − 3)', 's² + 9'],
     [roots(6, [real(0), ...pair(-1, 1)], [real(-1), ...pair(-1, 1)]), '6 s (s² + 2 s + 2)', '(s + 1)(s² + 2 s + 2)'],
     [roots(0.5, [], []), '0.5', '1'],
-    [{ kind: 'coefficients', numerator: [2.1], denominator: [0.35, 1, 0], deadTime: 0 } as const, '2.1', '0.35 s² + s'],
+    [{ kind: 'coefficients', numerator: [2.1], denominator: [0.35, 1, 0], deadTime: 0 }, '2.1', '0.35 s² + s'],
   ])('%j', (plant, over, under) => {
     expect(partsOf(plant)).toEqual({ over, under, delay: null });
   });
