@@ -1,5 +1,6 @@
 import { View } from 'react-native';
 import { type Fact, FactTable } from '@/components/ui/fact-table';
+import { Text } from '@/components/ui/text';
 import type { FrozenCase, PlantRevision } from '@/contract';
 import { PlantEquation } from './equation/plant-equation';
 import { readBack } from './equation/read-back';
@@ -10,18 +11,24 @@ const basisWords = { measured: 'measured', assumed: 'assumed' };
 /** A plant of the project, or as an analysis froze it. */
 type NamedPlant = PlantRevision | FrozenCase['plant'];
 
-/** What was typed, where the equation does not show it as it was. */
-const typedFacts = ({ plant }: NamedPlant): Fact[] => {
-  if (plant.kind !== 'formula') return [];
-  const values = Object.entries(plant.parameters).map(([name, value]) => ({ name, value: coefficientText(value) }));
-  return [{ name: 'Formula', value: plant.text }, ...values];
-};
+/** The formula as it was typed, which the equation does not show. */
+function Typed({ plant }: Pick<NamedPlant, 'plant'>) {
+  if (plant.kind !== 'formula') return null;
+  const values = Object.entries(plant.parameters).map(([name, value]) => `${name} = ${coefficientText(value)}`);
+  return (
+    <Text step="note" tone="ink2">
+      <Text step="note" weight={600}>
+        {'Written as '}
+      </Text>
+      {[plant.text, ...values].join(', ')}
+    </Text>
+  );
+}
 
 function facts(named: NamedPlant): Fact[] {
   const { deadTimeBasis, sensor, units } = named;
   const read = readBack(named);
   return [
-    ...typedFacts(named),
     {
       name: 'Dead time',
       value: read ? `${coefficientText(read.deadTime)} s` : 'as in the formula',
@@ -39,6 +46,7 @@ export function PlantReading({ plant }: { plant: NamedPlant }) {
   return (
     <View style={{ gap: 12 }}>
       <PlantEquation plant={plant} />
+      <Typed plant={plant.plant} />
       <FactTable label={`${plant.name}, rev ${plant.revision}`} facts={facts(plant)} />
     </View>
   );

@@ -31,7 +31,7 @@ export function usePlantEditor(projectId: string, latest: PlantRevision | undefi
   });
   const form = useWatch({ control }) as PlantForm;
   const preview = usePreview(form, latest);
-  const notation = useNotation({ read: getValues, write: (next) => reset(next, { keepDefaultValues: true }), shown: preview.plant });
+  const notation = useNotation({ form, read: getValues, write: (next) => reset(next, { keepDefaultValues: true }), shown: preview.plant });
   const typed = hasTyped(form, start.kept);
   useEffect(() => {
     if (typed) keepPlantDraft(projectId, plantId, { base, form });

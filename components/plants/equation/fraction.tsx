@@ -2,16 +2,22 @@ import { StyleSheet, View } from 'react-native';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
 
+/** A line ends between two brackets, never in one. */
+const unbroken = (text: string): string =>
+  text.replace(/\([^)]*\)/g, (bracket) => bracket.replaceAll(' ', '\u00a0')).replaceAll(')(', ')\u200b(');
+
 /** Text in which every s, the variable, leans. */
 export function Mathematics({ text, small = false }: { text: string; small?: boolean }) {
   const step = small ? 'body' : 'h2';
   return (
     <Text step={step} weight={500} style={styles.centred}>
-      {text.split(/(s)/).map((piece, i) => (
-        <Text key={i} step={step} weight={500} style={piece === 's' && styles.variable}>
-          {piece}
-        </Text>
-      ))}
+      {unbroken(text)
+        .split(/(s)/)
+        .map((piece, i) => (
+          <Text key={i} step={step} weight={500} style={piece === 's' && styles.variable}>
+            {piece}
+          </Text>
+        ))}
     </Text>
   );
 }

@@ -33,13 +33,14 @@ function factors(roots: readonly ComplexNumber[]): string[] {
   });
 }
 
+const product = (parts: readonly string[]): string => parts.join(' ').replaceAll(') (', ')(');
 const delay = (deadTime: number): string => (deadTime > 0 ? ` exp(-${exactText(deadTime)} s)` : '');
 
 function fromRoots({ gain, zeros, poles, deadTime }: Extract<WorkedOut, { kind: 'roots' }>): string {
-  const over = [exactText(gain), ...factors(zeros)].join(' ') + delay(deadTime);
+  const over = product([exactText(gain), ...factors(zeros)]) + delay(deadTime);
   const under = factors(poles);
   if (under.length === 0) return over;
-  return `${over}/${under.length === 1 ? under[0] : `(${under.join(' ')})`}`;
+  return `${over}/${under.length === 1 ? under[0] : `(${product(under)})`}`;
 }
 
 function fromCoefficients({ numerator, denominator, deadTime }: Extract<WorkedOut, { kind: 'coefficients' }>): string {

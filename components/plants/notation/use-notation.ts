@@ -4,12 +4,14 @@ import { runnablePlant } from '@/analysis/project';
 import { plantReadingQuery } from '@/hooks/queries/plants';
 import type { ReadablePlant } from '../equation/read-back';
 import type { PlantForm } from '../plant-form';
-import type { Notation } from './notation';
+import { type Notation, textIn } from './notation';
 import { readNotation } from './read-notation';
 import { bringBack, sayTheSame, switchNotation } from './switch-notation';
 import type { WorkedOut } from './write-plant';
 
 interface FormAccess {
+  form: PlantForm;
+  /** What it is by now, when an answer took its time. */
   read: () => PlantForm;
   write: (form: PlantForm) => void;
   /** The plant that is shown; a formula with what it reads as. */
@@ -18,15 +20,17 @@ interface FormAccess {
 
 export interface NotationChoice {
   choose: (to: Notation) => void;
-  /** Why the notation that is shown does not say what the one before said; null where it does. */
+  /** Why the notation that is shown does not say what the one before said, until something is typed there; null where it does. */
   reason: string | null;
   bringBack: () => void;
 }
 
+const placeIn = (form: PlantForm): string => `${form.notation} ${textIn(form, form.notation)}`;
+
 /** Changes between notations, so that each says what the one before said, and what was typed stays. */
-export function useNotation({ read, write, shown }: FormAccess): NotationChoice {
+export function useNotation({ form: now, read, write, shown }: FormAccess): NotationChoice {
   const client = useQueryClient();
-  const [reason, setReason] = useState<string | null>(null);
+  const [refused, setRefused] = useState<{ reason: string; at: string } | null>(null);
 
   const workedOut = async (form: PlantForm): Promise<WorkedOut | null> => {
     const { plant } = readNotation(form, form.notation);
@@ -43,16 +47,13 @@ export function useNotation({ read, write, shown }: FormAccess): NotationChoice 
     const before = read();
     const plant = sayTheSame(before, before.notation, to) ? null : await workedOut(before);
     const { form, reason: why } = switchNotation(read(), to, plant);
-    setReason(why);
+    setRefused(why === null ? null : { reason: why, at: placeIn(form) });
     write(form);
   };
 
   return {
     choose: (to) => void choose(to),
-    reason,
-    bringBack: () => {
-      setReason(null);
-      write(bringBack(read()));
-    },
+    reason: refused?.at === placeIn(now) ? refused.reason : null,
+    bringBack: () => write(bringBack(read())),
   };
 }
