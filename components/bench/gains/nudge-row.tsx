@@ -31,7 +31,7 @@ export function NudgeRow({ gain, control, onEnter }: NudgeRowProps) {
           {gainText(control.value)}
         </Text>
         <Text step="tick" tone="ink2" numberOfLines={1}>
-          {control.unit || 'factor'}
+          {control.value === null ? '' : control.unit || 'factor'}
         </Text>
       </Pressable>
       {nudge(1)}

@@ -14,10 +14,10 @@ const LONGEST = 1e6;
 const FASTEST = 1e9;
 const WIDEST = 100;
 
-const time = (value: number) => (value >= 0 && value <= LONGEST ? null : 'From 0 to 1,000,000 s.');
-const positiveTime = (value: number) => (value > 0 ? time(value) : 'More than 0 s.');
-const depth = (value: number) => (value >= 0 && value <= 1 ? null : 'From 0, nothing passes, to 1, all passes.');
-const width = (value: number) => (value > 0 && value <= WIDEST ? null : 'More than 0, at most 100.');
+const time = (value: number) => (value >= 0 && value <= LONGEST ? null : 'A time is from 0 to 1,000,000 s.');
+const positiveTime = (value: number) => (value > 0 ? time(value) : 'A pole time is more than 0.');
+const depth = (value: number) => (value >= 0 && value <= 1 ? null : 'Depth is from 0 to 1.');
+const width = (value: number) => (value > 0 && value <= WIDEST ? null : 'Width is more than 0, at most 100.');
 
 /** In the reader's unit without the tail that the turn from rad/s leaves: 5 Hz stay 5. */
 const shown = (value: number): number => Number(value.toPrecision(12));

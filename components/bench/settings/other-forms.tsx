@@ -59,7 +59,7 @@ function OneForm({ form, written, units }: OneFormProps) {
 
 const styles = StyleSheet.create({
   row: { flexDirection: 'row', flexWrap: 'wrap', gap: 12 },
-  form: { flexGrow: 1, flexBasis: 220, borderLeftWidth: line.field, paddingLeft: 12, gap: 2 },
+  form: { flexGrow: 1, flexBasis: 160, borderLeftWidth: line.field, paddingLeft: 12, gap: 2 },
   gain: { flexDirection: 'row', gap: 8 },
   label: { width: 24 },
 });

@@ -7,7 +7,7 @@ import { budgetWords, samplingWords } from '@/components/bench/strip/budget-word
 import { marginNumbers } from '@/components/verdict/margin-numbers';
 import { stripWords } from '@/components/bench/strip/strip-words';
 import type { BenchSubject } from '@/components/bench/subject/bench-subject';
-import { type Loop, PlantContent } from '@/contract';
+import { type Filter, type Loop, PlantContent } from '@/contract';
 
 const units = { frequency: 'rad/s', magnitude: 'dB' } as const;
 const content = PlantContent.parse({
@@ -73,6 +73,19 @@ describe('the delay budget', () => {
   it('says what the dead time costs at the crossover', () => {
     const { loop, analysis } = strip();
     expect(budgetWords(loop, analysis, units)).toEqual({ lead: 'Phase at crossover 2.06 rad/s:', text: 'dead time 9.4°' });
+  });
+
+  // The low-pass turns by −45° where 1/T is the crossover; a lead-lag with the longer zero leads.
+  it('names the sensor and the filters, and calls lead what it is', () => {
+    const { loop, analysis } = strip();
+    const crossover = analysis.margins.phase!.frequency;
+    const filters: Filter[] = [
+      { kind: 'leadLag', zeroTime: 1 / crossover, poleTime: 1e-9 },
+      { kind: 'lowPass', timeConstant: 1 / crossover },
+      { kind: 'lowPass', timeConstant: 1 / crossover },
+    ];
+    const filtered = { ...loop, controller: { ...loop.controller, filters }, sensor: { timeConstant: 1 / crossover, deadTime: 0 } };
+    expect(budgetWords(filtered, analysis, units)?.text).toBe('dead time 9.4°, sensor lag 45.0°, low-pass 90.0°, lead-lag 45.0° lead');
   });
 
   it('says how the loop is sampled', () => {

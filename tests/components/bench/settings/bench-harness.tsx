@@ -1,0 +1,55 @@
+import { render } from '@testing-library/react';
+import type { ReactNode } from 'react';
+import { BenchContext } from '@/components/bench/bench-context';
+import { createDraftStore } from '@/components/bench/draft/draft-store';
+import { type Settings, startSettings } from '@/components/bench/draft/settings';
+import { benchLoop, type BenchQuestion } from '@/components/bench/live/bench-loop';
+import type { LiveAnalyser, LiveAnswer } from '@/components/bench/live/live-analyser';
+import { createLookedAt } from '@/components/bench/live/looked-at';
+import { answerLoop, type LoopAnswer } from '@/components/bench/live/loop-answer';
+import type { BenchSubject } from '@/components/bench/subject/bench-subject';
+import { PlantContent } from '@/contract';
+
+const content = PlantContent.parse({
+  plant: { kind: 'coefficients', numerator: [2.1], denominator: [0.35, 1, 0], deadTime: 0.08 },
+  units: { input: 'kN·m', output: 'm/s' },
+});
+const subject = {
+  plant: { ...content, id: 'plant', name: 'Speed', revision: 1 },
+  shownCase: { id: 'nominal', name: 'nominal', parameters: {} },
+  opened: null,
+} as unknown as BenchSubject;
+
+function answeringAtOnce(): LiveAnalyser<BenchQuestion, LoopAnswer> {
+  const listeners = new Set<() => void>();
+  let answer: LiveAnswer<BenchQuestion, LoopAnswer> | null = null;
+  return {
+    ask(input) {
+      const output = answerLoop(input.loop, 'full');
+      answer = { input, output, complete: output, rested: output, detail: 'full', problem: null };
+      for (const listener of listeners) listener();
+    },
+    get: () => answer!,
+    subscribe(listener) {
+      listeners.add(listener);
+      return () => listeners.delete(listener);
+    },
+    stop: () => listeners.clear(),
+  };
+}
+
+/** A part of the bench over a draft and the engine itself, which answers at once; the store is handed back to look at. */
+export function onTheBench(part: ReactNode, settings: Partial<Settings> = {}) {
+  const latest = { revision: 3, settings: { ...startSettings, ...settings } };
+  const store = createDraftStore({ key: 'draft', latest, storage: null });
+  const analyser = answeringAtOnce();
+  const ask = () => {
+    const now = store.getState().held ?? store.getState().settings;
+    analyser.ask({ settings: now, loop: benchLoop(subject, now, { reference: 1, load: 1 }) });
+  };
+  ask();
+  store.subscribe(ask);
+  const lookedAt = createLookedAt({ parts: 'frequency', end: null });
+  render(<BenchContext.Provider value={{ subject, store, analyser, lookedAt }}>{part}</BenchContext.Provider>);
+  return { store, analyser };
+}
