@@ -1,3 +1,4 @@
+import type { Locator } from 'playwright-core';
 import type { SizeName } from './browser';
 import type { Visitor } from './visitor';
 
@@ -38,6 +39,23 @@ export class BenchPage {
 
   rule(gain: string) {
     return this.page.getByRole('slider', { name: new RegExp(`^${gain},`) }).first();
+  }
+
+  /** Where a gain can be seen by its name: its tile on a phone, its field on a wide screen. */
+  gain(name: string) {
+    return this.size === 'phone'
+      ? this.page.getByRole('radio', { name: new RegExp(`^${name} `) })
+      : this.page.getByRole('textbox', { name: new RegExp(`^${name},`) });
+  }
+
+  /** Opens All settings, does something there, and closes it. */
+  async inSettings(change: (sheet: Locator) => Promise<void>): Promise<void> {
+    await this.visitor.press('All settings');
+    const sheet = this.page.getByRole('dialog', { name: 'All settings' });
+    await sheet.waitFor();
+    await change(sheet);
+    await sheet.getByRole('button', { name: 'Close' }).click();
+    await sheet.waitFor({ state: 'hidden' });
   }
 
   /** Makes one gain the one that rule and nudges move; on a wide screen each has its own. */
