@@ -28,7 +28,7 @@ export interface NotationChoice {
 const placeIn = (form: PlantForm): string => `${form.notation} ${textIn(form, form.notation)}`;
 
 /** Changes between notations, so that each says what the one before said, and what was typed stays. */
-export function useNotation({ form: now, read, write, shown }: FormAccess): NotationChoice {
+export function useNotation({ form: present, read, write, shown }: FormAccess): NotationChoice {
   const client = useQueryClient();
   const [refused, setRefused] = useState<{ reason: string; at: string } | null>(null);
 
@@ -46,14 +46,17 @@ export function useNotation({ form: now, read, write, shown }: FormAccess): Nota
   const choose = async (to: Notation) => {
     const before = read();
     const plant = sayTheSame(before, before.notation, to) ? null : await workedOut(before);
-    const { form, reason: why } = switchNotation(read(), to, plant);
+    const now = read();
+    // Who typed or chose again while the server read the formula meant that.
+    if (placeIn(now) !== placeIn(before)) return;
+    const { form, reason: why } = switchNotation(now, to, plant);
     setRefused(why === null ? null : { reason: why, at: placeIn(form) });
     write(form);
   };
 
   return {
     choose: (to) => void choose(to),
-    reason: refused?.at === placeIn(now) ? refused.reason : null,
+    reason: refused?.at === placeIn(present) ? refused.reason : null,
     bringBack: () => write(bringBack(read())),
   };
 }
