@@ -7,9 +7,9 @@ import type { BenchCommand } from './bench-keys';
 import { BenchScene } from './bench-scene';
 import { useCompared } from './compare/use-compared';
 import type { Gain } from './draft/gain';
+import { nudgeGain } from './draft/move-gain';
 import { redo, undo } from './draft/draft-store';
 import { useDraftStore } from './draft/use-draft-store';
-import { nudgeDraft } from './gains/use-gain';
 import { useKeep } from './keep/use-keep';
 import { mayKeep } from './keep/saved-words';
 import { useBenchAnalysis } from './live/use-bench-analysis';
@@ -46,7 +46,7 @@ export function BenchDesk({ subject, link, onLink }: BenchDeskProps) {
         focusChart(command.sheet);
       } else if (command.kind === 'undo') undo(store);
       else if (command.kind === 'redo') redo(store);
-      else if (command.kind === 'nudge') nudgeDraft(store.getState(), activeGain, command.fraction);
+      else if (command.kind === 'nudge') nudgeGain(store.getState(), activeGain, command.fraction);
       else if (mayKeep(subject.project.role)) keep();
       else announce('Keeping is for editors of this project.');
     },

@@ -31,7 +31,7 @@ export const isTime = (gain: Gain, form: Form): boolean => gain === 'filterTime'
 /** An integral time of 0 would be infinite integral action. */
 export const mustBePositive = (gain: Gain, form: Form): boolean => gain === 'integral' && form !== 'parallel';
 
-const SHORTEST_INTEGRAL_TIME = 1e-6;
+const SHORTEST_INTEGRAL_TIME = 1e-9;
 
 /** The nearest value that the gain can have. */
 export function clampGain(gain: Gain, form: Form, value: number): number {

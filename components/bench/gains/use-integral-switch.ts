@@ -1,8 +1,8 @@
 import { useCallback } from 'react';
 import { useBench, useDraft } from '../bench-context';
 import { current } from '../draft/draft';
+import { keptGain } from '../draft/move-gain';
 import { lastIntegralTime, startIntegralTime } from '../draft/integral-time';
-import { keptGain } from './use-gain';
 
 export interface IntegralSwitch {
   /** false in parallel form, where Ki = 0 says it. */
