@@ -8,7 +8,7 @@ const response = plantResponse({ kind: 'coefficients', numerator: [2.1], denomin
 
 afterEach(cleanup);
 
-function sheet(store = createCursorStore({ frequency: 1, time: null })) {
+function sheet(store = createCursorStore({ frequency: 1 })) {
   render(
     <CursorProvider store={store}>
       <PlantSheet {...response} units={units} height={400} width={400} />
