@@ -71,9 +71,7 @@ export class BenchPage {
   /** Types a gain: into its field on a wide screen, on the keypad of a phone. */
   async type(gain: string, text: string): Promise<void> {
     if (this.size === 'wide') {
-      const field = this.page.getByRole('textbox', { name: new RegExp(`^${gain},`) });
-      await field.fill(text);
-      await field.press('Enter');
+      await this.enter(gain, text);
       return;
     }
     await this.choose(gain);
@@ -82,6 +80,14 @@ export class BenchPage {
     await keypad.waitFor();
     for (const key of text) await keypad.getByRole('button', { name: key === '.' ? 'Decimal point' : key, exact: true }).click();
     await keypad.getByRole('button', { name: `Set ${gain} to ${text}` }).click();
+  }
+
+  /** Writes into a gain's field of a wide screen. Focused first: the field then writes the gain out in full and selects it. */
+  async enter(gain: string, text: string): Promise<void> {
+    const field = this.gain(gain);
+    await field.focus();
+    await field.fill(text);
+    await field.press('Enter');
   }
 
   keep() {
