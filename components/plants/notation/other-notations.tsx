@@ -14,7 +14,7 @@ function said(plant: ReadablePlant): Readonly<Record<Notation, string>> | null {
   if (!read || runs.kind === 'formula') return null;
   const { numerator, denominator, poles, zeros, gain, deadTime } = read;
   const delay = deadTime > 0 ? `, dead time ${coefficientText(deadTime)} s` : '';
-  const listed = (roots: typeof poles) => (roots.length === 0 ? 'none' : `${rootsText(roots)} rad/s`);
+  const listed = (roots: typeof poles) => (roots.length === 0 ? 'none' : `${rootsText(roots)} 1/s`);
   return {
     coefficients: `${polynomialText(numerator)} over ${polynomialText(denominator)}${delay}`,
     roots: `${listed(poles)}. Zeros ${listed(zeros)}. Gain ${coefficientText(gain)}${delay}`,
