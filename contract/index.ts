@@ -6,6 +6,8 @@ export * from './controller';
 export * from './loop';
 export * from './analysis';
 export * from './account';
+export * from './permissions';
+export * from './member';
 export * from './project';
 export * from './case';
 export * from './plant';
