@@ -1,25 +1,23 @@
 import { z } from 'zod';
 import { Analysis } from './analysis';
-import { CaseAxes, CaseParameters } from './case';
+import { CaseAxes, CaseBasis, CaseParameters, mostCases } from './case';
 import { Id, Quantity, Revision, Timestamp, Verdict } from './common';
 import { Controller } from './controller';
+import { Limit } from './limits';
 import { Actuator, Sampling } from './loop';
 import { KeptPlant } from './plant';
-import { Headline } from './project';
+import { OperatingRange } from './operating-range';
+import { CaseRef, Headline } from './headline';
+import { Room } from './room';
 
 /** A frozen result: this design revision over these cases against these limits, by this engine. */
-
-export const Limit = z
-  .object({ quantity: Quantity, bound: z.enum(['min', 'max']), limit: z.number(), target: z.number().nullable(), source: z.string() })
-  .meta({ id: 'Limit' });
-export type Limit = z.infer<typeof Limit>;
 
 export const Check = z
   .object({
     quantity: Quantity,
     bound: z.enum(['min', 'max']),
     limit: z.number(),
-    target: z.number().nullable(),
+    target: z.number().nullable().meta({ description: 'the target judged against, the default where none was named; null: none' }),
     value: z.number().nullable(),
     use: z.number().nullable(),
     verdict: Verdict,
@@ -30,31 +28,36 @@ export type Check = z.infer<typeof Check>;
 export const FrozenCase = z.object({
   id: Id,
   name: z.string(),
-  plant: KeptPlant.extend({ id: Id, name: z.string(), revision: z.int() }),
+  plant: KeptPlant.extend({ id: Id, name: z.string(), revision: z.int() }).meta({
+    description: 'with the case’s own values of a formula’s parameters, and what the formula reads as with them',
+  }),
   parameters: CaseParameters,
   axes: CaseAxes,
+  basis: CaseBasis,
 });
 export type FrozenCase = z.infer<typeof FrozenCase>;
 
-export const FrozenInputs = z
-  .object({
-    design: z.object({
-      id: Id,
-      name: z.string(),
-      revision: z.int(),
-      controller: Controller,
-      sampling: z.union([Sampling, z.literal('continuous')]).nullable(),
-      actuator: Actuator.nullable(),
-    }),
-    cases: z.array(FrozenCase),
-    limits: z.array(Limit),
-  })
-  .meta({ id: 'FrozenInputs' });
+/** What every design of the project is judged against, as it stands now or stood when it was frozen. */
+export const Conditions = z
+  .object({ cases: z.array(FrozenCase), limits: z.array(Limit), operatingRange: z.array(OperatingRange) })
+  .meta({ id: 'Conditions' });
+export type Conditions = z.infer<typeof Conditions>;
+
+export const FrozenInputs = Conditions.extend({
+  design: z.object({
+    id: Id,
+    name: z.string(),
+    revision: z.int(),
+    controller: Controller,
+    sampling: z.union([Sampling, z.literal('continuous')]).nullable(),
+    actuator: Actuator.nullable(),
+  }),
+}).meta({ id: 'FrozenInputs' });
 export type FrozenInputs = z.infer<typeof FrozenInputs>;
 
 export const CaseResult = z
   .object({
-    case: z.object({ id: Id, name: z.string() }),
+    case: CaseRef,
     verdict: Verdict,
     reason: z.string().nullable().meta({ description: 'why it is not judged' }),
     checks: z.array(Check),
@@ -74,7 +77,7 @@ export const AnalysisSummary = z
     createdBy: z.string(),
     verdict: Verdict,
     headline: Headline,
-    room: z.null().meta({ description: 'null while no limits are demanded' }),
+    room: Room.nullable().meta({ description: 'null in an analysis that was kept without it' }),
     caseCount: z.int(),
     plants: z.array(z.object({ id: Id, name: z.string(), revision: z.int() })),
   })
@@ -85,7 +88,7 @@ export const KeptAnalysis = AnalysisSummary.extend({ inputs: FrozenInputs, resul
 export type KeptAnalysis = z.infer<typeof KeptAnalysis>;
 
 export const CreateAnalysis = z
-  .strictObject({ designId: Id, designRevision: Revision.optional(), caseIds: z.array(Id).min(1).max(400).optional() })
+  .strictObject({ designId: Id, designRevision: Revision.optional(), caseIds: z.array(Id).min(1).max(mostCases).optional() })
   .meta({ id: 'CreateAnalysis' });
 export type CreateAnalysis = z.infer<typeof CreateAnalysis>;
 

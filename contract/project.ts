@@ -1,21 +1,7 @@
 import { z } from 'zod';
-import { Id, Name, Note, ONE_LINE, Quantity, Role, Timestamp, Verdict } from './common';
-
-/** The number that stands first: the worst over the cases of the newest analysis. */
-export const Headline = z
-  .object({
-    quantity: Quantity,
-    value: z.number().nullable(),
-    verdict: Verdict,
-    case: z.object({ id: Id, name: z.string() }).nullable(),
-    frequency: z.number().nullable(),
-    limit: z.number().nullable(),
-    use: z.number().nullable(),
-    unstableCases: z.int().meta({ description: 'cases whose closed loop is not stable' }),
-    reason: z.string().nullable().meta({ description: 'why it is not judged' }),
-  })
-  .meta({ id: 'Headline' });
-export type Headline = z.infer<typeof Headline>;
+import { Id, Name, Note, ONE_LINE, Role, Timestamp } from './common';
+import { Headline } from './headline';
+import { OperatingRange, OperatingRanges } from './operating-range';
 
 const Description = Note;
 const Vehicle = z.string().trim().max(120, 'At most 120 characters.').regex(ONE_LINE, 'One line of text, without control characters.');
@@ -31,9 +17,10 @@ export const UpdateProject = z
     vehicle: Vehicle.optional(),
     description: Description.optional(),
     archived: z.boolean().optional(),
+    operatingRange: OperatingRanges.optional().meta({ description: 'replaced whole' }),
   })
   .meta({ id: 'UpdateProject' });
-export type UpdateProject = z.infer<typeof UpdateProject>;
+export type UpdateProject = z.input<typeof UpdateProject>;
 
 export const DeleteProject = z.strictObject({ confirmName: z.string() });
 
@@ -44,6 +31,7 @@ export const Project = z
     vehicle: z.string(),
     description: z.string(),
     archived: z.boolean(),
+    operatingRange: z.array(OperatingRange),
     role: Role,
     team: z.object({ id: Id, name: z.string() }),
     createdAt: Timestamp,
