@@ -2,6 +2,7 @@
 export * from './schema/account';
 export * from './schema/team';
 export * from './schema/project';
+export * from './schema/invitation';
 export * from './schema/plant';
 export * from './schema/design';
 export * from './schema/case';

@@ -23,6 +23,7 @@ export const project = sqliteTable(
   (table) => [index('project_team').on(table.teamId)],
 );
 
+/** Someone's seat. `version` counts changes of role and is the ETag. */
 export const projectMember = sqliteTable(
   'project_member',
   {
@@ -33,6 +34,7 @@ export const projectMember = sqliteTable(
       .notNull()
       .references(() => user.id, { onDelete: 'cascade' }),
     role: text({ enum: ['owner', 'editor', 'reviewer', 'viewer'] }).notNull(),
+    version: integer().notNull().default(1),
     createdAt: time().notNull(),
   },
   (table) => [
