@@ -26,6 +26,8 @@ async function atTheBench(size: SizeName) {
   const bench = new BenchPage(visitor, size);
   const project = await visitor.firstProjectId();
   await bench.open(project);
+  // The design beside it comes a moment later, and every chart's description names it.
+  await bench.chart(/Beside it, dashed/).waitFor({ state: 'attached' });
   return { page, context, visitor, bench, project };
 }
 
@@ -38,7 +40,7 @@ describe.each(Object.keys(sizes) as SizeName[])('a controller at the %s size', (
       await bench.inSettings((sheet) => sheet.getByRole('radio', { name: form }).click());
       await bench.gain('Td').waitFor();
       await expect.poll(() => bench.strip()).toBe(parallel);
-      expect(await bench.descriptions()).toEqual(charts);
+      await expect.poll(() => bench.descriptions()).toEqual(charts);
     }
     await context.close();
   });
