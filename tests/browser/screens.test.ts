@@ -35,6 +35,7 @@ const inside = (project: string, analysis: string) => ({
 async function faults(page: Page): Promise<string[]> {
   const light = await axeFindings(page);
   await page.emulateMedia({ colorScheme: 'dark' });
+  await page.locator('html[data-theme=dark]').waitFor({ state: 'attached' });
   const dark = await axeFindings(page, 'colours');
   await page.emulateMedia({ colorScheme: 'light' });
   const over = await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
