@@ -52,10 +52,12 @@ export function formatGain(value: number): string {
   return text.replace(/(\.\d\d\d*?)0+$/, '$1');
 }
 
-/** A frequency in the reader's unit, without it: two decimals, under 0.1 three significant figures. */
+/** A frequency in the reader's unit, without it: two decimals, under 0.1 three significant figures, from 1,000 on five. */
 export function formatFrequency(radiansPerSecond: number, unit: FrequencyUnit): string {
   const value = frequencyIn(unit, radiansPerSecond);
-  return formatNumber(value, Math.abs(value) < 0.1 ? Math.max(2, decimalsFor(value, 3)) : 2);
+  const size = Math.abs(value);
+  if (size >= 1000) return formatNumber(value, decimalsFor(value, 5));
+  return formatNumber(value, size < 0.1 ? Math.max(2, decimalsFor(value, 3)) : 2);
 }
 
 /** |L| and gain margins: decibels to one decimal, factors to two. A factor under 0.1 keeps three significant figures. */

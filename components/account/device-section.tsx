@@ -1,6 +1,6 @@
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
-import { Dialog, DialogActions } from '@/components/ui/dialog';
+import { Dialog, DialogDecision } from '@/components/ui/dialog';
 import { Heading, Text } from '@/components/ui/text';
 import { draftCount, forgetDrafts } from '@/hooks/device-store';
 import { SettingRow } from './setting-row';
@@ -23,10 +23,7 @@ export function DeviceSection() {
       </SettingRow>
       <Dialog open={asking} title={`Throw away ${count.replace(' not kept', '')}?`} onClose={() => setAsking(false)}>
         <Text tone="ink2">What was typed and never kept is gone from this device afterwards.</Text>
-        <DialogActions>
-          <Button label="Not yet" onPress={() => setAsking(false)} />
-          <Button kind="primary" label="Throw away" onPress={forget} />
-        </DialogActions>
+        <DialogDecision label="Throw away" onDecide={forget} onClose={() => setAsking(false)} />
       </Dialog>
     </>
   );

@@ -1,7 +1,6 @@
 import { useForm } from 'react-hook-form';
-import { Button } from '@/components/ui/button';
 import { contractResolver } from '@/components/forms/contract-resolver';
-import { Dialog, DialogActions } from '@/components/ui/dialog';
+import { Dialog, DialogDecision } from '@/components/ui/dialog';
 import { Form } from '@/components/ui/form';
 import { FormField } from '@/components/ui/form-field';
 import { sentence } from '@/hooks/api/problem';
@@ -39,10 +38,7 @@ function NameForm({ onClose }: { onClose: () => void }) {
         autoCapitalize="words"
         onSubmitEditing={submit}
       />
-      <DialogActions>
-        <Button label="Not yet" onPress={onClose} />
-        <Button kind="primary" label="Change the name" busy={update.isPending} onPress={submit} />
-      </DialogActions>
+      <DialogDecision label="Change the name" busy={update.isPending} onDecide={submit} onClose={onClose} />
     </Form>
   );
 }

@@ -1,7 +1,6 @@
 import { useForm } from 'react-hook-form';
-import { Button } from '@/components/ui/button';
 import { contractResolver } from '@/components/forms/contract-resolver';
-import { Dialog, DialogActions } from '@/components/ui/dialog';
+import { Dialog, DialogDecision } from '@/components/ui/dialog';
 import { Form } from '@/components/ui/form';
 import { FormField } from '@/components/ui/form-field';
 import { sentence } from '@/hooks/api/problem';
@@ -47,10 +46,7 @@ function PasswordForm({ onClose, onChanged }: Omit<PasswordDialogProps, 'open'>)
         autoComplete="new-password"
         onSubmitEditing={submit}
       />
-      <DialogActions>
-        <Button label="Not yet" onPress={onClose} />
-        <Button kind="primary" label="Change the password" busy={change.isPending} onPress={submit} />
-      </DialogActions>
+      <DialogDecision label="Change the password" busy={change.isPending} onDecide={submit} onClose={onClose} />
     </Form>
   );
 }

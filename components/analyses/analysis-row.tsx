@@ -1,6 +1,7 @@
 import { StyleSheet, View } from 'react-native';
 import { NavLink } from '@/components/navigation/nav-link';
 import { analysisPath } from '@/components/navigation/routes';
+import { ColumnHeads } from '@/components/ui/column-heads';
 import { moment } from '@/components/ui/moment';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
@@ -74,39 +75,22 @@ export function AnalysisRow({ projectId, analysis }: { projectId: string; analys
 }
 
 /** The names of the columns, over the rows of a wide list. */
-export function AnalysisColumns() {
-  const { colors } = useTheme();
-  const columns = [
-    ['design', styles.design],
-    ['verdict', styles.verdict],
-    ['worst over its cases', styles.number],
-    ['case', styles.case],
-    ['computed over', styles.over],
-    ['when, by', styles.when],
-  ] as const;
-  return (
-    <View style={[styles.head, { backgroundColor: colors.paper, borderBottomColor: colors.ink }]}>
-      {columns.map(([name, style]) => (
-        <Text key={name} step="small" tone="ink3" style={style}>
-          {name}
-        </Text>
-      ))}
-    </View>
-  );
-}
+export const AnalysisColumns = () => <ColumnHeads gap={COLUMN_GAP} columns={columns} />;
+
+/** Between the columns of a wide row, px. */
+const COLUMN_GAP = 14;
 
 const styles = StyleSheet.create({
   wide: {
     flexDirection: 'row',
     alignItems: 'center',
-    gap: 14,
+    gap: COLUMN_GAP,
     minHeight: 62,
     paddingHorizontal: gutter.wide,
     paddingVertical: 8,
     borderBottomWidth: 1,
   },
   phone: { flexDirection: 'row', gap: 12, alignItems: 'center', padding: gutter.phone, borderBottomWidth: 1 },
-  head: { flexDirection: 'row', alignItems: 'center', gap: 14, height: 40, paddingHorizontal: gutter.wide, borderBottomWidth: 1.5 },
   grow: { flex: 1, gap: 1 },
   right: { alignItems: 'flex-end', gap: 4 },
   design: { flex: 4 },
@@ -116,3 +100,12 @@ const styles = StyleSheet.create({
   over: { flex: 5 },
   when: { flex: 3, gap: 1 },
 });
+
+const columns = [
+  ['design', styles.design],
+  ['verdict', styles.verdict],
+  ['worst over its cases', styles.number],
+  ['case', styles.case],
+  ['computed over', styles.over],
+  ['when, by', styles.when],
+] as const;

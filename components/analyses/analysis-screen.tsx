@@ -11,6 +11,7 @@ import { moment } from '@/components/ui/moment';
 import { Page } from '@/components/ui/page';
 import { Paper } from '@/components/ui/paper';
 import { QueryView } from '@/components/ui/query-view';
+import { Heading, Text } from '@/components/ui/text';
 import { useLayout } from '@/components/ui/use-layout';
 import { VerdictStrip } from '@/components/verdict/verdict-strip';
 import type { KeptAnalysis } from '@/contract';
@@ -61,16 +62,21 @@ function AnalysisPage({ analysis, caseId, onCase, children }: AnalysisPageProps)
     current: one === result,
     onSelect: () => onCase(one.case.id),
   }));
+  const computed = `computed ${moment(analysis.createdAt, new Date(), true)} by ${analysis.createdBy}, engine ${analysis.engineVersion}`;
   const column = phone ? styles.stackColumn : styles.column;
   return (
-    <Page
-      title={title}
-      sub={`computed ${moment(analysis.createdAt, new Date(), true)} by ${analysis.createdBy}, engine ${analysis.engineVersion}`}
-      actions={bench}
-    >
+    <Page title={title} sub={computed} actions={bench}>
       <DocumentTitle parts={[title, 'Analyses', project.name]} />
       <VerdictStrip headline={analysis.headline} caseCount={analysis.results.length} numbers={worst.numbers} />
-      {phone ? <Paper>{bench}</Paper> : null}
+      {phone ? (
+        <Paper>
+          <Heading level={2}>{title}</Heading>
+          <Text step="note" tone="ink2">
+            {computed}
+          </Text>
+          {bench}
+        </Paper>
+      ) : null}
       {cases.length > 1 ? <Menu label={`Curves show ${result.case.name}`} kind="quiet" items={cases} /> : null}
       {result.numbers.warnings.map(({ code, message }) => (
         <Banner key={code} text={message} />

@@ -1,7 +1,6 @@
 import { useForm } from 'react-hook-form';
 import { contractResolver } from '@/components/forms/contract-resolver';
-import { Button } from '@/components/ui/button';
-import { DialogActions } from '@/components/ui/dialog';
+import { DialogDecision } from '@/components/ui/dialog';
 import { Form } from '@/components/ui/form';
 import { FormField } from '@/components/ui/form-field';
 import { sentence } from '@/hooks/api/problem';
@@ -22,10 +21,7 @@ export function AboutForm({ project, onClose }: { project: ReadProject; onClose:
       <FormField control={control} name="name" label="Name of the loop" autoFocus onSubmitEditing={submit} />
       <FormField control={control} name="vehicle" label="Car" hint="May be left empty." onSubmitEditing={submit} />
       <FormField control={control} name="description" label="What it is for" hint="May be left empty." onSubmitEditing={submit} />
-      <DialogActions>
-        <Button label="Not yet" onPress={onClose} />
-        <Button kind="primary" label="Change" busyLabel="Changing it" busy={update.isPending} onPress={submit} />
-      </DialogActions>
+      <DialogDecision label="Change" busyLabel="Changing it" busy={update.isPending} onDecide={submit} onClose={onClose} />
     </Form>
   );
 }

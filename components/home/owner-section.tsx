@@ -3,7 +3,7 @@ import { useState } from 'react';
 import { View } from 'react-native';
 import { useProject } from '@/components/navigation/project-context';
 import { Button } from '@/components/ui/button';
-import { Dialog, DialogActions } from '@/components/ui/dialog';
+import { Dialog, DialogDecision } from '@/components/ui/dialog';
 import { Field } from '@/components/ui/field';
 import { Form } from '@/components/ui/form';
 import { Heading, Text } from '@/components/ui/text';
@@ -61,10 +61,7 @@ function DeleteForm({ project, onClose }: { project: ReadProject; onClose: () =>
         autoFocus
         onSubmitEditing={submit}
       />
-      <DialogActions>
-        <Button label="Not yet" onPress={onClose} />
-        <Button kind="primary" label="Delete it" busyLabel="Deleting" busy={remove.isPending} onPress={submit} />
-      </DialogActions>
+      <DialogDecision label="Delete it" busyLabel="Deleting" busy={remove.isPending} onDecide={submit} onClose={onClose} />
     </Form>
   );
 }

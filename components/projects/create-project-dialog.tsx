@@ -1,9 +1,8 @@
 import { useRouter } from 'expo-router';
 import { useForm } from 'react-hook-form';
 import { projectPath } from '@/components/navigation/routes';
-import { Button } from '@/components/ui/button';
 import { contractResolver } from '@/components/forms/contract-resolver';
-import { Dialog, DialogActions } from '@/components/ui/dialog';
+import { Dialog, DialogDecision } from '@/components/ui/dialog';
 import { Form } from '@/components/ui/form';
 import { FormField } from '@/components/ui/form-field';
 import { sentence } from '@/hooks/api/problem';
@@ -46,10 +45,7 @@ function CreateProjectForm({ onClose }: { onClose: () => void }) {
       />
       <FormField control={control} name="vehicle" label="Car" hint="May be left empty." onSubmitEditing={submit} />
       <FormField control={control} name="description" label="What it is for" hint="May be left empty." onSubmitEditing={submit} />
-      <DialogActions>
-        <Button label="Not yet" onPress={onClose} />
-        <Button kind="primary" label="Make the project" busyLabel="Making it" busy={create.isPending} onPress={submit} />
-      </DialogActions>
+      <DialogDecision label="Make the project" busyLabel="Making it" busy={create.isPending} onDecide={submit} onClose={onClose} />
     </Form>
   );
 }

@@ -1,6 +1,7 @@
 import { StyleSheet, View } from 'react-native';
 import { NavLink } from '@/components/navigation/nav-link';
 import { projectPath } from '@/components/navigation/routes';
+import { ColumnHeads } from '@/components/ui/column-heads';
 import { moment } from '@/components/ui/moment';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
@@ -42,33 +43,25 @@ export function ProjectRow({ project }: { project: Project }) {
 }
 
 /** The names of the columns, over the rows of a wide list. */
-export function ProjectColumns() {
-  const { colors } = useTheme();
-  const columns = [
-    ['project, car', styles.name],
-    ['worst margin over all cases', styles.margin],
-    ['kept last', styles.kept],
-    ['next step', styles.next],
-  ] as const;
-  return (
-    <View style={[styles.head, { backgroundColor: colors.paper, borderBottomColor: colors.ink }]}>
-      {columns.map(([name, style]) => (
-        <Text key={name} step="small" tone="ink3" style={style}>
-          {name}
-        </Text>
-      ))}
-    </View>
-  );
-}
+export const ProjectColumns = () => <ColumnHeads gap={COLUMN_GAP} columns={columns} />;
+
+/** Between the columns of a wide row, px. */
+const COLUMN_GAP = 20;
 
 const styles = StyleSheet.create({
   row: { borderBottomWidth: 1 },
-  wide: { flexDirection: 'row', alignItems: 'center', gap: 20, minHeight: 88, paddingHorizontal: gutter.wide, paddingVertical: 14 },
+  wide: { flexDirection: 'row', alignItems: 'center', gap: COLUMN_GAP, minHeight: 88, paddingHorizontal: gutter.wide, paddingVertical: 14 },
   phone: { paddingHorizontal: 14, paddingVertical: 14, gap: 6 },
   phoneName: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'baseline', columnGap: 8 },
-  head: { flexDirection: 'row', alignItems: 'center', gap: 20, height: 40, paddingHorizontal: gutter.wide, borderBottomWidth: 1.5 },
   name: { flex: 5 },
   margin: { flex: 9 },
   kept: { flex: 5 },
   next: { flex: 5 },
 });
+
+const columns = [
+  ['project, car', styles.name],
+  ['worst margin over all cases', styles.margin],
+  ['kept last', styles.kept],
+  ['next step', styles.next],
+] as const;

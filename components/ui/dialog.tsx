@@ -1,5 +1,6 @@
 import type { PropsWithChildren } from 'react';
 import { StyleSheet, View } from 'react-native';
+import { Button } from './button';
 import { ModalFrame } from './modal-frame';
 import { Heading } from './text';
 import { useTheme } from './theme';
@@ -24,9 +25,23 @@ export function Dialog({ open, title, onClose, children }: PropsWithChildren<Dia
   );
 }
 
-/** The buttons at a dialog's foot, the decision last. */
-export function DialogActions({ children }: PropsWithChildren) {
-  return <View style={styles.actions}>{children}</View>;
+export interface DialogDecisionProps {
+  /** What is decided, as a command: "Change the name". */
+  label: string;
+  busyLabel?: string;
+  busy?: boolean;
+  onDecide: () => void;
+  onClose: () => void;
+}
+
+/** The two buttons at a dialog's foot, the decision last. */
+export function DialogDecision({ onDecide, onClose, ...decision }: DialogDecisionProps) {
+  return (
+    <View style={styles.actions}>
+      <Button label="Not yet" onPress={onClose} />
+      <Button kind="primary" onPress={onDecide} {...decision} />
+    </View>
+  );
 }
 
 const styles = StyleSheet.create({

@@ -54,6 +54,8 @@ describe('gains and frequencies', () => {
     expect(formatFrequency(4.836, 'rad/s')).toBe('4.84');
     expect(formatFrequency(0.0192, 'rad/s')).toBe('0.0192');
     expect(formatFrequency(2 * Math.PI, 'Hz')).toBe('1.00');
+    expect(formatFrequency(1234.56, 'rad/s')).toBe('1,234.6');
+    expect(formatFrequency(600_000, 'rad/s')).toBe('600,000');
   });
 
   it('|L| is decibels to one decimal or a factor to two', () => {
