@@ -1,5 +1,4 @@
 import { memo } from 'react';
-import { Line, Text, TSpan } from 'react-native-svg';
 import { fonts } from '@/components/ui/tokens';
 import { useTheme } from '@/components/ui/theme';
 import { type LabelTone, type PanelLabel, textWidth } from '@/figures';
@@ -39,14 +38,14 @@ export const ChartText = memo(function ChartText({ x, y, children, unit, tone = 
   const { color, weight, size = 13 } = tones[tone];
   const rim = halo ? { stroke: colors.paper, strokeWidth: 4, strokeLinejoin: 'round' as const, paintOrder: 'stroke' } : {};
   return (
-    <Text x={x} y={y} fill={colors[color]} fontFamily={fonts.narrow[weight]} fontSize={size} textAnchor={anchor} {...rim}>
+    <text x={x} y={y} fill={colors[color]} fontFamily={fonts.narrow[weight]} fontSize={size} textAnchor={anchor} {...rim}>
       {children}
       {unit === undefined ? null : (
-        <TSpan dx={7} fill={colors.ink3} fontFamily={fonts.narrow[500]}>
+        <tspan dx={7} fill={colors.ink3} fontFamily={fonts.narrow[500]}>
           {unit}
-        </TSpan>
+        </tspan>
       )}
-    </Text>
+    </text>
   );
 });
 
@@ -57,7 +56,7 @@ function StrikeThrough({ label: { lines, place } }: { label: PanelLabel }) {
   const { colors } = useTheme();
   const width = textWidth(lines[0]);
   const left = place.x - { start: 0, middle: width / 2, end: width }[place.anchor];
-  return <Line x1={left - 2} x2={left + width + 2} y1={place.y - 4.5} y2={place.y - 4.5} stroke={colors.ink3} strokeWidth={1.5} />;
+  return <line x1={left - 2} x2={left + width + 2} y1={place.y - 4.5} y2={place.y - 4.5} stroke={colors.ink3} strokeWidth={1.5} />;
 }
 
 /** A placed label, line under line. Of a number without meaning only the number is struck out. */

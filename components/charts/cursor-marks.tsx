@@ -1,4 +1,3 @@
-import { Circle, G, Line, Rect } from 'react-native-svg';
 import { useTheme } from '@/components/ui/theme';
 import { clamp, contains, type Interval, type Point, type Rect as Plot, textWidth } from '@/figures';
 import { ChartText } from './chart-text';
@@ -6,14 +5,14 @@ import { ChartText } from './chart-text';
 /** The open disc of the cursor on a curve of A or B. */
 export function CursorDisc({ at, design, radius = 4 }: { at: Point; design: 'a' | 'b'; radius?: number }) {
   const { colors } = useTheme();
-  return <Circle cx={at.x} cy={at.y} r={radius} fill={colors.paper} stroke={design === 'a' ? colors.ink : colors.b} strokeWidth={2} />;
+  return <circle cx={at.x} cy={at.y} r={radius} fill={colors.paper} stroke={design === 'a' ? colors.ink : colors.b} strokeWidth={2} />;
 }
 
 /** The dotted line of the cursor through the panels of a stack. */
 export function CursorLine({ x, plots }: { x: number; plots: readonly Plot[] }) {
   const { colors } = useTheme();
   return plots.map(({ y, height }) => (
-    <Line key={y} x1={x} x2={x} y1={y} y2={y + height} stroke={colors.ink} strokeWidth={1} strokeDasharray={[1, 3]} strokeLinecap="round" />
+    <line key={y} x1={x} x2={x} y1={y} y2={y + height} stroke={colors.ink} strokeWidth={1} strokeDasharray="1 3" strokeLinecap="round" />
   ));
 }
 
@@ -23,12 +22,12 @@ export function CursorFlag({ x, y, text, pixels }: { x: number; y: number; text:
   const half = Math.max(20, textWidth(text) / 2 + 6);
   const middle = clamp(x, pixels[0] + half - 24, pixels[1] - half + 10);
   return (
-    <G>
-      <Rect x={middle - half} y={y + 7} width={2 * half} height={18} rx={2} fill={colors.ink} />
+    <g>
+      <rect x={middle - half} y={y + 7} width={2 * half} height={18} rx={2} fill={colors.ink} />
       <ChartText x={middle} y={y + 20.5} tone="flag" anchor="middle">
         {text}
       </ChartText>
-    </G>
+    </g>
   );
 }
 
@@ -36,13 +35,13 @@ export function CursorFlag({ x, y, text, pixels }: { x: number; y: number; text:
 export function CursorDiscs({ a, b, plot }: { a: readonly Point[]; b: readonly Point[]; plot: Plot }) {
   const seen = (points: readonly Point[]) => points.filter((point) => contains(plot, point, -1));
   return (
-    <G>
+    <g>
       {seen(b).map((at, i) => (
         <CursorDisc key={i} at={at} design="b" />
       ))}
       {seen(a).map((at, i) => (
         <CursorDisc key={i} at={at} design="a" />
       ))}
-    </G>
+    </g>
   );
 }

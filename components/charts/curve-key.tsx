@@ -1,6 +1,5 @@
 import { memo } from 'react';
 import { View } from 'react-native';
-import Svg, { Path } from 'react-native-svg';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
 
@@ -9,11 +8,11 @@ const LENGTH = 28;
 /** A piece of A's or B's line, to name it by. */
 export function CurveSwatch({ design }: { design: 'a' | 'b' }) {
   const { colors } = useTheme();
-  const pen = design === 'a' ? { stroke: colors.ink, strokeWidth: 2.25 } : { stroke: colors.b, strokeWidth: 2, strokeDasharray: [7, 4] };
+  const pen = design === 'a' ? { stroke: colors.ink, strokeWidth: 2.25 } : { stroke: colors.b, strokeWidth: 2, strokeDasharray: '7 4' };
   return (
-    <Svg width={LENGTH} height={8} aria-hidden>
-      <Path d={`M0 4H${LENGTH}`} fill="none" {...pen} />
-    </Svg>
+    <svg width={LENGTH} height={8} aria-hidden>
+      <path d={`M0 4H${LENGTH}`} fill="none" {...pen} />
+    </svg>
   );
 }
 

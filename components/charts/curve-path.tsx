@@ -1,5 +1,4 @@
 import { memo } from 'react';
-import { Path } from 'react-native-svg';
 import { useTheme } from '@/components/ui/theme';
 
 export type CurveKind = 'a' | 'b' | 'secondA' | 'secondB' | 'others';
@@ -12,10 +11,10 @@ export const CurvePath = memo(function CurvePath({ d, kind }: { d: string; kind:
   if (d === '') return null;
   const pens = {
     a: { stroke: colors.ink, strokeWidth: 2.25 },
-    b: { stroke: colors.b, strokeWidth: 2, strokeDasharray: [7, 4] },
+    b: { stroke: colors.b, strokeWidth: 2, strokeDasharray: '7 4' },
     secondA: { stroke: colors.ink, strokeWidth: 1.5 },
-    secondB: { stroke: colors.b, strokeWidth: 1.5, strokeDasharray: [3.5, 3] },
+    secondB: { stroke: colors.b, strokeWidth: 1.5, strokeDasharray: '3.5 3' },
     others: { stroke: colors.ink3, strokeWidth: 0.75, strokeOpacity: OTHERS_OPACITY },
   };
-  return <Path d={d} fill="none" strokeLinejoin="round" strokeLinecap={kind === 'a' ? 'round' : 'butt'} {...pens[kind]} />;
+  return <path d={d} fill="none" strokeLinejoin="round" strokeLinecap={kind === 'a' ? 'round' : 'butt'} {...pens[kind]} />;
 });

@@ -1,6 +1,5 @@
 import { memo, useMemo } from 'react';
 import { View } from 'react-native';
-import Svg, { G, Path } from 'react-native-svg';
 import { useTheme } from '@/components/ui/theme';
 import { edgeRuler, type EdgeRulerShape, round2, textWidth } from '@/figures';
 import { ChartText } from './chart-text';
@@ -28,16 +27,16 @@ function Line({ shape: { baseline, target, limit, hasTarget } }: { shape: EdgeRu
   const { colors } = useTheme();
   const { y, from, to } = baseline;
   return (
-    <G>
-      <Path d={`M${from} ${y}H${round2(to)}`} stroke={colors.rule2} strokeWidth={1} />
+    <g>
+      <path d={`M${from} ${y}H${round2(to)}`} stroke={colors.rule2} strokeWidth={1} />
       {hasTarget ? (
         <>
-          <Path d={`M${round2(target)} ${y}H${round2(limit)}`} stroke={colors.tight} strokeWidth={3} />
-          <Path d={`M${round2(target)} ${y - 9}V${y + 6}`} stroke={colors.tight} strokeWidth={1.5} />
+          <path d={`M${round2(target)} ${y}H${round2(limit)}`} stroke={colors.tight} strokeWidth={3} />
+          <path d={`M${round2(target)} ${y - 9}V${y + 6}`} stroke={colors.tight} strokeWidth={1.5} />
         </>
       ) : null}
-      <Path d={`M${round2(limit)} ${y - 9}V${y + 8}`} stroke={colors.kerb} strokeWidth={1.5} />
-    </G>
+      <path d={`M${round2(limit)} ${y - 9}V${y + 8}`} stroke={colors.kerb} strokeWidth={1.5} />
+    </g>
   );
 }
 
@@ -46,18 +45,18 @@ function Cases({ shape: { baseline, ticks, needle, ghost, offLeft, offRight }, w
   const { y } = baseline;
   const marks = ticks.map((x) => `M${round2(x)} ${y - 8}v8`).join('');
   return (
-    <G>
-      <Path d={marks} stroke={colors.ink2} strokeWidth={1} strokeOpacity={0.75} />
-      {offLeft ? <Path d={`M9 ${y - 5}L3 ${y}l6 5`} fill="none" stroke={colors.ink2} strokeWidth={1.5} /> : null}
-      {offRight ? <Path d={`M${width - 7} ${y - 6}l6 6.5l-6 6.5z`} fill={colors.fail} /> : null}
-      {ghost === null ? null : <Path d={`M${round2(ghost)} ${y}v-12`} stroke={colors.b} strokeWidth={2} strokeDasharray={[3, 2]} />}
+    <g>
+      <path d={marks} stroke={colors.ink2} strokeWidth={1} strokeOpacity={0.75} />
+      {offLeft ? <path d={`M9 ${y - 5}L3 ${y}l6 5`} fill="none" stroke={colors.ink2} strokeWidth={1.5} /> : null}
+      {offRight ? <path d={`M${width - 7} ${y - 6}l6 6.5l-6 6.5z`} fill={colors.fail} /> : null}
+      {ghost === null ? null : <path d={`M${round2(ghost)} ${y}v-12`} stroke={colors.b} strokeWidth={2} strokeDasharray="3 2" />}
       {needle === null ? null : (
         <>
-          <Path d={`M${round2(needle)} ${y}v-12`} stroke={colors.ink} strokeWidth={2.5} />
-          <Path d={`M${round2(needle - 5)} ${y - 19}h10l-5 8z`} fill={colors.ink} />
+          <path d={`M${round2(needle)} ${y}v-12`} stroke={colors.ink} strokeWidth={2.5} />
+          <path d={`M${round2(needle - 5)} ${y - 19}h10l-5 8z`} fill={colors.ink} />
         </>
       )}
-    </G>
+    </g>
   );
 }
 
@@ -76,7 +75,7 @@ export const EdgeRuler = memo(function EdgeRuler({ uses, worst, hasTarget, label
   return (
     <View role="img" aria-label={label} onLayout={onLayout} style={{ height }}>
       {width > 0 ? (
-        <Svg width={width} height={height} aria-hidden>
+        <svg width={width} height={height} aria-hidden>
           <KerbStripe kerb={shape.kerb} />
           <Line shape={shape} />
           <Cases shape={shape} width={width} />
@@ -95,7 +94,7 @@ export const EdgeRuler = memo(function EdgeRuler({ uses, worst, hasTarget, label
               {ghost.name}
             </ChartText>
           )}
-        </Svg>
+        </svg>
       ) : null}
     </View>
   );

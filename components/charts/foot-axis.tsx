@@ -1,5 +1,4 @@
 import { memo } from 'react';
-import { G, Path } from 'react-native-svg';
 import { useTheme } from '@/components/ui/theme';
 import { type FrequencyAxis, type Interval, round2, textWidth, type TimeAxis } from '@/figures';
 import { ChartText } from './chart-text';
@@ -23,8 +22,8 @@ const FootAxis = memo(function FootAxis({ ticks, pixels: [left, right], y, unit 
   const free = right - (unit === '' ? -20 : textWidth(unit) + 8);
   const named = ticks.filter(({ x, text }) => text !== null && x + textWidth(text) / 2 <= free);
   return (
-    <G>
-      <Path d={`M${left} ${y}H${right}${path}`} stroke={colors.rule2} strokeWidth={1} fill="none" />
+    <g>
+      <path d={`M${left} ${y}H${right}${path}`} stroke={colors.rule2} strokeWidth={1} fill="none" />
       {named.map(({ x, text }) => {
         const atEnd = unit === '' && x > right - 8;
         return (
@@ -36,7 +35,7 @@ const FootAxis = memo(function FootAxis({ ticks, pixels: [left, right], y, unit 
       <ChartText x={right} y={y + 20} anchor="end">
         {unit}
       </ChartText>
-    </G>
+    </g>
   );
 });
 

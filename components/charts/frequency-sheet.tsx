@@ -1,6 +1,4 @@
 import { memo, useMemo } from 'react';
-import { StyleSheet } from 'react-native';
-import Svg from 'react-native-svg';
 import {
   type FrequencyAxis,
   frequencyAxis,
@@ -20,6 +18,7 @@ import type { FrequencyPanel, LoopChartProps } from './chart-types';
 import { describeFrequency } from './describe';
 import { FrequencyFoot } from './foot-axis';
 import { FrequencyCursor } from './frequency-cursor';
+import { Layer } from './layer';
 import { PanelView } from './panel-view';
 import { frequencyTable } from './tables';
 import { UnstableMark } from './unstable-mark';
@@ -74,13 +73,13 @@ export const FrequencySheet = memo(function FrequencySheet(props: FrequencySheet
   const columns = useMemo(() => across.labelled.map(({ x }) => x), [across]);
   const stable = a.analysis.closedLoop.stable;
   const picture = (
-    <Svg width={width} height={height} style={StyleSheet.absoluteFill} aria-hidden>
+    <Layer width={width} height={height}>
       {panels.map((panel) => (
         <PanelView key={panel.kind} picture={panel.picture} columns={columns} />
       ))}
       <FrequencyFoot axis={across} y={layout.foot} />
       {stable ? null : <UnstableMark x={width - 60} y={12} />}
-    </Svg>
+    </Layer>
   );
   return (
     <ChartShell

@@ -1,5 +1,4 @@
 import { memo } from 'react';
-import { G, Path } from 'react-native-svg';
 import { useTheme } from '@/components/ui/theme';
 import { type GainRuleShape, round2, ruleRows, type RuleTick } from '@/figures';
 import { ChartText } from './chart-text';
@@ -13,42 +12,42 @@ const tickPath = (ticks: readonly RuleTick[]): string => ticks.map(({ x, height 
 function Scale({ shape: { ticks, labels }, width }: { shape: GainRuleShape; width: number }) {
   const { colors } = useTheme();
   return (
-    <G>
-      <Path d={`M0 ${Y}H${width}${tickPath(ticks)}`} stroke={colors.rule2} strokeWidth={1} fill="none" />
+    <g>
+      <path d={`M0 ${Y}H${width}${tickPath(ticks)}`} stroke={colors.rule2} strokeWidth={1} fill="none" />
       {labels.map(({ x, text, isZero }) => (
         <ChartText key={text} x={x} y={Y - 16} anchor="middle" tone={isZero ? 'strong' : 'tick'}>
           {text}
         </ChartText>
       ))}
-    </G>
+    </g>
   );
 }
 
 function Limits({ shape: { held, edges, kerbs, warnings } }: { shape: GainRuleShape }) {
   const { colors } = useTheme();
   return (
-    <G>
-      {held === null ? null : <Path d={`M${round2(held[0])} ${Y}H${round2(held[1])}`} stroke={colors.ink} strokeWidth={3} />}
+    <g>
+      {held === null ? null : <path d={`M${round2(held[0])} ${Y}H${round2(held[1])}`} stroke={colors.ink} strokeWidth={3} />}
       {kerbs.map(({ x, shape }) => (
-        <G key={x}>
+        <g key={x}>
           <KerbStripe kerb={shape} />
-          <Path d={`M${round2(x)} ${Y - 14}V${Y + 9}`} stroke={colors.kerb} strokeWidth={1.5} />
-        </G>
+          <path d={`M${round2(x)} ${Y - 14}V${Y + 9}`} stroke={colors.kerb} strokeWidth={1.5} />
+        </g>
       ))}
       {edges.map(({ tick, x, text, anchor }) => (
-        <G key={anchor}>
-          <Path d={`M${round2(tick)} ${Y - 14}V${Y + 10}`} stroke={colors.kerb} strokeWidth={1.5} />
+        <g key={anchor}>
+          <path d={`M${round2(tick)} ${Y - 14}V${Y + 10}`} stroke={colors.kerb} strokeWidth={1.5} />
           <ChartText x={x} y={EDGE_Y} anchor={anchor} tone="limit">
             {text}
           </ChartText>
-        </G>
+        </g>
       ))}
       {warnings.map(({ x, text, anchor }) => (
         <ChartText key={anchor} x={x} y={WARNING_Y} anchor={anchor}>
           {text}
         </ChartText>
       ))}
-    </G>
+    </g>
   );
 }
 
@@ -64,16 +63,16 @@ export const GainRuleView = memo(function GainRuleView({ shape, width, moving }:
   const { colors } = useTheme();
   const middle = width / 2;
   return (
-    <G>
+    <g>
       <Scale shape={shape} width={width} />
-      <G opacity={moving ? FADED : 1}>
+      <g opacity={moving ? FADED : 1}>
         <Limits shape={shape} />
-      </G>
+      </g>
       {shape.kept === null ? null : (
-        <Path d={`M${round2(shape.kept)} ${Y + 2}l-5 9h10z`} fill={colors.paper} stroke={colors.ink} strokeWidth={1.5} />
+        <path d={`M${round2(shape.kept)} ${Y + 2}l-5 9h10z`} fill={colors.paper} stroke={colors.ink} strokeWidth={1.5} />
       )}
-      <Path d={`M${middle} 4V${Y + 2}`} stroke={colors.ink} strokeWidth={2.5} />
-      <Path d={`M${middle - 6} 2h12l-6 8z`} fill={colors.ink} />
-    </G>
+      <path d={`M${middle} 4V${Y + 2}`} stroke={colors.ink} strokeWidth={2.5} />
+      <path d={`M${middle - 6} 2h12l-6 8z`} fill={colors.ink} />
+    </g>
   );
 });

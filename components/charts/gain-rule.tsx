@@ -1,6 +1,5 @@
 import { memo, useMemo } from 'react';
 import { View, type ViewStyle } from 'react-native';
-import Svg from 'react-native-svg';
 import {
   formatGain,
   gainMode,
@@ -87,9 +86,9 @@ export const GainRule = memo(function GainRule(props: GainRuleProps) {
       style={[{ height: ruleRows.height }, sideways, style]}
     >
       {shape === null ? null : (
-        <Svg width={width} height={ruleRows.height} aria-hidden>
+        <svg width={width} height={ruleRows.height} aria-hidden>
           <GainRuleView shape={shape} width={width} moving={dragged !== null} />
-        </Svg>
+        </svg>
       )}
     </View>
   );

@@ -1,5 +1,4 @@
 import { memo, useId } from 'react';
-import { Circle, ClipPath, Defs, G, Path } from 'react-native-svg';
 import { useTheme } from '@/components/ui/theme';
 import type { CircleKerb, ClosedKerb, Point, StraightKerb } from '@/figures';
 
@@ -10,11 +9,11 @@ const OUTLINE = 0.75;
 export const KerbStripe = memo(function KerbStripe({ kerb }: { kerb: StraightKerb }) {
   const { colors } = useTheme();
   return (
-    <G>
-      <Path d={kerb.ground} fill={colors.kerbGap} stroke={colors.kerb} strokeWidth={OUTLINE} />
-      <Path d={kerb.blocks} fill={colors.kerb} />
-      <Path d={kerb.edge} fill="none" stroke={colors.kerb} strokeWidth={EDGE} />
-    </G>
+    <g>
+      <path d={kerb.ground} fill={colors.kerbGap} stroke={colors.kerb} strokeWidth={OUTLINE} />
+      <path d={kerb.blocks} fill={colors.kerb} />
+      <path d={kerb.edge} fill="none" stroke={colors.kerb} strokeWidth={EDGE} />
+    </g>
   );
 });
 
@@ -23,12 +22,12 @@ export const KerbCircle = memo(function KerbCircle({ center, circle }: { center:
   const { colors } = useTheme();
   const ring = { cx: center.x, cy: center.y, fill: 'none' };
   return (
-    <G>
-      <Circle {...ring} r={circle.middle} stroke={colors.kerbGap} strokeWidth={circle.width} />
-      <Circle {...ring} r={circle.middle} stroke={colors.kerb} strokeWidth={circle.width} strokeDasharray={[circle.dash, circle.dash]} />
-      <Circle {...ring} r={circle.inner} stroke={colors.kerb} strokeWidth={OUTLINE} />
-      <Circle {...ring} r={circle.middle + circle.width / 2} stroke={colors.kerb} strokeWidth={EDGE} />
-    </G>
+    <g>
+      <circle {...ring} r={circle.middle} stroke={colors.kerbGap} strokeWidth={circle.width} />
+      <circle {...ring} r={circle.middle} stroke={colors.kerb} strokeWidth={circle.width} strokeDasharray={circle.dash} />
+      <circle {...ring} r={circle.inner} stroke={colors.kerb} strokeWidth={OUTLINE} />
+      <circle {...ring} r={circle.middle + circle.width / 2} stroke={colors.kerb} strokeWidth={EDGE} />
+    </g>
   );
 });
 
@@ -38,17 +37,17 @@ export const KerbOutline = memo(function KerbOutline({ kerb }: { kerb: ClosedKer
   const id = useId();
   const stripe = { d: kerb.outline, fill: 'none', strokeWidth: kerb.strokeWidth };
   return (
-    <G>
-      <Defs>
-        <ClipPath id={id}>
-          <Path d={kerb.outline} />
-        </ClipPath>
-      </Defs>
-      <G clipPath={`url(#${id})`}>
-        <Path {...stripe} stroke={colors.kerbGap} />
-        <Path {...stripe} stroke={colors.kerb} strokeDasharray={[kerb.dash, kerb.dash]} />
-      </G>
-      <Path d={kerb.outline} fill="none" stroke={colors.kerb} strokeWidth={EDGE} />
-    </G>
+    <g>
+      <defs>
+        <clipPath id={id}>
+          <path d={kerb.outline} />
+        </clipPath>
+      </defs>
+      <g clipPath={`url(#${id})`}>
+        <path {...stripe} stroke={colors.kerbGap} />
+        <path {...stripe} stroke={colors.kerb} strokeDasharray={kerb.dash} />
+      </g>
+      <path d={kerb.outline} fill="none" stroke={colors.kerb} strokeWidth={EDGE} />
+    </g>
   );
 });

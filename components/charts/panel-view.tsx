@@ -1,5 +1,4 @@
 import { memo, useId } from 'react';
-import { Circle, ClipPath, Defs, G, Path, Rect } from 'react-native-svg';
 import { useTheme } from '@/components/ui/theme';
 import { type PanelPicture, round2 } from '@/figures';
 import { ChartLabel, ChartText } from './chart-text';
@@ -17,16 +16,16 @@ function Hairlines({ picture: { plot, axis, strong }, columns }: { picture: Pane
   const rows = axis.ticks.filter(({ value }) => !strong.includes(value)).map(({ value }) => row(value));
   const uprights = columns.map((x) => `M${round2(x)} ${plot.y}v${plot.height}`);
   return (
-    <G>
-      <Path d={[...rows, ...uprights].join('')} stroke={colors.rule} strokeWidth={1} fill="none" />
-      <Path d={strong.filter(inView).map(row).join('')} stroke={colors.rule2} strokeWidth={1} fill="none" />
-    </G>
+    <g>
+      <path d={[...rows, ...uprights].join('')} stroke={colors.rule} strokeWidth={1} fill="none" />
+      <path d={strong.filter(inView).map(row).join('')} stroke={colors.rule2} strokeWidth={1} fill="none" />
+    </g>
   );
 }
 
 function AxisNames({ picture: { plot, axis, title, unit } }: { picture: PanelPicture }) {
   return (
-    <G>
+    <g>
       {axis.ticks.map(({ value, text }) => (
         <ChartText key={value} x={plot.x - 7} y={axis.at(value) + 4.5} anchor="end">
           {text}
@@ -35,7 +34,7 @@ function AxisNames({ picture: { plot, axis, title, unit } }: { picture: PanelPic
       <ChartText x={plot.x} y={plot.y - TITLE_RISE} tone="title" unit={unit}>
         {title}
       </ChartText>
-    </G>
+    </g>
   );
 }
 
@@ -45,15 +44,15 @@ export const PanelView = memo(function PanelView({ picture, columns }: { picture
   const clip = useId();
   const { plot, curves, kerbs, bars, dots, labels } = picture;
   return (
-    <G>
-      <Defs>
-        <ClipPath id={clip}>
-          <Rect x={plot.x} y={plot.y - OVERHANG} width={plot.width} height={plot.height + 2 * OVERHANG} />
-        </ClipPath>
-      </Defs>
+    <g>
+      <defs>
+        <clipPath id={clip}>
+          <rect x={plot.x} y={plot.y - OVERHANG} width={plot.width} height={plot.height + 2 * OVERHANG} />
+        </clipPath>
+      </defs>
       <Hairlines picture={picture} columns={columns} />
       <AxisNames picture={picture} />
-      <G clipPath={`url(#${clip})`}>
+      <g clipPath={`url(#${clip})`}>
         <CurvePath d={curves.others} kind="others" />
         {kerbs.map((kerb, i) => (
           <KerbStripe key={i} kerb={kerb} />
@@ -62,19 +61,19 @@ export const PanelView = memo(function PanelView({ picture, columns }: { picture
         <CurvePath d={curves.b} kind="b" />
         <CurvePath d={curves.secondA} kind="secondA" />
         <CurvePath d={curves.a} kind="a" />
-      </G>
+      </g>
       {bars.map(({ x, from, to, disc }, i) => (
-        <G key={i}>
-          <Path d={`M${round2(x)} ${round2(from)}V${round2(to)}`} stroke={colors.ink} strokeWidth={1.5} fill="none" />
-          {disc ? <Circle cx={x} cy={to} r={3.5} fill={colors.ink} /> : null}
-        </G>
+        <g key={i}>
+          <path d={`M${round2(x)} ${round2(from)}V${round2(to)}`} stroke={colors.ink} strokeWidth={1.5} fill="none" />
+          {disc ? <circle cx={x} cy={to} r={3.5} fill={colors.ink} /> : null}
+        </g>
       ))}
       {dots.map(({ x, y, radius }, i) => (
-        <Circle key={i} cx={x} cy={y} r={radius} fill={colors.ink} stroke={colors.paper} strokeWidth={1.5} />
+        <circle key={i} cx={x} cy={y} r={radius} fill={colors.ink} stroke={colors.paper} strokeWidth={1.5} />
       ))}
       {labels.map((label, i) => (
         <ChartLabel key={i} label={label} />
       ))}
-    </G>
+    </g>
   );
 });

@@ -1,6 +1,4 @@
 import { memo, useMemo, useState } from 'react';
-import { StyleSheet } from 'react-native';
-import Svg from 'react-native-svg';
 import { Segments } from '@/components/ui/segments';
 import { touch } from '@/components/ui/tokens';
 import {
@@ -19,6 +17,7 @@ import { ChartShell } from './chart-shell';
 import { ChartText } from './chart-text';
 import type { LoopChartProps, PlaneKind } from './chart-types';
 import { describePlane, encirclementText } from './describe';
+import { Layer } from './layer';
 import { PlaneCursor } from './plane-cursor';
 import { PlaneView } from './plane-view';
 import { frequencyTable } from './tables';
@@ -88,7 +87,7 @@ export const PlaneChart = memo(function PlaneChart({ a, b, others, limits, units
   const right = plot.x + plot.width;
   const foot = kind === 'nyquist' ? `posts along L: ${units.frequency}` : `dB over arg L, posts in ${units.frequency}`;
   const drawing = (
-    <Svg width={width} height={height} style={StyleSheet.absoluteFill} aria-hidden>
+    <Layer width={width} height={height}>
       <PlaneView picture={picture} />
       <PlaneTitle name={names[kind]} x={plot.x} free={width - TOOLS} />
       <ChartText x={plot.x} y={height - 6}>
@@ -98,7 +97,7 @@ export const PlaneChart = memo(function PlaneChart({ a, b, others, limits, units
         {count.text}
       </ChartText>
       {a.analysis.closedLoop.stable ? null : <UnstableMark x={right} y={plot.y + 14} />}
-    </Svg>
+    </Layer>
   );
   return (
     <ChartShell

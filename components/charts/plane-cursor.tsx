@@ -1,9 +1,8 @@
-import { StyleSheet } from 'react-native';
-import Svg from 'react-native-svg';
 import { clamp, contains, frequencyAtPlace, type LoopScene, nearestPlace, type PlanePicture, responseOf } from '@/figures';
 import { CursorDisc } from './cursor-marks';
 import { useCursor } from './cursor-provider';
 import { frequencyCursorText } from './frequency-cursor';
+import { Layer } from './layer';
 import { PointerLayer } from './pointer-layer';
 import { steppedFrequency } from './stack-cursor';
 
@@ -25,13 +24,13 @@ export function PlaneCursor({
   const places = [b, a].flatMap((design) => (design === undefined ? [] : [{ design, at: picture.toPixel(design.at(now)) }]));
   return (
     <>
-      <Svg width={size.width} height={size.height} style={StyleSheet.absoluteFill} aria-hidden>
+      <Layer width={size.width} height={size.height}>
         {places
           .filter(({ at }) => frequency !== null && contains(picture.plot, at))
           .map(({ design, at }) => (
             <CursorDisc key={design.label} at={at} design={design === a ? 'a' : 'b'} radius={4.5} />
           ))}
-      </Svg>
+      </Layer>
       <PointerLayer
         rect={picture.plot}
         label="Cursor, frequency along L"

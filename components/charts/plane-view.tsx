@@ -1,5 +1,4 @@
 import { memo, useId } from 'react';
-import { Circle, ClipPath, Defs, G, Line, Path, Rect } from 'react-native-svg';
 import { useTheme } from '@/components/ui/theme';
 import { arrowheadPath, type PlanePicture, round2 } from '@/figures';
 import { ChartLabel, ChartText } from './chart-text';
@@ -11,16 +10,16 @@ const SHADE = 0.07;
 const Ground = memo(function Ground({ picture: { contours, grid, axes, unitCircle } }: { picture: PlanePicture }) {
   const { colors } = useTheme();
   return (
-    <G>
-      <Path d={grid} stroke={colors.rule} strokeWidth={1} fill="none" />
+    <g>
+      <path d={grid} stroke={colors.rule} strokeWidth={1} fill="none" />
       {contours.shaded.map((d, i) => (
-        <Path key={i} d={d} fill={colors.contour} fillOpacity={SHADE} />
+        <path key={i} d={d} fill={colors.contour} fillOpacity={SHADE} />
       ))}
-      <Path d={contours.fine} stroke={colors.contour} strokeWidth={0.7} fill="none" />
-      <Path d={contours.strong} stroke={colors.contour} strokeWidth={1.4} fill="none" />
-      <Path d={unitCircle} stroke={colors.rule2} strokeWidth={1} strokeDasharray={[2, 3]} fill="none" />
-      <Path d={axes} stroke={colors.rule2} strokeWidth={1} fill="none" />
-    </G>
+      <path d={contours.fine} stroke={colors.contour} strokeWidth={0.7} fill="none" />
+      <path d={contours.strong} stroke={colors.contour} strokeWidth={1.4} fill="none" />
+      <path d={unitCircle} stroke={colors.rule2} strokeWidth={1} strokeDasharray="2 3" fill="none" />
+      <path d={axes} stroke={colors.rule2} strokeWidth={1} fill="none" />
+    </g>
   );
 });
 
@@ -33,9 +32,9 @@ function Kerbs({ kerbs }: Pick<PlanePicture, 'kerbs'>) {
 function DirectionMarks({ picture: { arrows, posts, summits } }: { picture: PlanePicture }) {
   const { colors } = useTheme();
   return (
-    <G>
+    <g>
       {arrows.map(({ point, angle }, i) => (
-        <Path
+        <path
           key={i}
           d={arrowheadPath}
           fill={colors.ink}
@@ -44,11 +43,11 @@ function DirectionMarks({ picture: { arrows, posts, summits } }: { picture: Plan
           transform={`translate(${round2(point.x)} ${round2(point.y)}) rotate(${round2(angle)})`}
         />
       ))}
-      <Path d={posts} stroke={colors.ink} strokeWidth={1.5} fill="none" />
+      <path d={posts} stroke={colors.ink} strokeWidth={1.5} fill="none" />
       {summits.map(({ x, y }) => (
-        <Path key={x} d={`M${round2(x - 6)} ${round2(y + 4.5)}h12l-6 -10.5z`} fill={colors.ink} />
+        <path key={x} d={`M${round2(x - 6)} ${round2(y + 4.5)}h12l-6 -10.5z`} fill={colors.ink} />
       ))}
-    </G>
+    </g>
   );
 }
 
@@ -56,13 +55,13 @@ function Worst({ worst }: { worst: NonNullable<PlanePicture['worst']> }) {
   const { colors } = useTheme();
   const { point, summit, leader } = worst;
   return (
-    <G>
-      <Line x1={summit.x} y1={summit.y} x2={point.x} y2={point.y} stroke={colors.ink} strokeWidth={1.25} />
+    <g>
+      <line x1={summit.x} y1={summit.y} x2={point.x} y2={point.y} stroke={colors.ink} strokeWidth={1.25} />
       {leader === null ? null : (
-        <Line x1={leader[0].x} y1={leader[0].y} x2={leader[1].x} y2={leader[1].y} stroke={colors.ink3} strokeWidth={1} />
+        <line x1={leader[0].x} y1={leader[0].y} x2={leader[1].x} y2={leader[1].y} stroke={colors.ink3} strokeWidth={1} />
       )}
-      <Circle cx={point.x} cy={point.y} r={5} fill={colors.ink} stroke={colors.paper} strokeWidth={1.5} />
-    </G>
+      <circle cx={point.x} cy={point.y} r={5} fill={colors.ink} stroke={colors.paper} strokeWidth={1.5} />
+    </g>
   );
 }
 
@@ -71,13 +70,13 @@ export const PlaneView = memo(function PlaneView({ picture }: { picture: PlanePi
   const clip = useId();
   const { plot, curves, worst, axisLabels, labels } = picture;
   return (
-    <G>
-      <Defs>
-        <ClipPath id={clip}>
-          <Rect x={plot.x} y={plot.y} width={plot.width} height={plot.height} />
-        </ClipPath>
-      </Defs>
-      <G clipPath={`url(#${clip})`}>
+    <g>
+      <defs>
+        <clipPath id={clip}>
+          <rect x={plot.x} y={plot.y} width={plot.width} height={plot.height} />
+        </clipPath>
+      </defs>
+      <g clipPath={`url(#${clip})`}>
         <Ground picture={picture} />
         <CurvePath d={curves.others} kind="others" />
         <Kerbs kerbs={picture.kerbs} />
@@ -85,7 +84,7 @@ export const PlaneView = memo(function PlaneView({ picture }: { picture: PlanePi
         <CurvePath d={curves.a} kind="a" />
         <DirectionMarks picture={picture} />
         {worst === null ? null : <Worst worst={worst} />}
-      </G>
+      </g>
       {axisLabels.map(({ x, y, text, anchor }) => (
         <ChartText key={text + x} x={x} y={y} anchor={anchor} halo>
           {text}
@@ -94,6 +93,6 @@ export const PlaneView = memo(function PlaneView({ picture }: { picture: PlanePi
       {labels.map((label, i) => (
         <ChartLabel key={i} label={label} />
       ))}
-    </G>
+    </g>
   );
 });

@@ -1,9 +1,8 @@
 import { memo, useMemo } from 'react';
-import { StyleSheet } from 'react-native';
-import Svg from 'react-native-svg';
 import { frequencyAxis, plantMagnitudePanel, plantPhasePanel, type PlantScene, plantWindow, stackLayout, stackMargins } from '@/figures';
 import { ChartShell } from './chart-shell';
 import { FrequencyFoot } from './foot-axis';
+import { Layer } from './layer';
 import { PanelView } from './panel-view';
 import { PlantCursor } from './plant-cursor';
 import { describePlantCurves, plantTable } from './plant-words';
@@ -37,11 +36,11 @@ export const PlantSheet = memo(function PlantSheet({ curves, corners, at, units,
   );
   const columns = useMemo(() => across.labelled.map(({ x }) => x), [across]);
   const picture = (
-    <Svg width={width} height={height} style={StyleSheet.absoluteFill} aria-hidden>
+    <Layer width={width} height={height}>
       <PanelView picture={magnitude} columns={columns} />
       <PanelView picture={phase} columns={columns} />
       <FrequencyFoot axis={across} y={layout.foot} />
-    </Svg>
+    </Layer>
   );
   return (
     <ChartShell

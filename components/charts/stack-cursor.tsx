@@ -1,8 +1,7 @@
-import { StyleSheet } from 'react-native';
-import Svg from 'react-native-svg';
 import { clamp, formatFrequency, type FrequencyAxis, type FrequencyUnit, type Point, type Rect } from '@/figures';
 import { CursorDiscs, CursorFlag, CursorLine } from './cursor-marks';
 import { useCursor } from './cursor-provider';
+import { Layer } from './layer';
 import { PointerLayer } from './pointer-layer';
 
 /** Decades per press of an arrow key, and with Shift. */
@@ -43,13 +42,13 @@ export function StackCursor({ plots, across, size, unit, rest, valueText, discsA
   return (
     <>
       {seen ? (
-        <Svg width={size.width} height={size.height} style={StyleSheet.absoluteFill} aria-hidden>
+        <Layer width={size.width} height={size.height}>
           <CursorLine x={x} plots={plots} />
           {discsAt(now).map(({ plot, a, b }) => (
             <CursorDiscs key={plot.y} a={a} b={b} plot={plot} />
           ))}
           <CursorFlag x={x} y={size.foot} text={formatFrequency(now, unit)} pixels={[top.x, top.x + top.width]} />
-        </Svg>
+        </Layer>
       ) : null}
       <PointerLayer
         rect={{ x: top.x, y: top.y, width: top.width, height: bottom.y + bottom.height - top.y }}

@@ -1,5 +1,3 @@
-import { StyleSheet } from 'react-native';
-import Svg from 'react-native-svg';
 import {
   clamp,
   formatSeconds,
@@ -13,6 +11,7 @@ import {
 } from '@/figures';
 import { CursorDiscs, CursorFlag, CursorLine } from './cursor-marks';
 import { useCursor } from './cursor-provider';
+import { Layer } from './layer';
 import { PointerLayer } from './pointer-layer';
 import { responseCell } from './tables';
 
@@ -47,13 +46,13 @@ export function TimeCursor({ scene: { a, b }, panels, across, size }: TimeCursor
   return (
     <>
       {seen ? (
-        <Svg width={size.width} height={size.height} style={StyleSheet.absoluteFill} aria-hidden>
+        <Layer width={size.width} height={size.height}>
           <CursorLine x={x} plots={plots} />
           {panels.map(({ panel, picture }) => (
             <CursorDiscs key={panel.kind} a={discs(a, panel, picture)} b={discs(b, panel, picture)} plot={picture.plot} />
           ))}
           <CursorFlag x={x} y={size.foot} text={formatSeconds(now)} pixels={[top.x, top.x + top.width]} />
-        </Svg>
+        </Layer>
       ) : null}
       <PointerLayer
         rect={{ x: top.x, y: top.y, width: top.width, height: bottom.y + bottom.height - top.y }}

@@ -1,11 +1,10 @@
 import { memo, useMemo } from 'react';
-import { StyleSheet } from 'react-native';
-import Svg from 'react-native-svg';
 import { type Interval, stackLayout, stackMargins, timeAxis, timePanel, timeWindow } from '@/figures';
 import { ChartShell } from './chart-shell';
 import type { LoopChartProps, TimePanel } from './chart-types';
 import { describeTime } from './describe';
 import { TimeFoot } from './foot-axis';
+import { Layer } from './layer';
 import { PanelView } from './panel-view';
 import { timeTable } from './tables';
 import { TimeCursor } from './time-cursor';
@@ -52,13 +51,13 @@ export const TimeSheet = memo(function TimeSheet({ a, b, limits, units, panels: 
   const columns = useMemo(() => across.ticks.filter(({ text }) => text !== null).map(({ x }) => x), [across]);
   const stable = a.analysis.closedLoop.stable;
   const picture = (
-    <Svg width={width} height={height} style={StyleSheet.absoluteFill} aria-hidden>
+    <Layer width={width} height={height}>
       {panels.map(({ panel, picture: drawn }) => (
         <PanelView key={panel.kind} picture={drawn} columns={columns} />
       ))}
       <TimeFoot axis={across} y={layout.foot} />
       {stable ? null : <UnstableMark x={width - 60} y={12} />}
-    </Svg>
+    </Layer>
   );
   return (
     <ChartShell

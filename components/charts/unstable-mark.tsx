@@ -1,4 +1,3 @@
-import { G, Path } from 'react-native-svg';
 import { useTheme } from '@/components/ui/theme';
 import { textWidth, verdictShapes } from '@/figures';
 import { ChartText } from './chart-text';
@@ -11,11 +10,11 @@ export function UnstableMark({ x, y }: { x: number; y: number }) {
   const text = 'unstable';
   const left = x - textWidth(text) - 18;
   return (
-    <G>
-      <Path d={verdictShapes.fail.solid ?? ''} fill={colors.fail} transform={`translate(${left} ${y - 11}) scale(${GLYPH})`} />
+    <g>
+      <path d={verdictShapes.fail.solid ?? ''} fill={colors.fail} transform={`translate(${left} ${y - 11}) scale(${GLYPH})`} />
       <ChartText x={x} y={y} anchor="end" tone="fail" halo>
         {text}
       </ChartText>
-    </G>
+    </g>
   );
 }
