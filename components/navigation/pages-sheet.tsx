@@ -5,7 +5,7 @@ import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
 import { gutter } from '@/components/ui/tokens';
 import { NavLink, type NavLinkProps } from './nav-link';
-import { pages } from './pages';
+import { allPages } from './pages';
 import type { ProjectTabsProps } from './project-tabs';
 import { projectPath } from './routes';
 
@@ -42,8 +42,16 @@ export function PagesSheet({ projectId, current, open, onClose }: PagesSheetProp
   return (
     <Sheet open={open} label="Pages" onClose={onClose}>
       <View role="navigation" aria-label="All pages">
-        {pages.map(({ page, ...entry }) => (
-          <PageRow key={page} {...entry} href={projectPath(projectId, page)} here={page === current} onPress={onClose} />
+        {allPages.map(({ page, icon, name, about }) => (
+          <PageRow
+            key={page}
+            icon={icon}
+            name={name}
+            about={about}
+            href={projectPath(projectId, page)}
+            here={page === current}
+            onPress={onClose}
+          />
         ))}
         <PageRow icon="account" name="Account" about="units, theme, keys" href="/account" onPress={onClose} />
       </View>

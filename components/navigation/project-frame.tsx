@@ -10,7 +10,7 @@ import { projectQuery, type ReadProject } from '@/hooks/queries/projects';
 import { DeskFrame } from './desk-frame';
 import { MainArea } from './main-area';
 import { PageBar } from './page-bar';
-import { pageOf, pages } from './pages';
+import { pageAt, pages } from './pages';
 import { PagesSheet } from './pages-sheet';
 import { PhoneTop } from './phone-top';
 import { ProjectContext } from './project-context';
@@ -38,19 +38,23 @@ export function ProjectFrame({ projectId, children }: PropsWithChildren<{ projec
 function LoadedFrame({ project, children }: PropsWithChildren<{ project: ReadProject }>) {
   const phone = useLayout() === 'phone';
   const pathname = usePathname();
-  const current = pageOf(pathname);
+  const { page: current, name: pageName, up: above = 'home', tab = current } = pageAt(pathname);
   const [sheet, setSheet] = useState(false);
-  const context = useMemo(() => ({ project, openPages: () => setSheet(true) }), [project, setSheet]);
-  const place = { projectId: project.id, current };
-  const pageName = pages.find(({ page }) => page === current)?.name ?? 'Home';
+  const [phoneActions, setPhoneActions] = useState<View | null>(null);
+  const context = useMemo(
+    () => ({ project, openPages: () => setSheet(true), phoneActions: phoneActions as unknown as HTMLElement | null }),
+    [project, setSheet, phoneActions],
+  );
+  const place = { projectId: project.id, current: tab };
   const home = current === 'home';
   const deeper = pathname !== projectPath(project.id, current);
-  const up = deeper ? projectPath(project.id, current) : home ? '/' : projectPath(project.id);
+  const up = deeper ? projectPath(project.id, current) : home ? '/' : projectPath(project.id, above);
   return (
     <ProjectContext.Provider value={context}>
       <View style={styles.frame}>
         {phone ? (
           <PhoneTop title={home ? project.name : pageName} sub={home ? project.vehicle : project.name} up={up}>
+            <View ref={setPhoneActions} />
             <IconButton icon="more" label="All pages" onPress={context.openPages} />
           </PhoneTop>
         ) : (
@@ -64,8 +68,8 @@ function LoadedFrame({ project, children }: PropsWithChildren<{ project: ReadPro
           {!phone && (home || current === 'bench') ? <HiddenHeading>{home ? project.name : `Bench, ${project.name}`}</HiddenHeading> : null}
           {children}
         </MainArea>
-        {phone && current !== 'bench' ? <PageBar {...place} /> : null}
-        <PagesSheet {...place} open={sheet} onClose={() => setSheet(false)} />
+        {phone && pages.some(({ page }) => page === current) && current !== 'bench' ? <PageBar {...place} /> : null}
+        <PagesSheet projectId={project.id} current={current} open={sheet} onClose={() => setSheet(false)} />
       </View>
     </ProjectContext.Provider>
   );

@@ -1,10 +1,9 @@
 import type { Href } from 'expo-router';
 
-export type ProjectPage = 'home' | 'plant' | 'bench' | 'analyses';
+export type ProjectPage = 'home' | 'plant' | 'bench' | 'cases' | 'limits' | 'analyses' | 'members' | 'activity';
 
-const paths: Readonly<Record<ProjectPage, string>> = { home: '', plant: '/plant', bench: '/bench', analyses: '/analyses' };
-
-export const projectPath = (projectId: string, page: ProjectPage = 'home') => `/projects/${projectId}${paths[page]}` as Href;
+export const projectPath = (projectId: string, page: ProjectPage = 'home') =>
+  `/projects/${projectId}${page === 'home' ? '' : `/${page}`}` as Href;
 export const analysisPath = (projectId: string, analysisId: string) => `/projects/${projectId}/analyses/${analysisId}` as Href;
 export const benchPath = (projectId: string, designId: string, revision: number) =>
   `/projects/${projectId}/bench?design=${designId}&revision=${revision}` as Href;

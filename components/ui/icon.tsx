@@ -23,8 +23,11 @@ const icons = {
   home: ['M4 11l8-7 8 7v9H4z'],
   plant: ['M3 12h4M17 12h4M7 7h10v10H7z'],
   bench: ['M4 8h16M4 16h16', ['M9 5v6M15 13v6', 3]],
+  cases: ['M4 4h16v16H4zM4 12h16M12 4v16'],
+  limits: ['M3 17h13', ['M18 6v14', 4], 'M9 10v7'],
   list: ['M4 6h10M4 12h16M4 18h7'],
   account: ['M20.500 12a8.500 8.500 0 10-17 0a8.500 8.500 0 1017 0M8 13h8'],
+  clock: ['M20.500 12a8.500 8.500 0 10-17 0a8.500 8.500 0 1017 0M12 7v5h4'],
   people: ['M3 6h8M3 12h8M3 18h8', ['M16 6h5M16 12h3M16 18h5', 3]],
   offline: ['M4 4l16 16M8 12a6 6 0 012-2M5 9a10 10 0 013-2M16 12a6 6 0 00-2-2M19 9a10 10 0 00-7-3M12 18h.01'],
 } satisfies Record<string, readonly Stroke[]>;

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { initials } from '@/components/navigation/initials';
-import { pageOf } from '@/components/navigation/pages';
+import { pageAt } from '@/components/navigation/pages';
 import { safeNext, signInPath } from '@/components/navigation/routes';
 
 describe('signing in leads back', () => {
@@ -22,8 +22,9 @@ describe('where one is', () => {
     ['/projects/1', 'home'],
     ['/projects/1/plant', 'plant'],
     ['/projects/1/analyses/2', 'analyses'],
+    ['/projects/1/limits', 'limits'],
   ])('%s is %s', (path, page) => {
-    expect(pageOf(path)).toBe(page);
+    expect(pageAt(path).page).toBe(page);
   });
 
   it.each([
