@@ -1,6 +1,6 @@
 import type { Complex } from '@/analysis/numbers/complex';
-import { IM, LOG_SLOPE, multiplyIn, PHASE_SLOPE, RE, startProduct, TURNS, WIDTH } from './turning-product';
 import { RootFactors } from './root-factors';
+import { IM, LOG_SLOPE, multiplyIn, PHASE_SLOPE, RE, startProduct, TURNS, WIDTH } from './turning-product';
 
 /** The real and imaginary part of Σ cₖ·(jω)ᵏ as two real polynomials in ω². */
 interface Halves {
@@ -9,6 +9,9 @@ interface Halves {
 }
 
 const SIGNS = [1, 1, -1, -1];
+
+/** Up to this degree the argument stays on one side of the real axis, all the way from 0 at ω = 0. */
+const NEVER_TURNS = 2;
 
 const halves = (ascending: readonly number[]): Halves => {
   const signed = ascending.map((c, k) => c * SIGNS[k % 4]);
@@ -28,13 +31,13 @@ const horner = (ascending: Float64Array, x: number): number => {
 export class PolynomialFactor {
   private readonly value: Halves;
   private readonly slope: Halves;
-  private readonly roots: RootFactors;
+  private readonly roots: RootFactors | null;
   private readonly counted = new Float64Array(WIDTH);
 
   constructor(ascending: readonly number[], roots: readonly Complex[]) {
     this.value = halves(ascending);
     this.slope = halves(ascending.map((c, k) => c * k));
-    this.roots = new RootFactors(roots);
+    this.roots = roots.length > NEVER_TURNS ? new RootFactors(roots) : null;
   }
 
   multiplyInto(product: Float64Array, omega: number): void {
@@ -47,13 +50,13 @@ export class PolynomialFactor {
     product[LOG_SLOPE] += (slopeRe * re + slopeIm * im) / length;
     product[PHASE_SLOPE] += (slopeIm * re - slopeRe * im) / length;
     multiplyIn(product, re, im);
-    product[TURNS] += this.turnsAt(omega, re, im);
+    if (this.roots) product[TURNS] += this.turnsAt(this.roots, omega, re, im);
   }
 
   /** Whole turns of this factor: those of its roots, corrected where rounding put the two on different sides of the cut. */
-  private turnsAt(omega: number, re: number, im: number): number {
+  private turnsAt(roots: RootFactors, omega: number, re: number, im: number): number {
     startProduct(this.counted);
-    this.roots.multiplyInto(this.counted, omega);
+    roots.multiplyInto(this.counted, omega);
     const difference = this.counted[IM] >= 0 !== im >= 0 && re < 0 && this.counted[RE] < 0 ? (im >= 0 ? -1 : 1) : 0;
     return this.counted[TURNS] + difference;
   }

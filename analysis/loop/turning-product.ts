@@ -32,5 +32,21 @@ export const multiplyIn = (product: Float64Array, re: number, im: number): void 
   else if (above !== nextIm >= 0) product[TURNS] += above ? 1 : -1;
 };
 
+/** Divides the product by another one, neither of them zero, and takes its turns and slopes off. */
+export const divideBy = (product: Float64Array, divisor: Float64Array): void => {
+  const re = divisor[RE];
+  const im = divisor[IM];
+  const size = Math.abs(re) > Math.abs(im) ? Math.abs(re) : Math.abs(im);
+  const x = re / size;
+  const y = im / size;
+  const share = 1 / (size * (x * x + y * y));
+  multiplyIn(product, x * share, 0 - y * share);
+  // The divisor's argument is π on the cut, and so is that of its inverse: one turn too many.
+  if (im === 0 && re < 0) product[TURNS] -= 1;
+  product[TURNS] -= divisor[TURNS];
+  product[LOG_SLOPE] -= divisor[LOG_SLOPE];
+  product[PHASE_SLOPE] -= divisor[PHASE_SLOPE];
+};
+
 /** Unwrapped argument of the product, radians. */
 export const argument = (product: Float64Array): number => Math.atan2(product[IM], product[RE]) + 2 * Math.PI * product[TURNS];

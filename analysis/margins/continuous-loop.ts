@@ -1,4 +1,4 @@
-import { AxisProduct } from '@/analysis/loop/axis-product';
+import { AxisProduct, productOf } from '@/analysis/loop/axis-product';
 import { fromGains } from '@/analysis/loop/controller';
 import { LoopError } from '@/analysis/loop/loop-error';
 import type { LoopModel, Rational } from '@/analysis/loop/model';
@@ -31,20 +31,19 @@ export class ContinuousLoop implements LoopFunction {
 
   constructor(model: LoopModel) {
     const { plant, controller, filters, sensor } = model;
+    const forward = forwardController(model);
     this.plant = new AxisProduct([plant]);
     this.command = new AxisProduct([controller, filters]);
     this.sensor = new AxisProduct([sensor]);
-    this.forward = new AxisProduct([forwardController(model), filters]);
+    this.forward = forward === controller ? this.command : new AxisProduct([forward, filters]);
     this.plantDeadTime = model.plantDeadTime;
     this.deadTime = model.plantDeadTime + model.sensorDeadTime;
     const parts = [plant, controller, filters, sensor];
     this.landmarks = landmarks(parts, this.deadTime);
     this.axisFrequencies = axisFrequencies(parts);
-    const loop = new AxisProduct(parts);
-    const reference = new AxisProduct([plant, forwardController(model), filters]);
-    this.isZero = loop.isZero;
-    this.atZero = { loop: loop.atZero, command: this.command.atZero, reference: reference.atZero };
-    this.atInfinity = { loop: loop.atInfinity, command: this.command.atInfinity, reference: reference.atInfinity };
+    this.isZero = this.plant.isZero || this.command.isZero;
+    this.atZero = this.endOfAxis('atZero');
+    this.atInfinity = this.endOfAxis('atInfinity');
     this.phaseShift = this.plant.isNegative && this.command.isNegative ? 2 * Math.PI : 0;
   }
 
@@ -56,28 +55,40 @@ export class ContinuousLoop implements LoopFunction {
     plant.evaluate(beside);
     command.evaluate(beside);
     sensor.evaluate(beside);
-    forward.evaluate(beside);
+    if (forward !== command) forward.evaluate(beside);
     const re = plant.re * command.re - plant.im * command.im;
     const im = plant.re * command.im + plant.im * command.re;
     const loopRe = re * sensor.re - im * sensor.im;
     const loopIm = re * sensor.im + im * sensor.re;
-    const cos = deadTime === 0 ? 1 : Math.cos(omega * deadTime);
-    const sin = deadTime === 0 ? 0 : -Math.sin(omega * deadTime);
+    const turn = omega * deadTime;
+    const cos = deadTime === 0 ? 1 : Math.cos(turn);
+    const sin = deadTime === 0 ? 0 : -Math.sin(turn);
     table[offset + S.OMEGA] = omega;
     table[offset + S.RE] = loopRe * cos - loopIm * sin;
     table[offset + S.IM] = loopRe * sin + loopIm * cos;
+    table[offset + S.MAGNITUDE] = plant.magnitude * command.magnitude * sensor.magnitude;
     table[offset + S.LOG] = plant.logMagnitude + command.logMagnitude + sensor.logMagnitude;
     table[offset + S.LOG_SLOPE] = plant.logSlope + command.logSlope + sensor.logSlope;
-    table[offset + S.PHASE] = plant.phase + command.phase + sensor.phase + this.phaseShift - omega * deadTime;
-    table[offset + S.PHASE_SLOPE] = plant.phaseSlope + command.phaseSlope + sensor.phaseSlope - omega * deadTime;
-    table[offset + S.PLANT_LOG] = plant.logMagnitude;
+    table[offset + S.PHASE] = plant.phase + command.phase + sensor.phase + this.phaseShift - turn;
+    table[offset + S.PHASE_SLOPE] = plant.phaseSlope + command.phaseSlope + sensor.phaseSlope - turn;
+    table[offset + S.PLANT_MAGNITUDE] = plant.magnitude;
     table[offset + S.PLANT_PHASE] = plant.phase - omega * this.plantDeadTime;
+    table[offset + S.COMMAND_MAGNITUDE] = command.magnitude;
+    table[offset + S.COMMAND_PHASE] = command.phase;
     table[offset + S.COMMAND_LOG] = command.logMagnitude;
     table[offset + S.COMMAND_LOG_SLOPE] = command.logSlope;
-    table[offset + S.COMMAND_PHASE] = command.phase;
     table[offset + S.REFERENCE_LOG] = plant.logMagnitude + forward.logMagnitude;
     table[offset + S.REFERENCE_LOG_SLOPE] = plant.logSlope + forward.logSlope;
     if (Number.isNaN(table[offset + S.RE] + table[offset + S.PHASE])) throw outOfRange(omega);
+  }
+
+  private endOfAxis(end: 'atZero' | 'atInfinity'): EndOfAxis {
+    const { plant, command, sensor, forward } = this;
+    return {
+      loop: productOf(productOf(plant[end], command[end]), sensor[end]),
+      command: command[end],
+      reference: productOf(plant[end], forward[end]),
+    };
   }
 }
 

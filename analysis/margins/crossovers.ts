@@ -3,7 +3,6 @@ import type { LoopFunction } from './loop-function';
 import { visitPieces } from './pieces';
 import type { Probe } from './probe';
 import { loopGain, loopPhase } from './quantities';
-import { LOG, PHASE, ROW } from './sample';
 import { LEAST_LISTED_GAIN } from './search-grid';
 
 /** A point where |L| = 1. The phase is unwrapped, radians. */
@@ -34,7 +33,7 @@ export const gainCrossovers = (probe: Probe): GainCrossover[] => {
     visit: ({ a, valueA, b, valueB }) => {
       if (valueA > 0 === valueB > 0) return;
       const frequency = probe.crossing(loopGain, 0, { a, valueA, b, valueB });
-      found.push({ frequency, phase: probe.row[PHASE] });
+      found.push({ frequency, phase: probe.found[loopPhase] });
     },
   });
   return found;
@@ -49,12 +48,12 @@ export const phaseCrossovers = (loop: LoopFunction, probe: Probe): PhaseCrossove
   const most = limit === 0 ? Infinity : MOST_NEUTRAL_CROSSOVERS;
   const least = Math.log(loop.deadTime > 0 ? LEAST_LISTED_GAIN : ZERO_GAIN);
   visitPieces(probe, loopPhase, {
-    matters: (low, high, i) => firstLevel(low) <= high && Math.max(probe.table[i * ROW + LOG], probe.table[(i + 1) * ROW + LOG]) >= least,
+    matters: (low, high, i) => firstLevel(low) <= high && Math.max(probe.valueAt(i, loopGain), probe.valueAt(i + 1, loopGain)) >= least,
     visit: ({ a, valueA, b, valueB }) => {
       const levels = levelsBetween(valueA, valueB);
       for (const level of levels) {
         const frequency = probe.crossing(loopPhase, level, { a, valueA, b, valueB });
-        const log = probe.row[LOG];
+        const log = probe.found[loopGain];
         if (log >= least) found.push({ frequency, gain: Math.exp(log) });
         if (found.length >= most) return true;
       }

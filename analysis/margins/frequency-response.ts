@@ -54,30 +54,36 @@ export const drawnGrid = (
 
 /** The curves of the contract, read off a grid of exact samples. */
 export const frequencyResponse = ({ table, count }: Grid): FrequencyResponse => {
-  const column = (read: (row: number) => number) => {
-    const values = new Array<number>(count);
-    for (let i = 0; i < count; i += 1) values[i] = read(i * S.ROW);
-    return values;
+  const room = () => new Array<number>(count);
+  const curve = () => ({ magnitude: room(), phaseDegrees: room() });
+  const response = {
+    frequencies: room(),
+    loop: { ...curve(), real: room(), imaginary: room() },
+    plant: curve(),
+    controller: curve(),
+    sensitivity: room(),
+    complementarySensitivity: room(),
+    loadSensitivity: room(),
+    noiseSensitivity: room(),
   };
-  const curve = (log: number, phase: number) => ({
-    magnitude: column((row) => Math.exp(table[row + log])),
-    phaseDegrees: column((row) => table[row + phase] * DEGREES),
-  });
-  const plant = curve(S.PLANT_LOG, S.PLANT_PHASE);
-  const controller = curve(S.COMMAND_LOG, S.COMMAND_PHASE);
-  const loop = curve(S.LOG, S.PHASE);
-  const sensitivity = column((row) => 1 / Math.max(LEAST_DISTANCE, length(1 + table[row + S.RE], table[row + S.IM])));
-  const times = (values: readonly number[]) => values.map((value, i) => value * sensitivity[i]);
-  return {
-    frequencies: column((row) => table[row + S.OMEGA]),
-    loop: { ...loop, real: column((row) => table[row + S.RE]), imaginary: column((row) => table[row + S.IM]) },
-    plant,
-    controller,
-    sensitivity,
-    complementarySensitivity: times(loop.magnitude),
-    loadSensitivity: times(plant.magnitude),
-    noiseSensitivity: times(controller.magnitude),
-  };
+  const { frequencies, loop, plant, controller } = response;
+  for (let i = 0, row = 0; i < count; i += 1, row += S.ROW) {
+    const sensitivity = 1 / Math.max(LEAST_DISTANCE, length(1 + table[row + S.RE], table[row + S.IM]));
+    frequencies[i] = table[row + S.OMEGA];
+    loop.magnitude[i] = table[row + S.MAGNITUDE];
+    loop.phaseDegrees[i] = table[row + S.PHASE] * DEGREES;
+    loop.real[i] = table[row + S.RE];
+    loop.imaginary[i] = table[row + S.IM];
+    plant.magnitude[i] = table[row + S.PLANT_MAGNITUDE];
+    plant.phaseDegrees[i] = table[row + S.PLANT_PHASE] * DEGREES;
+    controller.magnitude[i] = table[row + S.COMMAND_MAGNITUDE];
+    controller.phaseDegrees[i] = table[row + S.COMMAND_PHASE] * DEGREES;
+    response.sensitivity[i] = sensitivity;
+    response.complementarySensitivity[i] = table[row + S.MAGNITUDE] * sensitivity;
+    response.loadSensitivity[i] = table[row + S.PLANT_MAGNITUDE] * sensitivity;
+    response.noiseSensitivity[i] = table[row + S.COMMAND_MAGNITUDE] * sensitivity;
+  }
+  return response;
 };
 
 /** √(re² + im²), by the slow safe way only where the squares overflow. */

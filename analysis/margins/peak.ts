@@ -1,6 +1,5 @@
 import type { Probe } from './probe';
-import type { Quantity } from './quantities';
-import { IM, OMEGA, RE, ROW, type Table } from './sample';
+import { sensitivity, type Quantity } from './quantities';
 
 /** The supremum of |something| over the axis. `frequency` null: only approached as ω → ∞. */
 export interface Supremum {
@@ -8,8 +7,8 @@ export interface Supremum {
   readonly frequency: number | null;
 }
 
-/** Within this distance of −1 a peak may be far sharper than the rows beside it tell, so it is always looked for. */
-const NEAR_CRITICAL = 0.7;
+/** Within 0.7 of −1, that is above this ln|S|, a peak may be far sharper than the rows beside it tell: it is always looked for. */
+const NEAR_CRITICAL = -Math.log(0.7);
 /** A peak inside the axis must stand out of what the ends tend to by more than rounding. */
 const STANDS_OUT = 1e-12;
 
@@ -26,32 +25,25 @@ export const supremum = (probe: Probe, quantity: Quantity, ends: { atZero: numbe
 };
 
 const greatest = (probe: Probe, quantity: Quantity): { log: number; omega: number } => {
-  const { table, count } = probe;
   let log = -Infinity;
   let omega = 0;
-  for (let i = 0; i < count; i += 1) {
-    const value = quantity.value(table, i * ROW);
-    if (value <= log) continue;
+  const consider = (value: number, frequency: number) => {
+    if (value <= log) return;
     log = value;
-    omega = table[i * ROW + OMEGA];
-  }
-  for (let i = 0; i < count - 1; i += 1) {
-    const row = i * ROW;
-    const slopeA = quantity.slope(table, row);
-    const slopeB = quantity.slope(table, row + ROW);
+    omega = frequency;
+  };
+  for (let i = 0; i < probe.count; i += 1) consider(probe.valueAt(i, quantity), probe.frequencyAt(i));
+  for (let i = 0; i < probe.count - 1; i += 1) {
+    const slopeA = probe.slopeAt(i, quantity);
+    const slopeB = probe.slopeAt(i + 1, quantity);
     if (!(slopeA > 0 && slopeB < 0) || probe.jumps(i)) continue;
-    const a = table[row + OMEGA];
-    const b = table[row + ROW + OMEGA];
-    const width = Math.log(b / a);
-    const reach = Math.min(quantity.value(table, row) + slopeA * width, quantity.value(table, row + ROW) - slopeB * width);
-    if (reach < log && !nearCritical(table, row) && !nearCritical(table, row + ROW)) continue;
-    const peak = probe.stationary(quantity, { a, slopeA, b, slopeB });
-    const value = quantity.value(probe.row, 0);
-    if (value <= log) continue;
-    log = value;
-    omega = peak;
+    const width = Math.log(probe.frequencyAt(i + 1) / probe.frequencyAt(i));
+    const reach = Math.min(probe.valueAt(i, quantity) + slopeA * width, probe.valueAt(i + 1, quantity) - slopeB * width);
+    if (reach < log && !nearCritical(probe, i) && !nearCritical(probe, i + 1)) continue;
+    const peak = probe.stationary(quantity, i);
+    consider(probe.found[quantity], peak);
   }
   return { log, omega };
 };
 
-const nearCritical = (table: Table, row: number): boolean => Math.hypot(1 + table[row + RE], table[row + IM]) < NEAR_CRITICAL;
+const nearCritical = (probe: Probe, i: number): boolean => probe.valueAt(i, sensitivity) > NEAR_CRITICAL;

@@ -1,48 +1,68 @@
 import { bracketedRoot } from '@/analysis/numbers/bracketed-root';
 import type { LoopFunction } from './loop-function';
-import type { Quantity } from './quantities';
+import { readQuantities, READINGS, SLOPE, type Quantity } from './quantities';
 import { OMEGA, ROW, type Table } from './sample';
 
 /**
- * Reads the exact loop between two rows of a grid. What it finds stands in its own row, valid until the next search.
+ * Reads the exact loop on the rows of a grid and between two of them. What it finds between them stands in `found`, valid
+ * until the next search.
  */
 export class Probe {
-  readonly row: Table = new Float64Array(ROW);
+  /** Every quantity at every row of the grid. */
+  readonly readings: Float64Array;
+  /** The same where the probe stands. */
+  readonly found = new Float64Array(READINGS);
+  private readonly row: Table = new Float64Array(ROW);
+
   constructor(
     private readonly loop: LoopFunction,
     readonly table: Table,
     readonly count: number,
-  ) {}
+  ) {
+    this.readings = new Float64Array(count * READINGS);
+    for (let i = 0; i < count; i += 1) readQuantities(table, i * ROW, this.readings, i * READINGS);
+  }
 
-  /** Samples the loop at ω into the probe's row. */
-  moveTo(omega: number): void {
-    this.loop.sampleAt(omega, this.row, 0);
+  frequencyAt(i: number): number {
+    return this.table[i * ROW + OMEGA];
+  }
+
+  valueAt(i: number, quantity: Quantity): number {
+    return this.readings[i * READINGS + quantity];
+  }
+
+  slopeAt(i: number, quantity: Quantity): number {
+    return this.readings[i * READINGS + quantity + SLOPE];
   }
 
   /** L jumps somewhere between rows i and i + 1: an undamped pole or zero lies there. */
   jumps(i: number): boolean {
-    const from = this.table[i * ROW + OMEGA];
-    const to = this.table[(i + 1) * ROW + OMEGA];
+    const from = this.frequencyAt(i);
+    const to = this.frequencyAt(i + 1);
     return this.loop.axisFrequencies.some((omega) => omega > from && omega < to);
   }
 
-  /** Frequency between two others where `quantity` is stationary; its slopes there have different signs. */
-  stationary(quantity: Quantity, ends: { a: number; slopeA: number; b: number; slopeB: number }): number {
-    return this.settle({ a: ends.a, fa: ends.slopeA, b: ends.b, fb: ends.slopeB }, () => quantity.slope(this.row, 0));
+  /** Frequency between rows i and i + 1 where `quantity` is stationary; its slopes there have different signs. */
+  stationary(quantity: Quantity, i: number): number {
+    const [a, b] = [this.frequencyAt(i), this.frequencyAt(i + 1)];
+    return this.settle(quantity + SLOPE, 0, { a, fa: this.slopeAt(i, quantity), b, fb: this.slopeAt(i + 1, quantity) });
   }
 
   /** Frequency between two others where `quantity` equals `level`; the given values lie on both sides of it. */
   crossing(quantity: Quantity, level: number, ends: { a: number; valueA: number; b: number; valueB: number }): number {
-    const bracket = { a: ends.a, fa: ends.valueA - level, b: ends.b, fb: ends.valueB - level };
-    return this.settle(bracket, () => quantity.value(this.row, 0) - level);
+    return this.settle(quantity, level, { a: ends.a, fa: ends.valueA - level, b: ends.b, fb: ends.valueB - level });
   }
 
-  private settle(bracket: { a: number; fa: number; b: number; fb: number }, read: () => number): number {
-    const omega = bracketedRoot((x) => {
-      this.moveTo(x);
-      return read();
-    }, bracket);
-    this.moveTo(omega);
+  private settle(place: number, level: number, bracket: { a: number; fa: number; b: number; fb: number }): number {
+    let last = NaN;
+    const read = (omega: number) => {
+      last = omega;
+      this.loop.sampleAt(omega, this.row, 0);
+      readQuantities(this.row, 0, this.found, 0);
+      return this.found[place] - level;
+    };
+    const omega = bracketedRoot(read, bracket);
+    if (omega !== last) read(omega);
     return omega;
   }
 }

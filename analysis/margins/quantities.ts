@@ -1,67 +1,58 @@
 import * as S from './sample';
 
-/** A real function of frequency, read from one row: its natural logarithm (or, for a phase, its value) and slope to ln ω. */
-export interface Quantity {
-  value(table: S.Table, row: number): number;
-  slope(table: S.Table, row: number): number;
-}
+/**
+ * A real function of frequency by its place in a row of readings: its natural logarithm (or, for a phase, its value) stands
+ * there, and its derivative to ln ω right after.
+ */
+export type Quantity = number;
 
-const logAbsolute = (re: number, im: number): number => 0.5 * Math.log(re * re + im * im);
+/** From a quantity's place to its slope's. */
+export const SLOPE = 1;
 
-/** ln|1 + L|. */
-const logDifference = (t: S.Table, row: number): number => logAbsolute(1 + t[row + S.RE], t[row + S.IM]);
+export const loopGain: Quantity = 0;
+export const loopPhase: Quantity = 2;
+export const sensitivity: Quantity = 4;
+export const complementarySensitivity: Quantity = 6;
+/** |(S − T)/2|. */
+export const balancedSensitivity: Quantity = 8;
+/** |K·C_y·S|. */
+export const noiseSensitivity: Quantity = 10;
+export const referenceResponse: Quantity = 12;
+export const READINGS = 14;
 
 /**
- * Re(λ·T) with λ = d ln L/d ln ω: the slope of ln|1 + L|. T is formed from 1/L where L is large, so that nothing overflows.
+ * Reads every quantity off the sample at `row` of a table into `readings` from `place` on.
+ *
+ * With λ = d ln L/d ln ω: ln|1 + L| has the slope Re(λ·T), ln|T| has Re(λ·S), which does not cancel where T is near 1, and
+ * ln|(S − T)/2| = ln|1 − L|/(2·|1 + L|) has −2·Re(λ·L/(1 − L²)).
+ *
+ * @see REFERENCES "Slopes of the peaks", Seiler 2020
  */
-const differenceSlope = (t: S.Table, row: number): number => {
-  const re = t[row + S.RE];
-  const im = t[row + S.IM];
+export const readQuantities = (table: S.Table, row: number, readings: Float64Array, place: number): void => {
+  const re = table[row + S.RE];
+  const im = table[row + S.IM];
+  const log = table[row + S.LOG];
+  const logSlope = table[row + S.LOG_SLOPE];
+  const phaseSlope = table[row + S.PHASE_SLOPE];
   const square = (1 + re) * (1 + re) + im * im;
-  const tRe = (re * (1 + re) + im * im) / square;
-  const tIm = im / square;
-  return t[row + S.LOG_SLOPE] * tRe - t[row + S.PHASE_SLOPE] * tIm;
-};
-
-export const loopGain: Quantity = { value: (t, row) => t[row + S.LOG], slope: (t, row) => t[row + S.LOG_SLOPE] };
-export const loopPhase: Quantity = { value: (t, row) => t[row + S.PHASE], slope: (t, row) => t[row + S.PHASE_SLOPE] };
-
-export const sensitivity: Quantity = {
-  value: (t, row) => -logDifference(t, row),
-  slope: (t, row) => -differenceSlope(t, row),
-};
-
-/** Its slope is Re(λ·S): no cancellation where T is near 1. */
-export const complementarySensitivity: Quantity = {
-  value: (t, row) => t[row + S.LOG] - logDifference(t, row),
-  slope: (t, row) => {
-    const re = 1 + t[row + S.RE];
-    const im = t[row + S.IM];
-    const square = re * re + im * im;
-    return (t[row + S.LOG_SLOPE] * re + t[row + S.PHASE_SLOPE] * im) / square;
-  },
-};
-
-/** |(S − T)/2| = |1 − L|/(2·|1 + L|), whose slope is −2·Re(λ·L/(1 − L²)). @see REFERENCES Seiler 2020 */
-export const balancedSensitivity: Quantity = {
-  value: (t, row) => logAbsolute(1 - t[row + S.RE], t[row + S.IM]) - Math.LN2 - logDifference(t, row),
-  slope: (t, row) => {
-    const re = t[row + S.RE];
-    const im = t[row + S.IM];
-    const size = re * re + im * im;
-    // L/(1 − L²) = 1/(1/L − L), with 1/L = (re − j·im)/size.
-    const x = re / size - re;
-    const y = -im / size - im;
-    return (-2 * (t[row + S.LOG_SLOPE] * x + t[row + S.PHASE_SLOPE] * y)) / (x * x + y * y);
-  },
-};
-
-export const noiseSensitivity: Quantity = {
-  value: (t, row) => t[row + S.COMMAND_LOG] - logDifference(t, row),
-  slope: (t, row) => t[row + S.COMMAND_LOG_SLOPE] - differenceSlope(t, row),
-};
-
-export const referenceResponse: Quantity = {
-  value: (t, row) => t[row + S.REFERENCE_LOG] - logDifference(t, row),
-  slope: (t, row) => t[row + S.REFERENCE_LOG_SLOPE] - differenceSlope(t, row),
+  const difference = 0.5 * Math.log(square);
+  const differenceSlope = logSlope * ((re * (1 + re) + im * im) / square) - phaseSlope * (im / square);
+  // L/(1 − L²) = 1/(1/L − L), with 1/L = (re − j·im)/size.
+  const size = re * re + im * im;
+  const x = re / size - re;
+  const y = -im / size - im;
+  readings[place + loopGain] = log;
+  readings[place + loopGain + SLOPE] = logSlope;
+  readings[place + loopPhase] = table[row + S.PHASE];
+  readings[place + loopPhase + SLOPE] = phaseSlope;
+  readings[place + sensitivity] = -difference;
+  readings[place + sensitivity + SLOPE] = -differenceSlope;
+  readings[place + complementarySensitivity] = log - difference;
+  readings[place + complementarySensitivity + SLOPE] = (logSlope * (1 + re) + phaseSlope * im) / square;
+  readings[place + balancedSensitivity] = 0.5 * Math.log((1 - re) * (1 - re) + im * im) - Math.LN2 - difference;
+  readings[place + balancedSensitivity + SLOPE] = (-2 * (logSlope * x + phaseSlope * y)) / (x * x + y * y);
+  readings[place + noiseSensitivity] = table[row + S.COMMAND_LOG] - difference;
+  readings[place + noiseSensitivity + SLOPE] = table[row + S.COMMAND_LOG_SLOPE] - differenceSlope;
+  readings[place + referenceResponse] = table[row + S.REFERENCE_LOG] - difference;
+  readings[place + referenceResponse + SLOPE] = table[row + S.REFERENCE_LOG_SLOPE] - differenceSlope;
 };

@@ -2,23 +2,25 @@
 export const OMEGA = 0;
 export const RE = 1;
 export const IM = 2;
+export const MAGNITUDE = 3;
 /** ln|L|, and its derivative to ln ω. */
-export const LOG = 3;
-export const LOG_SLOPE = 4;
+export const LOG = 4;
+export const LOG_SLOPE = 5;
 /** Unwrapped argument of L, and its derivative to ln ω. */
-export const PHASE = 5;
-export const PHASE_SLOPE = 6;
+export const PHASE = 6;
+export const PHASE_SLOPE = 7;
 /** The plant with its dead time. */
-export const PLANT_LOG = 7;
-export const PLANT_PHASE = 8;
+export const PLANT_MAGNITUDE = 8;
+export const PLANT_PHASE = 9;
 /** Filters and feedback controller, K·C_y. */
-export const COMMAND_LOG = 9;
-export const COMMAND_LOG_SLOPE = 10;
+export const COMMAND_MAGNITUDE = 10;
 export const COMMAND_PHASE = 11;
+export const COMMAND_LOG = 12;
+export const COMMAND_LOG_SLOPE = 13;
 /** P·K·(C_r + F): the reference response is this times S. */
-export const REFERENCE_LOG = 12;
-export const REFERENCE_LOG_SLOPE = 13;
-export const ROW = 14;
+export const REFERENCE_LOG = 14;
+export const REFERENCE_LOG_SLOPE = 15;
+export const ROW = 16;
 
 /** Rows one after another, each at `index * ROW`. */
 export type Table = Float64Array;
