@@ -51,7 +51,6 @@ function AnalysisPage({ analysis, caseId, onCase, children }: AnalysisPageProps)
   const router = useRouter();
   const phone = useLayout() === 'phone';
   const result = analysis.results.find((one) => one.case.id === caseId) ?? analysis.results[0];
-  const worst = analysis.results.find((one) => one.case.id === analysis.headline.case?.id) ?? analysis.results[0];
   const { units } = (analysis.inputs.cases.find((one) => one.id === result.case.id) ?? analysis.inputs.cases[0]).plant;
   const { id, name, revision } = analysis.design;
   const title = `${name}, rev ${revision}`;
@@ -67,7 +66,7 @@ function AnalysisPage({ analysis, caseId, onCase, children }: AnalysisPageProps)
   return (
     <Page title={title} sub={computed} actions={bench}>
       <DocumentTitle parts={[title, 'Analyses', project.name]} />
-      <VerdictStrip headline={analysis.headline} caseCount={analysis.results.length} numbers={worst.numbers} />
+      <VerdictStrip headline={analysis.headline} room={analysis.room} results={analysis.results} />
       {phone ? (
         <Paper>
           <Heading level={2}>{title}</Heading>

@@ -1,7 +1,8 @@
 import { memo } from 'react';
 import { fonts } from '@/components/ui/tokens';
 import { useTheme } from '@/components/ui/theme';
-import { type LabelTone, type PanelLabel, textWidth } from '@/figures';
+import type { LabelTone, PanelLabel } from '@/figures';
+import { textWidth } from '@/figures/text-width';
 
 export type TextTone = LabelTone | 'tick' | 'title' | 'flag' | 'fail';
 

@@ -1,7 +1,9 @@
 import { memo, useMemo } from 'react';
 import { View } from 'react-native';
 import { useTheme } from '@/components/ui/theme';
-import { edgeRuler, type EdgeRulerShape, round2, textWidth } from '@/figures';
+import { edgeRuler, type EdgeRulerShape } from '@/figures/edge-ruler';
+import { round2 } from '@/figures/geometry';
+import { textWidth } from '@/figures/text-width';
 import { ChartText } from './chart-text';
 import { KerbStripe } from './kerb-stripe';
 import { useChartFrame } from './use-chart-frame';

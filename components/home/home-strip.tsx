@@ -8,7 +8,5 @@ export function HomeStrip() {
   const { id, headline, latestAnalysis } = useProject();
   const { data: analysis } = useQuery({ ...analysisQuery(id, latestAnalysis?.id ?? ''), enabled: latestAnalysis !== null });
   if (!analysis || !headline) return null;
-  const { results } = analysis;
-  const worst = results.find((result) => result.case.id === headline.case?.id) ?? results[0];
-  return <VerdictStrip headline={headline} caseCount={results.length} numbers={worst.numbers} />;
+  return <VerdictStrip headline={headline} room={analysis.room} results={analysis.results} />;
 }

@@ -1,32 +1,35 @@
 import { StyleSheet, View } from 'react-native';
-import type { Analysis, Headline } from '@/contract';
+import type { CaseResult, Headline, Room } from '@/contract';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
 import { gutter } from '@/components/ui/tokens';
 import { useUnits } from '@/components/ui/units';
 import { useLayout } from '@/components/ui/use-layout';
 import { VerdictBlock } from '@/components/ui/verdict-block';
-import { headlineText } from './headline-text';
+import { BesideLine } from './beside-line';
+import { CheckRulers } from './check-rulers';
+import { headlineLines, headlineText } from './headline-text';
+import { HeadlineRuler } from './headline-ruler';
 import { marginNumbers } from './margin-numbers';
 import { MarginRow } from './margin-row';
+import { RoomBlock } from './room-block';
+import { worstChecks } from './worst-checks';
 
 export interface VerdictStripProps {
   headline: Headline;
-  /** Over how many cases the number is the worst. */
-  caseCount: number;
-  /** The numbers of the case that the headline comes from. */
-  numbers: Analysis;
+  /** Null where it was not computed, or nothing is demanded. */
+  room: Room | null;
+  results: readonly CaseResult[];
 }
 
-/** The number first: the worst over all cases, its case and frequency, what is demanded of it or why nobody judged it; beside it the case's margins. */
-export function VerdictStrip({ headline, caseCount, numbers }: VerdictStripProps) {
+/** As many as stand side by side on a wide screen. */
+const MOST_RULERS = 5;
+
+/** The number first: the worst over all cases, its case and frequency, the room that is left, and everything that is demanded on its ruler. */
+export function VerdictStrip({ headline, room, results }: VerdictStripProps) {
   const { colors } = useTheme();
-  const units = useUnits();
   const phone = useLayout() === 'phone';
-  const text = headlineText(headline, units);
-  const worst = caseCount === 1 ? 'the only case' : `worst of ${caseCount}`;
-  const unstable = headline.unstableCases > 0;
-  const place = [worst, text.frequency].filter(Boolean).join(', ');
+  const text = headlineText(headline, useUnits());
   return (
     <View
       role="region"
@@ -41,19 +44,33 @@ export function VerdictStrip({ headline, caseCount, numbers }: VerdictStripProps
               {headline.case.name}
             </Text>
           )}
-          <Text step="note" tone="ink2">
-            {unstable ? `unstable in ${headline.unstableCases} of ${caseCount}. Margins have no meaning there.` : place}
-          </Text>
-          {text.limit || (headline.reason && !text.words) ? (
-            <Text step="small" tone="ink2">
-              {text.limit ?? headline.reason}
+          {headlineLines(headline, text, results.length).map((line) => (
+            <Text key={line} step="note" tone="ink2">
+              {line}
             </Text>
-          ) : null}
+          ))}
+          {headline.beside && <BesideLine beside={headline.beside} />}
         </View>
       </View>
-      <MarginRow numbers={marginNumbers(numbers, units)} unstable={!numbers.closedLoop.stable} compact={phone} />
+      {room && !phone ? <RoomBlock room={room} /> : null}
+      <Demands headline={headline} results={results} />
+      {room && phone ? <RoomBlock room={room} compact /> : null}
     </View>
   );
+}
+
+/** Rulers where limits are demanded, else the margins of the headline's case. */
+function Demands({ headline, results }: Omit<VerdictStripProps, 'room'>) {
+  const units = useUnits();
+  const phone = useLayout() === 'phone';
+  const checks = worstChecks(results);
+  if (checks.length === 0) {
+    const { numbers } = results.find((result) => result.case.id === headline.case?.id) ?? results[0];
+    return <MarginRow numbers={marginNumbers(numbers, units)} unstable={!numbers.closedLoop.stable} compact={phone} />;
+  }
+  if (!phone) return <CheckRulers checks={checks.slice(0, MOST_RULERS)} />;
+  const worst = checks.find(({ check }) => check.quantity === headline.quantity) ?? checks[0];
+  return <HeadlineRuler worst={worst} />;
 }
 
 const styles = StyleSheet.create({
@@ -64,7 +81,7 @@ const styles = StyleSheet.create({
     flexWrap: 'wrap',
     alignItems: 'center',
     justifyContent: 'space-between',
-    columnGap: 34,
+    columnGap: 30,
     rowGap: 8,
     minHeight: 84,
     paddingHorizontal: gutter.wide,

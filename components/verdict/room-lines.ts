@@ -1,0 +1,38 @@
+import type { FirstBreak, Room, RoomWay } from '@/contract';
+import { formatFactor, formatRoomMilliseconds, formatRoomPercent } from '@/figures/format';
+import { quantityName, quantityText, type ReaderUnits } from '@/figures/quantity-text';
+
+/** One way in which the loop may change, and what stops it first. */
+export interface RoomLine {
+  readonly way: keyof Room;
+  /** "7 % more gain" */
+  readonly change: string;
+  /** "before Ms 1.70"; empty where nothing broke as far as was looked. */
+  readonly before: string;
+  /** The case in which it breaks; null where none does. */
+  readonly caseName: string | null;
+}
+
+/** From twice the gain on a factor reads better than per cent. */
+const asMoreGain = (factor: number) =>
+  factor < 2 ? formatRoomPercent(factor - 1) : `${formatFactor(Math.floor(factor * 100) / 100)} times`;
+
+const changes: readonly (readonly [keyof Room, (amount: number) => string, string])[] = [
+  ['moreGain', asMoreGain, 'more gain'],
+  ['lessGain', (factor) => formatRoomPercent(1 - factor), 'less gain'],
+  ['moreDeadTime', formatRoomMilliseconds, 'more dead time'],
+];
+
+function stop({ quantity, limit }: FirstBreak, units: ReaderUnits): string {
+  if (quantity === null) return 'before it is unstable';
+  return `before ${quantityName(quantity)}${limit === null ? '' : ` ${quantityText(quantity, limit, units).text}`}`;
+}
+
+function line(way: RoomWay, [key, amount, words]: (typeof changes)[number], units: ReaderUnits): RoomLine {
+  const first = way.any ?? way.instability;
+  if (first === null) return { way: key, change: `over ${amount(way.lookedTo)} ${words}`, before: '', caseName: null };
+  return { way: key, change: `${amount(first.amount)} ${words}`, before: stop(first, units), caseName: first.case.name };
+}
+
+/** What may change, one at a time, before the first limit breaks in any case. Amounts are rounded down: never more than there is. */
+export const roomLines = (room: Room, units: ReaderUnits): RoomLine[] => changes.map((change) => line(room[change[0]], change, units));
