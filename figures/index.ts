@@ -1,3 +1,5 @@
+export * from './axis-text';
+export * from './cell-ruler';
 export * from './curve-marks';
 export * from './edge-ruler';
 export * from './filter-text';
@@ -13,6 +15,8 @@ export * from './geometry';
 export * from './interpolate';
 export * from './kerb';
 export * from './label-board';
+export * from './lap-chart';
+export * from './lap-labels';
 export * from './linear-axis';
 export * from './log-scale';
 export * from './loop-axes';

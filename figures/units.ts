@@ -2,6 +2,7 @@ import type { Preferences } from '@/contract';
 
 export type FrequencyUnit = Preferences['frequencyUnit'];
 export type MagnitudeUnit = Preferences['magnitudeUnit'];
+export type SpeedUnit = Preferences['speedUnit'];
 
 const TURN = 2 * Math.PI;
 
@@ -19,3 +20,12 @@ export const fromDecibels = (decibels: number): number => 10 ** (decibels / 20);
 
 /** A factor in the reader's magnitude unit. */
 export const magnitudeIn = (unit: MagnitudeUnit, factor: number): number => (unit === 'dB' ? toDecibels(factor) : factor);
+
+const KMH_PER_MS = 3.6;
+
+/** m/s → the reader's unit. */
+export const speedIn = (unit: SpeedUnit, metresPerSecond: number): number =>
+  unit === 'km/h' ? metresPerSecond * KMH_PER_MS : metresPerSecond;
+
+/** The reader's unit → m/s. */
+export const speedFrom = (unit: SpeedUnit, value: number): number => (unit === 'km/h' ? value / KMH_PER_MS : value);

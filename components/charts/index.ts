@@ -8,6 +8,7 @@ export { PlantSheet, type PlantSheetProps } from './plant-sheet';
 export { PlantReadOut } from './plant-cursor';
 export { ReadOut, type ReadOutProps, TimeReadOut, type TimeReadOutProps } from './read-out';
 export { CurveKey, CurveSwatch } from './curve-key';
+export { LapChart, type LapChartProps } from './lap-chart';
 export { EdgeRuler, type EdgeRulerProps } from './edge-ruler';
 export { GainRule, type GainRuleProps } from './gain-rule';
 export type { GainChange } from './use-gain-drag';
