@@ -8,6 +8,8 @@ import { caseRoutes } from './cases/case-routes';
 import { designRoutes } from './designs/design-routes';
 import type { Route } from './http/route';
 import { loopRoutes } from './loops/loop-routes';
+import { invitationRoutes } from './members/invitation-routes';
+import { memberRoutes } from './members/member-routes';
 import { plantRoutes } from './plants/plant-routes';
 import { projectRoutes } from './projects/project-routes';
 import { systemRoutes } from './system/system-routes';
@@ -20,6 +22,8 @@ export const routes: readonly Route[] = [
   ...verificationRoutes,
   ...accountRoutes,
   ...projectRoutes,
+  ...memberRoutes,
+  ...invitationRoutes,
   ...plantRoutes,
   ...designRoutes,
   ...caseRoutes,

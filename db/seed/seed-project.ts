@@ -3,7 +3,7 @@ import type { Context } from '@/server/context';
 import { addDesignRevision, enterDesign } from '@/server/designs/design-service';
 import { enterPlant } from '@/server/plants/plant-service';
 import { startProject } from '@/server/projects/project-service';
-import { addMember } from '../stores/project-store';
+import { addMember } from '../stores/member-store';
 import type { Stamp } from '../stores/stamp';
 import type { DemoProject } from './demo-projects';
 import type { DemoTeam } from './seed-people';

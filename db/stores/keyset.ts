@@ -37,6 +37,14 @@ export function before(time: SQLiteColumn, id: SQLiteColumn, { cursor }: PageQue
   return or(lt(time, at), and(eq(time, at), lt(id, last.id)));
 }
 
+/** Rows after the cursor in a list that is sorted by time and id, oldest first. */
+export function after(time: SQLiteColumn, id: SQLiteColumn, { cursor }: PageQuery): SQL | undefined {
+  if (cursor === undefined) return undefined;
+  const last = split(cursor);
+  const at = new Date(last.key);
+  return or(gt(time, at), and(eq(time, at), gt(id, last.id)));
+}
+
 /** Rows after the cursor in a list that is sorted by a whole number, upwards. */
 export const beyond = (column: SQLiteColumn, { cursor }: PageQuery) => (cursor === undefined ? undefined : gt(column, split(cursor).key));
 

@@ -1,11 +1,12 @@
 import { and, asc, desc, eq, inArray } from 'drizzle-orm';
 import { alias } from 'drizzle-orm/sqlite-core';
-import type { PageQuery, Project, Role } from '@/contract';
+import type { PageQuery, Project } from '@/contract';
 import type { Database } from '../open';
 import { analysis, design, project, projectMember, team, user } from '../tables';
 import { transact } from '../transact';
 import { recordActivity } from './activity-store';
 import { before, rowsFor, toPage, type Page } from './keyset';
+import { addMember } from './member-store';
 import type { ActivityEntry, Stamp } from './stamp';
 
 /** A project as one of its members sees it, with the version that its ETag tells. */
@@ -123,13 +124,6 @@ export function createProject(db: Database, { activity, stamp, ...created }: New
     addMember(within, { projectId: created.id, userId: stamp.by, role: 'owner' }, stamp.at);
     recordActivity(within, created.id, activity, stamp);
   });
-}
-
-export function addMember(within: Database, member: Reader & { role: Role }, at: Date): void {
-  within
-    .insert(projectMember)
-    .values({ ...member, createdAt: at })
-    .run();
 }
 
 interface ProjectChange {

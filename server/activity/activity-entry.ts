@@ -10,7 +10,15 @@ type Action =
   | 'plant.revised'
   | 'design.created'
   | 'design.revised'
-  | 'analysis.kept';
+  | 'analysis.kept'
+  | 'member.invited'
+  | 'member.added'
+  | 'member.joined'
+  | 'member.roleChanged'
+  | 'member.removed'
+  | 'member.left'
+  | 'invitation.resent'
+  | 'invitation.takenBack';
 
 /** A line of a project's history; `summary` goes on where the person's name stands. */
 export const activityEntry = (action: Action, summary: string, detail?: string): ActivityEntry => ({

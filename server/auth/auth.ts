@@ -10,6 +10,8 @@ import type { Config } from '../config';
 import { resetLetter, verificationLetter } from '../mail/letters';
 import type { Mailer } from '../mail/mailer';
 import type { Message } from '../mail/message';
+import { postLetter } from '../mail/post-letter';
+import { joinWhereInvited } from '../members/join';
 import { ADDRESS_HEADER } from './call-headers';
 
 interface AuthParts {
@@ -27,10 +29,7 @@ const DAY_S = 24 * HOUR_S;
  * what is reachable is what we validate, limit, describe and test.
  */
 export function createAuth({ config, db, mailer, log }: AuthParts) {
-  // Not waited for: a slow mail server must not hold up a sign-up, nor tell by its slowness which addresses are known.
-  const post = async (letter: Message) => {
-    mailer.send(letter).catch((err: unknown) => log.error({ err, subject: letter.subject }, 'a letter was not sent'));
-  };
+  const post = async (letter: Message) => postLetter({ mailer, log }, letter);
   return betterAuth({
     appName: 'Kerbline',
     baseURL: config.baseUrl,
@@ -62,10 +61,18 @@ export function createAuth({ config, db, mailer, log }: AuthParts) {
       sendOnSignUp: true,
       expiresIn: DAY_S,
       sendVerificationEmail: ({ user: { name, email }, url }) => post(verificationLetter({ name, email, url })),
+      afterEmailVerification: async ({ id }) => joinWhereInvited(db, id),
     },
     databaseHooks: {
-      // Sign-up ends with a session, so nobody ever works without a team, also where the process died in between.
-      session: { create: { before: async ({ userId }) => ensureTeam(db, userId) } },
+      session: {
+        create: {
+          // Sign-up ends with a session, so nobody ever works without a team or waits for a project, also where the process died in between.
+          before: async ({ userId }) => {
+            ensureTeam(db, userId);
+            joinWhereInvited(db, userId);
+          },
+        },
+      },
     },
   });
 }

@@ -17,6 +17,8 @@ export const limits = {
   failedSignIn: { name: 'failed-sign-in', most: 10, windowMs: 15 * MINUTE_MS },
   mailAsked: { name: 'mail-asked', most: 10, windowMs: MINUTE_MS },
   mailReceived: { name: 'mail-received', most: 5, windowMs: 15 * MINUTE_MS },
+  invitationSent: { name: 'invitation-sent', most: 60, windowMs: 60 * MINUTE_MS },
+  invitationReceived: { name: 'invitation-received', most: 5, windowMs: 15 * MINUTE_MS },
 } as const satisfies Record<string, Limit>;
 
 /** One customer's network is one caller: an IPv6 address counts by its first 64 bits. */

@@ -65,6 +65,13 @@ export class Conflict extends Problem {
   }
 }
 
+/** 409: what is asked would change a project that is put away. */
+export class Archived extends Conflict {
+  constructor() {
+    super('This project is archived and can only be read. An owner can take it out of the archive.');
+  }
+}
+
 /** 422: well-formed, but out of range or without meaning. */
 export class Meaningless extends Problem {
   constructor(errors: readonly ProblemError[]) {

@@ -1,13 +1,18 @@
 import type { Request } from 'express';
 import type { z } from 'zod';
-import type { Role } from '@/contract';
-import type { Permission } from '../auth/permissions';
+import type { Permission, Role } from '@/contract';
 import type { SignedIn } from '../auth/signed-in';
 import type { Context } from '../context';
 import type { Answer } from './answer';
 
-/** Who may call a route: anyone, anyone signed in, or a member of the path's `:projectId` whose role has the permission. */
-export type Access = 'public' | 'session' | { readonly project: Permission };
+/** A member of the path's `:projectId` whose role has the permission. An archived project is closed to all but `read`, unless said otherwise. */
+interface ProjectAccess {
+  readonly project: Permission;
+  readonly whileArchived?: true;
+}
+
+/** Who may call a route: anyone, anyone signed in, or a member. */
+export type Access = 'public' | 'session' | ProjectAccess;
 
 export interface Input {
   readonly params?: z.ZodObject;

@@ -1,3 +1,4 @@
+import type { InvitedRole } from '@/contract';
 import { writeLetter, type Message } from './message';
 
 interface Addressed {
@@ -28,5 +29,33 @@ export function resetLetter({ name, email, url }: Addressed): Message {
     after: [
       'The link works once, within one hour, and signs out every device. If it was not you, do nothing: your password stays as it is.',
     ],
+  });
+}
+
+interface Invited {
+  readonly email: string;
+  readonly project: string;
+  readonly invitedBy: string;
+  readonly role: InvitedRole;
+  readonly url: string;
+}
+
+export function invitationLetter({ email, project, invitedBy, role, url, days }: Invited & { readonly days: number }): Message {
+  return writeLetter({
+    to: email,
+    subject: `${invitedBy} invites you to ${project}`,
+    before: ['Hello,', `${invitedBy} invites you to the project “${project}” in Kerbline, as ${role}.`],
+    link: { label: 'Open the invitation', url },
+    after: [`The link works once, for ${days} days, with an account of this address. If you do not know ${invitedBy}, do nothing.`],
+  });
+}
+
+export function membershipLetter({ email, project, invitedBy, role, url }: Invited): Message {
+  return writeLetter({
+    to: email,
+    subject: `${invitedBy} has made you ${role} of ${project}`,
+    before: ['Hello,', `${invitedBy} has made you ${role} of the project “${project}” in Kerbline.`],
+    link: { label: 'Open the project', url },
+    after: ['If this is not for you, you can leave it on the page of its members.'],
   });
 }

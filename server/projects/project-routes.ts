@@ -49,7 +49,7 @@ export const projectRoutes = [
     path: '/api/projects/:projectId',
     summary: 'Renames, describes, archives a project',
     tag,
-    access: { project: 'edit' },
+    access: { project: 'edit', whileArchived: true },
     input: { params: inProject, body: UpdateProject },
     output: Project,
     handler: ({ context, user, project, body, expectVersion }) => {
@@ -63,7 +63,7 @@ export const projectRoutes = [
     path: '/api/projects/:projectId',
     summary: 'Deletes a project with everything in it, after its name is repeated',
     tag,
-    access: { project: 'manage' },
+    access: { project: 'manage', whileArchived: true },
     input: { params: inProject, body: DeleteProject },
     output: null,
     handler: ({ context, user, project, body, expectVersion }) => {

@@ -6,7 +6,8 @@ import { createProject, deleteProject, findProject, updateProject, type SeenProj
 import type { Stamp } from '@/db/stores/stamp';
 import { teamsOf } from '@/db/stores/team-store';
 import { activityEntry } from '../activity/activity-entry';
-import { Meaningless, NotAllowed, NotFound, Problem } from '../http/problem';
+import { changedMeanwhile } from '../http/etag';
+import { Archived, Meaningless, NotAllowed, NotFound } from '../http/problem';
 
 interface Place {
   readonly projectId: string;
@@ -45,15 +46,16 @@ export function startProject(
   return openProject(db, { projectId: id, userId: stamp.by });
 }
 
-const changedMeanwhile = () => new Problem(412, 'Someone has changed this since you read it. Read it again, then make your change.');
-
 function changeEntry({ archived }: z.output<typeof UpdateProject>, name: string) {
   if (archived === true) return activityEntry('project.archived', `archived the project ${name}`);
   if (archived === false) return activityEntry('project.restored', `took the project ${name} out of the archive`);
   return activityEntry('project.changed', `changed what the project ${name} says of itself`);
 }
 
-/** @throws NotAllowed where someone else than an owner archives; Problem 412 where another change came first */
+/**
+ * Changes what a project says of itself; of an archived one, only that it is archived.
+ * @throws NotAllowed where someone else than an owner archives, Archived, Problem 412 where another change came first
+ */
 export function changeProject(
   db: Database,
   { project, version }: SeenProject,
@@ -62,6 +64,7 @@ export function changeProject(
 ): SeenProject {
   if (changes.archived !== undefined && project.role !== 'owner')
     throw new NotAllowed('Only an owner archives a project or takes it back.');
+  if (project.archived && changes.archived !== false) throw new Archived();
   const activity = changeEntry(changes, changes.name ?? project.name);
   if (!updateProject(db, { projectId: project.id, version, changes, activity, stamp })) throw changedMeanwhile();
   return openProject(db, { projectId: project.id, userId: stamp.by });

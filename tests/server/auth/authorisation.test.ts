@@ -1,8 +1,8 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import type { Me, Role } from '@/contract';
+import { allows, type Me, type Role } from '@/contract';
 import { project, projectMember } from '@/db/tables';
-import { allows } from '@/server/auth/permissions';
+
 import type { Route } from '@/server/http/route';
 import { routes } from '@/server/routes';
 import { startTestApp, type TestApp } from '../../support/test-app';

@@ -1,6 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { Me, Project } from '@/contract';
-import { addMember } from '@/db/stores/project-store';
+import { addMember } from '@/db/stores/member-store';
 import { makeProject, made } from '../../support/a-project';
 import type { Client, Reply } from '../../support/client';
 import { startTestApp, type TestApp } from '../../support/test-app';
