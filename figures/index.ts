@@ -1,5 +1,6 @@
 export * from './axis-text';
 export * from './cell-ruler';
+export * from './chart-limits';
 export * from './curve-marks';
 export * from './edge-ruler';
 export * from './filter-text';

@@ -15,7 +15,9 @@ import { Heading, Text } from '@/components/ui/text';
 import { useLayout } from '@/components/ui/use-layout';
 import { VerdictStrip } from '@/components/verdict/verdict-strip';
 import type { KeptAnalysis } from '@/contract';
+import { chartLimits } from '@/figures';
 import { CaseCurves } from './case-curves';
+import { CheckList } from './check-list';
 import { LoopNumbers, ResponseNumbers } from './case-numbers';
 import { FrozenInputs } from './frozen-inputs';
 import { Recompute } from './recompute';
@@ -31,7 +33,7 @@ export function AnalysisScreen({ analysisId }: { analysisId: string }) {
       {(analysis) => (
         <AnalysisPage analysis={analysis} caseId={caseId} onCase={choose}>
           <QueryView query={{ ...curves, data: design }} waiting="Computing the curves">
-            {(a) => <CaseCurves design={a} />}
+            {(a) => <CaseCurves design={a} limits={chartLimits(analysis.inputs.limits, analysis.inputs.design.actuator)} />}
           </QueryView>
         </AnalysisPage>
       )}
@@ -82,6 +84,11 @@ function AnalysisPage({ analysis, caseId, onCase, children }: AnalysisPageProps)
       ))}
       {children}
       <View style={phone ? styles.stack : styles.side}>
+        {result.checks.length > 0 ? (
+          <Paper style={column}>
+            <CheckList heading={`What is demanded of ${result.case.name}`} checks={result.checks} />
+          </Paper>
+        ) : null}
         <Paper style={column}>
           <LoopNumbers name={result.case.name} numbers={result.numbers} />
         </Paper>

@@ -1,5 +1,5 @@
 import { StyleSheet, View } from 'react-native';
-import { type ChartDesign, CursorProvider, FrequencySheet, PlaneChart, ReadOut, TimeSheet } from '@/components/charts';
+import { type ChartDesign, type ChartLimits, CursorProvider, FrequencySheet, PlaneChart, ReadOut, TimeSheet } from '@/components/charts';
 import { Paper } from '@/components/ui/paper';
 import { useUnits } from '@/components/ui/units';
 import { useLayout } from '@/components/ui/use-layout';
@@ -11,7 +11,7 @@ const panels = [
 ] as const;
 
 /** All curves of one case, one cursor through them. */
-export function CaseCurves({ design }: { design: ChartDesign }) {
+export function CaseCurves({ design, limits }: { design: ChartDesign; limits: ChartLimits }) {
   const units = useUnits();
   const phone = useLayout() === 'phone';
   const sheet = phone ? undefined : styles.sheet;
@@ -19,15 +19,15 @@ export function CaseCurves({ design }: { design: ChartDesign }) {
     <CursorProvider>
       <View style={phone ? styles.stack : styles.side}>
         <Paper style={sheet}>
-          <FrequencySheet a={design} units={units} height={480} />
+          <FrequencySheet a={design} limits={limits} units={units} height={480} />
         </Paper>
         <Paper style={sheet}>
-          <PlaneChart a={design} units={units} height={420} />
+          <PlaneChart a={design} limits={limits} units={units} height={420} />
           <ReadOut a={design} units={units} layout={phone ? 'line' : 'table'} />
         </Paper>
         {design.analysis.timeResponse?.reference ? (
           <Paper style={sheet}>
-            <TimeSheet a={design} units={units} panels={panels} height={480} />
+            <TimeSheet a={design} limits={limits} units={units} panels={panels} height={480} />
           </Paper>
         ) : null}
       </View>

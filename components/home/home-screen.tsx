@@ -9,6 +9,7 @@ import { useLayout } from '@/components/ui/use-layout';
 import { About } from './about';
 import { HomeStrip } from './home-strip';
 import { Lately } from './lately';
+import { LimitsList } from './limits-list';
 import { NextBox } from './next-box';
 import { OwnerSection } from './owner-section';
 import { People } from './people';
@@ -40,6 +41,7 @@ export function HomeScreen() {
         <Column width={wide ? WIDTHS.lately : undefined} last>
           {wide ? null : plane}
           <About />
+          <LimitsList />
           <Lately />
           {phone ? <People /> : null}
           {project.role === 'owner' ? <OwnerSection /> : null}

@@ -6,6 +6,7 @@ import { Heading, Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
 import { casesQuery } from '@/hooks/queries/cases';
 import { designsQuery } from '@/hooks/queries/designs';
+import { limitsQuery } from '@/hooks/queries/limits';
 import { plantsQuery } from '@/hooks/queries/plants';
 import { type Stage, stages } from './stages';
 
@@ -30,8 +31,12 @@ export function StageList() {
   const plants = useQuery(plantsQuery(id));
   const cases = useQuery(casesQuery(id));
   const designs = useQuery(designsQuery(id));
-  const known = plants.data && cases.data && designs.data && { plants: plants.data, cases: cases.data, designs: designs.data };
-  const awaited = [plants, cases, designs].find(({ data }) => data === undefined) ?? plants;
+  const limits = useQuery(limitsQuery(id));
+  const known = plants.data &&
+    cases.data &&
+    designs.data &&
+    limits.data && { plants: plants.data, cases: cases.data, designs: designs.data, limits: limits.data.items };
+  const awaited = [plants, cases, designs, limits].find(({ data }) => data === undefined) ?? plants;
   return (
     <View style={styles.section}>
       <Heading level={2}>Where it stands</Heading>
