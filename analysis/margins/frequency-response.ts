@@ -1,6 +1,7 @@
 import type { FrequencyResponse } from '@/contract';
 import type { GainCrossover } from './crossovers';
-import { ladder, refinedGrid, type Fineness, type Grid } from './grid';
+import { refinedGrid, type Fineness, type Grid } from './grid';
+import { ladder } from './ladder';
 import type { LoopFunction } from './loop-function';
 import * as S from './sample';
 
@@ -53,8 +54,8 @@ export const drawnGrid = (
 };
 
 /** The curves of the contract, read off a grid of exact samples. */
-export const frequencyResponse = ({ table, count }: Grid): FrequencyResponse => {
-  const room = () => new Array<number>(count);
+export const frequencyResponse = ({ table, rows }: Grid): FrequencyResponse => {
+  const room = () => new Array<number>(rows.length);
   const curve = () => ({ magnitude: room(), phaseDegrees: room() });
   const response = {
     frequencies: room(),
@@ -67,7 +68,8 @@ export const frequencyResponse = ({ table, count }: Grid): FrequencyResponse => 
     noiseSensitivity: room(),
   };
   const { frequencies, loop, plant, controller } = response;
-  for (let i = 0, row = 0; i < count; i += 1, row += S.ROW) {
+  for (let i = 0; i < rows.length; i += 1) {
+    const row = rows[i];
     const sensitivity = 1 / Math.max(LEAST_DISTANCE, length(1 + table[row + S.RE], table[row + S.IM]));
     frequencies[i] = table[row + S.OMEGA];
     loop.magnitude[i] = table[row + S.MAGNITUDE];

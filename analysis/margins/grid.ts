@@ -1,5 +1,6 @@
 import type { LoopFunction } from './loop-function';
-import { LOG, OMEGA, PHASE, ROW, type Table } from './sample';
+import { LOG, OMEGA, PHASE, type Table } from './sample';
+import { SampledRows } from './sampled-rows';
 
 /** How fine a grid is to be. */
 export interface Fineness {
@@ -20,7 +21,8 @@ export interface Fineness {
 
 export interface Grid {
   readonly table: Table;
-  readonly count: number;
+  /** Where the rows begin in the table, by ascending frequency. */
+  readonly rows: readonly number[];
   /** Refinement ended at the cap, coarser than asked. */
   readonly capped: boolean;
 }
@@ -34,62 +36,65 @@ const CLOSEST = 1e-7;
 
 /**
  * Samples the loop at `frequencies` (ascending) and between them until no two neighbours are further apart than asked.
- * Whole passes over the grid, so that a cap falls evenly.
+ * Whole passes over the grid, so that a cap falls evenly; what one pass left whole the next does not judge again.
  */
 export const refinedGrid = (loop: LoopFunction, frequencies: readonly number[], fineness: Fineness): Grid => {
-  let table: Table = new Float64Array(frequencies.length * ROW);
-  frequencies.forEach((omega, i) => loop.sampleAt(omega, table, i * ROW));
-  let count = frequencies.length;
+  const samples = new SampledRows(loop, 2 * frequencies.length);
+  let rows = frequencies.map((omega) => samples.add(omega));
+  let pieces = rows.map(() => UNJUDGED);
+  pieces[pieces.length - 1] = WHOLE;
   for (;;) {
-    const pieces = piecesWanted(table, { count, fineness, deadTime: loop.deadTime });
-    const wanted = pieces.reduce((sum, n) => sum + n, 1);
-    if (wanted === count) return { table, count, capped: false };
-    if (wanted > fineness.cap) return { table, count, capped: true };
-    const next: Table = new Float64Array(wanted * ROW);
-    let end = 0;
-    for (let i = 0; i < count; i += 1) {
-      for (let k = 0; k < ROW; k += 1) next[end * ROW + k] = table[i * ROW + k];
-      end += 1;
-      const n = i < count - 1 ? pieces[i] : 1;
-      const from = table[i * ROW + OMEGA];
-      const ratio = n > 1 ? (table[(i + 1) * ROW + OMEGA] / from) ** (1 / n) : 1;
-      for (let k = 1; k < n; k += 1, end += 1) loop.sampleAt(from * ratio ** k, next, end * ROW);
+    const { table } = samples;
+    let wanted = rows.length;
+    for (let i = 0; i < rows.length; i += 1) {
+      if (pieces[i] === UNJUDGED) pieces[i] = piecesWanted(table, [rows[i], rows[i + 1]], { fineness, deadTime: loop.deadTime });
+      wanted += pieces[i] - 1;
     }
-    table = next;
-    count = wanted;
+    if (wanted === rows.length) return { table, rows, capped: false };
+    if (wanted > fineness.cap) return { table, rows, capped: true };
+    [rows, pieces] = cut(samples, rows, pieces);
   }
 };
 
-/** Into how many pieces each interval is to be cut. */
-const piecesWanted = (table: Table, { count, fineness, deadTime }: { count: number; fineness: Fineness; deadTime: number }): Uint8Array => {
-  const pieces = new Uint8Array(count - 1);
-  for (let i = 0; i < count - 1; i += 1) {
-    const row = i * ROW;
-    const next = row + ROW;
-    const span = table[next + OMEGA] - table[row + OMEGA];
-    const turn = Math.abs(table[next + PHASE] - table[row + PHASE]);
-    const bend = Math.abs(table[next + PHASE] - table[row + PHASE] + span * deadTime);
-    const log = Math.max(table[row + LOG], table[next + LOG]);
-    const turnStep = log > QUIET ? fineness.turnStep : fineness.quietTurnStep;
-    const excess = Math.max(
-      Math.abs(table[next + LOG] - table[row + LOG]) / fineness.logStep,
-      bend / fineness.phaseStep,
-      log > fineness.turnFloor ? turn / turnStep : 0,
-    );
-    const done = !(excess > 1) || span <= CLOSEST * table[next + OMEGA];
-    pieces[i] = done ? 1 : Math.min(MOST_PIECES, Math.ceil(excess));
+/** Marks of the interval that follows a row: not looked at yet, and fine enough. */
+const UNJUDGED = 0;
+const WHOLE = 1;
+
+/** Samples between rows, evenly in ln ω, so that each interval is in as many pieces as wanted; a piece is not judged yet. */
+const cut = (samples: SampledRows, rows: readonly number[], pieces: readonly number[]): [rows: number[], pieces: number[]] => {
+  const nextRows: number[] = [];
+  const nextPieces: number[] = [];
+  for (let i = 0; i < rows.length; i += 1) {
+    const count = pieces[i];
+    nextRows.push(rows[i]);
+    nextPieces.push(count === WHOLE ? WHOLE : UNJUDGED);
+    if (count === WHOLE) continue;
+    const from = samples.table[rows[i] + OMEGA];
+    const step = Math.log(samples.table[rows[i + 1] + OMEGA] / from) / count;
+    for (let k = 1; k < count; k += 1) {
+      nextRows.push(samples.add(from * Math.exp(k * step)));
+      nextPieces.push(UNJUDGED);
+    }
   }
-  return pieces;
+  return [nextRows, nextPieces];
 };
 
-/** Ascending frequencies from `low` to `high`: an even logarithmic ladder and every landmark between. */
-export const ladder = (
-  low: number,
-  high: number,
-  { pointsPerDecade, landmarks }: { pointsPerDecade: number; landmarks: readonly number[] },
-): number[] => {
-  const steps = Math.max(1, Math.ceil(Math.log10(high / low) * pointsPerDecade));
-  const even = Array.from({ length: steps + 1 }, (_, k) => low * (high / low) ** (k / steps));
-  const all = [...even, ...landmarks.filter((omega) => omega > low && omega < high)];
-  return [...new Set(all)].sort((a, b) => a - b);
+/** Into how many pieces the interval between two rows is to be cut. */
+const piecesWanted = (
+  table: Table,
+  [row, next]: readonly [number, number],
+  { fineness, deadTime }: { fineness: Fineness; deadTime: number },
+): number => {
+  const span = table[next + OMEGA] - table[row + OMEGA];
+  const turn = Math.abs(table[next + PHASE] - table[row + PHASE]);
+  const bend = Math.abs(table[next + PHASE] - table[row + PHASE] + span * deadTime);
+  const log = Math.max(table[row + LOG], table[next + LOG]);
+  const turnStep = log > QUIET ? fineness.turnStep : fineness.quietTurnStep;
+  const excess = Math.max(
+    Math.abs(table[next + LOG] - table[row + LOG]) / fineness.logStep,
+    bend / fineness.phaseStep,
+    log > fineness.turnFloor ? turn / turnStep : 0,
+  );
+  const isWhole = !(excess > 1) || span <= CLOSEST * table[next + OMEGA];
+  return isWhole ? WHOLE : Math.min(MOST_PIECES, Math.ceil(excess));
 };

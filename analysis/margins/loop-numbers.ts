@@ -7,8 +7,7 @@ import type { LoopFunction } from './loop-function';
 import { decibels, delayMargin, diskMargin, gainMargin, phaseMargin, phaseMarginDegrees } from './margins';
 import { supremum, type Supremum } from './peak';
 import { Probe } from './probe';
-import { balancedSensitivity, complementarySensitivity, noiseSensitivity, referenceResponse, sensitivity } from './quantities';
-import { LOG } from './sample';
+import { balancedSensitivity, complementarySensitivity, loopGain, noiseSensitivity, referenceResponse, sensitivity } from './quantities';
 import { searchGrid, type Detail } from './search-grid';
 
 /** Everything that is read off the frequency axis, each number refined on the exact function. */
@@ -22,7 +21,7 @@ const PEAKING = { sensitivity, complementarySensitivity, balancedSensitivity, no
 /** Margins, peaks and bandwidths of a loop. @throws LoopError where the loop turns through too many crossovers */
 export const loopNumbers = (loop: LoopFunction, detail: Detail): LoopNumbers => {
   const grid = searchGrid(loop, detail);
-  const probe = new Probe(loop, grid.table, grid.count);
+  const probe = new Probe(loop, grid);
   const crossovers = loop.isZero ? [] : gainCrossovers(probe);
   const phase = loop.isZero ? [] : phaseCrossovers(loop, probe);
   const zero = valuesAtZero(loop);
@@ -32,7 +31,7 @@ export const loopNumbers = (loop: LoopFunction, detail: Detail): LoopNumbers => 
   const noise = peak('noiseSensitivity');
   return {
     crossovers,
-    startsOutside: grid.table[LOG] > 0,
+    startsOutside: probe.valueAt(0, loopGain) > 0,
     margins: {
       gain: gainMargin(phase, 'upward'),
       gainReduction: gainMargin(phase, 'downward'),

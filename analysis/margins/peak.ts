@@ -27,12 +27,12 @@ export const supremum = (probe: Probe, quantity: Quantity, ends: { atZero: numbe
 const greatest = (probe: Probe, quantity: Quantity): { log: number; omega: number } => {
   let log = -Infinity;
   let omega = 0;
-  const consider = (value: number, frequency: number) => {
-    if (value <= log) return;
+  for (let i = 0; i < probe.count; i += 1) {
+    const value = probe.valueAt(i, quantity);
+    if (value <= log) continue;
     log = value;
-    omega = frequency;
-  };
-  for (let i = 0; i < probe.count; i += 1) consider(probe.valueAt(i, quantity), probe.frequencyAt(i));
+    omega = probe.frequencyAt(i);
+  }
   for (let i = 0; i < probe.count - 1; i += 1) {
     const slopeA = probe.slopeAt(i, quantity);
     const slopeB = probe.slopeAt(i + 1, quantity);
@@ -41,7 +41,10 @@ const greatest = (probe: Probe, quantity: Quantity): { log: number; omega: numbe
     const reach = Math.min(probe.valueAt(i, quantity) + slopeA * width, probe.valueAt(i + 1, quantity) - slopeB * width);
     if (reach < log && !nearCritical(probe, i) && !nearCritical(probe, i + 1)) continue;
     const peak = probe.stationary(quantity, i);
-    consider(probe.found[quantity], peak);
+    const value = probe.found[quantity];
+    if (value <= log) continue;
+    log = value;
+    omega = peak;
   }
   return { log, omega };
 };

@@ -1,4 +1,5 @@
 import { bracketedRoot } from '@/analysis/numbers/bracketed-root';
+import type { Grid } from './grid';
 import type { LoopFunction } from './loop-function';
 import { readQuantities, READINGS, SLOPE, type Quantity } from './quantities';
 import { OMEGA, ROW, type Table } from './sample';
@@ -9,22 +10,27 @@ import { OMEGA, ROW, type Table } from './sample';
  */
 export class Probe {
   /** Every quantity at every row of the grid. */
-  readonly readings: Float64Array;
+  private readonly readings: Float64Array;
   /** The same where the probe stands. */
   readonly found = new Float64Array(READINGS);
   private readonly row: Table = new Float64Array(ROW);
 
   constructor(
     private readonly loop: LoopFunction,
-    readonly table: Table,
-    readonly count: number,
+    private readonly grid: Grid,
   ) {
-    this.readings = new Float64Array(count * READINGS);
-    for (let i = 0; i < count; i += 1) readQuantities(table, i * ROW, this.readings, i * READINGS);
+    const { table, rows } = grid;
+    this.readings = new Float64Array(rows.length * READINGS);
+    for (let i = 0; i < rows.length; i += 1) readQuantities(table, rows[i], this.readings, i * READINGS);
+  }
+
+  /** Rows of the grid. */
+  get count(): number {
+    return this.grid.rows.length;
   }
 
   frequencyAt(i: number): number {
-    return this.table[i * ROW + OMEGA];
+    return this.grid.table[this.grid.rows[i] + OMEGA];
   }
 
   valueAt(i: number, quantity: Quantity): number {

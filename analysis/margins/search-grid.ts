@@ -1,5 +1,6 @@
 import { LoopError } from '@/analysis/loop/loop-error';
-import { ladder, refinedGrid, type Fineness, type Grid } from './grid';
+import { refinedGrid, type Fineness, type Grid } from './grid';
+import { ladder } from './ladder';
 import type { LoopFunction } from './loop-function';
 
 /** Decades searched beyond the outermost landmark, at each end. */
@@ -54,7 +55,7 @@ export const searchGrid = (loop: LoopFunction, detail: Detail): Grid => {
   const fineness = FINENESS[detail];
   const beside = loop.axisFrequencies.flatMap((omega) => BESIDE_AXIS_POINT.flatMap((gap) => [omega * (1 - gap), omega * (1 + gap)]));
   const axis = new Set(loop.axisFrequencies);
-  const landmarks = [...loop.landmarks.filter((omega) => !axis.has(omega)), ...beside];
+  const landmarks = [...loop.landmarks.filter((omega) => !axis.has(omega)), ...beside].sort((a, b) => a - b);
   const frequencies = ladder(low, high, { pointsPerDecade: fineness.pointsPerDecade, landmarks });
   const grid = refinedGrid(loop, frequencies, fineness);
   if (grid.capped) throw tooManyTurns();
