@@ -1,7 +1,7 @@
 import { useLocalSearchParams, useRouter } from 'expo-router';
 import { useForm } from 'react-hook-form';
 import { View } from 'react-native';
-import { safeNext } from '@/components/navigation/routes';
+import { safeNext, signUpPath } from '@/components/navigation/routes';
 import { Button } from '@/components/ui/button';
 import { Form } from '@/components/ui/form';
 import { contractResolver } from '@/components/forms/contract-resolver';
@@ -16,11 +16,11 @@ const refusal = (error: unknown) => (hasStatus(error, 401) ? 'That e-mail and pa
 
 export function SignIn() {
   const router = useRouter();
-  const { next } = useLocalSearchParams<{ next?: string }>();
+  const { next = '/', email = '' } = useLocalSearchParams<{ next?: string; email?: string }>();
   const signIn = useSignIn();
   const { control, handleSubmit } = useForm({
     resolver: contractResolver(({ SignIn }) => SignIn),
-    defaultValues: { email: '', password: '' },
+    defaultValues: { email, password: '' },
   });
   const submit = handleSubmit((values) => signIn.mutate(values, { onSuccess: () => router.replace(safeNext(next)) }));
   return (
@@ -38,7 +38,7 @@ export function SignIn() {
         <Button label="Sign in" busyLabel="Signing in" kind="primary" tall stretch busy={signIn.isPending} onPress={submit} />
       </Form>
       <View>
-        <Link href={next ? `/sign-up?next=${encodeURIComponent(next)}` : '/sign-up'}>New here? Make an account</Link>
+        <Link href={signUpPath(next, email)}>New here? Make an account</Link>
         <Link href="/forgot-password">Password forgotten</Link>
       </View>
       <Text step="note" tone="ink2">

@@ -1,6 +1,6 @@
 import { useLocalSearchParams, useRouter } from 'expo-router';
 import { useForm } from 'react-hook-form';
-import { safeNext } from '@/components/navigation/routes';
+import { safeNext, signInPath } from '@/components/navigation/routes';
 import { Button } from '@/components/ui/button';
 import { Form } from '@/components/ui/form';
 import { contractResolver } from '@/components/forms/contract-resolver';
@@ -12,11 +12,11 @@ import { EntryFrame } from './entry-frame';
 
 export function SignUp() {
   const router = useRouter();
-  const { next } = useLocalSearchParams<{ next?: string }>();
+  const { next = '/', email = '' } = useLocalSearchParams<{ next?: string; email?: string }>();
   const signUp = useSignUp();
   const { control, handleSubmit } = useForm({
     resolver: contractResolver(({ SignUp }) => SignUp),
-    defaultValues: { name: '', email: '', password: '' },
+    defaultValues: { name: '', email, password: '' },
   });
   const submit = handleSubmit((values) => signUp.mutate(values, { onSuccess: () => router.replace(safeNext(next)) }));
   return (
@@ -35,7 +35,7 @@ export function SignUp() {
         />
         <Button label="Make the account" busyLabel="Making it" kind="primary" tall stretch busy={signUp.isPending} onPress={submit} />
       </Form>
-      <Link href="/sign-in">Have one? Sign in</Link>
+      <Link href={signInPath(next, email)}>Have one? Sign in</Link>
     </EntryFrame>
   );
 }

@@ -8,8 +8,24 @@ export const analysisPath = (projectId: string, analysisId: string) => `/project
 export const benchPath = (projectId: string, designId: string, revision: number) =>
   `/projects/${projectId}/bench?design=${designId}&revision=${revision}` as Href;
 
-/** Sign-in that leads back to the page asked for. */
-export const signInPath = (next: string) => (next === '/' ? '/sign-in' : `/sign-in?next=${encodeURIComponent(next)}`) as Href;
+const withNext = (path: string, next: string, email?: string) => {
+  const query = new URLSearchParams({ ...(next !== '/' && { next }), ...(email && { email }) }).toString();
+  return (query === '' ? path : `${path}?${query}`) as Href;
+};
+
+interface OnBench {
+  caseId: string;
+  /** The bench's own choice where absent. */
+  design?: { id: string; revision: number };
+}
+
+/** One case on the bench, under a kept revision of a design. */
+export const caseBenchPath = (projectId: string, { caseId, design }: OnBench) =>
+  `${design ? `${benchPath(projectId, design.id, design.revision)}&` : `${projectPath(projectId, 'bench')}?`}case=${caseId}` as Href;
+
+/** Sign-in that leads back to the page asked for, with the address written in where it is known. */
+export const signInPath = (next: string, email?: string) => withNext('/sign-in', next, email);
+export const signUpPath = (next: string, email?: string) => withNext('/sign-up', next, email);
 
 /** Where to go after signing in: a path of this site, never another's. */
 export function safeNext(next: string | undefined): Href {

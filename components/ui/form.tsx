@@ -1,7 +1,6 @@
 import type { FormEvent, PropsWithChildren } from 'react';
 import { View } from 'react-native';
-import { Text } from './text';
-import { useTheme } from './theme';
+import { ProblemLine } from './problem-line';
 
 export interface FormProps {
   /** What is done when Enter is pressed in a field or the button with `type="submit"` semantics is used. */
@@ -13,7 +12,6 @@ export interface FormProps {
 
 /** A real form element, so that Enter submits and password managers know what they see. */
 export function Form({ onSubmit, problem, gap = 16, children }: PropsWithChildren<FormProps>) {
-  const { colors } = useTheme();
   const submit = (event: FormEvent) => {
     event.preventDefault();
     onSubmit();
@@ -22,15 +20,7 @@ export function Form({ onSubmit, problem, gap = 16, children }: PropsWithChildre
     <form onSubmit={submit} noValidate>
       <View style={{ gap }}>
         {children}
-        <View role="alert">
-          {problem ? (
-            <View style={{ borderLeftWidth: 4, borderLeftColor: colors.fail, paddingLeft: 8 }}>
-              <Text step="note" tone="fail">
-                {problem}
-              </Text>
-            </View>
-          ) : null}
-        </View>
+        <ProblemLine text={problem} />
       </View>
       <button type="submit" hidden tabIndex={-1} aria-hidden />
     </form>

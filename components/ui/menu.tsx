@@ -15,13 +15,16 @@ export interface MenuItem {
 
 export interface MenuProps {
   label: string;
+  /** What it is for, for those who listen, where `label` only says what is chosen. */
+  name?: string;
+  disabled?: boolean;
   items: readonly MenuItem[];
   kind?: ButtonProps['kind'];
   align?: 'left' | 'right';
 }
 
 /** A button with a list under it. Down opens it, arrows walk it, Escape closes it and gives the focus back. */
-export function Menu({ label, items, kind = 'secondary', align = 'left' }: MenuProps) {
+export function Menu({ label, name, disabled, items, kind = 'secondary', align = 'left' }: MenuProps) {
   const { colors } = useTheme();
   const [open, setOpen] = useState(false);
   const box = useRef<View>(null);
@@ -56,11 +59,20 @@ export function Menu({ label, items, kind = 'secondary', align = 'left' }: MenuP
   };
   return (
     <View ref={box} style={styles.box} onKeyDown={walk}>
-      <Button label={label} kind={kind} iconAfter="down" aria-haspopup="menu" aria-expanded={open} onPress={() => setOpen(!open)} />
+      <Button
+        label={label}
+        aria-label={name && `${name}, ${label}`}
+        kind={kind}
+        iconAfter="down"
+        disabled={disabled}
+        aria-haspopup="menu"
+        aria-expanded={open}
+        onPress={() => setOpen(!open)}
+      />
       {open && (
         <View
           role="menu"
-          aria-label={label}
+          aria-label={name ?? label}
           style={[styles.list, styles[align], { backgroundColor: colors.paper, borderColor: colors.ink }]}
         >
           {items.map((item) => (

@@ -2,7 +2,7 @@ import type { PropsWithChildren, ReactNode } from 'react';
 import { ScrollView, StyleSheet, View } from 'react-native';
 import { Heading, Text } from './text';
 import { useTheme } from './theme';
-import { gutter } from './tokens';
+import { gutter, line } from './tokens';
 import { useLayout } from './use-layout';
 
 export interface PageProps {
@@ -12,13 +12,15 @@ export interface PageProps {
   actions?: ReactNode;
   /** A narrower column for text. */
   width?: number;
+  /** What a phone keeps at its foot, in reach of a thumb. */
+  foot?: ReactNode;
 }
 
 /** One scrolling page on the desk: its title and actions, then sheets. On a phone the sheet fills the page. */
-export function Page({ title, sub, actions, width = 1240, children }: PropsWithChildren<PageProps>) {
+export function Page({ title, sub, actions, width = 1240, foot, children }: PropsWithChildren<PageProps>) {
   const { colors } = useTheme();
   const phone = useLayout() === 'phone';
-  return (
+  const page = (
     <ScrollView style={[styles.scroll, { backgroundColor: colors.desk }]} contentContainerStyle={styles.content}>
       <View style={[styles.column, { maxWidth: width + 2 * gutter.wide }, phone ? styles.phone : styles.wide]}>
         {title && !phone ? (
@@ -38,9 +40,18 @@ export function Page({ title, sub, actions, width = 1240, children }: PropsWithC
       </View>
     </ScrollView>
   );
+  if (!phone || !foot) return page;
+  return (
+    <View style={styles.page}>
+      {page}
+      <View style={[styles.foot, { backgroundColor: colors.paper, borderTopColor: colors.ink }]}>{foot}</View>
+    </View>
+  );
 }
 
 const styles = StyleSheet.create({
+  page: { flex: 1, minHeight: 0 },
+  foot: { flexDirection: 'row', gap: 8, paddingHorizontal: gutter.phone, paddingVertical: 8, borderTopWidth: line.head },
   scroll: { flex: 1 },
   content: { flexGrow: 1, alignItems: 'center' },
   column: { width: '100%' },

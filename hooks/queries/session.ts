@@ -18,11 +18,11 @@ function useEntry<Input>(path: string) {
 export const useSignIn = () => useEntry<SignIn>('/auth/sign-in/email');
 export const useSignUp = () => useEntry<SignUp>('/auth/sign-up/email');
 
-/** Ends with a fresh page: nothing of the one who was signed in stays in memory. */
-export const useSignOut = () =>
+/** Ends with a fresh page, at sign-in or at `next`: nothing of the one who was signed in stays in memory. */
+export const useSignOut = (next = '/sign-in') =>
   useMutation({
     mutationFn: () => request<unknown>('POST', '/auth/sign-out', { body: {} }),
-    onSuccess: () => window.location.assign('/sign-in'),
+    onSuccess: () => window.location.assign(next),
   });
 
 export const useAskReset = () =>

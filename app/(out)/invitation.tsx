@@ -1,0 +1,1 @@
+export { InvitationPage as default } from '@/components/members/invitation-page';
