@@ -1,34 +1,61 @@
-import { NODE_COUNT, interpolate } from './nodes';
+import { NODE_COUNT } from './nodes';
+import { evaluatePanel, fitPanel } from './panel-polynomial';
+
+const FIRST_ROOM = 64;
 
 /**
  * A signal over time as panels, each a polynomial through its values at NODES. Jumps stand between panels: the value at
  * a panel's start is the one just after. Grows at its end while it is simulated.
  */
 export class Curve {
-  readonly starts: number[] = [];
-  readonly widths: number[] = [];
-  readonly values: number[] = [];
+  /** Where panels start, how wide they are and their node values; only what belongs to the first `panels` of them counts. */
+  starts: Float64Array = new Float64Array(FIRST_ROOM);
+  widths: Float64Array = new Float64Array(FIRST_ROOM);
+  values: Float64Array = new Float64Array(FIRST_ROOM * NODE_COUNT);
+  panels = 0;
   /** The greatest magnitude at any node so far. */
   size = 0;
-
-  get panels(): number {
-    return this.starts.length;
-  }
+  private fitted = 0;
+  private fits: Float64Array = new Float64Array(0);
 
   get end(): number {
     const last = this.panels - 1;
     return last < 0 ? 0 : this.starts[last] + this.widths[last];
   }
 
+  /** How many node values there are. */
+  get nodes(): number {
+    return this.panels * NODE_COUNT;
+  }
+
+  /** Every panel's polynomial in x from −1 to 1, NODE_COUNT coefficients each. */
+  get coefficients(): Float64Array {
+    if (this.fitted < this.panels) {
+      if (this.fits.length < this.nodes) this.fits = grown(this.fits, this.values.length);
+      for (; this.fitted < this.panels; this.fitted += 1) fitPanel(this.values, this.fitted * NODE_COUNT, this.fits);
+    }
+    return this.fits;
+  }
+
   /** Appends a panel whose node values stand in `source` from `offset`. */
-  append({ start, width }: { start: number; width: number }, source: ArrayLike<number>, offset: number): void {
-    this.starts.push(start);
-    this.widths.push(width);
+  append(start: number, width: number, source: Float64Array, offset: number): void {
+    const { panels, nodes } = this;
+    if (panels === this.starts.length) {
+      this.starts = grown(this.starts, 2 * panels);
+      this.widths = grown(this.widths, 2 * panels);
+      this.values = grown(this.values, 2 * nodes);
+    }
+    this.starts[panels] = start;
+    this.widths[panels] = width;
+    let size = this.size;
     for (let i = 0; i < NODE_COUNT; i += 1) {
       const value = source[offset + i];
-      this.values.push(value);
-      this.size = Math.max(this.size, Math.abs(value));
+      this.values[nodes + i] = value;
+      // Not a plain comparison: a value that is not a number must not go unnoticed.
+      if (!(Math.abs(value) <= size)) size = Math.abs(value);
     }
+    this.size = size;
+    this.panels = panels + 1;
   }
 
   /** The panel that holds `time`; at a boundary the later one. */
@@ -53,17 +80,25 @@ export class Curve {
     return this.valueIn(panel > 0 && this.starts[panel] === time ? panel - 1 : panel, time);
   }
 
-  /** The values at ascending times. */
-  valuesAt(times: readonly number[]): number[] {
+  /** The values at ascending times, `size` times as large. */
+  valuesAt(times: readonly number[], size = 1): number[] {
     let panel = 0;
     return times.map((time) => {
       while (panel + 1 < this.panels && this.starts[panel + 1] <= time) panel += 1;
-      return this.valueIn(panel, time);
+      return size * this.valueIn(panel, time);
     });
   }
 
   /** The polynomial of one panel, also at the panel's ends. */
   valueIn(panel: number, time: number): number {
-    return interpolate(this.values, panel * NODE_COUNT, (time - this.starts[panel]) / this.widths[panel]);
+    const offset = panel * NODE_COUNT;
+    const since = time - this.starts[panel];
+    return since === 0 ? this.values[offset] : evaluatePanel(this.coefficients, offset, (2 * since) / this.widths[panel] - 1);
   }
+}
+
+function grown(array: Float64Array, length: number): Float64Array {
+  const longer = new Float64Array(length);
+  longer.set(array);
+  return longer;
 }

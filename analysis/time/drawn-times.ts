@@ -1,5 +1,6 @@
 import type { Curve } from './curve';
 import { derivativeAtNodes, NODE_COUNT } from './nodes';
+import { bendBound, slopeOfPanel } from './panel-polynomial';
 
 /** Straight lines between drawn points stay within this share of a curve's range. */
 const DRAWING_TOLERANCE = 2.5e-4;
@@ -37,27 +38,34 @@ interface Drawing {
 function bendTimes(curve: Curve, { end, spacing, tolerance }: Drawing): number[] {
   const times: number[] = [];
   const allowed = tolerance * rangeUntil(curve, end);
-  const [slopes, bends] = [new Float64Array(NODE_COUNT), new Float64Array(NODE_COUNT)];
+  const { coefficients } = curve;
   let [before, slopeBefore] = [curve.values[0], 0];
-  for (let panel = 0; panel < curve.panels && curve.starts[panel] < end; panel += 1) {
+  for (let panel = 0; panel < curve.panels && curve.starts[panel] < end && times.length <= MAX_POINTS; panel += 1) {
     const [start, width, offset] = [curve.starts[panel], curve.widths[panel], panel * NODE_COUNT];
-    derivativeAtNodes(curve.values, offset, slopes);
+    const perTime = 2 / width;
     if (Math.abs(curve.values[offset] - before) > allowed) times.push(start - INSTANT * end, start);
-    else if ((Math.abs(slopes[0] / width - slopeBefore) * spacing) / 4 > allowed) times.push(start);
-    const bend = greatest(derivativeAtNodes(slopes, 0, bends));
-    const pieces = Math.ceil(Math.sqrt(bend / (8 * allowed)));
+    else if ((Math.abs(perTime * slopeOfPanel(coefficients, offset, -1) - slopeBefore) * spacing) / 4 > allowed) times.push(start);
+    before = curve.values[offset + NODE_COUNT - 1];
+    slopeBefore = perTime * slopeOfPanel(coefficients, offset, 1);
+    const steepest = (8 * allowed) / (spacing * spacing * perTime * perTime);
+    if (bendBound(coefficients, offset) <= steepest) continue;
+    const pieces = Math.ceil(Math.sqrt(greatestBend(curve, panel) / (8 * allowed)));
     if (width / pieces < spacing) for (let k = 0; k <= pieces; k += 1) times.push(start + (width * k) / pieces);
-    [before, slopeBefore] = [curve.values[offset + NODE_COUNT - 1], slopes[NODE_COUNT - 1] / width];
-    if (times.length > MAX_POINTS) break;
   }
   return times;
 }
 
-function greatest(values: Float64Array): number {
+/** The greatest second derivative at a panel's nodes, per square of its width. */
+function greatestBend({ values }: Curve, panel: number): number {
+  derivativeAtNodes(values, panel * NODE_COUNT, slopes);
+  derivativeAtNodes(slopes, 0, bends);
   let most = 0;
-  for (let i = 0; i < values.length; i += 1) most = Math.max(most, Math.abs(values[i]));
+  for (let i = 0; i < NODE_COUNT; i += 1) most = Math.max(most, Math.abs(bends[i]));
   return most;
 }
+
+/** Room for what `greatestBend` reads. */
+const [slopes, bends] = [new Float64Array(NODE_COUNT), new Float64Array(NODE_COUNT)];
 
 function rangeUntil(curve: Curve, end: number): number {
   let size = Number.MIN_VALUE;

@@ -61,7 +61,7 @@ export const isTooFine = (track: Track): boolean => track.panels < Infinity && t
 export function hasSettled(bandFor: (peak: number) => Band): Enough {
   return (output, horizon) => {
     const { centre, band } = bandFor(output.size);
-    for (let k = output.values.length - 1; k >= 0; k -= 1) {
+    for (let k = output.nodes - 1; k >= 0; k -= 1) {
       if (Math.abs(output.values[k] - centre) > band) return horizon >= WATCH_PER_SETTLING * nodeTime(output, k + 1);
     }
     return output.size > 0;
@@ -70,22 +70,29 @@ export function hasSettled(bandFor: (peak: number) => Band): Enough {
 
 /** Enough of an unstable response: ten times the unit step, many swings at a size that hardly grows, or a long rest. */
 export function hasGrown(output: Curve, horizon: number): boolean {
-  const grown = output.values.findIndex((value) => Math.abs(value) >= GROWN);
-  return (grown >= 0 && nodeTime(output, grown) < horizon) || horizon >= SWINGS * firstTurn(output) || hasRested(output, horizon);
+  return firstAsLarge(output, GROWN) < horizon || horizon >= SWINGS * firstTurn(output) || hasRested(output, horizon);
 }
 
 /** Whether the output came to stand still and stood for long: its input does not wake what is unstable. */
 function hasRested(output: Curve, horizon: number): boolean {
-  const { values, size } = output;
-  const end = values[values.length - 1];
-  const moved = values.findLastIndex((value) => Math.abs(value - end) > RESTING * size);
-  return size > 0 && horizon >= WATCH_PER_REST * nodeTime(output, moved + 1);
+  const { values, size, nodes } = output;
+  const end = values[nodes - 1];
+  let resting = nodes - 1;
+  while (resting > 0 && Math.abs(values[resting - 1] - end) <= RESTING * size) resting -= 1;
+  return size > 0 && horizon >= WATCH_PER_REST * nodeTime(output, resting);
+}
+
+/** The time of the first node at which the curve is as large as that; Infinity where none is. */
+function firstAsLarge(curve: Curve, size: number): number {
+  let k = 0;
+  while (k < curve.nodes && Math.abs(curve.values[k]) < size) k += 1;
+  return nodeTime(curve, k);
 }
 
 /** The first node after which the curve turns back; Infinity where it never does. */
 function firstTurn(curve: Curve): number {
   let direction = 0;
-  for (let k = 1; k < curve.values.length; k += 1) {
+  for (let k = 1; k < curve.nodes; k += 1) {
     const change = curve.values[k] - curve.values[k - 1];
     if (Math.abs(change) <= MOTION * curve.size) continue;
     if (direction !== 0 && Math.sign(change) === -direction) return nodeTime(curve, k - 1);

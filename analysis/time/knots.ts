@@ -1,9 +1,10 @@
+import { bracketedRoot } from '@/analysis/numbers/bracketed-root';
 import type { Curve } from './curve';
-import { derivativeAtNodes, interpolate, NODES, NODE_COUNT } from './nodes';
+import { NODES, NODE_COUNT } from './nodes';
+import { evaluatePanel, isSurelyMonotone, slopeOfPanel } from './panel-polynomial';
 
 /** A panel whose values differ by less than this share of the curve's size is flat: its turns would be rounding. */
 const FLAT = 1e-11;
-const BISECTIONS = 48;
 
 /** A curve's times and values such that it is monotone from each knot to the next. At a jump two knots share a time. */
 export interface Knots {
@@ -11,29 +12,44 @@ export interface Knots {
   readonly values: readonly number[];
 }
 
-/** The knots of `curve` on [0, end]: panel nodes and, between them, every turning point, refined on the polynomial. */
+interface GrowingKnots {
+  readonly times: number[];
+  readonly values: number[];
+}
+
+/** The knots of `curve` on [0, end]: both ends of every panel and, where it turns, its nodes and its turning points. */
 export function monotoneKnots(curve: Curve, end: number): Knots {
-  const times: number[] = [];
-  const values: number[] = [];
-  const room = new Float64Array(NODE_COUNT);
+  const knots: GrowingKnots = { times: [], values: [] };
   for (let panel = 0; panel < curve.panels && curve.starts[panel] < end; panel += 1) {
-    const [start, width, offset] = [curve.starts[panel], curve.widths[panel], panel * NODE_COUNT];
-    const slopes = isFlat(curve, offset) ? null : derivativeAtNodes(curve.values, offset, room);
-    for (let i = 0; i < NODE_COUNT; i += 1) {
-      if (slopes && i > 0 && slopes[i - 1] * slopes[i] < 0) {
-        const turn = zeroBetween((x) => interpolate(slopes, 0, x), NODES[i - 1], NODES[i]);
-        times.push(start + turn * width);
-        values.push(interpolate(curve.values, offset, turn));
-      }
-      times.push(start + NODES[i] * width);
-      values.push(curve.values[offset + i]);
-    }
+    const offset = panel * NODE_COUNT;
+    if (isSurelyMonotone(curve.coefficients, offset) || isFlat(curve, offset)) {
+      knots.times.push(curve.starts[panel], curve.starts[panel] + curve.widths[panel]);
+      knots.values.push(curve.values[offset], curve.values[offset + NODE_COUNT - 1]);
+    } else addTurningPanel(curve, panel, knots);
   }
-  return cutAt(curve, { times, values }, end);
+  return cutAt(curve, knots, end);
+}
+
+function addTurningPanel(curve: Curve, panel: number, { times, values }: GrowingKnots): void {
+  const [start, width, offset] = [curve.starts[panel], curve.widths[panel], panel * NODE_COUNT];
+  const { coefficients } = curve;
+  const slopeAt = (position: number) => slopeOfPanel(coefficients, offset, 2 * position - 1);
+  let slopeBefore = 0;
+  for (let i = 0; i < NODE_COUNT; i += 1) {
+    const slope = slopeAt(NODES[i]);
+    if (slopeBefore * slope < 0) {
+      const turn = zeroBetween(slopeAt, NODES[i - 1], NODES[i]);
+      times.push(start + turn * width);
+      values.push(evaluatePanel(coefficients, offset, 2 * turn - 1));
+    }
+    times.push(start + NODES[i] * width);
+    values.push(curve.values[offset + i]);
+    slopeBefore = slope;
+  }
 }
 
 /** Knots until `end`, the last one at `end` itself. */
-function cutAt(curve: Curve, { times, values }: { times: number[]; values: number[] }, end: number): Knots {
+function cutAt(curve: Curve, { times, values }: GrowingKnots, end: number): Knots {
   while (times.length && times[times.length - 1] >= end) {
     times.pop();
     values.pop();
@@ -53,14 +69,10 @@ function isFlat(curve: Curve, offset: number): boolean {
   return high - low <= FLAT * curve.size;
 }
 
-/** A zero of f between a and b, where f has opposite signs or one is zero, by bisection. */
+/** A zero of f between a and b; where rounding leaves f one sign there, the end at which it is smaller. */
 export function zeroBetween(f: (x: number) => number, a: number, b: number): number {
-  const positiveAtB = f(b) > 0;
-  let [low, high] = [a, b];
-  for (let k = 0; k < BISECTIONS; k += 1) {
-    const middle = (low + high) / 2;
-    if (f(middle) > 0 === positiveAtB) high = middle;
-    else low = middle;
-  }
-  return high;
+  const fa = f(a);
+  const fb = f(b);
+  if (fa > 0 === fb > 0) return Math.abs(fa) < Math.abs(fb) ? a : b;
+  return bracketedRoot(f, { a, fa, b, fb });
 }

@@ -16,7 +16,7 @@ const TAIL_WEIGHTS = [DEGREE - 1, DEGREE].map((k) =>
 
 /** Whether the panels from `first` on follow the curve they stand for, told by how their coefficients fall off. */
 export function isResolved(curve: Curve, first = 0): boolean {
-  for (let offset = first * NODE_COUNT; offset < curve.values.length; offset += NODE_COUNT) {
+  for (let offset = first * NODE_COUNT; offset < curve.nodes; offset += NODE_COUNT) {
     for (const weights of TAIL_WEIGHTS) {
       let coefficient = 0;
       for (let j = 0; j < NODE_COUNT; j += 1) coefficient += weights[j] * curve.values[offset + j];

@@ -50,7 +50,7 @@ export class Simulation {
     this.delayLine = new Float64Array(system.deadTime > 0 ? this.track.panels * NODE_COUNT : 0);
     this.state = Float64Array.from(initial);
     this.result = new Float64Array(WATCHED.length * NODE_COUNT + initial.length);
-    if (outputDelay > 0) this.output.append({ start: 0, width: outputDelay }, new Float64Array(NODE_COUNT), 0);
+    if (outputDelay > 0) this.output.append(0, outputDelay, new Float64Array(NODE_COUNT), 0);
   }
 
   get panels(): number {
@@ -82,10 +82,10 @@ export class Simulation {
       for (let j = state.length; j < matrix.columns; j += 1) sum += matrix.data[row + j] * delayLine[history + j - state.length];
       result[i] = sum;
     }
-    this.output.append({ start: this.time + this.run.outputDelay, width }, result, 0);
-    this.control.append({ start: this.time, width }, result, NODE_COUNT);
+    this.output.append(this.time + this.run.outputDelay, width, result, 0);
+    this.control.append(this.time, width, result, NODE_COUNT);
     if (delayLine.length) {
-      this.measurement.append({ start: this.time, width }, result, 2 * NODE_COUNT);
+      this.measurement.append(this.time, width, result, 2 * NODE_COUNT);
       delayLine.set(result.subarray(2 * NODE_COUNT, 3 * NODE_COUNT), history);
     }
     state.set(result.subarray(WATCHED.length * NODE_COUNT));

@@ -92,7 +92,7 @@ function attemptResponses(question: StepQuestion, { fineness, widening }: Manner
 /** No response at all, on the axis of one that there is. */
 function silence({ horizon, axisEnd }: StepResponse): StepResponse {
   const nothing = new Curve();
-  nothing.append({ start: 0, width: horizon }, new Float64Array(NODE_COUNT), 0);
+  nothing.append(0, horizon, new Float64Array(NODE_COUNT), 0);
   return { output: nothing, control: nothing, knots: monotoneKnots(nothing, horizon), horizon, axisEnd, finalValue: 0 };
 }
 

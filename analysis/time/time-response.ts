@@ -83,6 +83,5 @@ export function timeResponse(
 
 function drawn({ output, control, axisEnd }: StepResponse, size: number, points: number): TimeSeries {
   const time = drawnTimes([output, control], axisEnd, points);
-  const sized = (values: number[]) => (size === 1 ? values : values.map((value) => size * value));
-  return { time, output: sized(output.valuesAt(time)), control: sized(control.valuesAt(time)) };
+  return { time, output: output.valuesAt(time, size), control: control.valuesAt(time, size) };
 }
