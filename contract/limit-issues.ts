@@ -16,7 +16,10 @@ export interface LimitIssue {
 
 const words = { min: 'at least', max: 'at most' };
 
-function ownIssues({ quantity, bound, limit, target }: Demand, index: number): LimitIssue[] {
+/** How a number of a quantity is said; as the contract has it unless told otherwise. */
+type Say = (quantity: Quantity, value: number) => string;
+
+function ownIssues({ quantity, bound, limit, target }: Demand, index: number, say: Say): LimitIssue[] {
   const { bounds, range } = quantityRules[quantity];
   const issues: LimitIssue[] = [];
   if (!bounds.includes(bound)) issues.push({ path: [index, 'bound'], message: `This quantity is demanded as “${words[bounds[0]]}”.` });
@@ -26,7 +29,7 @@ function ownIssues({ quantity, bound, limit, target }: Demand, index: number): L
   if (outside)
     issues.push({
       path: [index, 'target'],
-      message: `A target lies inside its limit: ${bound === 'min' ? 'no less' : 'no more'} than ${limit}.`,
+      message: `A target lies inside its limit: ${bound === 'min' ? 'no less' : 'no more'} than ${say(quantity, limit)}.`,
     });
   else if (!isInRange(quantity, target)) issues.push({ path: [index, 'target'], message: `The target of this quantity is ${range}.` });
   return issues;
@@ -34,18 +37,21 @@ function ownIssues({ quantity, bound, limit, target }: Demand, index: number): L
 
 /**
  * What is wrong with a list of demands: a bound without sense, a number out of range, a target outside its limit, a quantity
- * demanded twice, a least value above the greatest.
+ * demanded twice, a least value above the greatest. `say` words numbers in a reader's units.
  */
-export function limitIssues(demands: readonly Demand[]): LimitIssue[] {
+export function limitIssues(demands: readonly Demand[], say: Say = (_, value) => String(value)): LimitIssue[] {
   return demands.flatMap((demand, index) => {
     const before = demands.slice(0, index).filter(({ quantity }) => quantity === demand.quantity);
-    const issues = ownIssues(demand, index);
+    const issues = ownIssues(demand, index, say);
     if (before.some(({ bound }) => bound === demand.bound))
       issues.push({ path: [index, 'quantity'], message: `This quantity is demanded as “${words[demand.bound]}” already.` });
     const other = before.find(({ bound }) => bound !== demand.bound);
     const [least, most] = demand.bound === 'min' ? [demand.limit, other?.limit] : [other?.limit, demand.limit];
     if (least !== undefined && most !== undefined && least > most)
-      issues.push({ path: [index, 'limit'], message: `At least ${least} and at most ${most} cannot both hold.` });
+      issues.push({
+        path: [index, 'limit'],
+        message: `At least ${say(demand.quantity, least)} and at most ${say(demand.quantity, most)} cannot both hold.`,
+      });
     return issues;
   });
 }
