@@ -25,3 +25,4 @@ export const BenchScreen = onDemand((screens) => screens.BenchScreen);
 export const PlantScreen = onDemand((screens) => screens.PlantScreen);
 export const AnalysisScreen = onDemand((screens) => screens.AnalysisScreen);
 export const LatestPlane = onDemand((screens) => screens.LatestPlane);
+export const CasesScreen = onDemand((screens) => screens.CasesScreen);

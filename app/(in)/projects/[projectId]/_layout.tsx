@@ -7,6 +7,7 @@ const pages = [
   () => import('./index'),
   () => import('./plant'),
   () => import('./bench'),
+  () => import('./cases'),
   () => import('./analyses/index'),
   () => import('./analyses/[analysisId]'),
   fetchLoopScreens,
