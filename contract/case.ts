@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { Id, Name, Revision } from './common';
+import { Id, Name, ONE_LINE, Revision } from './common';
 
 /** Conditions that the loop must survive, one by one or as a grid from lists. */
 
@@ -68,7 +68,13 @@ export const Case = z
   .meta({ id: 'Case' });
 export type Case = z.infer<typeof Case>;
 
-const pointParts = { name: z.string().trim().max(60).optional(), parameters: CaseParameters.default({}), basis: CaseBasis.optional() };
+const PointName = z
+  .string()
+  .trim()
+  .min(1, 'A point’s name has at least one character.')
+  .max(36, 'A point’s name has at most 36 characters.')
+  .regex(ONE_LINE, 'A point’s name is one line of text, without control characters.');
+const pointParts = { name: PointName.optional(), parameters: CaseParameters.default({}), basis: CaseBasis.optional() };
 const listAlong = <A extends Axis>(axis: A) =>
   z.strictObject({
     axis: z.literal(axis),

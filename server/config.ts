@@ -15,6 +15,8 @@ export interface Config {
   /** Null: mails are kept by the local fake. */
   readonly smtpUrl: string | null;
   readonly analysePerMinute: number;
+  /** What is not computed by then is answered as a job, ms. */
+  readonly answerWithinMs: number;
   readonly logLevel: string;
   /** Where the built client stands; null until it is built. */
   readonly clientDir: string | null;
@@ -33,6 +35,7 @@ const Environment = z.object({
   DEMO: z.enum(['0', '1']).optional(),
   SMTP_URL: z.url({ protocol: /^smtps?$/ }).optional(),
   ANALYSE_PER_MINUTE: z.coerce.number().int().min(1).default(600),
+  ANSWER_WITHIN_MS: z.coerce.number().int().min(0).max(600_000).default(2_000),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent']).default('info'),
   CLIENT_DIR: z.string().optional(),
   CHECK_ANSWERS: z.enum(['0', '1']).default('0'),
@@ -66,6 +69,7 @@ export function readConfig(environment: Readonly<Record<string, string | undefin
     demo: variables.DEMO ? variables.DEMO === '1' : !production,
     smtpUrl: variables.SMTP_URL ?? null,
     analysePerMinute: variables.ANALYSE_PER_MINUTE,
+    answerWithinMs: variables.ANSWER_WITHIN_MS,
     logLevel: variables.LOG_LEVEL,
     clientDir: variables.CLIENT_DIR ?? null,
     checkAnswers: variables.CHECK_ANSWERS === '1',

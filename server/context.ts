@@ -3,6 +3,7 @@ import pino, { type Logger } from 'pino';
 import { openDatabase, type Database, type OpenDatabase } from '@/db/open';
 import { createAuth, type Auth } from './auth/auth';
 import type { Config } from './config';
+import { createJobBoard, type JobBoard } from './jobs/job-board';
 import { createLoopPool, type LoopPool } from './jobs/loop-pool';
 import { createMailer, type Mailer } from './mail/mailer';
 
@@ -14,6 +15,7 @@ export interface Context {
   readonly auth: Auth;
   readonly mailer: Mailer;
   readonly jobs: LoopPool;
+  readonly board: JobBoard;
   readonly log: Logger;
   readonly close: () => Promise<void>;
 }
@@ -31,6 +33,7 @@ export function createContext(config: Config, replaced: Partial<Pick<Context, 'j
     auth: createAuth({ config, db, mailer, log }),
     mailer,
     jobs,
+    board: createJobBoard((error) => log.error({ err: error }, 'unforeseen error in a job')),
     log,
     close: async () => {
       await jobs.close();

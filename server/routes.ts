@@ -6,6 +6,9 @@ import { activityRoutes } from './activity/activity-routes';
 import { analysisRoutes } from './analyses/analysis-routes';
 import { caseRoutes } from './cases/case-routes';
 import { designRoutes } from './designs/design-routes';
+import { judgeRoutes } from './analyses/judge-routes';
+import { jobRoutes } from './jobs/job-routes';
+import { limitRoutes } from './limits/limit-routes';
 import type { Route } from './http/route';
 import { loopRoutes } from './loops/loop-routes';
 import { invitationRoutes } from './members/invitation-routes';
@@ -27,7 +30,10 @@ export const routes: readonly Route[] = [
   ...plantRoutes,
   ...designRoutes,
   ...caseRoutes,
+  ...limitRoutes,
   ...analysisRoutes,
+  ...judgeRoutes,
+  ...jobRoutes,
   ...activityRoutes,
   ...loopRoutes,
 ];

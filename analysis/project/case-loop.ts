@@ -1,6 +1,5 @@
 import type { DesignContent, FrozenCase, KeptPlant, Loop } from '@/contract';
 import { overridePlant } from './override-plant';
-import { runnablePlant } from './runnable-plant';
 
 /**
  * The loop that a design makes in one case: the case's plant with its overrides, under the design's controller.
@@ -9,7 +8,7 @@ import { runnablePlant } from './runnable-plant';
  */
 export function caseLoop({ plant, parameters }: { plant: KeptPlant; parameters: FrozenCase['parameters'] }, design: DesignContent): Loop {
   return {
-    plant: overridePlant(runnablePlant(plant), parameters),
+    plant: overridePlant(plant, parameters),
     controller: design.controller,
     sensor: plant.sensor,
     sampling: design.sampling === 'continuous' ? null : design.sampling,

@@ -1,63 +1,62 @@
-import type { CaseResult, Check, Headline } from '@/contract';
+import type { CaseResult, Headline, Verdict } from '@/contract';
+import { edgesOf, openEdges, type Checked } from './edges';
+import { besideHeadline, findingsIn, isStability, worstFinding, type Finding } from './findings';
 import { quantities } from './quantities';
 import { worstVerdict } from './worst-verdict';
 
-interface Finding {
-  readonly result: CaseResult;
-  readonly check: Check;
-}
+type Number = Pick<Headline, 'quantity' | 'value' | 'frequency' | 'limit' | 'target' | 'use'> & { case: CaseResult['case'] };
+
+const undemanded = { limit: null, target: null, use: null };
 
 const mostUnstable = (results: readonly CaseResult[]) =>
   results.reduce((worst, next) => (next.numbers.closedLoop.unstablePoles > worst.numbers.closedLoop.unstablePoles ? next : worst));
 
-const highestMs = (results: readonly CaseResult[]) =>
-  results.reduce((worst, next) => (next.numbers.sensitivity.ms.value > worst.numbers.sensitivity.ms.value ? next : worst));
-
-/** A failure comes before any use: one whose limit and target fall together has none. */
-const severity = ({ check }: Finding) => (check.use === null && check.verdict === 'fail' ? Infinity : (check.use ?? -Infinity));
-
-function nearestLimit(results: readonly CaseResult[]): Finding | null {
-  const findings = results.flatMap((result) =>
-    result.checks.filter(({ quantity, value }) => quantities[quantity].stability && value !== null).map((check) => ({ result, check })),
+function highestMs(results: readonly CaseResult[]): Number {
+  const worst = results.reduce((highest, next) =>
+    next.numbers.sensitivity.ms.value > highest.numbers.sensitivity.ms.value ? next : highest,
   );
-  if (findings.length === 0) return null;
-  return findings.reduce((worst, next) => (severity(next) > severity(worst) ? next : worst));
+  const { value, frequency } = worst.numbers.sensitivity.ms;
+  return { ...undemanded, quantity: 'ms', value, frequency, case: worst.case };
 }
 
-const reasonOf = (results: readonly CaseResult[]) => results.find(({ verdict }) => verdict === 'notJudged')?.reason ?? null;
+function numberOf({ result, check }: Finding): Number {
+  const { quantity, value, limit, target, use } = check;
+  return { quantity, value, limit, target, use, case: result.case, frequency: quantities[quantity].frequency(result.numbers) };
+}
+
+/** What was not checked cannot be vouched for: a pass at an end that is not the end of what can happen is tight. */
+const capAtEdge = (verdict: Verdict, caseId: string, checked: Checked) => verdict === 'pass' && openEdges(caseId, checked) > 0;
 
 /**
  * The number that stands first: an unstable case before anything, then the stability quantity nearest its limit,
- * and without such a limit Ms. Its verdict is that of all cases together, whichever quantity it comes from.
+ * and without such a limit Ms. Its verdict is that of all cases together, whichever quantity it comes from; where it comes
+ * from another, that one stands beside.
  *
  * @param results the judged cases, at least one
+ * @param checked where those cases stand, and which ends of the grid were declared physical
  */
-export function headline(results: readonly CaseResult[]): Headline {
-  const verdict = worstVerdict(results.map((result) => result.verdict));
+export function headline(results: readonly CaseResult[], checked: Checked): Headline {
+  const overall = worstVerdict(results.map(({ verdict }) => verdict));
   const unstable = results.filter(({ numbers }) => !numbers.closedLoop.stable);
-  const whole = {
-    verdict,
-    unstableCases: unstable.length,
-    reason: verdict === 'notJudged' ? reasonOf(results) : null,
-    limit: null,
-    use: null,
-  };
-  if (unstable.length > 0) return { ...whole, quantity: 'ms', value: null, frequency: null, case: mostUnstable(unstable).case };
-
-  const nearest = nearestLimit(results);
-  if (nearest) {
-    const { quantity, value, limit, use } = nearest.check;
-    return {
-      ...whole,
-      quantity,
-      value,
-      limit,
-      use,
-      case: nearest.result.case,
-      frequency: quantities[quantity].frequency(nearest.result.numbers),
-    };
+  const shared = { unstableCases: unstable.length, reason: null, beside: null, capped: false };
+  if (unstable.length > 0) {
+    const { case: first } = mostUnstable(unstable);
+    const edges = edgesOf(first.id, checked);
+    return { ...shared, ...undemanded, quantity: 'ms', value: null, frequency: null, case: first, verdict: overall, edges };
   }
-  const worst = highestMs(results);
-  const { value, frequency } = worst.numbers.sensitivity.ms;
-  return { ...whole, quantity: 'ms', value, frequency, case: worst.case };
+
+  const findings = findingsIn(results);
+  const measured = findings.filter((finding) => isStability(finding) && finding.check.value !== null);
+  const nearest = worstFinding(measured, ({ result }) => openEdges(result.case.id, checked));
+  const number = nearest ? numberOf(nearest) : highestMs(results);
+  const capped = capAtEdge(overall, number.case.id, checked);
+  return {
+    ...shared,
+    ...number,
+    verdict: capped ? 'tight' : overall,
+    reason: overall === 'notJudged' ? (results.find(({ verdict }) => verdict === 'notJudged')?.reason ?? null) : null,
+    beside: besideHeadline(findings, { first: nearest, overall }),
+    edges: edgesOf(number.case.id, checked),
+    capped,
+  };
 }

@@ -1,8 +1,20 @@
 /** What a project makes of the engine: which loop a case is, and what its numbers are worth. */
+export { breachIn, breachOf, needsResponses, type Breach } from './breach';
 export { caseLoop } from './case-loop';
+export { defaultTarget, targetOf } from './default-target';
+export { edgesOf, type Checked } from './edges';
+export { firstBreak, type Break } from './first-break';
+export { gridCases, gridIssues, unknownParameter, type GridCase } from './grid-cases';
 export { headline } from './headline';
 export { judgeCase, type Judgement, type Stated } from './judge-case';
+export { judgeCases, type JudgedCases } from './judge-cases';
+export { judgeLimit } from './judge-limit';
 export { limitUse } from './limit-use';
+export { marksAlong, type Mark, type Marks, type MarksQuestion } from './marks';
+export { overridePlant } from './override-plant';
+export { parameterNames, withOwnParameters } from './own-parameters';
+export { reachOf, room, roomAlong, roomWay, wayNames, type FoundRoom, type RoomQuestion } from './room';
+export type { WayName } from './room-ways';
 export { runnablePlant } from './runnable-plant';
 export { quantities, type Reading } from './quantities';
 export { worstVerdict } from './worst-verdict';

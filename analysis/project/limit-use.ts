@@ -1,11 +1,14 @@
 import type { Limit } from '@/contract';
+import { targetOf } from './default-target';
 import { judgedValue, quantities } from './quantities';
 
 const UNMARKED_TARGET_INSIDE = 0.1;
 
-/** Where no target was set, the ruler is drawn as if it stood a tenth of the limit inside. */
-function rulerTarget({ bound, limit, target }: Limit): number {
-  if (target !== null) return target;
+/** Without a target, or with one that is the limit itself, the ruler is drawn as if it stood a tenth of the limit inside. */
+function rulerTarget(demand: Limit): number {
+  const { bound, limit } = demand;
+  const target = targetOf(demand);
+  if (target !== null && target !== limit) return target;
   const inside = UNMARKED_TARGET_INSIDE * Math.abs(limit);
   return bound === 'min' ? limit + inside : limit - inside;
 }
@@ -21,7 +24,6 @@ function rulerTarget({ bound, limit, target }: Limit): number {
 export function limitUse(demand: Limit, value: number): number | null {
   const { scale } = quantities[demand.quantity];
   const target = scale(rulerTarget(demand));
-  const limit = scale(demand.limit);
-  const use = (target - scale(judgedValue(demand.quantity, value))) / (target - limit);
+  const use = (target - scale(judgedValue(demand.quantity, value))) / (target - scale(demand.limit));
   return Number.isFinite(use) ? use : null;
 }

@@ -10,23 +10,29 @@ export interface Reading {
   readonly byMagnitude: boolean;
   /** The one scale on which limit, target and value are compared. */
   readonly scale: (value: number) => number;
+  /** Whether more of the quantity is less on its scale. */
+  readonly turnsOrder: boolean;
   /** Stability quantities come before performance in the headline. */
   readonly stability: boolean;
+  /** Whether it is read off a time response. */
+  readonly fromResponse: boolean;
   /** Whether null means "no finite limit", which meets any demand in a stable loop. */
   readonly nullIsUnlimited: boolean;
 }
 
 const nowhere = () => null;
 const asIs = (value: number) => value;
-const inverse = (value: number) => 1 / value;
 const decibels = (value: number) => 20 * Math.log10(value);
+const inverse = { scale: (value: number) => 1 / value, turnsOrder: true };
 
 type Parts = Pick<Reading, 'value'> & Partial<Reading>;
 const stability = (parts: Parts): Reading => ({
   frequency: nowhere,
   byMagnitude: false,
   scale: asIs,
+  turnsOrder: false,
   stability: true,
+  fromResponse: false,
   nullIsUnlimited: false,
   ...parts,
 });
@@ -34,7 +40,7 @@ const performance = (parts: Parts): Reading => ({ ...stability(parts), stability
 
 type Metric = keyof NonNullable<NonNullable<Analysis['timeResponse']>['metrics']>;
 const metric = (name: Metric, parts: Partial<Reading> = {}) =>
-  performance({ value: (analysis) => analysis.timeResponse?.metrics?.[name] ?? null, ...parts });
+  performance({ value: (analysis) => analysis.timeResponse?.metrics?.[name] ?? null, fromResponse: true, ...parts });
 
 /** Every quantity that a project can demand a limit for. */
 export const quantities: Readonly<Record<Quantity, Reading>> = {
@@ -64,12 +70,12 @@ export const quantities: Readonly<Record<Quantity, Reading>> = {
   ms: stability({
     value: ({ sensitivity }) => sensitivity.ms.value,
     frequency: ({ sensitivity }) => sensitivity.ms.frequency,
-    scale: inverse,
+    ...inverse,
   }),
   mt: stability({
     value: ({ sensitivity }) => sensitivity.mt.value,
     frequency: ({ sensitivity }) => sensitivity.mt.frequency,
-    scale: inverse,
+    ...inverse,
   }),
   modulusMargin: stability({ value: ({ margins }) => margins.modulus, frequency: ({ sensitivity }) => sensitivity.ms.frequency }),
   diskMargin: stability({ value: ({ margins }) => margins.disk.alpha }),

@@ -1,6 +1,6 @@
 import { sql } from 'drizzle-orm';
 import { check, foreignKey, index, integer, sqliteTable, text } from 'drizzle-orm/sqlite-core';
-import type { CaseResult, FrozenInputs, Headline } from '@/contract';
+import type { CaseResult, FrozenInputs, Headline, Room } from '@/contract';
 import { user } from './account';
 import { id, json, time } from './columns';
 import { designRevision } from './design';
@@ -21,6 +21,7 @@ export const analysis = sqliteTable(
     resultHash: text().notNull(),
     verdict: text({ enum: ['pass', 'tight', 'fail', 'notJudged'] }).notNull(),
     headline: json<Headline>().notNull(),
+    room: json<Room>(),
     inputs: json<FrozenInputs>().notNull(),
     results: json<CaseResult[]>().notNull(),
     createdBy: text()

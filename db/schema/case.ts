@@ -1,4 +1,5 @@
-import { index, integer, sqliteTable, text } from 'drizzle-orm/sqlite-core';
+import { sql } from 'drizzle-orm';
+import { check, index, integer, sqliteTable, text } from 'drizzle-orm/sqlite-core';
 import type { Case } from '@/contract';
 import { id, json, time } from './columns';
 import { plant } from './plant';
@@ -19,10 +20,17 @@ export const projectCase = sqliteTable(
     name: text().notNull(),
     parameters: json<Case['parameters']>().notNull().default({}),
     axes: json<Case['axes']>().notNull().default({}),
+    basis: text({ enum: ['measured', 'figures', 'extrapolated'] })
+      .notNull()
+      .default('extrapolated'),
     position: integer().notNull(),
     version: integer().notNull().default(1),
     createdAt: time().notNull(),
     updatedAt: time().notNull(),
   },
-  (table) => [index('project_case_project').on(table.projectId, table.position), index('project_case_plant').on(table.plantId)],
+  (table) => [
+    index('project_case_project').on(table.projectId, table.position),
+    index('project_case_plant').on(table.plantId),
+    check('project_case_basis', sql`${table.basis} in ('measured', 'figures', 'extrapolated')`),
+  ],
 );

@@ -1,7 +1,8 @@
 import { sql } from 'drizzle-orm';
 import { check, index, integer, primaryKey, sqliteTable, text } from 'drizzle-orm/sqlite-core';
+import type { OperatingRange } from '@/contract';
 import { user } from './account';
-import { flag, id, time } from './columns';
+import { flag, id, json, time } from './columns';
 import { team } from './team';
 
 /** One loop on one vehicle. `version` counts edits and is the ETag. */
@@ -16,6 +17,7 @@ export const project = sqliteTable(
     vehicle: text().notNull().default(''),
     description: text().notNull().default(''),
     archived: flag().notNull().default(false),
+    operatingRange: json<OperatingRange[]>().notNull().default([]),
     version: integer().notNull().default(1),
     createdAt: time().notNull(),
     updatedAt: time().notNull(),

@@ -1,4 +1,4 @@
-import { keepAnalysis } from '@/server/analyses/analysis-service';
+import { keepAnalysis } from '@/server/analyses/keep-analysis';
 import type { Context } from '@/server/context';
 import { addDesignRevision, enterDesign } from '@/server/designs/design-service';
 import { enterPlant } from '@/server/plants/plant-service';
@@ -27,7 +27,7 @@ export async function seedProject(context: Context, { teamId, engineer, others }
     stamp: stamp(daysAgo),
   }));
   const design = await enterDesign(context, project.id, { name, ...first.content }, first.stamp);
-  await keepAnalysis(context, project.id, { designId: design.id }, later(first.stamp, 7));
+  await keepAnalysis(context, { projectId: project.id, choice: { designId: design.id }, stamp: later(first.stamp, 7) });
   const key = { projectId: project.id, designId: design.id };
   for (const [index, revision] of followers.entries())
     await addDesignRevision(context, key, { ...revision.content, baseRevision: index + 1, analyse: true }, revision.stamp);

@@ -1,5 +1,5 @@
 import { and, desc, eq } from 'drizzle-orm';
-import type { AnalysisSummary, CaseResult, FrozenInputs, Headline, KeptAnalysis, PageQuery, Verdict } from '@/contract';
+import type { AnalysisSummary, CaseResult, FrozenInputs, Headline, KeptAnalysis, PageQuery, Room, Verdict } from '@/contract';
 import type { Database } from '../open';
 import { analysis, user } from '../tables';
 import { transact } from '../transact';
@@ -15,6 +15,7 @@ export interface NewAnalysis {
   readonly resultHash: string;
   readonly verdict: Verdict;
   readonly headline: Headline;
+  readonly room: Room;
   readonly inputs: FrozenInputs;
   readonly results: CaseResult[];
   readonly stamp: Stamp;
@@ -30,9 +31,10 @@ const summaryColumns = {
   createdBy: user.name,
   verdict: analysis.verdict,
   headline: analysis.headline,
+  room: analysis.room,
 };
 
-type SummaryRow = Omit<AnalysisSummary, 'design' | 'plants' | 'room' | 'caseCount' | 'createdAt'> & {
+type SummaryRow = Omit<AnalysisSummary, 'design' | 'plants' | 'caseCount' | 'createdAt'> & {
   inputs: FrozenInputs;
   createdAt: Date;
 };
@@ -49,7 +51,6 @@ function toSummary({ inputs, createdAt, ...row }: SummaryRow): AnalysisSummary {
     ...row,
     design: { id, name, revision },
     createdAt: createdAt.toISOString(),
-    room: null,
     caseCount: inputs.cases.length,
     plants: plantsOf(inputs),
   };

@@ -1,10 +1,10 @@
 import { and, count, desc, eq } from 'drizzle-orm';
-import type { Case, KeptPlant, PageQuery, PlantRevision } from '@/contract';
+import type { KeptPlant, PageQuery, PlantRevision } from '@/contract';
 import type { Database } from '../open';
 import { plant, plantRevision, user } from '../tables';
 import { transact } from '../transact';
 import { recordActivity } from './activity-store';
-import { insertCase } from './case-store';
+import { insertCases, type NewCase } from './case-store';
 import { before, below, rowsFor, toPage, type Page } from './keyset';
 import type { ActivityEntry, Stamp } from './stamp';
 
@@ -78,13 +78,13 @@ function insertRevision(within: Database, revision: number, { plantId, content, 
 }
 
 /** Writes a plant with its first revision; the project's first plant brings `firstCase`. */
-export function createPlant(db: Database, created: NewRevision, firstCase: Case): void {
+export function createPlant(db: Database, created: NewRevision, firstCase: NewCase): void {
   const { projectId, plantId, name, stamp } = created;
   transact(db, (within) => {
     const [{ plants }] = within.select({ plants: count() }).from(plant).where(eq(plant.projectId, projectId)).all();
     within.insert(plant).values({ id: plantId, projectId, name, latestRevision: 1, createdAt: stamp.at, updatedAt: stamp.at }).run();
     insertRevision(within, 1, created);
-    if (plants === 0) insertCase(within, projectId, firstCase, stamp.at);
+    if (plants === 0) insertCases(within, projectId, [firstCase], stamp.at);
     recordActivity(within, projectId, created.activity, stamp);
   });
 }

@@ -28,6 +28,7 @@ const columns = {
   vehicle: project.vehicle,
   description: project.description,
   archived: project.archived,
+  operatingRange: project.operatingRange,
   version: project.version,
   role: projectMember.role,
   team: { id: team.id, name: team.name },
@@ -129,7 +130,7 @@ export function createProject(db: Database, { activity, stamp, ...created }: New
 interface ProjectChange {
   readonly projectId: string;
   readonly version: number;
-  readonly changes: Partial<Pick<Project, 'name' | 'vehicle' | 'description' | 'archived'>>;
+  readonly changes: Partial<Pick<Project, 'name' | 'vehicle' | 'description' | 'archived' | 'operatingRange'>>;
   readonly activity: ActivityEntry;
   readonly stamp: Stamp;
 }

@@ -1,38 +1,40 @@
 import { randomUUID } from 'node:crypto';
 import { engineVersion } from '@/analysis';
-import { headline } from '@/analysis/project';
+import { judgeCases } from '@/analysis/project';
+import type { FrozenInputs } from '@/contract';
 import type { NewAnalysis } from '@/db/stores/analysis-store';
 import type { Stamp } from '@/db/stores/stamp';
-import type { Context } from '../context';
-import { computeResults } from './compute-results';
+import type { Watch } from '../jobs/in-turn';
+import type { LoopPool } from '../jobs/loop-pool';
+import { computeNumbers } from './compute-numbers';
+import { computeRoom } from './compute-room';
 import { contentHash } from './content-hash';
-import { freezeInputs, type DesignToFreeze } from './freeze-inputs';
 import { hashResults } from './hash-results';
 
 interface Request {
   readonly projectId: string;
-  readonly design: DesignToFreeze;
-  /** All cases of the project where absent. */
-  readonly caseIds?: readonly string[];
+  readonly inputs: FrozenInputs;
   readonly stamp: Stamp;
+  readonly watch?: Watch;
 }
 
-/** Freezes the inputs and computes them: an analysis that only needs to be written. @throws as freezeInputs and computeResults */
-export async function analyseDesign(
-  { db, jobs }: Pick<Context, 'db' | 'jobs'>,
-  { projectId, design, caseIds, stamp }: Request,
-): Promise<NewAnalysis> {
-  const inputs = freezeInputs(db, projectId, design, caseIds);
-  const results = await computeResults(jobs, inputs);
-  const first = headline(results);
+/** Each case is analysed, and then asked how much room it leaves in three ways. */
+export const workIn = ({ cases }: FrozenInputs) => cases.length * 4;
+
+/** Computes and judges frozen inputs: an analysis that only needs to be written. @throws as computeNumbers */
+export async function analyseDesign(jobs: LoopPool, { projectId, inputs, stamp, watch = {} }: Request): Promise<NewAnalysis> {
+  const { design, cases, limits } = inputs;
+  const numbers = await computeNumbers(jobs, design, cases, { ...watch, responses: true });
+  const { results, headline } = judgeCases(design, inputs, numbers);
   return {
     id: randomUUID(),
     projectId,
     engineVersion,
     contentHash: contentHash(inputs),
     resultHash: hashResults(results),
-    verdict: first.verdict,
-    headline: first,
+    verdict: headline.verdict,
+    headline,
+    room: await computeRoom(jobs, { design, cases, limits, results }, watch),
     inputs,
     results,
     stamp,

@@ -1,10 +1,13 @@
-import { Analysis, AnalysisSummary, CreateAnalysis, Id, KeptAnalysis, page, PageQuery, Recomputed } from '@/contract';
+import { z } from 'zod';
+import { Analysis, AnalysisSummary, CreateAnalysis, Id, JobAnswer, KeptAnalysis, page, PageQuery, Recomputed } from '@/contract';
 import { listAnalyses } from '@/db/stores/analysis-store';
 import { stampNow } from '../activity/stamp-now';
+import { answer } from '../http/answer';
 import { inProject } from '../http/paths';
 import { route } from '../http/route';
 import { countAnalysis } from '../loops/count-analysis';
-import { caseCurves, keepAnalysis, openAnalysis, recompute } from './analysis-service';
+import { caseCurves, openAnalysis, recompute } from './analysis-service';
+import { startAnalysis } from './keep-analysis';
 
 const tag = 'Analyses';
 const ofAnalysis = inProject.extend({ analysisId: Id });
@@ -23,15 +26,17 @@ export const analysisRoutes = [
   route({
     method: 'post',
     path: '/api/projects/:projectId/analyses',
-    summary: 'Analyses a design revision over the project’s cases and keeps the result, frozen',
+    summary:
+      'Analyses a design revision over the project’s cases and keeps the result, frozen; 202 with a job where that takes longer than 2 s',
     tag,
     access: { project: 'edit' },
     input: { params: inProject, body: CreateAnalysis },
-    output: KeptAnalysis,
+    output: z.union([KeptAnalysis, JobAnswer]),
     status: 201,
-    handler: ({ context, project, user, body }) => {
+    handler: async ({ context, project, user, body }) => {
       countAnalysis(context, user);
-      return keepAnalysis(context, project.id, body, stampNow(user));
+      const started = await startAnalysis(context, { projectId: project.id, choice: body, stamp: stampNow(user) });
+      return 'job' in started ? answer(started, { status: 202 }) : started;
     },
   }),
   route({

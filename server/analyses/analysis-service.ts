@@ -1,15 +1,10 @@
-import type { z } from 'zod';
 import { engineVersion } from '@/analysis';
-import type { Analysis, CreateAnalysis, KeptAnalysis, Recomputed } from '@/contract';
-import { createAnalysis, findAnalysis } from '@/db/stores/analysis-store';
-import { findDesign } from '@/db/stores/design-store';
-import type { Stamp } from '@/db/stores/stamp';
+import { judgeCases } from '@/analysis/project';
+import type { Analysis, KeptAnalysis, Recomputed } from '@/contract';
+import { findAnalysis } from '@/db/stores/analysis-store';
 import type { Context } from '../context';
 import { NotFound } from '../http/problem';
-import { activityEntry } from '../activity/activity-entry';
-import { analyseDesign } from './analyse-design';
-import { overCases } from './over-cases';
-import { computeCase, computeResults } from './compute-results';
+import { computeCase, computeNumbers } from './compute-numbers';
 import { hashResults } from './hash-results';
 import { numberDifferences } from './number-differences';
 
@@ -30,40 +25,24 @@ export function openAnalysis({ db }: Pick<Parts, 'db'>, key: AnalysisKey): KeptA
   return kept;
 }
 
-/**
- * Analyses a design revision, the latest where none is named, over cases of the project and keeps the result.
- * @throws NotFound for a design or case that is not in the project, Conflict without cases, Meaningless where the engine refuses
- */
-export async function keepAnalysis(
-  parts: Parts,
-  projectId: string,
-  { designId, designRevision, caseIds }: z.output<typeof CreateAnalysis>,
-  stamp: Stamp,
-): Promise<KeptAnalysis> {
-  const design = findDesign(parts.db, { projectId, designId }, designRevision ?? null);
-  if (!design) throw new NotFound('There is no such design revision in this project.');
-  const kept = await analyseDesign(parts, { projectId, design, caseIds, stamp });
-  const summary = `analysed ${design.name}, revision ${design.revision}, ${overCases(kept)}`;
-  createAnalysis(parts.db, kept, activityEntry('analysis.kept', summary));
-  return openAnalysis(parts, { projectId, analysisId: kept.id });
-}
-
 /** A case with its curves, computed from what was frozen. @throws NotFound */
 export async function caseCurves(parts: Parts, key: AnalysisKey, caseId: string): Promise<Analysis> {
   const { inputs } = openAnalysis(parts, key);
   const frozen = inputs.cases.find(({ id }) => id === caseId);
   if (!frozen) throw new NotFound();
-  return computeCase(parts.jobs, inputs, frozen, { curves: true });
+  return computeCase(parts.jobs, inputs.design, frozen);
 }
 
 /** Computes an analysis from its frozen inputs once more and says where it came out otherwise. @throws NotFound */
 export async function recompute(parts: Parts, key: AnalysisKey): Promise<Recomputed> {
   const kept = openAnalysis(parts, key);
-  const results = await computeResults(parts.jobs, kept.inputs);
+  const { design, cases } = kept.inputs;
+  const numbers = await computeNumbers(parts.jobs, design, cases, { responses: true });
+  const { results } = judgeCases(design, kept.inputs, numbers);
   const resultHash = hashResults(results);
   const tolerance = kept.engineVersion === engineVersion ? 0 : OTHER_ENGINE_TOLERANCE;
-  const differences = results.flatMap(({ case: { name }, numbers }, index) =>
-    numberDifferences(name, { kept: kept.results[index].numbers, now: numbers }, tolerance),
+  const differences = results.flatMap((now, index) =>
+    numberDifferences(now.case.name, { kept: kept.results[index].numbers, now: now.numbers }, tolerance),
   );
   return { same: resultHash === kept.resultHash || (tolerance > 0 && differences.length === 0), engineVersion, resultHash, differences };
 }

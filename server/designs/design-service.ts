@@ -5,6 +5,7 @@ import { createDesign, findDesign, reviseDesign, type DesignKey } from '@/db/sto
 import type { Stamp } from '@/db/stores/stamp';
 import { activityEntry } from '../activity/activity-entry';
 import { analyseDesign } from '../analyses/analyse-design';
+import { freezeInputs } from '../analyses/freeze-inputs';
 import { openAnalysis } from '../analyses/analysis-service';
 import { overCases } from '../analyses/over-cases';
 import type { Context } from '../context';
@@ -50,7 +51,8 @@ export async function addDesignRevision(
   await checkDesign(parts.jobs, content);
   const revision = baseRevision + 1;
   const design = { id: key.designId, name: name ?? before.name, revision, ...content };
-  const analysis = analyse ? await analyseDesign(parts, { projectId: key.projectId, design, stamp }) : null;
+  const inputs = analyse ? await freezeInputs(parts, key.projectId, design) : null;
+  const analysis = inputs && (await analyseDesign(parts.jobs, { projectId: key.projectId, inputs, stamp }));
   const analysed = analysis ? ` and analysed it ${overCases(analysis)}` : '';
   const activity = activityEntry('design.revised', `changed the design ${design.name} to revision ${revision}${analysed}`, note);
   const revised = { ...key, name: design.name, content, note, activity, stamp };

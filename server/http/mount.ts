@@ -5,6 +5,7 @@ import type { Context } from '../context';
 import { Answer } from './answer';
 import { checkAnswer } from './check-answer';
 import { expectVersion } from './etag';
+import { EventStream, sendEvents } from './event-stream';
 import { answerOnce } from './idempotency';
 import { Problem } from './problem';
 import type { AnyVisit, Route } from './route';
@@ -29,6 +30,7 @@ async function receive(context: Context, route: Route, request: Request): Promis
 }
 
 function send({ config }: Context, route: Route, response: Response, reply: unknown): void {
+  if (reply instanceof EventStream) return sendEvents(response, reply);
   const { body, options } = reply instanceof Answer ? reply : new Answer(reply);
   if (config.checkAnswers && route.output) checkAnswer(route.output, body);
   response.status(options.status ?? route.status).set(options.headers ?? {});

@@ -4,6 +4,7 @@ import type { Permission, Role } from '@/contract';
 import type { SignedIn } from '../auth/signed-in';
 import type { Context } from '../context';
 import type { Answer } from './answer';
+import type { EventStream } from './event-stream';
 
 /** A member of the path's `:projectId` whose role has the permission. An archived project is closed to all but `read`, unless said otherwise. */
 interface ProjectAccess {
@@ -55,11 +56,13 @@ export interface RouteDefinition<A extends Access, I extends Input, O extends z.
   readonly status?: number;
   /** A POST takes an Idempotency-Key unless it computes without keeping, or sets cookies. */
   readonly idempotent?: boolean;
+  /** Answers by Server-Sent Events, each of them one `output`. */
+  readonly events?: boolean;
   handler(visit: Visit<A, I>): Reply<O> | Promise<Reply<O>>;
 }
 
 type Body<O> = O extends z.ZodType ? z.input<O> : void;
-type Reply<O> = Body<O> | Answer<Body<O>>;
+type Reply<O> = Body<O> | Answer<Body<O>> | EventStream<Body<O>>;
 
 /** A route whose own types are forgotten, so that all routes fit in one list. */
 export interface Route {
@@ -72,6 +75,7 @@ export interface Route {
   readonly output: z.ZodType | null;
   readonly status: number;
   readonly idempotent: boolean;
+  readonly events: boolean;
   handler(visit: AnyVisit): unknown;
 }
 
@@ -87,6 +91,6 @@ export interface AnyVisit extends Omit<Visit, 'params' | 'query' | 'body' | 'use
 export function route<const A extends Access, const I extends Input, const O extends z.ZodType | null>(
   definition: RouteDefinition<A, I, O>,
 ): Route {
-  const { input = {}, output, status = output ? 200 : 204, idempotent = definition.access !== 'public' } = definition;
-  return { ...definition, input, status, idempotent: idempotent && definition.method === 'post' } as Route;
+  const { input = {}, output, status = output ? 200 : 204, idempotent = definition.access !== 'public', events = false } = definition;
+  return { ...definition, input, status, events, idempotent: idempotent && definition.method === 'post' } as Route;
 }

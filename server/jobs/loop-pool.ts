@@ -1,5 +1,6 @@
 import { availableParallelism } from 'node:os';
 import { Piscina } from 'piscina';
+import type { FoundRoom, RoomQuestion, WayName } from '@/analysis/project';
 import type { Analysis, Loop, PlantModel, PlantReading } from '@/contract';
 import { LoopRefused, TooBusy } from './refusals';
 import type { Outcome } from './task';
@@ -21,8 +22,14 @@ export interface LoopPoolOptions {
 
 /** The engine on worker threads: the server's main thread never runs it. */
 export interface LoopPool {
+  /** How many loops are computed at the same time. */
+  readonly threads: number;
   /** @throws LoopRefused with the engine's pointer, or `#` when it took too long; TooBusy */
   analyse(loop: Loop, options: { curves: boolean }): Promise<Analysis>;
+  /** Several loops on one thread, without curves. @throws as analyse; `index` of the LoopRefused says which loop it was */
+  analyseAll(loops: readonly Loop[], options: { responses: boolean }): Promise<Analysis[]>;
+  /** @throws as analyse */
+  room(way: WayName, question: RoomQuestion, reach: number): Promise<FoundRoom>;
   /** @throws as analyse */
   describe(plant: PlantModel): Promise<PlantReading>;
   close(): Promise<void>;
@@ -37,8 +44,13 @@ const defaults = (): LoopPoolOptions => ({
   onError: () => undefined,
 });
 
-const stopped = (detail: string) => new LoopRefused({ pointer: '#', detail });
+const stopped = (detail: string, index: number) => new LoopRefused({ pointer: '#', detail }, index);
 const isOutOfMemory = (error: unknown) => error instanceof Error && 'code' in error && error.code === 'ERR_WORKER_OUT_OF_MEMORY';
+
+function valueOf<Value>(outcome: Outcome<Value>, index = 0): Value {
+  if ('refused' in outcome) throw new LoopRefused(outcome.refused, index);
+  return outcome.value;
+}
 
 /** A thread cannot be interrupted: one that takes too long is ended, and piscina starts another in its place. */
 export function createLoopPool(options: Partial<LoopPoolOptions> = {}): LoopPool {
@@ -55,14 +67,12 @@ export function createLoopPool(options: Partial<LoopPoolOptions> = {}): LoopPool
 
   async function run<Value>(name: string, task: object): Promise<Value> {
     if (pool.queueSize >= maxWaiting) throw new TooBusy();
-    const { started, signal, release } = watchdog(timeoutMs);
+    const { started, signal, begun, release } = watchdog(timeoutMs);
     try {
-      const outcome: Outcome<Value> = await pool.run({ ...task, started }, { name, signal, transferList: [started] });
-      if ('refused' in outcome) throw new LoopRefused(outcome.refused);
-      return outcome.value;
+      return valueOf<Value>(await pool.run({ ...task, started }, { name, signal, transferList: [started] }));
     } catch (error) {
-      if (signal.aborted) throw stopped(`This loop took longer than ${timeoutMs / 1000} s to analyse and was stopped.`);
-      if (isOutOfMemory(error)) throw stopped('This loop needs more memory than one analysis may take.');
+      if (signal.aborted) throw stopped(`This loop took longer than ${timeoutMs / 1000} s to analyse and was stopped.`, begun());
+      if (isOutOfMemory(error)) throw stopped('This loop needs more memory than one analysis may take.', begun());
       throw error;
     } finally {
       release();
@@ -70,7 +80,13 @@ export function createLoopPool(options: Partial<LoopPoolOptions> = {}): LoopPool
   }
 
   return {
+    threads,
     analyse: (loop, { curves }) => run<Analysis>('analyse', { loop, curves }),
+    analyseAll: async (loops, { responses }) => {
+      const outcomes = await run<Outcome<Analysis>[]>('analyseAll', { loops, responses });
+      return outcomes.map(valueOf);
+    },
+    room: (way, question, reach) => run<FoundRoom>('room', { way, question, reach }),
     describe: (plant) => run<PlantReading>('describe', { plant }),
     close: () => pool.close({ force: true }),
   };

@@ -3,7 +3,11 @@ import { Meaningless, Problem } from '../http/problem';
 
 /** The engine will not compute this loop; `error.pointer` points into the loop, `#` being all of it. */
 export class LoopRefused extends Meaningless {
-  constructor(readonly error: ProblemError) {
+  /** @param index which of several loops it was */
+  constructor(
+    readonly error: ProblemError,
+    readonly index = 0,
+  ) {
     super([error]);
   }
 }

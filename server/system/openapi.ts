@@ -16,8 +16,8 @@ function refusals({ access, input }: Route): Record<string, ReturnType<typeof pr
 }
 
 function operation(route: Route): ZodOpenApiOperationObject {
-  const { summary, tag, input, output, status, access, method, path } = route;
-  const success = output && status < 300 ? { content: { 'application/json': { schema: output } } } : {};
+  const { summary, tag, input, output, status, access, method, path, events } = route;
+  const success = output && status < 300 ? { content: { [events ? 'text/event-stream' : 'application/json']: { schema: output } } } : {};
   return {
     operationId: `${method}${path.replace(/[^A-Za-z]+(\w)/g, (_, letter: string) => letter.toUpperCase())}`,
     summary,

@@ -18,6 +18,7 @@ describe('the configuration', () => {
       demo: true,
       smtpUrl: null,
       analysePerMinute: 600,
+      answerWithinMs: 2_000,
       logLevel: 'info',
     });
   });

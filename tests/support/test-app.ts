@@ -35,7 +35,10 @@ const listening = (server: Server) =>
 /** @example const app = await startTestApp(); const ada = await app.client('ada').signUp(); */
 export async function startTestApp({ env, config, routes, replaced }: TestAppOptions = {}): Promise<TestApp> {
   const dataDir = mkdtempSync(join(tmpdir(), 'kerbline-test-'));
-  const settings = { ...readConfig({ LOG_LEVEL: 'silent', CHECK_ANSWERS: '1', ...env, DATA_DIR: dataDir }), ...config };
+  const settings = {
+    ...readConfig({ LOG_LEVEL: 'silent', CHECK_ANSWERS: '1', ANSWER_WITHIN_MS: '60000', ...env, DATA_DIR: dataDir }),
+    ...config,
+  };
   const context = createContext(settings, replaced);
   const server = createServer(createApp(context, routes));
   const url = `http://127.0.0.1:${await listening(server)}`;

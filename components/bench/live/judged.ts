@@ -9,5 +9,6 @@ export function judged(subject: BenchSubject, settings: Settings, numbers: Analy
   const sampled = opened?.sampling !== null && typeof opened?.sampling === 'object';
   const stated = { sampling: settings.statedContinuous || sampled, deadTime: plant.deadTimeBasis !== null };
   const { verdict, reason, checks } = judgeCase([], numbers, stated);
-  return headline([{ case: { id: shownCase.id, name: shownCase.name }, verdict, reason, checks, numbers }]);
+  const result = { case: { id: shownCase.id, name: shownCase.name }, verdict, reason, checks, numbers };
+  return headline([result], { cases: [], operatingRange: [] });
 }

@@ -10,12 +10,13 @@ const limits: Limit[] = [
   { quantity: 'settlingTime', bound: 'max', limit: 3, target: 2.7, source: 'team rule' },
 ];
 const judged = (name: string, numbers: Analysis) => aResult(name, numbers, judgeCase(limits, numbers, stated));
+const nowhere = { cases: [], operatingRange: [] };
 const loop = (degrees: number, ms: number, settlingTime: number) =>
   anAnalysis({ margins: { phase: { degrees, frequency: 2.1 } }, ms, metrics: { settlingTime } });
 
 describe('the headline', () => {
   it('is the worst Ms, not judged, where no limits are set', () => {
-    const first = headline([aResult('dry', anAnalysis({ ms: 1.5 })), aResult('standing water', anAnalysis({ ms: 1.62 }))]);
+    const first = headline([aResult('dry', anAnalysis({ ms: 1.5 })), aResult('standing water', anAnalysis({ ms: 1.62 }))], nowhere);
     expect(first).toMatchObject({
       quantity: 'ms',
       value: 1.62,
@@ -33,34 +34,38 @@ describe('the headline', () => {
       judged('ice', anAnalysis({ stable: false })),
       judged('gravel', anAnalysis({ stable: false, unstablePoles: 4 })),
     ];
-    expect(headline(results)).toEqual({
+    expect(headline(results, nowhere)).toEqual({
       quantity: 'ms',
       value: null,
       verdict: 'fail',
       case: results[2].case,
       frequency: null,
       limit: null,
+      target: null,
       use: null,
       unstableCases: 2,
       reason: null,
+      beside: null,
+      edges: [],
+      capped: false,
     });
   });
 
   it('is the failed stability quantity with the greatest use', () => {
-    const first = headline([judged('dry', loop(44, 1.5, 2)), judged('wet track', loop(52, 1.9, 2))]);
+    const first = headline([judged('dry', loop(44, 1.5, 2)), judged('wet track', loop(52, 1.9, 2))], nowhere);
     // Phase: (50 − 44)/5 = 1.2. Ms: (1/1.6 − 1/1.9)/(1/1.6 − 1/1.7) = 2.68.
     expect(first).toMatchObject({ quantity: 'ms', value: 1.9, limit: 1.7, verdict: 'fail', case: { name: 'wet track' } });
     expect(first.use).toBeCloseTo(2.684, 3);
   });
 
   it('keeps a failed performance quantity out of its place but carries its verdict', () => {
-    const first = headline([judged('dry', loop(52, 1.5, 9))]);
+    const first = headline([judged('dry', loop(52, 1.5, 9))], nowhere);
     expect(first).toMatchObject({ quantity: 'phaseMargin', value: 52, frequency: 2.1, verdict: 'fail' });
     expect(first.use).toBeCloseTo(-0.4, 12);
   });
 
   it('is the stability quantity with the greatest use where all hold', () => {
-    expect(headline([judged('dry', loop(47, 1.5, 2)), judged('wet', loop(60, 1.65, 2))])).toMatchObject({
+    expect(headline([judged('dry', loop(47, 1.5, 2)), judged('wet', loop(60, 1.65, 2))], nowhere)).toMatchObject({
       quantity: 'phaseMargin',
       value: 47,
       verdict: 'tight',
@@ -70,7 +75,7 @@ describe('the headline', () => {
   it('is Ms where only performance is demanded', () => {
     const fast: Limit[] = [{ quantity: 'settlingTime', bound: 'max', limit: 3, target: null, source: 'lap plan' }];
     const numbers = loop(52, 1.5, 2);
-    expect(headline([aResult('dry', numbers, judgeCase(fast, numbers, stated))])).toMatchObject({
+    expect(headline([aResult('dry', numbers, judgeCase(fast, numbers, stated))], nowhere)).toMatchObject({
       quantity: 'ms',
       value: 1.5,
       verdict: 'pass',

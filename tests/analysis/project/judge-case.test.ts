@@ -34,8 +34,17 @@ describe('the verdict of one case', () => {
   });
 
   it('has no tight without a target', () => {
-    expect(judgeCase([most('ms', 1.6, null)], anAnalysis({ ms: 1.599 }), stated).verdict).toBe('pass');
-    expect(judgeCase([most('ms', 1.6, null)], anAnalysis({ ms: 1.601 }), stated).verdict).toBe('fail');
+    const overshooting = (overshootPercent: number) => anAnalysis({ metrics: { overshootPercent } });
+    expect(judgeCase([most('overshootPercent', 5, null)], overshooting(4.999), stated).verdict).toBe('pass');
+    expect(judgeCase([most('overshootPercent', 5, null)], overshooting(5.001), stated).verdict).toBe('fail');
+  });
+
+  it('judges against the default target where none is named', () => {
+    expect(judgeCase([most('ms', 1.6, null)], anAnalysis({ ms: 1.499 }), stated).verdict).toBe('pass');
+    expect(judgeCase([most('ms', 1.6, null)], anAnalysis({ ms: 1.501 }), stated)).toMatchObject({
+      verdict: 'tight',
+      checks: [{ limit: 1.6, target: 1.5 }],
+    });
   });
 
   it('is not judged without limits', () => {

@@ -37,7 +37,7 @@ describe('a kept analysis', () => {
     expect(kept).toMatchObject({
       verdict: 'notJudged',
       caseCount: 1,
-      room: null,
+      room: { moreGain: { any: null, stability: null, instability: { amount: 11.68, case: { name: 'nominal' } } } },
       createdBy: 'ada',
       engineVersion: result.numbers.engineVersion,
     });

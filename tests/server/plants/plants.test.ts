@@ -31,7 +31,18 @@ describe('plants', () => {
     await made(ada, `${mine.at}/plants`, { ...aPlant, name: 'Dry' });
     const { body } = await ada.call<{ items: Case[]; nextCursor: null }>('GET', `${mine.at}/cases`);
     expect(body).toEqual({
-      items: [{ id: expect.any(String), name: 'nominal', plantId: mine.plant.id, plantRevision: null, parameters: {}, axes: {} }],
+      items: [
+        {
+          id: expect.any(String),
+          name: 'nominal',
+          plantId: mine.plant.id,
+          plantRevision: null,
+          parameters: {},
+          axes: {},
+          basis: 'extrapolated',
+          etag: '"1"',
+        },
+      ],
       nextCursor: null,
     });
   });
