@@ -3,6 +3,7 @@ import { fromGains } from '@/analysis/loop/controller';
 import { LoopError } from '@/analysis/loop/loop-error';
 import type { LoopModel, Rational } from '@/analysis/loop/model';
 import { axisFrequencies, landmarks } from './landmarks';
+import { LEAST_LISTED_GAIN, ZERO_GAIN } from './least-gain';
 import type { EndOfAxis, LoopFunction } from './loop-function';
 import * as S from './sample';
 
@@ -18,6 +19,8 @@ export class ContinuousLoop implements LoopFunction {
   readonly axisFrequencies: readonly number[];
   readonly isZero: boolean;
   readonly deadTime: number;
+  readonly end = null;
+  readonly leastListedGain: number;
   readonly atZero: EndOfAxis;
   readonly atInfinity: EndOfAxis;
   evaluations = 0;
@@ -38,6 +41,7 @@ export class ContinuousLoop implements LoopFunction {
     this.forward = forward === controller ? this.command : new AxisProduct([forward, filters]);
     this.plantDeadTime = model.plantDeadTime;
     this.deadTime = model.plantDeadTime + model.sensorDeadTime;
+    this.leastListedGain = this.deadTime > 0 ? LEAST_LISTED_GAIN : ZERO_GAIN;
     const parts = [plant, controller, filters, sensor];
     this.landmarks = landmarks(parts, this.deadTime);
     this.axisFrequencies = axisFrequencies(parts);

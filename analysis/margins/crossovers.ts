@@ -3,7 +3,7 @@ import type { LoopFunction } from './loop-function';
 import { visitPieces } from './pieces';
 import type { Probe } from './probe';
 import { loopGain, loopPhase } from './quantities';
-import { LEAST_LISTED_GAIN } from './search-grid';
+import { ZERO_GAIN } from './least-gain';
 
 /** A point where |L| = 1. The phase is unwrapped, radians. */
 export interface GainCrossover {
@@ -17,8 +17,6 @@ export interface PhaseCrossover {
   readonly gain: number;
 }
 
-/** |L| below this counts as zero. */
-const ZERO_GAIN = 1e-12;
 /** A neutral loop's crossovers never end; the list does. */
 export const MOST_NEUTRAL_CROSSOVERS = 200;
 const TURN = 2 * Math.PI;
@@ -39,14 +37,14 @@ export const gainCrossovers = (probe: Probe): GainCrossover[] => {
   return found;
 };
 
-/** All ω ≥ 0 with L real and negative, ascending, the point at infinity last. */
+/** All ω ≥ 0 with L real and negative, ascending, the end of the axis last. */
 export const phaseCrossovers = (loop: LoopFunction, probe: Probe): PhaseCrossover[] => {
   const found: PhaseCrossover[] = [];
   const atZero = limitOf(loop.atZero.loop, 'zero');
   if (Number.isFinite(atZero) && atZero < -ZERO_GAIN) found.push({ frequency: 0, gain: -atZero });
   const limit = loop.deadTime > 0 ? limitOf(loop.atInfinity.loop, 'infinity') : 0;
   const most = limit === 0 ? Infinity : MOST_NEUTRAL_CROSSOVERS;
-  const least = Math.log(loop.deadTime > 0 ? LEAST_LISTED_GAIN : ZERO_GAIN);
+  const least = Math.log(loop.leastListedGain);
   visitPieces(probe, loopPhase, {
     matters: (low, high, i) => firstLevel(low) <= high && Math.max(probe.valueAt(i, loopGain), probe.valueAt(i + 1, loopGain)) >= least,
     visit: ({ a, valueA, b, valueB }) => {
@@ -60,7 +58,8 @@ export const phaseCrossovers = (loop: LoopFunction, probe: Probe): PhaseCrossove
     },
   });
   const atInfinity = limitOf(loop.atInfinity.loop, 'infinity');
-  if (loop.deadTime === 0 && Number.isFinite(atInfinity) && atInfinity < -ZERO_GAIN) found.push({ frequency: null, gain: -atInfinity });
+  if (loop.deadTime === 0 && Number.isFinite(atInfinity) && atInfinity < -loop.leastListedGain)
+    found.push({ frequency: loop.end, gain: -atInfinity });
   return found;
 };
 

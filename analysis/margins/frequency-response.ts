@@ -36,6 +36,8 @@ const BEYOND = 100;
 /** The turns of the dead time that are drawn, radians, unless a crossover lies further out. */
 const DRAWN_TURNS = 60;
 const BEYOND_CROSSOVER = 4;
+/** How near to its end a finite axis is drawn, relatively: L may be 0 there. */
+const BESIDE_END = 1e-4;
 
 /** The frequencies to draw: every corner and crossover with two decades around, the dead time's turns cut off. */
 export const drawnGrid = (
@@ -46,8 +48,9 @@ export const drawnGrid = (
   const seen = [...loop.landmarks, ...crossovers.map(({ frequency }) => frequency)];
   const low = Math.min(...seen) / BEYOND;
   const last = crossovers.length > 0 ? crossovers[crossovers.length - 1].frequency * BEYOND_CROSSOVER : 0;
-  const high =
+  const unbounded =
     loop.deadTime > 0 ? Math.max(Math.min(Math.max(...seen) * BEYOND, DRAWN_TURNS / loop.deadTime), last) : Math.max(...seen) * BEYOND;
+  const high = loop.end === null ? unbounded : loop.end * (1 - BESIDE_END);
   const axis = new Set(loop.axisFrequencies);
   const landmarks = loop.landmarks.filter((omega) => !axis.has(omega));
   return refinedGrid(loop, ladder(low, high, { pointsPerDecade: fineness.pointsPerDecade, landmarks }), fineness);

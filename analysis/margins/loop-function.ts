@@ -3,7 +3,7 @@ import type { Table } from './sample';
 
 /**
  * A loop as this folder sees it: a function of ω that can be sampled anywhere on its axis. A continuous loop's axis has no
- * end; a sampled loop would end at π/h. Nothing here knows where the samples come from.
+ * end, a sampled loop's ends at π/h. Nothing here knows where the samples come from.
  */
 export interface LoopFunction {
   /** Writes one row at `offset`. Counts against the loop's budget. */
@@ -16,6 +16,10 @@ export interface LoopFunction {
   readonly isZero: boolean;
   /** Dead time that turns the phase without end; 0 where the axis is finite or there is none. */
   readonly deadTime: number;
+  /** Where the axis ends, L real there: π/h of a sampled loop. null: nowhere, as ω → ∞. */
+  readonly end: number | null;
+  /** Phase crossovers where |L| is less are not listed. */
+  readonly leastListedGain: number;
   readonly atZero: EndOfAxis;
   readonly atInfinity: EndOfAxis;
 }

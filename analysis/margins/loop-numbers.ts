@@ -26,7 +26,7 @@ export const loopNumbers = (loop: LoopFunction, detail: Detail): LoopNumbers => 
   const phase = loop.isZero ? [] : phaseCrossovers(loop, probe);
   const zero = valuesAtZero(loop);
   const infinity = valuesAtInfinity(loop);
-  const peak = (name: keyof typeof PEAKING) => supremum(probe, PEAKING[name], { atZero: zero[name], atInfinity: infinity[name] });
+  const peak = (name: keyof typeof PEAKING) => supremum(probe, PEAKING[name], { atZero: zero[name], atEnd: infinity[name], end: loop.end });
   const ms = reported(peak('sensitivity'));
   const noise = peak('noiseSensitivity');
   return {

@@ -16,12 +16,12 @@ const STANDS_OUT = 1e-12;
  * The supremum of e^quantity: every turning point that could be the greatest is found exactly as a zero of the slope, and
  * compared with what the function tends to at both ends of the axis.
  */
-export const supremum = (probe: Probe, quantity: Quantity, ends: { atZero: number; atInfinity: number }): Supremum => {
+export const supremum = (probe: Probe, quantity: Quantity, ends: { atZero: number; atEnd: number; end: number | null }): Supremum => {
   const inside = greatest(probe, quantity);
   const value = Math.exp(inside.log);
-  const limit = Math.max(ends.atZero, ends.atInfinity);
+  const limit = Math.max(ends.atZero, ends.atEnd);
   if (value > limit * (1 + STANDS_OUT)) return { value, frequency: inside.omega };
-  return { value: limit, frequency: ends.atZero >= ends.atInfinity * (1 - STANDS_OUT) ? 0 : null };
+  return { value: limit, frequency: ends.atZero >= ends.atEnd * (1 - STANDS_OUT) ? 0 : ends.end };
 };
 
 const greatest = (probe: Probe, quantity: Quantity): { log: number; omega: number } => {

@@ -1,6 +1,7 @@
 import { LoopError } from '@/analysis/loop/loop-error';
 import { refinedGrid, type Fineness, type Grid } from './grid';
 import { ladder } from './ladder';
+import { LEAST_LISTED_GAIN } from './least-gain';
 import type { LoopFunction } from './loop-function';
 
 /** Decades searched beyond the outermost landmark, at each end. */
@@ -12,8 +13,8 @@ const NEUTRAL_BEYOND = 10;
 const NEUTRAL_TURNS = 205;
 /** How near to an undamped pole or zero the search goes, relatively. */
 const BESIDE_AXIS_POINT = [1e-2, 1e-4, 1e-6, 1e-8, 1e-10, 1e-12];
-/** Below this gain a dead time's crossovers are not listed, numerics.md "Margins". */
-export const LEAST_LISTED_GAIN = 1e-3;
+/** How near to its end a finite axis is searched, relatively; what L comes to there is known by itself. */
+const BESIDE_END = 1e-6;
 
 /** Beyond this ratio of the fastest to the slowest motion a frequency's powers leave the range of numbers. */
 const WIDEST_SPAN = 1e150;
@@ -69,6 +70,7 @@ const searchRange = (loop: LoopFunction): { low: number; high: number } => {
   const early = unityOf(loop.atZero.loop);
   const late = unityOf(loop.atInfinity.loop);
   const low = Math.min(first / BEYOND, early < first ? early / BEYOND_CROSSING : first);
+  if (loop.end !== null) return { low, high: loop.end * (1 - BESIDE_END) };
   const isNeutral = loop.deadTime > 0 && loop.atInfinity.loop.power >= 0;
   if (isNeutral) return { low, high: last * NEUTRAL_BEYOND + (NEUTRAL_TURNS * 2 * Math.PI) / loop.deadTime };
   return { low, high: Math.max(last * BEYOND, late > last ? late * BEYOND_CROSSING : last) };
