@@ -1,91 +1,120 @@
-import { columnNorm, multiply, scaledBy, zeroMatrix, type Matrix } from './matrix';
-import { solve } from './matrix-solve';
+import { addProduct, columnNorm, zeroMatrix, type Matrix } from './matrix';
+import { solveInPlace } from './matrix-solve';
 
-/** Coefficients of the numerators of the [7/7] and [13/13] Padé approximants of eˣ, ascending. */
-const PADE_7 = [17297280, 8648640, 1995840, 277200, 25200, 1512, 56, 1];
-const PADE_13 = [
-  64764752532480000, 32382376266240000, 7771770303897600, 1187353796428800, 129060195264000, 10559470521600, 670442572800, 33522128640,
-  1323241920, 40840800, 960960, 16380, 182, 1,
-];
+/** Coefficients of the numerator of the [7/7] Padé approximant of eˣ, ascending. */
+const PADE = [17297280, 8648640, 1995840, 277200, 25200, 1512, 56, 1];
 
-/** Up to these norms the approximants are exact to double precision. */
-const REACH_7 = 0.9504178996162932;
-const REACH_13 = 5.371920351148152;
+/** Up to this norm it is exact to double precision. */
+const REACH = 0.9504178996162932;
 
 /**
- * e^A by scaling and squaring with Padé approximants. `a` is square and finite; balance it first where its entries differ by
+ * e^A by scaling and squaring with a Padé approximant. `a` is square and finite; balance it first where its entries differ by
  * many decades.
  * Example: exponential of [[0, 1], [−1, 0]] has cos 1 = 0.5403023058681398 on its diagonal.
  *
  * @see REFERENCES.md [Higham 2005], algorithm 2.3
  */
 export function exponential(a: Matrix): Matrix {
-  const [change] = exponentialChanges(a, [1]);
+  const [change] = new ExponentialChanges(a.rows, [1]).of(a);
   for (let i = 0; i < a.rows; i += 1) change.data[i * (a.rows + 1)] += 1;
   return change;
 }
 
 /**
- * e^(share·A) − I for each of some shares from 0 to 1, which have the powers of A in common.
+ * e^(share·A) − I for each of some shares, which have the powers of A in common; for one matrix of an order after the other in
+ * the same room.
  *
  * The difference from I is what is computed and squared, by E ← 2E + E²: beside a fast mode, a slow one would otherwise
  * drown in the rounding of the ones on the diagonal.
  */
-export function exponentialChanges(a: Matrix, shares: readonly number[]): Matrix[] {
-  const norm = columnNorm(a);
-  const squarings = Math.max(0, Math.ceil(Math.log2((norm * Math.max(...shares)) / REACH_13)));
-  const scaled = scaledBy(a, 2 ** -squarings);
-  const square = multiply(scaled, scaled);
-  const fourth = multiply(square, square);
-  const powers: EvenPowers = [square, fourth, multiply(fourth, square)];
-  return shares.map((share) => {
-    let change = padeChange(scaled, powers, { share, norm: norm * share * 2 ** -squarings });
-    for (let k = 0; k < squarings; k += 1) change = chained(change, change);
-    return change;
-  });
+export class ExponentialChanges {
+  private readonly changes: Matrix[];
+  private readonly scaled: Matrix;
+  /** A², A⁴ and A⁶ of the scaled matrix. */
+  private readonly powers: readonly [Matrix, Matrix, Matrix];
+  private readonly odd: Matrix;
+  private readonly left: Matrix;
+  private readonly spare: Matrix;
+
+  /** @param shares positive */
+  constructor(
+    order: number,
+    private readonly shares: readonly number[],
+  ) {
+    const room = () => zeroMatrix(order, order);
+    this.changes = shares.map(room);
+    this.scaled = room();
+    this.powers = [room(), room(), room()];
+    this.odd = room();
+    this.left = room();
+    this.spare = room();
+  }
+
+  /** The changes of one matrix, valid until others are asked for. */
+  of(a: Matrix): readonly Matrix[] {
+    const { scaled, powers, shares } = this;
+    const norm = columnNorm(a);
+    const halvings = norm > 0 ? Math.ceil(Math.log2(norm)) : 0;
+    for (let i = 0; i < a.data.length; i += 1) scaled.data[i] = a.data[i] * 2 ** -halvings;
+    product(scaled, scaled, powers[0]);
+    product(powers[0], powers[0], powers[1]);
+    product(powers[1], powers[0], powers[2]);
+    shares.forEach((share, k) => {
+      const squarings = Math.max(0, Math.ceil(Math.log2((norm * share) / REACH)));
+      this.approximate(share * 2 ** (halvings - squarings), this.changes[k]);
+      this.square(this.changes[k], squarings);
+    });
+    return this.changes;
+  }
+
+  /** The changes of the last matrix times a power of two. */
+  doubled(times: number): readonly Matrix[] {
+    for (const change of this.changes) this.square(change, times);
+    return this.changes;
+  }
+
+  /** e^(x·A) − I of the scaled matrix where its norm is within reach: 2·(even − odd)⁻¹·odd of the approximant's numerator. */
+  private approximate(x: number, change: Matrix): void {
+    const { scaled, odd, left, spare } = this;
+    this.combine(x, 1, spare);
+    product(scaled, spare, odd);
+    this.combine(x, 0, left);
+    for (let i = 0; i < odd.data.length; i += 1) {
+      const part = x * odd.data[i];
+      left.data[i] -= part;
+      change.data[i] = 2 * part;
+    }
+    solveInPlace(left, change);
+  }
+
+  /** b[from]·I + b[from + 2]·(xA)² + b[from + 4]·(xA)⁴ + b[from + 6]·(xA)⁶. */
+  private combine(x: number, from: number, sum: Matrix): void {
+    const [second, fourth, sixth] = this.powers;
+    const square = x * x;
+    const [u, v, w] = [PADE[from + 2] * square, PADE[from + 4] * square * square, PADE[from + 6] * square * square * square];
+    for (let i = 0; i < sum.data.length; i += 1) sum.data[i] = u * second.data[i] + v * fourth.data[i] + w * sixth.data[i];
+    for (let i = 0; i < sum.rows; i += 1) sum.data[i * (sum.rows + 1)] += PADE[from];
+  }
+
+  private square(change: Matrix, times: number): void {
+    const { spare } = this;
+    for (let k = 0; k < times; k += 1) {
+      for (let i = 0; i < change.data.length; i += 1) spare.data[i] = 2 * change.data[i];
+      addProduct(change, change, spare);
+      change.data.set(spare.data);
+    }
+  }
 }
 
 /** (I + a)·(I + b) − I. */
 export function chained(a: Matrix, b: Matrix): Matrix {
-  const product = multiply(a, b);
-  for (let i = 0; i < product.data.length; i += 1) product.data[i] += a.data[i] + b.data[i];
-  return product;
+  const chain = zeroMatrix(a.rows, a.columns);
+  for (let i = 0; i < chain.data.length; i += 1) chain.data[i] = a.data[i] + b.data[i];
+  addProduct(a, b, chain);
+  return chain;
 }
 
-/** A², A⁴, A⁶. */
-type EvenPowers = readonly [Matrix, Matrix, Matrix];
-
-/** e^(share·A) − I where the norm of share·A is within reach: 2·(even − odd)⁻¹·odd of the approximant's numerator. */
-function padeChange(a: Matrix, powers: EvenPowers, { share, norm }: { share: number; norm: number }): Matrix {
-  const b = norm <= REACH_7 ? PADE_7 : PADE_13;
-  const x = share * share;
-  /** b[from] + b[from + 2]·A² + … + b[from + 6]·A⁶ at the share, and for the longer approximant A⁶ times as much again. */
-  const half = (from: number): Matrix => {
-    const weights = (k: number) => [b[k] * x, b[k + 2] * x ** 2, b[k + 4] * x ** 3] as const;
-    const low = combination(powers, weights(from + 2), b[from]);
-    if (b === PADE_7) return low;
-    return plus(low, multiply(powers[2], combination(powers, weights(from + 8), 0)), x ** 3);
-  };
-  const even = half(0);
-  const odd = multiply(a, half(1));
-  const [left, right] = [zeroMatrix(a.rows, a.rows), zeroMatrix(a.rows, a.rows)];
-  for (let i = 0; i < odd.data.length; i += 1) {
-    left.data[i] = even.data[i] - share * odd.data[i];
-    right.data[i] = 2 * share * odd.data[i];
-  }
-  return solve(left, right);
-}
-
-/** Σ weightₖ·powerₖ + constant·I. */
-function combination([a, b, c]: EvenPowers, [u, v, w]: readonly [number, number, number], constant: number): Matrix {
-  const sum = zeroMatrix(a.rows, a.rows);
-  for (let i = 0; i < sum.data.length; i += 1) sum.data[i] = u * a.data[i] + v * b.data[i] + w * c.data[i];
-  for (let i = 0; i < a.rows; i += 1) sum.data[i * (a.rows + 1)] += constant;
-  return sum;
-}
-
-/** a + weight·b, in the place of a. */
-function plus(a: Matrix, b: Matrix, weight: number): Matrix {
-  for (let i = 0; i < a.data.length; i += 1) a.data[i] += weight * b.data[i];
-  return a;
+function product(a: Matrix, b: Matrix, into: Matrix): void {
+  into.data.fill(0);
+  addProduct(a, b, into);
 }

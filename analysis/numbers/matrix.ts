@@ -30,14 +30,21 @@ export function scaledBy(matrix: Matrix, factor: number): Matrix {
 
 export function multiply(a: Matrix, b: Matrix): Matrix {
   const product = zeroMatrix(a.rows, b.columns);
+  addProduct(a, b, product);
+  return product;
+}
+
+/** Adds a·b to `sum`, which is neither of them. */
+export function addProduct(a: Matrix, b: Matrix, sum: Matrix): void {
+  const [left, right, data] = [a.data, b.data, sum.data];
+  const { columns } = b;
   for (let i = 0; i < a.rows; i += 1) {
     for (let k = 0; k < a.columns; k += 1) {
-      const factor = a.data[i * a.columns + k];
+      const factor = left[i * a.columns + k];
       if (factor === 0) continue;
-      for (let j = 0; j < b.columns; j += 1) product.data[i * b.columns + j] += factor * b.data[k * b.columns + j];
+      for (let j = 0; j < columns; j += 1) data[i * columns + j] += factor * right[k * columns + j];
     }
   }
-  return product;
 }
 
 /** Σ weightᵢ·matrixᵢ, all of one shape. */

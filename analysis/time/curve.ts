@@ -1,7 +1,9 @@
 import { NODE_COUNT } from './nodes';
 import { evaluatePanel, fitPanel } from './panel-polynomial';
 
-const FIRST_ROOM = 64;
+/** Panels that a curve has room for once it has any. */
+const FIRST_ROOM = 96;
+const ROOM_GROWTH = 3;
 
 /**
  * A signal over time as panels, each a polynomial through its values at NODES. Jumps stand between panels: the value at
@@ -9,9 +11,9 @@ const FIRST_ROOM = 64;
  */
 export class Curve {
   /** Where panels start, how wide they are and their node values; only what belongs to the first `panels` of them counts. */
-  starts: Float64Array = new Float64Array(FIRST_ROOM);
-  widths: Float64Array = new Float64Array(FIRST_ROOM);
-  values: Float64Array = new Float64Array(FIRST_ROOM * NODE_COUNT);
+  starts: Float64Array = new Float64Array(0);
+  widths: Float64Array = new Float64Array(0);
+  values: Float64Array = new Float64Array(0);
   panels = 0;
   /** The greatest magnitude at any node so far. */
   size = 0;
@@ -41,9 +43,10 @@ export class Curve {
   append(start: number, width: number, source: Float64Array, offset: number): void {
     const { panels, nodes } = this;
     if (panels === this.starts.length) {
-      this.starts = grown(this.starts, 2 * panels);
-      this.widths = grown(this.widths, 2 * panels);
-      this.values = grown(this.values, 2 * nodes);
+      const room = Math.max(FIRST_ROOM, ROOM_GROWTH * panels);
+      this.starts = grown(this.starts, room);
+      this.widths = grown(this.widths, room);
+      this.values = grown(this.values, room * NODE_COUNT);
     }
     this.starts[panels] = start;
     this.widths[panels] = width;

@@ -43,7 +43,7 @@ export function planPanels(poles: readonly Complex[], period: number, fineness =
     lastUntil(end, fastest > 0 ? PANEL_ANGLE / fastest : Math.min(end - start, STILL_WIDTH));
   });
   if (start < period) lastUntil(period, start || Math.min(period, STILL_WIDTH));
-  return spans.map((span) => stageOf(span, fineness));
+  return period < Infinity ? spans.map((span) => evenStage(span, fineness)) : doubledStages(spans, fineness);
 }
 
 /** A stretch of time and the widest panel that follows what is alive in it. */
@@ -53,8 +53,18 @@ interface Span {
 }
 
 /** Panels of at most the given width that fill the length evenly; without end where it has none. */
-function stageOf({ length, widest }: Span, fineness: number): Stage {
+function evenStage({ length, widest }: Span, fineness: number): Stage {
   if (length === Infinity) return { width: widest / fineness, count: Infinity };
   const count = Math.ceil((length / widest) * fineness);
   return { width: length / count, count };
+}
+
+/** Stages that need not fill a period: each panel is the first one's width doubled so often, which makes its operator cheap. */
+function doubledStages(spans: readonly Span[], fineness: number): Stage[] {
+  const first = evenStage(spans[0], fineness);
+  const others = spans.slice(1).map(({ length, widest }) => {
+    const width = first.width * 2 ** Math.floor(Math.log2(widest / fineness / first.width));
+    return { width, count: Math.ceil(length / width) };
+  });
+  return [first, ...others];
 }

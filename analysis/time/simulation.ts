@@ -1,3 +1,4 @@
+import type { Matrix } from '@/analysis/numbers/matrix';
 import { Curve } from './curve';
 import type { LoopSystem } from './loop-system';
 import { NODE_COUNT } from './nodes';
@@ -75,22 +76,29 @@ export class Simulation {
     const { state, result, delayLine } = this;
     this.run.budget.spend(matrix.data.length + WORK_BESIDE_MAP);
     const history = this.slot * NODE_COUNT;
-    for (let i = 0; i < matrix.rows; i += 1) {
-      const row = i * matrix.columns;
-      let sum = 0;
-      for (let j = 0; j < state.length; j += 1) sum += matrix.data[row + j] * state[j];
-      for (let j = state.length; j < matrix.columns; j += 1) sum += matrix.data[row + j] * delayLine[history + j - state.length];
-      result[i] = sum;
-    }
+    this.map(matrix, history);
     this.output.append(this.time + this.run.outputDelay, width, result, 0);
     this.control.append(this.time, width, result, NODE_COUNT);
-    if (delayLine.length) {
+    if (delayLine.length > 0) {
       this.measurement.append(this.time, width, result, 2 * NODE_COUNT);
-      delayLine.set(result.subarray(2 * NODE_COUNT, 3 * NODE_COUNT), history);
+      for (let i = 0; i < NODE_COUNT; i += 1) delayLine[history + i] = result[2 * NODE_COUNT + i];
     }
-    state.set(result.subarray(WATCHED.length * NODE_COUNT));
+    const first = matrix.rows - state.length;
+    for (let i = 0; i < state.length; i += 1) state[i] = result[first + i];
     this.time += width;
     this.slot += 1;
+  }
+
+  /** The operator times the state and what comes out of the delay line from `history` on. */
+  private map({ data, rows, columns }: Matrix, history: number): void {
+    const { state, result, delayLine } = this;
+    const order = state.length;
+    for (let i = 0, place = 0; i < rows; i += 1) {
+      let sum = 0;
+      for (let j = 0; j < order; j += 1, place += 1) sum += data[place] * state[j];
+      for (let j = history; j < history + columns - order; j += 1, place += 1) sum += data[place] * delayLine[j];
+      result[i] = sum;
+    }
   }
 
   private endTurn(): void {

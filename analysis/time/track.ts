@@ -1,7 +1,7 @@
 import type { LoopSystem } from './loop-system';
 import { longPanelOperator } from './long-panel-operator';
 import { isStablePanel } from './panel-stability';
-import { panelOperator, type PanelOperator } from './panel-operator';
+import { PanelOperators, type PanelOperator } from './panel-operator';
 import type { Stage } from './panel-plan';
 import type { WorkBudget } from './work-budget';
 
@@ -15,14 +15,16 @@ export interface Track {
 /** The tracks of one loop, their operators made once and shared by all its responses. */
 export class Tracks {
   readonly first: Track;
+  private readonly operators: PanelOperators;
   private readonly even = new Map<number, Track | null>();
 
   constructor(
     private readonly system: LoopSystem,
     stages: readonly Stage[],
-    private readonly budget: WorkBudget,
+    budget: WorkBudget,
   ) {
-    this.first = trackOf(stages.map(({ width, count }) => ({ count, make: () => panelOperator(system, width, budget) })));
+    this.operators = new PanelOperators(system, budget);
+    this.first = trackOf(stages.map(({ width, count }) => ({ count, make: () => this.operators.ofWidth(width) })));
   }
 
   /** Panels all of `width`, a whole fraction or multiple of the dead time; null where they would not stay stable. */
@@ -37,7 +39,7 @@ export class Tracks {
 
   private makeEven(width: number): Track | null {
     const { deadTime } = this.system;
-    const direct = panelOperator(this.system, width, this.budget);
+    const direct = this.operators.ofWidth(width);
     if (width < deadTime) return trackOf([{ make: () => direct, count: Math.round(deadTime / width) }]);
     const operator = width > deadTime ? longPanelOperator(direct, deadTime) : direct;
     return isStablePanel(operator) ? trackOf([{ make: () => operator, count: 1 }]) : null;
@@ -57,7 +59,8 @@ function trackOf(stretches: readonly Stretch[]): Track {
   return {
     panels,
     operatorAt: (slot) => {
-      const k = ends.findIndex((end) => slot < end);
+      let k = 0;
+      while (slot >= ends[k]) k += 1;
       return (operators[k] ??= stretches[k].make());
     },
   };
