@@ -42,9 +42,7 @@ export function InvitationRow({ invitation }: { invitation: Invitation }) {
               aria-label={`Send the invitation of ${email} again`}
               busyLabel="Sending"
               busy={again.isPending}
-              onPress={() =>
-                again.mutate(invitation, { onSuccess: () => announce(`Sent again to ${email}; the earlier link is over.`) })
-              }
+              onPress={() => again.mutate(invitation, { onSuccess: () => announce(`Sent again to ${email}; the earlier link is over.`) })}
             />
           )}
           <Button

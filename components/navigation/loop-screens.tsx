@@ -26,3 +26,4 @@ export const PlantScreen = onDemand((screens) => screens.PlantScreen);
 export const AnalysisScreen = onDemand((screens) => screens.AnalysisScreen);
 export const LatestPlane = onDemand((screens) => screens.LatestPlane);
 export const CasesScreen = onDemand((screens) => screens.CasesScreen);
+export const LimitsScreen = onDemand((screens) => screens.LimitsScreen);

@@ -6,6 +6,7 @@ export { Bench as BenchScreen } from '@/components/bench';
 export { PlantScreen } from '@/components/plants/plant-screen';
 export { AnalysisScreen } from '@/components/analyses/analysis-screen';
 export { CasesScreen } from '@/components/cases/cases-screen';
+export { LimitsScreen } from '@/components/limits/limits-screen';
 export { LatestPlane } from '@/components/home/latest-plane';
 export * as contract from '@/contract';
 export { zodResolver } from '@hookform/resolvers/zod';

@@ -1,6 +1,8 @@
 import { useEffect, useRef, useState } from 'react';
 import { Pressable, StyleSheet, View } from 'react-native';
 import { Button, type ButtonProps } from './button';
+import type { IconName } from './icon';
+import { IconButton } from './icon-button';
 import { Text } from './text';
 import { useTheme } from './theme';
 import { corner, line, touch } from './tokens';
@@ -18,13 +20,15 @@ export interface MenuProps {
   /** What it is for, for those who listen, where `label` only says what is chosen. */
   name?: string;
   disabled?: boolean;
+  /** A picture in the place of the label, for a row's own menu. */
+  icon?: IconName;
   items: readonly MenuItem[];
   kind?: ButtonProps['kind'];
   align?: 'left' | 'right';
 }
 
 /** A button with a list under it. Down opens it, arrows walk it, Escape closes it and gives the focus back. */
-export function Menu({ label, name, disabled, items, kind = 'secondary', align = 'left' }: MenuProps) {
+export function Menu({ label, name, disabled, icon, items, kind = 'secondary', align = 'left' }: MenuProps) {
   const { colors } = useTheme();
   const [open, setOpen] = useState(false);
   const box = useRef<View>(null);
@@ -57,18 +61,14 @@ export function Menu({ label, name, disabled, items, kind = 'secondary', align =
     close();
     item.onSelect();
   };
+  const trigger = { disabled, 'aria-haspopup': 'menu', 'aria-expanded': open, onPress: () => setOpen(!open) } as const;
   return (
     <View ref={box} style={styles.box} onKeyDown={walk}>
-      <Button
-        label={label}
-        aria-label={name && `${name}, ${label}`}
-        kind={kind}
-        iconAfter="down"
-        disabled={disabled}
-        aria-haspopup="menu"
-        aria-expanded={open}
-        onPress={() => setOpen(!open)}
-      />
+      {icon ? (
+        <IconButton label={name ?? label} icon={icon} {...trigger} />
+      ) : (
+        <Button label={label} aria-label={name && `${name}, ${label}`} kind={kind} iconAfter="down" {...trigger} />
+      )}
       {open && (
         <View
           role="menu"

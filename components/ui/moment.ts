@@ -15,3 +15,12 @@ export function moment(iso: string, now: Date, withClock = false): string {
   const date = at.getFullYear() === now.getFullYear() ? day(at) : `${day(at)} ${at.getFullYear()}`;
   return withClock ? `${date} ${clock(at)}` : date;
 }
+
+const MINUTE_MS = 60_000;
+
+/** "just now", "2 min ago", then the moment itself. */
+export function ago(iso: string, now: Date): string {
+  const minutes = Math.floor((now.getTime() - new Date(iso).getTime()) / MINUTE_MS);
+  if (minutes < 1) return 'just now';
+  return minutes < 60 ? `${minutes} min ago` : moment(iso, now, true);
+}

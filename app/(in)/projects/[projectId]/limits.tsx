@@ -1,0 +1,1 @@
+export { LimitsScreen as default } from '@/components/navigation/loop-screens';
