@@ -1,66 +1,141 @@
-import { randomUUID } from 'node:crypto';
+import { eq } from 'drizzle-orm';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { allows, type Me, type Role } from '@/contract';
-import { project, projectMember } from '@/db/tables';
-
-import type { Route } from '@/server/http/route';
+import { z } from 'zod';
+import { plant } from '@/db/tables';
+import { createApp } from '@/server/app';
+import { inProject } from '@/server/http/paths';
+import { route, type Route } from '@/server/http/route';
 import { routes } from '@/server/routes';
-import { startTestApp, type TestApp } from '../../support/test-app';
+import { startTestApp } from '../../support/test-app';
+import { rows } from './walk/rows';
+import { documentAt, openToReaders, serve, withoutCheck, type Sabotaged } from './walk/sabotage';
+import { letsIn, turnsAway } from './walk/walk';
+import { makeWorld, type World } from './walk/world';
 
-const roles: readonly Role[] = ['owner', 'editor', 'reviewer', 'viewer'];
-const projectId = randomUUID();
-
-let app: TestApp;
-beforeAll(async () => {
-  app = await startTestApp();
-  await app.client('stranger').signUp();
-  for (const role of roles) {
-    const { body: me } = await (await app.client(role).signUp()).call<Me>('GET', '/api/me');
-    const now = new Date();
-    if (role === 'owner')
-      app.db
-        .insert(project)
-        .values({ id: projectId, teamId: me.teams[0].id, name: 'Wet-track speed', createdAt: now, updatedAt: now })
-        .run();
-    app.db.insert(projectMember).values({ projectId, userId: me.id, role, createdAt: now }).run();
-  }
-});
+const app = await startTestApp({ env: { ANALYSE_PER_MINUTE: '100000' } });
+const operations = await documentAt(app.url);
 afterAll(() => app.close());
 
-/** A call without a body: whoever may call the route is told so, or told that nothing is there. */
-async function knock(who: string, { method, path }: Route): Promise<number> {
-  const address = path.replace(':projectId', projectId).replace(/:\w+/g, () => randomUUID());
-  return (await app.client(who).call(method.toUpperCase(), address)).status;
-}
+let world: World;
+beforeAll(async () => {
+  world = await makeWorld(app);
+});
 
-const named = (wanted: (route: Route) => boolean) =>
-  routes.filter(wanted).map((route) => [`${route.method.toUpperCase()} ${route.path}`, route] as const);
-const inside = named(({ access }) => typeof access === 'object');
+const names = operations.map(({ name }) => name);
+const named = (name: string) => operations.find((operation) => operation.name === name)!;
 
-describe('who is not signed in', () => {
-  it.each(named(({ access }) => access !== 'public'))('is told to sign in: %s', async (_name, route) => {
-    expect(await knock('nobody', route)).toBe(401);
+describe('every route of the OpenAPI document', () => {
+  it('has a row that says who may call it, and every row a route', () => {
+    expect(Object.keys(rows).sort()).toEqual([...names].sort());
+  });
+
+  it('is every route there is, but for the description itself and the page', () => {
+    const page = '/{*path}';
+    const layers = createApp(app.context).router.stack.flatMap(({ route: known }) => (known ? [known.path] : []));
+    const undescribed = [...new Set(layers)].filter(
+      (path) => !operations.some((operation) => operation.path === path.replace(/:(\w+)/g, '{$1}')),
+    );
+    expect(undescribed.sort()).toEqual(['/api/docs', '/api/docs/open.js', '/api/openapi.json', page]);
+  });
+
+  it.each(names)('turns everyone else away without a hint, and changes nothing: %s', async (name) => {
+    expect(await turnsAway(world, named(name), rows[name])).toEqual([]);
+  });
+
+  it.each(names)('lets in whom the table of permissions says: %s', async (name) => {
+    expect(await letsIn(world, named(name), rows[name])).toEqual([]);
   });
 });
 
-describe('who has no role in a project', () => {
-  it.each(inside)('hears that it is not there: %s', async (_name, route) => {
-    expect(await knock('stranger', route)).toBe(404);
-  });
-});
+describe('the walk finds a route', () => {
+  const nameOf = ({ method, path }: Route) => `${method.toUpperCase()} ${path.replace(/:(\w+)/g, '{$1}')}`;
+  const inside = routes.filter(({ access }) => typeof access === 'object');
+  const findings = ({ world: there, operations: known }: Sabotaged, name: string) =>
+    turnsAway(
+      there,
+      known.find((operation) => operation.name === name)!,
+      rows[name],
+    );
+  const replacing = (other: Route) => routes.map((one) => (nameOf(one) === nameOf(other) ? other : one));
+  const found = async (other: Route) => {
+    const server = await serve(app, world, replacing(other));
+    const lines = await findings(server, nameOf(other));
+    server.close();
+    return lines;
+  };
 
-describe.each(roles)('as %s', (role) => {
-  it.each(inside)('%s answers as the table of permissions says', async (_name, route) => {
-    if (typeof route.access !== 'object') throw new Error('not inside a project');
-    const status = await knock(role, route);
-    if (allows(role, route.access.project)) expect([401, 403]).not.toContain(status);
-    else expect(status).toBe(403);
-  });
-});
+  describe('whose check was removed', () => {
+    let server: Sabotaged;
+    beforeAll(async () => {
+      server = await serve(app, world, routes.map(withoutCheck));
+    });
+    afterAll(() => server.close());
 
-describe('routes inside a project', () => {
-  it('are never open to everyone who is signed in', () => {
-    const loose = routes.filter(({ path, access }) => path.includes(':projectId') && typeof access !== 'object');
-    expect(loose).toEqual([]);
+    // Its query asks for the reader's own projects, so that it stays closed.
+    const closedTwice = ['GET /api/projects/{projectId}'];
+    it.each(inside.map(nameOf).filter((name) => !closedTwice.includes(name)))('%s', async (name) => {
+      expect(await findings(server, name)).toContainEqual(expect.stringMatching(/^(rival|editor|reviewer|viewer): \d+, wanted 40[34]/));
+    });
+  });
+
+  describe('that asks for less than it needs', () => {
+    let server: Sabotaged;
+    beforeAll(async () => {
+      server = await serve(app, world, routes.map(openToReaders));
+    });
+    afterAll(() => server.close());
+
+    const needy = inside.filter((one) => typeof one.access === 'object' && one.access.project !== 'read');
+    it.each(needy.map(nameOf))('%s', async (name) => {
+      expect(await findings(server, name)).toContainEqual(expect.stringMatching(/^(editor|reviewer|viewer): \d+, wanted 403/));
+    });
+  });
+
+  it('that nobody gave a row', async () => {
+    const extra = route({
+      method: 'get',
+      path: '/api/projects/:projectId/secrets',
+      summary: 'What nobody has thought of',
+      tag: 'Test',
+      access: 'session',
+      input: { params: inProject },
+      output: z.object({}),
+      handler: () => ({}),
+    });
+    const server = await serve(app, world, [...routes, extra]);
+    expect(server.operations.map(({ name }) => name).filter((name) => !rows[name])).toEqual([nameOf(extra)]);
+    server.close();
+  });
+
+  it('that looks a thing up without its project', async () => {
+    const careless = route({
+      method: 'get',
+      path: '/api/projects/:projectId/plants/:plantId',
+      summary: 'A plant of whomever',
+      tag: 'Test',
+      access: { project: 'read' },
+      input: { params: inProject.extend({ plantId: z.uuid() }) },
+      output: z.object({ name: z.string() }),
+      handler: ({ context, params }) => ({
+        name: context.db.select().from(plant).where(eq(plant.id, params.plantId)).get()?.name ?? 'none',
+      }),
+    });
+    expect(await found(careless)).toContainEqual(expect.stringMatching(/^someone else’s plantId: 200, wanted 404/));
+  });
+
+  it('that takes fields which nobody may set', async () => {
+    const generous = route({
+      method: 'patch',
+      path: '/api/projects/:projectId',
+      summary: 'Takes anything',
+      tag: 'Test',
+      access: { project: 'edit' },
+      input: { params: inProject, body: z.looseObject({ description: z.string().optional() }) },
+      output: z.object({}),
+      handler: () => ({}),
+    });
+    const lines = await found(generous);
+    for (const field of ['role', 'ownerId', 'createdAt', 'id'])
+      expect(lines).toContainEqual(expect.stringMatching(new RegExp(`^with an extra ${field}: 200, wanted 400`)));
   });
 });
