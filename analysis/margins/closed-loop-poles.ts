@@ -1,5 +1,5 @@
 import { PlaneProduct } from '@/analysis/loop/plane-product';
-import type { LoopModel, Rational } from '@/analysis/loop/model';
+import type { Rational } from '@/analysis/loop/model';
 import type { Complex } from '@/analysis/numbers/complex';
 import { pairConjugates } from '@/analysis/numbers/conjugates';
 import { ehrlichAberth, type NewtonStep } from '@/analysis/numbers/ehrlich-aberth';
@@ -7,15 +7,14 @@ import { startingPoints } from '@/analysis/numbers/newton-polygon';
 import { add, expandRoots } from '@/analysis/numbers/polynomial';
 
 /**
- * Closed-loop poles of a loop without dead time: the zeros of denominator + numerator of L, nothing cancelled.
+ * Closed-loop poles of a loop that is a product of rational functions: the zeros of denominator + numerator, nothing cancelled.
  *
  * Both stay factored. The expanded sum only gives starting points; the iteration itself reads 1 + L and its derivative
  * from the factors, which keeps digits that expanded coefficients of twelve poles over three decades no longer hold.
  *
  * @see REFERENCES Aberth 1973
  */
-export const closedLoopPoles = (model: LoopModel): Complex[] => {
-  const parts = [model.plant, model.filters, model.controller, model.sensor];
+export const closedLoopPoles = (parts: readonly Rational[]): Complex[] => {
   const start = initialPoints(parts);
   return pairConjugates(ehrlichAberth(start, characteristicStep(new PlaneProduct(parts))));
 };

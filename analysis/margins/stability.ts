@@ -35,7 +35,7 @@ export const judgeStability = (model: LoopModel, loop: LoopFunction, crossings: 
   const hidden = hiddenModes(parts);
   const size = smallestMagnitude([...openPoles, ...parts.flatMap((part) => part.zeros)]);
   if (loop.deadTime > 0 && !loop.isZero) return byEncirclements(loop, crossings, { openUnstable, hidden });
-  const poles = loop.isZero ? openPoles : closedLoopPoles(model);
+  const poles = loop.isZero ? openPoles : closedLoopPoles(parts);
   const boundary = poles.filter((pole) => isOnBoundary(pole, size)).length;
   const inside = poles.filter((pole) => pole.re > 0 && !isOnBoundary(pole, size)).length;
   return {

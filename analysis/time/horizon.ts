@@ -32,11 +32,14 @@ const MAX_SIZE = 1e100;
 /** Why a response is not given. `coarse`: panels too wide for what was found; `long`: too much work; `boundless`: too large. */
 export type Failure = 'coarse' | 'long' | 'boundless';
 
+/** A response that can be followed further: what judging one asks of its simulation. */
+export type Running = Pick<Simulation, 'output' | 'control' | 'panels' | 'advanceTo'>;
+
 /** Whether the output up to `horizon` shows enough. */
 export type Enough = (output: Curve, horizon: number) => boolean;
 
 /** Simulates on and on, each time half as far again, until enough was seen; answers how far that is. */
-export function simulateUntil(simulation: Simulation, firstHorizon: number, enough: Enough): number | Failure {
+export function simulateUntil(simulation: Running, firstHorizon: number, enough: Enough): number | Failure {
   for (let horizon = firstHorizon; horizon < LONGEST * firstHorizon; horizon *= HORIZON_GROWTH) {
     const failure = simulateTo(simulation, horizon);
     if (failure) return failure;
@@ -46,7 +49,7 @@ export function simulateUntil(simulation: Simulation, firstHorizon: number, enou
 }
 
 /** Simulates up to `horizon`, and says if that failed. */
-export function simulateTo(simulation: Simulation, horizon: number): Failure | null {
+export function simulateTo(simulation: Running, horizon: number): Failure | null {
   const known = simulation.panels;
   const arrived = simulation.advanceTo(horizon, { panels: MAX_PANELS, size: MAX_SIZE });
   if (!(simulation.output.size < MAX_SIZE && simulation.control.size < MAX_SIZE)) return 'boundless';

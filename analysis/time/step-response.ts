@@ -2,7 +2,7 @@ import type { Complex } from '@/analysis/numbers/complex';
 import type { LoopModel } from '@/analysis/loop/model';
 import { Curve } from './curve';
 import type { FinalValues } from './final-values';
-import { GROWN, hasGrown, hasSettled, isTooFine, simulateTo, simulateUntil, type Failure } from './horizon';
+import { GROWN, hasGrown, hasSettled, isTooFine, simulateTo, simulateUntil, type Failure, type Running } from './horizon';
 import { monotoneKnots, type Knots } from './knots';
 import { answersReference } from './linear-loop';
 import type { LoopSystem } from './loop-system';
@@ -36,7 +36,8 @@ const FIRST_PANELS = 4;
 const AXIS_PER_SETTLING = 1.6;
 
 type StepKind = 'reference' | 'load';
-const bands = { reference: referenceBand, load: loadBand };
+/** The band in which each response counts as settled. */
+export const bands = { reference: referenceBand, load: loadBand };
 
 export interface StepQuestion {
   readonly model: LoopModel;
@@ -90,21 +91,24 @@ function attemptResponses(question: StepQuestion, { fineness, widening }: Manner
 }
 
 /** No response at all, on the axis of one that there is. */
-function silence({ horizon, axisEnd }: StepResponse): StepResponse {
+export function silence({ horizon, axisEnd }: StepResponse): StepResponse {
   const nothing = new Curve();
   nothing.append(0, horizon, new Float64Array(NODE_COUNT), 0);
   return { output: nothing, control: nothing, knots: monotoneKnots(nothing, horizon), horizon, axisEnd, finalValue: 0 };
 }
 
-interface Run {
-  readonly simulation: Simulation;
+export interface Run {
+  readonly simulation: Running;
   readonly firstHorizon: number;
   readonly finalValue: number | null;
   readonly bandOf: typeof referenceBand;
 }
 
 /** Simulates one response for as long as it takes to judge it and to show it. */
-function watch({ stable, duration }: StepQuestion, { simulation, firstHorizon, finalValue, bandOf }: Run): StepResponse | Failure {
+export function watch(
+  { stable, duration }: Pick<StepQuestion, 'stable' | 'duration'>,
+  { simulation, firstHorizon, finalValue, bandOf }: Run,
+): StepResponse | Failure {
   const { output, control } = simulation;
   const bandFor = (peak: number) => bandOf(finalValue, peak);
   const judged = stable || duration === null ? simulateUntil(simulation, firstHorizon, stable ? hasSettled(bandFor) : hasGrown) : 0;

@@ -65,19 +65,25 @@ export function respond(model: LoopModel, duration: number | null, stability: Kn
  */
 export function timeResponse(
   model: LoopModel,
-  { duration, referenceStep, loadStep }: Responses,
+  responses: Responses,
   stability: KnownStability,
-  { points = POINTS }: TimeResponseOptions = {},
+  { points }: TimeResponseOptions = {},
 ): { timeResponse: TimeResponse | null; warnings: Warning[] } {
-  const steps = respond(model, duration, stability);
+  const steps = respond(model, responses.duration, stability);
   if ('code' in steps) return { timeResponse: null, warnings: [steps] };
+  return { timeResponse: shown(steps, responses, { stable: stability.stable, points }), warnings: [] };
+}
+
+/** Responses to unit steps as what is shown of steps of these sizes; without metrics where the loop is unstable. */
+export function shown(
+  { reference, load }: StepResponses,
+  { referenceStep, loadStep }: Responses,
+  { stable, points = POINTS }: TimeResponseOptions & { readonly stable: boolean },
+): TimeResponse {
   return {
-    timeResponse: {
-      reference: drawn(steps.reference, referenceStep, points),
-      load: drawn(steps.load, loadStep, points),
-      metrics: stability.stable ? { ...referenceMetrics(steps.reference, referenceStep), ...loadMetrics(steps.load, loadStep) } : null,
-    },
-    warnings: [],
+    reference: drawn(reference, referenceStep, points),
+    load: drawn(load, loadStep, points),
+    metrics: stable ? { ...referenceMetrics(reference, referenceStep), ...loadMetrics(load, loadStep) } : null,
   };
 }
 
