@@ -1,4 +1,4 @@
-import type { Role } from '@/contract';
+import type { InviteMember, Role } from '@/contract';
 
 /** The invented team of the demo; the README gives these sign-ins. */
 export const demoTeam = 'Heron Racing';
@@ -16,3 +16,6 @@ export const others: readonly DemoPerson[] = [
   { name: 'Jonas Abara', email: 'jonas@heron-racing.example', role: 'reviewer' },
   { name: 'Tove Lind', email: 'tove@heron-racing.example', role: 'viewer' },
 ];
+
+/** Has no account yet. */
+export const invited: InviteMember = { email: 'rasmus@heron-racing.example', role: 'viewer' };

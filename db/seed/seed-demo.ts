@@ -1,6 +1,7 @@
 import type { Context } from '@/server/context';
 import { user } from '../tables';
 import { demoProjects } from './demo-projects';
+import { seedInvitation } from './seed-invitation';
 import { seedPeople } from './seed-people';
 import { seedProject } from './seed-project';
 
@@ -11,5 +12,6 @@ export async function seedDemo(context: Context): Promise<void> {
   if (context.db.select({ id: user.id }).from(user).limit(1).get()) return;
   const people = await seedPeople(context, new Date(Date.now() - TEAM_AGE_MS));
   for (const demo of demoProjects) await seedProject(context, people, demo);
+  seedInvitation(context, people);
   context.log.info('The demo team is in place');
 }

@@ -1,6 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { seedDemo } from '@/db/seed/seed-demo';
-import type { Activity, KeptAnalysis, Project } from '@/contract';
+import type { Activity, Invitation, KeptAnalysis, Project } from '@/contract';
 import type { Client } from '../../support/client';
 import { startTestApp, type TestApp } from '../../support/test-app';
 
@@ -61,6 +61,13 @@ describe('the demo team', () => {
     const { body } = await mira.call('GET', '/api/me');
     expect(body).toMatchObject({ name: 'Mira Castellan', emailVerified: true, teams: [{ name: 'Heron Racing', role: 'owner' }] });
     expect((await mira.call('GET', '/api/dev/mail')).body).toEqual({ items: [] });
+  });
+
+  it('waits for the answer of someone who was invited', async () => {
+    const [{ id }] = await projectsOf(mira);
+    const { body } = await mira.call<{ items: Invitation[] }>('GET', `/api/projects/${id}/invitations`);
+    expect(body.items).toMatchObject([{ email: 'rasmus@heron-racing.example', role: 'viewer', invitedBy: 'Mira Castellan' }]);
+    expect(Date.parse(body.items[0].expiresAt)).toBeGreaterThan(Date.now());
   });
 
   it('kept only stable loops with margin, which come out the same', async () => {
