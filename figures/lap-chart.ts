@@ -1,10 +1,10 @@
 import type { Point, Rect } from './geometry';
 import { type StraightKerb, straightKerb } from './kerb';
 import { type LapDemand, type LapName, lapNames } from './lap-labels';
-import { createLabelBoard } from './label-board';
+import { boxAround, createLabelBoard } from './label-board';
 import { type Axis, finiteExtent, linearScale } from './linear-axis';
 import type { PanelLabel } from './panel';
-import { placesAround } from './place-label';
+import { type LabelPlace, placesAround } from './place-label';
 import { type Polyline, polylinePath } from './polyline';
 import { textWidth } from './text-width';
 import { valueAxis } from './value-axis';
@@ -38,8 +38,8 @@ export interface LapPicture {
   readonly axis: Axis;
   /** The places of the cases; text null where there is no room for it. */
   readonly columns: readonly { readonly x: number; readonly text: string | null }[];
-  /** What lies beyond the checked range. */
-  readonly beyond: readonly { readonly rect: Rect; readonly text: string }[];
+  /** What lies beyond the checked range; its words are among the labels. */
+  readonly beyond: readonly Rect[];
   readonly kerbs: readonly StraightKerb[];
   readonly lines: readonly { readonly path: string; readonly discs: readonly Point[]; readonly strong: boolean }[];
   readonly names: readonly LapName[];
@@ -50,9 +50,12 @@ export interface LapPicture {
 const MARGIN = { left: 44, top: 26, foot: 28, name: 12 };
 const WIDEST_NAME = 110;
 /** Pixels of a region beyond the cases, and without one. */
-const BEYOND = 52;
+const BEYOND = 56;
 const INSET = 10;
 const TICK_GAP = 8;
+const LINE = 16;
+/** Round the point that is singled out. */
+const RING = 9;
 
 function columnsOf(places: readonly number[], across: (at: number) => number, tickText: LapChartInput['tickText']) {
   let free = -Infinity;
@@ -92,6 +95,12 @@ function beyondRects({ x, y, width, height }: Rect, [low, high]: readonly [numbe
   ];
 }
 
+/** At the foot of a region, else higher up in it. */
+function placesInside({ x, y, height }: Rect, lines: number): LabelPlace[] {
+  const first = y + height - 8 - (lines - 1) * LINE;
+  return [0, 0.33, 0.6, 0.85].map((share) => ({ x: x + 8, y: first - share * height, anchor: 'start' }));
+}
+
 /**
  * One number of every case over speed, or over whatever the cases are laid along: a line for each load, what is demanded as a
  * kerb, the worst singled out, and what was not checked beyond the ends.
@@ -103,8 +112,8 @@ export function lapChart(input: LapChartInput): LapPicture {
   const axis = valueAxis(finiteExtent(values) ?? [0, 1], [plot.y + plot.height, plot.y]);
   const drawn = lines.map(({ points }) => points.map(({ at, value }) => ({ x: across(at), y: value === null ? NaN : axis.at(value) })));
   const polylines = drawn.map((points): Polyline => ({
-    x: Float64Array.from(points, ({ x }) => x),
-    y: Float64Array.from(points, ({ y }) => y),
+    x: points.map(({ x }) => x),
+    y: points.map(({ y }) => y),
   }));
   const kerbs = demands.map(({ bound, limit }) => {
     const y = axis.at(limit);
@@ -113,13 +122,15 @@ export function lapChart(input: LapChartInput): LapPicture {
   const regions = beyondRects(plot, ends, input);
   const at = worst === null ? null : drawn[worst.line][worst.point];
   const board = createLabelBoard({ bounds: plot, curves: polylines, shaded: regions.map(({ rect }) => rect) });
+  if (at !== null) board.reserve(boxAround(at.x, at.y, RING));
   for (const { limit } of demands) board.reserve({ x: plot.x, y: axis.at(limit) - 8, width: plot.width, height: 16 });
   if (worst !== null && at !== null) board.add(worst.text, 'strong', placesAround(at, [16, 28, 44, 64]));
+  for (const { rect, text } of regions) board.add(text.split(' '), 'quiet', placesInside(rect, text.split(' ').length));
   return {
     plot,
     axis,
     columns: columnsOf(places, across, input.tickText),
-    beyond: regions,
+    beyond: regions.map(({ rect }) => rect),
     kerbs,
     lines: drawn.map((points, i) => ({
       path: polylinePath(polylines[i], plot),

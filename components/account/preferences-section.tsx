@@ -14,6 +14,10 @@ const magnitudeUnits = [
   { value: 'dB', label: 'dB' },
   { value: 'factor', label: 'factor' },
 ] as const;
+const speedUnits = [
+  { value: 'm/s', label: 'm/s' },
+  { value: 'km/h', label: 'km/h' },
+] as const;
 const themes = [
   { value: 'light', label: 'light' },
   { value: 'dark', label: 'dark' },
@@ -42,6 +46,9 @@ export function PreferencesSection() {
       </SettingRow>
       <SettingRow name="Gain">
         <Segments label="Gain" value={magnitudeUnit} options={magnitudeUnits} onChange={(value) => set({ magnitudeUnit: value })} />
+      </SettingRow>
+      <SettingRow name="Speed">
+        <Segments label="Speed" value={preferences.speedUnit} options={speedUnits} onChange={(value) => set({ speedUnit: value })} />
       </SettingRow>
       <Note>
         {`Example: crossover ${formatFrequency(exampleCrossover, frequencyUnit)} ${frequencyUnit}, gain margin ${margin}. Gains stay in the units of the control unit.`}

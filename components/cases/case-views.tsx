@@ -1,4 +1,4 @@
-import { useMemo } from 'react';
+import { type ReactNode, useMemo } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { LapChart } from '@/components/charts';
 import { CasesOrLimits } from '@/components/navigation/cases-or-limits';
@@ -24,12 +24,14 @@ export interface CaseViewsProps {
   shown: Shown;
   link: CasesLink;
   onChange: (change: { case?: string; number?: string; view?: string }) => void;
+  /** At the right of the ways to look, where there is room. */
+  tools: ReactNode;
 }
 
 const CHART_HEIGHT = { phone: 380, middle: 380, wide: 366 };
 
 /** The cases themselves: as a grid, as a list, and as one number over speed. */
-export function CaseViews({ data: { views, analysis }, shown, link, onChange }: CaseViewsProps) {
+export function CaseViews({ data: { views, analysis }, shown, link, onChange, tools }: CaseViewsProps) {
   const layout = useLayout();
   const wide = layout === 'wide';
   const { quantity, quantities, layout: grid, numbers, worst, selected } = shown;
@@ -57,8 +59,8 @@ export function CaseViews({ data: { views, analysis }, shown, link, onChange }: 
         )}
         {layout === 'phone' ? null : <CasesOrLimits current="cases" />}
       </View>
-      {grid === null ? null : (
-        <View style={padding}>
+      <View style={[padding, layout === 'phone' ? null : styles.ways]}>
+        {grid === null ? null : (
           <Segments
             label="Cases shown as"
             value={view}
@@ -66,8 +68,9 @@ export function CaseViews({ data: { views, analysis }, shown, link, onChange }: 
             onChange={(next) => onChange({ view: next })}
             stretch={layout === 'phone'}
           />
-        </View>
-      )}
+        )}
+        {tools}
+      </View>
       {view === 'list' || grid === null ? (
         <View style={layout === 'phone' ? null : padding}>
           <CaseList views={views} columns={columns} worst={worst?.view.kept.id} selected={selected.kept.id} onOpen={open} />
@@ -106,7 +109,8 @@ function Chart({ shown: { quantity, numbers, worst, headline }, layout, limits, 
   const { operatingRange } = useProject();
   const props = useMemo(() => {
     const first = headline !== null && worst?.view.kept.id === headline.case?.id && headline.quantity === quantity;
-    return lapProps({ layout, quantity, numbers, worst, limits, operatingRange, units, aside: first ? edgeWords(headline) : null });
+    const aside = first ? edgeWords(headline) : null;
+    return lapProps({ layout, quantity, numbers, worst, limits, operatingRange, units, aside });
   }, [layout, quantity, numbers, worst, limits, operatingRange, units, headline]);
   return (
     <View style={styles.chart}>
@@ -118,6 +122,7 @@ function Chart({ shown: { quantity, numbers, worst, headline }, layout, limits, 
 const styles = StyleSheet.create({
   head: { flexDirection: 'row', alignItems: 'flex-end', gap: 16, zIndex: 12 },
   grow: { flexGrow: 1 },
+  ways: { flexDirection: 'row', flexWrap: 'wrap', justifyContent: 'space-between', alignItems: 'center', gap: 10 },
   phone: { paddingHorizontal: gutter.phone, paddingVertical: 8 },
   wide: { paddingHorizontal: gutter.wide, paddingTop: 12 },
   chart: { paddingTop: 18 },

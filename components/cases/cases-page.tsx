@@ -16,6 +16,7 @@ import { MiniGrids } from './grid/mini-grids';
 import { NotAnalysed } from './not-analysed';
 import { CasePanel } from './panel/case-panel';
 import type { CaseData } from './use-case-data';
+import { useOpenCase } from './use-open-case';
 import { useShownCases } from './use-shown-cases';
 
 /** The headline over all cases, the cases themselves, and the one that was opened beside them. */
@@ -29,7 +30,7 @@ export function CasesPage({ data }: { data: CaseData }) {
   const shown = useShownCases(data, link);
   const { views, analysis, conditions, misfit } = data;
   const { headline, selected } = shown;
-  const open = (caseId: string) => change({ case: caseId });
+  const { panel: panelRef, open } = useOpenCase(views, change);
   const edit = (what: string | undefined) => change({ edit: what });
   const editing = mayEdit && link.edit !== undefined;
   const editor = editing ? (
@@ -53,7 +54,7 @@ export function CasesPage({ data }: { data: CaseData }) {
   return (
     <ScrollView style={{ backgroundColor: colors.paper }} contentContainerStyle={styles.page}>
       {analysis && headline ? (
-        <VerdictStrip headline={headline} room={analysis.room} results={analysis.results} />
+        <VerdictStrip headline={headline} room={analysis.room} results={analysis.results} instead={wide ? <Legend /> : undefined} />
       ) : (
         <View style={padding}>
           <NotAnalysed caseCount={views.length} />
@@ -64,9 +65,15 @@ export function CasesPage({ data }: { data: CaseData }) {
       {phone ? <CasesOrLimits current="cases" /> : null}
       <View style={wide ? styles.side : null}>
         <View style={[wide && styles.main, { borderRightColor: colors.rule }]}>
-          <CaseViews data={data} shown={shown} link={link} onChange={change} />
+          <CaseViews
+            data={data}
+            shown={shown}
+            link={link}
+            onChange={change}
+            tools={wide && mayEdit && !editing ? <MakeCases views={views} onEdit={edit} /> : null}
+          />
         </View>
-        <View style={[wide ? styles.panel : null, padding, !wide && { backgroundColor: colors.paper }]}>
+        <View ref={panelRef} style={[wide ? styles.panel : null, padding, !wide && { backgroundColor: colors.paper }]}>
           {panel}
           {wide && !editor && shown.layout && analysis ? (
             <MiniGrids data={data} shown={shown} onChoose={(number) => change({ number })} />
@@ -74,8 +81,8 @@ export function CasesPage({ data }: { data: CaseData }) {
         </View>
       </View>
       <View style={[padding, styles.foot]}>
-        {mayEdit && !editing ? <MakeCases views={views} onEdit={edit} /> : null}
-        <Legend />
+        {mayEdit && !editing && !wide ? <MakeCases views={views} onEdit={edit} /> : null}
+        {wide && analysis ? null : <Legend />}
       </View>
     </ScrollView>
   );

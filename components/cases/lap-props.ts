@@ -1,8 +1,10 @@
+import { quantities } from '@/analysis/project';
 import type { LapChartProps } from '@/components/charts';
 import type { Units } from '@/components/ui/units';
 import { demandText } from '@/components/verdict/demand-text';
 import type { Axis, Limit, OperatingRange, Quantity } from '@/contract';
 import { axisFrom, axisIn, axisName, axisNumber, axisText, axisUnit } from '@/figures/axis-text';
+import { formatFrequency, withUnit } from '@/figures/format';
 import type { LapLine } from '@/figures/lap-chart';
 import type { LapDemand } from '@/figures/lap-labels';
 import { quantityName, quantityText } from '@/figures/quantity-text';
@@ -31,6 +33,12 @@ function shownValue(quantity: Quantity, value: number, units: Units): number {
   if (inDecibels.includes(quantity)) return magnitudeIn(units.magnitude, value);
   if (quantity === 'bandwidth') return frequencyIn(units.frequency, value);
   return quantity === 'phaseMargin' ? Math.abs(value) : value;
+}
+
+/** "1.63 at 4.84 rad/s" */
+function placed({ text, view }: CaseNumber, quantity: Quantity, { frequency: unit }: Units): string {
+  const at = view.result && quantities[quantity].frequency(view.result.numbers);
+  return at === null ? text : `${text} at ${withUnit(formatFrequency(at, unit), unit)}`;
 }
 
 /** What lies beyond an end of what was checked, in words; null where nothing can. */
@@ -75,7 +83,7 @@ export function lapProps(reading: LapReading): Omit<LapChartProps, 'height'> {
     units: { number: quantityText(quantity, 1, units).unit || 'factor', foot: axisUnit(column, units.speed) },
     lines,
     demands,
-    worst: drawn ? { line, point, text: [worst.text, ...(aside === null ? [] : [aside])] } : null,
+    worst: drawn ? { line, point, text: [placed(worst, quantity, units), ...(aside === null ? [] : [aside])] } : null,
     beyond,
     tickText: (at) => axisNumber(column, axisFrom(column, at, units.speed), units.speed),
     description: `${title}, ${lines.length === 1 ? 'one line' : `${lines.length} lines, one per load`}. ${demands.map(({ text }) => `Demanded ${text}. `).join('')}${worstWords}`,

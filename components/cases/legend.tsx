@@ -33,13 +33,13 @@ export function Legend() {
         </View>
       ))}
       <Text step="small" tone="ink2">
-        In the grid an extrapolated case has no disc. A frame marks the one nearest the edge.
+        In the grid only those that are not extrapolated have one; a frame is round the case nearest the edge.
       </Text>
     </View>
   );
 }
 
 const styles = StyleSheet.create({
-  legend: { flexDirection: 'row', flexWrap: 'wrap', columnGap: 18, rowGap: 4, alignItems: 'center' },
+  legend: { flexDirection: 'row', flexWrap: 'wrap', columnGap: 18, rowGap: 4, alignItems: 'center', maxWidth: 580, flexShrink: 1 },
   entry: { flexDirection: 'row', alignItems: 'center', gap: 6 },
 });

@@ -28,7 +28,7 @@ function Ground({ picture: { plot, axis, columns, beyond }, foot }: { picture: L
   const low = plot.y + plot.height;
   return (
     <g>
-      {beyond.map(({ rect }) => (
+      {beyond.map((rect) => (
         <rect key={rect.x} {...rect} fill={colors.bar} />
       ))}
       <path d={[...rows, ...uprights].join('')} stroke={colors.rule} strokeWidth={1} fill="none" />
@@ -48,13 +48,6 @@ function Ground({ picture: { plot, axis, columns, beyond }, foot }: { picture: L
       <ChartText x={plot.x + plot.width + 10} y={low + 20}>
         {foot}
       </ChartText>
-      {beyond.map(({ rect, text }) =>
-        text.split(' ').map((word, i, words) => (
-          <ChartText key={`${rect.x} ${word}`} x={rect.x + 4} y={low - 8 - (words.length - 1 - i) * 16} tone="quiet">
-            {word}
-          </ChartText>
-        )),
-      )}
     </g>
   );
 }

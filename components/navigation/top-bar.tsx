@@ -14,14 +14,15 @@ export function TopBar({ children }: PropsWithChildren) {
   const { colors } = useTheme();
   const units = useUnits();
   const wide = useLayout() === 'wide';
+  const named = [units.frequency, units.magnitude, units.speed].join(', ');
   return (
     <View role="banner" style={[styles.bar, { backgroundColor: colors.paper, borderBottomColor: colors.ink }]}>
       <Brand />
       {children}
       <View style={styles.right}>
         {wide && (
-          <NavLink href="/account" aria-label={`Units: ${units.frequency}, ${units.magnitude}. Change`} style={styles.units}>
-            <Text weight={600}>{`${units.frequency}, ${units.magnitude}`}</Text>
+          <NavLink href="/account" aria-label={`Units: ${named}. Change`} style={styles.units}>
+            <Text weight={600}>{named}</Text>
           </NavLink>
         )}
         <AccountCircle />

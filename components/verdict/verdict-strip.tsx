@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 import type { CaseResult, Headline, Room } from '@/contract';
 import { Text } from '@/components/ui/text';
@@ -20,13 +21,15 @@ export interface VerdictStripProps {
   /** Null where it was not computed, or nothing is demanded. */
   room: Room | null;
   results: readonly CaseResult[];
+  /** Stands in the place of the rulers on a wide screen, where the page itself shows every case. */
+  instead?: ReactNode;
 }
 
 /** As many as stand side by side on a wide screen. */
 const MOST_RULERS = 5;
 
 /** The number first: the worst over all cases, its case and frequency, the room that is left, and everything that is demanded on its ruler. */
-export function VerdictStrip({ headline, room, results }: VerdictStripProps) {
+export function VerdictStrip({ headline, room, results, instead }: VerdictStripProps) {
   const { colors } = useTheme();
   const phone = useLayout() === 'phone';
   const text = headlineText(headline, useUnits());
@@ -53,14 +56,14 @@ export function VerdictStrip({ headline, room, results }: VerdictStripProps) {
         </View>
       </View>
       {room && !phone ? <RoomBlock room={room} /> : null}
-      <Demands headline={headline} results={results} />
+      {(!phone && instead) || <Demands headline={headline} results={results} />}
       {room && phone ? <RoomBlock room={room} compact /> : null}
     </View>
   );
 }
 
 /** Rulers where limits are demanded, else the margins of the headline's case. */
-function Demands({ headline, results }: Omit<VerdictStripProps, 'room'>) {
+function Demands({ headline, results }: Pick<VerdictStripProps, 'headline' | 'results'>) {
   const units = useUnits();
   const phone = useLayout() === 'phone';
   const checks = worstChecks(results);

@@ -39,7 +39,6 @@ function readAxis(
   form: AxisForm,
   { speedUnit, names, say }: { speedUnit: GridForm['speedUnit']; names: readonly string[]; say: Say },
 ) {
-  countMismatch(axis, form, say);
   const points = pointsOf(form).map((point, index) => {
     const number = (column: string, text: string): number | undefined => {
       const value = parseNumber(text);
@@ -66,6 +65,7 @@ export function readGridForm(form: GridForm, plant: PlantRevision | undefined, t
   const say: Say = (place, message) => void (errors[place] ??= message);
   const used = caseAxes.filter((axis) => pointsOf(form.axes[axis]).length > 0);
   const counts = used.map((axis) => pointsOf(form.axes[axis]).length);
+  for (const axis of used) countMismatch(axis, form.axes[axis], say);
   const longest = used[counts.indexOf(Math.max(...counts))];
   const large = tooLarge(counts, form.replace ? 0 : there);
   if (large !== null) {

@@ -39,7 +39,7 @@ export function CellFace({ number, worst, more = 0, small = false }: CellFacePro
         {more > 0 && !small ? <Text step="tick" tone="ink2">{`+${more}`}</Text> : null}
       </View>
       {view.kept.basis === 'extrapolated' ? null : (
-        <View style={styles.basis}>
+        <View style={[styles.basis, small && styles.corner]}>
           <BasisMark basis={view.kept.basis} small={small} />
         </View>
       )}
@@ -91,6 +91,7 @@ const styles = StyleSheet.create({
   tightly: { gap: 2, paddingBottom: 2 },
   large: { fontSize: 20, lineHeight: 22 },
   basis: { position: 'absolute', left: 5, top: 5 },
+  corner: { left: 1, top: 1 },
   bar: { position: 'absolute', left: 0, bottom: 0, height: 4 },
   lowBar: { height: 3 },
   limit: { position: 'absolute', bottom: 0, width: 2, height: 8 },

@@ -16,7 +16,7 @@ export const columnName = ({ column }: CaseGridLayout, at: number, units: Units)
 /** "load, speed in km/h" */
 export function cornerName({ column, rowAxes }: CaseGridLayout, units: Units): string {
   const along = `${axisName(column).toLowerCase()} in ${axisUnit(column, units.speed)}`;
-  return rowAxes.length === 0 ? along : `${rowAxes.map((axis) => axisName(axis).toLowerCase()).join(', ')}; ${along}`;
+  return rowAxes.length === 0 ? along : `${rowAxes.map((axis) => axisName(axis).toLowerCase()).join(', ')}, ${along}`;
 }
 
 export const placeOf = (layout: CaseGridLayout, at: number, units: Units): string => axisText(layout.column, at, units.speed);

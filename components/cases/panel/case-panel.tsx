@@ -106,7 +106,7 @@ function PlantLines({ view: { kept, now, frozen } }: { view: CaseView }) {
           {words ?? ''}
         </Text>
       ) : null}
-      <View style={styles.line}>
+      <View style={styles.basisLine}>
         <BasisMark basis={kept.basis} />
         <Text step="note" tone="ink2" style={styles.basis}>
           <Text step="note" weight={600}>
@@ -125,5 +125,6 @@ const styles = StyleSheet.create({
   title: { flexGrow: 1, flexShrink: 1, gap: 4 },
   plant: { gap: 4 },
   line: { flexDirection: 'row', alignItems: 'center', flexWrap: 'wrap', columnGap: 8, rowGap: 6 },
-  basis: { flexShrink: 1 },
+  basisLine: { flexDirection: 'row', alignItems: 'center', gap: 8 },
+  basis: { flex: 1 },
 });

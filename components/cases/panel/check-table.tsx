@@ -46,7 +46,7 @@ function CheckLine({ check, view, unstable, barred }: CheckLineProps) {
         <Text>{quantityName(check.quantity)}</Text>
       </View>
       <View role="cell" style={styles.value}>
-        <Text step="h3" tone={unstable || view.outdated ? 'ink3' : 'ink'} style={unstable && styles.struck}>
+        <Text step="h3" tone={unstable || view.outdated ? 'ink3' : 'ink'} style={unstable && styles.struck} numberOfLines={1}>
           {checkValueText(check, units)}
         </Text>
       </View>
@@ -66,9 +66,9 @@ const styles = StyleSheet.create({
   // For those who listen: the eye reads the columns by what stands in them.
   heads: { position: 'absolute', width: 1, height: 1, overflow: 'hidden', opacity: 0 },
   row: { flexDirection: 'row', alignItems: 'center', minHeight: 36, gap: 8, paddingHorizontal: 8, paddingVertical: 4 },
-  name: { flex: 5, minWidth: 0 },
-  value: { flex: 3, alignItems: 'flex-end' },
-  demand: { flex: 6, minWidth: 0, paddingLeft: 6 },
-  verdict: { minWidth: 104, alignItems: 'flex-start' },
+  name: { flex: 4, minWidth: 0 },
+  value: { minWidth: 66, alignItems: 'flex-end' },
+  demand: { flex: 5, minWidth: 0, paddingLeft: 6 },
+  verdict: { minWidth: 76, alignItems: 'flex-start' },
   struck: { textDecorationLine: 'line-through' },
 });
