@@ -39,6 +39,7 @@ const CLOSEST = 1e-7;
  * Whole passes over the grid, so that a cap falls evenly; what one pass left whole the next does not judge again.
  */
 export const refinedGrid = (loop: LoopFunction, frequencies: readonly number[], fineness: Fineness): Grid => {
+  const rule = { ...fineness, deadTime: loop.deadTime };
   const samples = new SampledRows(loop, 2 * frequencies.length);
   let rows = frequencies.map((omega) => samples.add(omega));
   let pieces = rows.map(() => UNJUDGED);
@@ -47,7 +48,7 @@ export const refinedGrid = (loop: LoopFunction, frequencies: readonly number[], 
     const { table } = samples;
     let wanted = rows.length;
     for (let i = 0; i < rows.length; i += 1) {
-      if (pieces[i] === UNJUDGED) pieces[i] = piecesWanted(table, [rows[i], rows[i + 1]], { fineness, deadTime: loop.deadTime });
+      if (pieces[i] === UNJUDGED) pieces[i] = piecesWanted(table, rows[i], rows[i + 1], rule);
       wanted += pieces[i] - 1;
     }
     if (wanted === rows.length) return { table, rows, capped: false };
@@ -80,20 +81,16 @@ const cut = (samples: SampledRows, rows: readonly number[], pieces: readonly num
 };
 
 /** Into how many pieces the interval between two rows is to be cut. */
-const piecesWanted = (
-  table: Table,
-  [row, next]: readonly [number, number],
-  { fineness, deadTime }: { fineness: Fineness; deadTime: number },
-): number => {
+const piecesWanted = (table: Table, row: number, next: number, rule: Fineness & { readonly deadTime: number }): number => {
   const span = table[next + OMEGA] - table[row + OMEGA];
   const turn = Math.abs(table[next + PHASE] - table[row + PHASE]);
-  const bend = Math.abs(table[next + PHASE] - table[row + PHASE] + span * deadTime);
+  const bend = Math.abs(table[next + PHASE] - table[row + PHASE] + span * rule.deadTime);
   const log = Math.max(table[row + LOG], table[next + LOG]);
-  const turnStep = log > QUIET ? fineness.turnStep : fineness.quietTurnStep;
+  const turnStep = log > QUIET ? rule.turnStep : rule.quietTurnStep;
   const excess = Math.max(
-    Math.abs(table[next + LOG] - table[row + LOG]) / fineness.logStep,
-    bend / fineness.phaseStep,
-    log > fineness.turnFloor ? turn / turnStep : 0,
+    Math.abs(table[next + LOG] - table[row + LOG]) / rule.logStep,
+    bend / rule.phaseStep,
+    log > rule.turnFloor ? turn / turnStep : 0,
   );
   const isWhole = !(excess > 1) || span <= CLOSEST * table[next + OMEGA];
   return isWhole ? WHOLE : Math.min(MOST_PIECES, Math.ceil(excess));

@@ -85,11 +85,13 @@ export class Curve {
 
   /** The values at ascending times, `size` times as large. */
   valuesAt(times: readonly number[], size = 1): number[] {
+    const values = new Array<number>(times.length);
     let panel = 0;
-    return times.map((time) => {
-      while (panel + 1 < this.panels && this.starts[panel + 1] <= time) panel += 1;
-      return size * this.valueIn(panel, time);
-    });
+    for (let i = 0; i < times.length; i += 1) {
+      while (panel + 1 < this.panels && this.starts[panel + 1] <= times[i]) panel += 1;
+      values[i] = size * this.valueIn(panel, times[i]);
+    }
+    return values;
   }
 
   /** The polynomial of one panel, also at the panel's ends. */
