@@ -33,7 +33,7 @@ export function Legend() {
         </View>
       ))}
       <Text step="small" tone="ink2">
-        In the grid only those that are not extrapolated have one; a frame is round the case nearest the edge.
+        In the grid no disc is extrapolated; a frame marks the case nearest the edge.
       </Text>
     </View>
   );

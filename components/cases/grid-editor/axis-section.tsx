@@ -64,7 +64,7 @@ export function AxisSection({ axis, form, names, speedUnit, errors, onChange }: 
                 {names.map((name) => (
                   <View key={name} style={styles.parameter}>
                     <Field
-                      label={`${parameterWords(name).label} at each`}
+                      label={`${parameterWords(name).label} at each ${axisName(axis).toLowerCase()}`}
                       unit={parameterWords(name).unit}
                       compact
                       numeric
