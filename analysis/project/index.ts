@@ -17,4 +17,5 @@ export { reachOf, room, roomAlong, roomWay, wayNames, type FoundRoom, type RoomQ
 export type { WayName } from './room-ways';
 export { runnablePlant } from './runnable-plant';
 export { quantities, type Reading } from './quantities';
+export { startingSets, type StartingSet } from './starting-sets';
 export { worstVerdict } from './worst-verdict';

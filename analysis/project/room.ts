@@ -1,7 +1,7 @@
 import type { CaseResult, DesignContent, FirstBreak, FrozenCase, Limit, Loop, Room, RoomWay } from '@/contract';
-import { breachIn, breachOf } from './breach';
+import { breachIn, breachOf, type Breach } from './breach';
 import { caseLoop } from './case-loop';
-import { firstBreak } from './first-break';
+import { firstBreak, type Break } from './first-break';
 import { quantities } from './quantities';
 import { firstInstability, firstOf, ways, type Way, type WayName } from './room-ways';
 
@@ -26,52 +26,67 @@ interface Candidate {
   readonly loop: Loop;
 }
 
+type FoundBreak = Break<Candidate, Breach>;
+
 /** A hair beyond the margin that ends the walk, so that the loop is not stable there and not merely at the edge of it. */
 const BEYOND = 1e-6;
 
-const worstUse = ({ checks }: CaseResult) =>
-  Math.max(...checks.map(({ use, verdict }) => (verdict === 'fail' ? Infinity : (use ?? -Infinity))));
+const worstUse = ({ checks }: CaseResult, limits: readonly Limit[]) =>
+  Math.max(
+    ...checks
+      .filter(({ quantity, bound }) => limits.some((limit) => limit.quantity === quantity && limit.bound === bound))
+      .map(({ use, verdict }) => (verdict === 'fail' ? Infinity : (use ?? -Infinity))),
+  );
+
+const distance = ({ none }: Way, amount: number) => Math.abs(amount - none);
 
 /** How far is looked: to where the first case loses its stability, since a limit breaks there at the latest. */
 export function reachOf(name: WayName, results: readonly CaseResult[]): number {
   const way = ways[name];
   const far = way.far(results);
   const ends = firstInstability(way, results)?.amount ?? far;
-  return Math.abs(ends - way.none) < Math.abs(far - way.none) ? ends : far;
+  return distance(way, ends) < distance(way, far) ? ends : far;
 }
 
-/** A loop that is not stable breaks every limit. */
-const withinReach = ({ none }: Way, reach: number, first: FirstBreak | null) =>
-  first && Math.abs(first.amount - none) <= Math.abs(reach - none) ? first : null;
+/** One way, walked over the cases of a question. */
+class RoomWalk {
+  private readonly way: Way;
+  private readonly end: number;
+  private readonly candidates: readonly Candidate[];
 
-const beyond = ({ none }: Way, reach: number) => reach + (reach - none) * BEYOND;
+  constructor(
+    name: WayName,
+    { design, cases, results }: RoomQuestion,
+    private readonly search: Search,
+  ) {
+    this.way = ways[name];
+    this.end = search.reach + (search.reach - this.way.none) * BEYOND;
+    this.candidates = results.map((result, index) => ({ result, loop: caseLoop(cases[index], design) }));
+  }
 
-/**
- * Where the first of these limits breaks in any of the cases along one way, not yet rounded.
- *
- * @returns null where none of them does
- */
-function firstLimitToBreak(name: WayName, { design, cases, limits, results }: RoomQuestion, { reach, asked }: Search): FirstBreak | null {
-  if (limits.length === 0) return null;
-  const way = ways[name];
-  const end = beyond(way, reach);
-  const candidates = results
-    .map((result, index): Candidate => ({ result, loop: caseLoop(cases[index], design) }))
-    .sort((a, b) => worstUse(b.result) - worstUse(a.result) || 0);
-  const found = firstBreak(candidates, ({ result, loop }, share) => {
-    if (share === 0) return breachIn(limits, result.numbers);
-    asked?.();
-    return breachOf(way.alter(loop, way.amountAt(share, end)), limits);
-  });
-  const limit = found && { amount: way.amountAt(found.holds, end), ...found.what, case: found.case.result.case };
-  return firstOf(way.none, limit, withinReach(way, reach, firstInstability(way, results)));
+  /** Where the first of these limits breaks before what is `known` to break. */
+  first(limits: readonly Limit[], known: FoundBreak | null): FoundBreak | null {
+    if (limits.length === 0) return known;
+    const worstFirst = [...this.candidates].sort((a, b) => worstUse(b.result, limits) - worstUse(a.result, limits) || 0);
+    const breakAt = ({ result, loop }: Candidate, share: number) => {
+      if (share === 0) return breachIn(limits, result.numbers);
+      this.search.asked?.();
+      return breachOf(this.way.alter(loop, this.way.amountAt(share, this.end)), limits);
+    };
+    return firstBreak(worstFirst, breakAt, known);
+  }
+
+  /** As it is told. A loop that is not stable breaks every limit, so nothing holds beyond the first instability. */
+  told(found: FoundBreak | null): FirstBreak | null {
+    const limit = found && { amount: this.way.amountAt(found.holds, this.end), ...found.what, case: found.case.result.case };
+    const instability = firstInstability(
+      this.way,
+      this.candidates.map(({ result }) => result),
+    );
+    const within = instability && distance(this.way, instability.amount) <= distance(this.way, this.search.reach);
+    return firstOf(this.way.none, limit, within ? instability : null);
+  }
 }
-
-/** Both kinds of limits that are asked about: all of them, and those on stability quantities alone. */
-const limitKinds = (limits: readonly Limit[]) => ({
-  any: limits,
-  stability: limits.filter(({ quantity }) => quantities[quantity].stability),
-});
 
 /** The first limits to break along one way in some of the cases, not yet rounded. */
 export type FoundRoom = Pick<RoomWay, 'any' | 'stability'>;
@@ -90,12 +105,17 @@ export function roomWay(name: WayName, results: readonly CaseResult[], found: re
   };
 }
 
-/** What one way breaks in these cases: every limit asked about, then those on stability quantities alone. */
+/**
+ * What one way breaks in some of the cases. Limits on stability quantities come first: they are judged on margins alone, and
+ * the others, some of which need a time response, are then asked only where those still hold.
+ */
 export function roomAlong(name: WayName, question: RoomQuestion, search: Search): FoundRoom {
-  const { any, stability } = limitKinds(question.limits);
-  const first = firstLimitToBreak(name, question, search);
-  const same = stability.length === any.length;
-  return { any: first, stability: same ? first : firstLimitToBreak(name, { ...question, limits: stability }, search) };
+  const walk = new RoomWalk(name, question, search);
+  const isStability = ({ quantity }: Limit) => quantities[quantity].stability;
+  const [stable, other] = [question.limits.filter(isStability), question.limits.filter((limit) => !isStability(limit))];
+  const stability = walk.first(stable, null);
+  const any = walk.first(other, stability);
+  return { any: question.limits.length > 0 ? walk.told(any) : null, stability: stable.length > 0 ? walk.told(stability) : null };
 }
 
 export const wayNames = Object.keys(ways) as WayName[];

@@ -39,6 +39,13 @@ type SummaryRow = Omit<AnalysisSummary, 'design' | 'plants' | 'caseCount' | 'cre
   createdAt: Date;
 };
 
+/** An analysis that was kept before cases had a basis and projects an operating range said nothing of them. */
+const completed = (inputs: FrozenInputs): FrozenInputs => ({
+  ...inputs,
+  cases: inputs.cases.map((kept) => ({ ...kept, basis: kept.basis ?? 'extrapolated' })),
+  operatingRange: inputs.operatingRange ?? [],
+});
+
 /** Each plant revision once, however many cases stand on it. */
 function plantsOf({ cases }: FrozenInputs): AnalysisSummary['plants'] {
   const plants = cases.map(({ plant: { id, name, revision } }) => ({ id, name, revision }));
@@ -78,7 +85,7 @@ export function findAnalysis(db: Database, { projectId, analysisId }: { projectI
     .get();
   if (!row) return undefined;
   const { results, ...summary } = row;
-  return { ...toSummary(summary), inputs: summary.inputs, results };
+  return { ...toSummary(summary), inputs: completed(summary.inputs), results };
 }
 
 /** Writes an analysis within the transaction that also writes what it belongs to. */

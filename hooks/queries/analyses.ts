@@ -1,7 +1,8 @@
 import { infiniteQueryOptions, queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import type { Analysis, AnalysisSummary, CreateAnalysis, KeptAnalysis, Recomputed } from '@/contract';
+import type { Analysis, AnalysisSummary, CreateAnalysis, JobAnswer, KeptAnalysis, Recomputed } from '@/contract';
 import { staleTimes } from '../api/query-client';
 import { request } from '../api/request';
+import { resultOf } from './jobs';
 import { type Page, query } from './page';
 import { projectKey } from './projects';
 
@@ -35,7 +36,12 @@ export const caseAnalysisQuery = (projectId: string, analysisId: string, caseId:
 export function useCreateAnalysis(projectId: string) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (choice: CreateAnalysis) => request<KeptAnalysis>('POST', `/projects/${projectId}/analyses`, { body: choice }),
+    mutationFn: async (choice: CreateAnalysis) => {
+      const begun = await request<KeptAnalysis | JobAnswer>('POST', `/projects/${projectId}/analyses`, { body: choice });
+      if (!('job' in begun)) return begun;
+      const { analysisId } = await resultOf(begun.job);
+      return request<KeptAnalysis>('GET', `/projects/${projectId}/analyses/${analysisId}`);
+    },
     onSuccess: (analysis) => {
       client.setQueryData(analysisKey(projectId, analysis.id), analysis);
       return client.invalidateQueries({ queryKey: projectKey(projectId) });
