@@ -1,7 +1,6 @@
 import { ScrollView } from 'react-native';
 import { LatestPlane } from '@/components/navigation/loop-screens';
 import { useMayEdit, useProject } from '@/components/navigation/project-context';
-import { Banner } from '@/components/ui/banner';
 import { Column, Columns } from '@/components/ui/columns';
 import { DocumentTitle } from '@/components/ui/document-title';
 import { useTheme } from '@/components/ui/theme';
@@ -30,7 +29,6 @@ export function HomeScreen() {
     <ScrollView style={{ backgroundColor: colors.paper }} contentContainerStyle={{ flexGrow: 1 }}>
       <DocumentTitle parts={[project.name]} />
       <HomeStrip />
-      {project.archived ? <Banner lead="Archived." text="It can be read; nothing changes in it." /> : null}
       <Columns>
         <Column width={wide ? WIDTHS.stages.wide : WIDTHS.stages.middle}>
           {mayEdit ? <NextBox /> : null}

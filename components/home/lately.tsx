@@ -1,52 +1,25 @@
 import { useInfiniteQuery } from '@tanstack/react-query';
-import { StyleSheet, View } from 'react-native';
+import { View } from 'react-native';
+import { ActivityRows } from '@/components/activity/activity-rows';
 import { useProject } from '@/components/navigation/project-context';
-import { Button } from '@/components/ui/button';
-import { moment } from '@/components/ui/moment';
+import { projectPath } from '@/components/navigation/routes';
 import { QueryView } from '@/components/ui/query-view';
-import { Heading, Text } from '@/components/ui/text';
-import { useTheme } from '@/components/ui/theme';
 import { activityQuery } from '@/hooks/queries/projects';
+import { SectionHead } from './section-head';
 
-/** Who did what, newest first. */
+const SHOWN = 5;
+
+/** What was done last; the rest stands on a page of its own. */
 export function Lately() {
-  const { colors } = useTheme();
   const { id } = useProject();
   const activity = useInfiniteQuery(activityQuery(id));
+  const more = activity.hasNextPage || (activity.data?.length ?? 0) > SHOWN;
   return (
-    <View style={styles.section}>
-      <Heading level={2}>Lately</Heading>
+    <View>
+      <SectionHead name="Lately" {...(more && { link: 'All of it', href: projectPath(id, 'activity') })} />
       <QueryView query={activity} waiting="Fetching what happened">
-        {(items) => (
-          <View role="list">
-            {items.map(({ id: key, at, by, summary, detail }) => (
-              <View key={key} role="listitem" style={[styles.row, { borderBottomColor: colors.rule }]}>
-                <Text step="note" tone="ink2" style={styles.when}>
-                  {moment(at, new Date())}
-                </Text>
-                <View style={styles.what}>
-                  <Text weight={600}>{`${by} ${summary}`}</Text>
-                  {detail ? (
-                    <Text step="note" tone="ink2">
-                      {detail}
-                    </Text>
-                  ) : null}
-                </View>
-              </View>
-            ))}
-          </View>
-        )}
+        {(items) => <ActivityRows items={items.slice(0, SHOWN)} />}
       </QueryView>
-      {activity.hasNextPage ? (
-        <Button kind="quiet" label="Earlier" busy={activity.isFetchingNextPage} onPress={() => activity.fetchNextPage()} />
-      ) : null}
     </View>
   );
 }
-
-const styles = StyleSheet.create({
-  section: { gap: 6 },
-  row: { flexDirection: 'row', gap: 10, paddingVertical: 10, borderBottomWidth: 1 },
-  when: { width: 76 },
-  what: { flex: 1, gap: 2 },
-});

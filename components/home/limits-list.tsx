@@ -3,14 +3,14 @@ import { StyleSheet, View } from 'react-native';
 import { useMayEdit, useProject } from '@/components/navigation/project-context';
 import { projectPath } from '@/components/navigation/routes';
 import { type Fact, FactTable } from '@/components/ui/fact-table';
-import { Link } from '@/components/ui/link';
 import { QueryView } from '@/components/ui/query-view';
-import { Heading, Text } from '@/components/ui/text';
+import { Text } from '@/components/ui/text';
 import { useUnits } from '@/components/ui/units';
 import { demandText } from '@/components/verdict/demand-text';
 import type { Limit } from '@/contract';
 import { quantityName, quantityText, type ReaderUnits } from '@/figures/quantity-text';
 import { limitsQuery } from '@/hooks/queries/limits';
+import { SectionHead } from './section-head';
 
 const factOf = (limit: Limit, units: ReaderUnits): Fact => ({
   name: quantityName(limit.quantity),
@@ -26,10 +26,7 @@ export function LimitsList() {
   const limits = useQuery(limitsQuery(id));
   return (
     <View style={styles.section}>
-      <View style={styles.head}>
-        <Heading level={2}>Limits</Heading>
-        <Link href={projectPath(id, 'limits')}>{mayEdit ? 'Change' : 'Open'}</Link>
-      </View>
+      <SectionHead name="Limits" link={mayEdit ? 'Change' : 'Open'} href={projectPath(id, 'limits')} />
       <QueryView query={limits} waiting="Fetching the limits">
         {({ items }) =>
           items.length === 0 ? (
@@ -45,5 +42,4 @@ export function LimitsList() {
 
 const styles = StyleSheet.create({
   section: { gap: 6 },
-  head: { flexDirection: 'row', alignItems: 'center', justifyContent: 'space-between', minHeight: 44 },
 });

@@ -1,17 +1,19 @@
 import { View } from 'react-native';
 import { useProject } from '@/components/navigation/project-context';
-import { Heading, Text } from '@/components/ui/text';
+import { projectPath } from '@/components/navigation/routes';
+import { Text } from '@/components/ui/text';
+import { SectionHead } from './section-head';
 
 /** Who may do what in the project. */
 export function People() {
-  const { people } = useProject();
+  const { id, people } = useProject();
   return (
     <View style={{ gap: 6 }}>
-      <Heading level={2}>People</Heading>
+      <SectionHead name="People" link="Members" href={projectPath(id, 'members')} />
       <View role="list">
-        {people.map(({ id, name, role }) => (
+        {people.map(({ id: person, name, role }) => (
           <View
-            key={id}
+            key={person}
             role="listitem"
             style={{ flexDirection: 'row', justifyContent: 'space-between', minHeight: 36, alignItems: 'center' }}
           >

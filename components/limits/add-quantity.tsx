@@ -5,6 +5,7 @@ import { type DemandRow, emptyRow, keyOf } from './model/demand-row';
 import { boundWords } from './model/row-words';
 
 export interface AddQuantityProps {
+  label: string;
   rows: readonly DemandRow[];
   onAdd: (row: DemandRow) => void;
 }
@@ -18,12 +19,12 @@ export const addable = (rows: readonly DemandRow[]): DemandRow[] => {
 };
 
 /** What else can be demanded, by name and by the sense of it. */
-export function AddQuantity({ rows, onAdd }: AddQuantityProps) {
+export function AddQuantity({ label, rows, onAdd }: AddQuantityProps) {
   const items = addable(rows).map((row) => ({
     key: keyOf(row),
     label: quantityName(row.quantity),
     hint: boundWords[row.bound],
     onSelect: () => onAdd(row),
   }));
-  return items.length === 0 ? null : <Menu label="Add a quantity" items={items} />;
+  return items.length === 0 ? null : <Menu label={label} items={items} />;
 }

@@ -2,6 +2,7 @@ import { StyleSheet, TextInput, View } from 'react-native';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
 import { corner, fonts, line, touch } from '@/components/ui/tokens';
+import { useLayout } from '@/components/ui/use-layout';
 
 export interface DemandFieldProps {
   id: string;
@@ -34,10 +35,11 @@ export function DemandField({
   onSubmit,
 }: DemandFieldProps) {
   const { colors } = useTheme();
+  const phone = useLayout() === 'phone';
   const leftOut = optional && text === '' && !placeholder;
   const edge = { borderColor: wrong ? colors.fail : colors.rule2, backgroundColor: colors.paper };
   return (
-    <View style={[styles.box, edge, wrong && styles.wrong, leftOut && styles.dashed]}>
+    <View style={[styles.box, phone && styles.narrow, edge, wrong && styles.wrong, leftOut && styles.dashed]}>
       <TextInput
         id={id}
         aria-label={unit ? `${label}, in ${unit === '°' ? 'degrees' : unit}` : label}
@@ -73,6 +75,7 @@ const styles = StyleSheet.create({
     flexDirection: 'row',
     alignItems: 'center',
   },
+  narrow: { width: 84 },
   wrong: { borderWidth: 2 },
   dashed: { borderStyle: 'dashed' },
   input: { flex: 1, minWidth: 0, height: '100%', paddingHorizontal: 10, borderRadius: 3, fontFamily: fonts.narrow[600], fontSize: 18 },

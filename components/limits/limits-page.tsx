@@ -22,7 +22,11 @@ export function LimitsPage({ kept }: { kept: ReadLimits }) {
   const phone = useLayout() === 'phone';
   const page = useLimitsPage(kept);
   const { table, rows, editing, keeping } = page;
-  const add = <AddQuantity rows={rows} onAdd={page.add} />;
+  const add = (
+    <View style={styles.row}>
+      <AddQuantity label={phone ? 'Add a quantity' : 'Add'} rows={rows} onAdd={page.add} />
+    </View>
+  );
   const keep = (
     <Button
       kind="primary"
@@ -47,7 +51,7 @@ export function LimitsPage({ kept }: { kept: ReadLimits }) {
   );
   const foot = table.mayEdit ? (
     <>
-      <View style={styles.add}>{add}</View>
+      {add}
       <View style={styles.share}>{keep}</View>
     </>
   ) : null;
@@ -99,5 +103,5 @@ const styles = StyleSheet.create({
   // The list that drops out of it lies over the paper beside it.
   over: { flex: 1, zIndex: 1 },
   share: { flex: 1, minWidth: 0 },
-  add: { justifyContent: 'center' },
+  row: { flexDirection: 'row' },
 });

@@ -63,5 +63,5 @@ const styles = StyleSheet.create({
   line: { flexDirection: 'row', flexWrap: 'wrap', gap: 8, zIndex: 1 },
   email: { flexGrow: 1, flexBasis: 240 },
   // Beside the field, under the line of its label.
-  decide: { flexDirection: 'row', gap: 8, paddingTop: 28 },
+  decide: { flexDirection: 'row', alignSelf: 'flex-start', gap: 8, paddingTop: 28 },
 });

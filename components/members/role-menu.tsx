@@ -13,6 +13,9 @@ export interface RoleMenuProps<R extends Role> {
   onChoose: (role: R) => void;
 }
 
+/** Room for the longest role, px. */
+const WIDTH = 120;
+
 /** One role out of several, each with what it lets someone do. */
 export function RoleMenu<R extends Role>({ name, role, roles, disabled, more = [], onChoose }: RoleMenuProps<R>) {
   const items = roles.map((choice) => ({
@@ -24,5 +27,5 @@ export function RoleMenu<R extends Role>({ name, role, roles, disabled, more = [
       if (choice !== role) onChoose(choice);
     },
   }));
-  return <Menu label={role} name={name} disabled={disabled} align="right" items={[...items, ...more]} />;
+  return <Menu label={role} name={name} disabled={disabled} align="right" width={WIDTH} items={[...items, ...more]} />;
 }

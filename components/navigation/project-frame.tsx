@@ -2,10 +2,12 @@ import { useQuery } from '@tanstack/react-query';
 import { usePathname } from 'expo-router';
 import { type PropsWithChildren, useMemo, useState } from 'react';
 import { StyleSheet, View } from 'react-native';
+import { Banner } from '@/components/ui/banner';
 import { IconButton } from '@/components/ui/icon-button';
 import { QueryView } from '@/components/ui/query-view';
 import { HiddenHeading } from '@/components/ui/hidden-heading';
 import { useLayout } from '@/components/ui/use-layout';
+import { hasStatus } from '@/hooks/api/problem';
 import { projectQuery, type ReadProject } from '@/hooks/queries/projects';
 import { DeskFrame } from './desk-frame';
 import { MainArea } from './main-area';
@@ -24,11 +26,16 @@ import { TopBar } from './top-bar';
 export function ProjectFrame({ projectId, children }: PropsWithChildren<{ projectId: string }>) {
   const project = useQuery(projectQuery(projectId));
   const phone = useLayout() === 'phone';
-  if (project.data) return <LoadedFrame project={project.data}>{children}</LoadedFrame>;
+  // What was read stays readable, but not to whom it is no longer shown.
+  if (project.data && !hasStatus(project.error, 404)) return <LoadedFrame project={project.data}>{children}</LoadedFrame>;
   return (
     <DeskFrame title="Project" up="/">
       {phone ? null : <HiddenHeading>Project</HiddenHeading>}
-      <QueryView query={project} waiting="Fetching the project" missing="No such project, or it is not yours to see.">
+      <QueryView
+        query={{ ...project, data: undefined }}
+        waiting="Fetching the project"
+        missing="No such project, or it is not yours to see."
+      >
         {() => null}
       </QueryView>
     </DeskFrame>
@@ -64,6 +71,7 @@ function LoadedFrame({ project, children }: PropsWithChildren<{ project: ReadPro
           </TopBar>
         )}
         <SignalBanner />
+        {project.archived ? <Banner lead="Archived." text="It can be read; nothing changes in it." /> : null}
         <MainArea>
           {!phone && (home || current === 'bench') ? <HiddenHeading>{home ? project.name : `Bench, ${project.name}`}</HiddenHeading> : null}
           {children}

@@ -22,13 +22,15 @@ export interface MenuProps {
   disabled?: boolean;
   /** A picture in the place of the label, for a row's own menu. */
   icon?: IconName;
+  /** Of its button, px, where several stand under each other. */
+  width?: number;
   items: readonly MenuItem[];
   kind?: ButtonProps['kind'];
   align?: 'left' | 'right';
 }
 
 /** A button with a list under it. Down opens it, arrows walk it, Escape closes it and gives the focus back. */
-export function Menu({ label, name, disabled, icon, items, kind = 'secondary', align = 'left' }: MenuProps) {
+export function Menu({ label, name, disabled, icon, width, items, kind = 'secondary', align = 'left' }: MenuProps) {
   const { colors } = useTheme();
   const [open, setOpen] = useState(false);
   const box = useRef<View>(null);
@@ -63,11 +65,18 @@ export function Menu({ label, name, disabled, icon, items, kind = 'secondary', a
   };
   const trigger = { disabled, 'aria-haspopup': 'menu', 'aria-expanded': open, onPress: () => setOpen(!open) } as const;
   return (
-    <View ref={box} style={styles.box} onKeyDown={walk}>
+    <View ref={box} style={[styles.box, { width }]} onKeyDown={walk}>
       {icon ? (
         <IconButton label={name ?? label} icon={icon} {...trigger} />
       ) : (
-        <Button label={label} aria-label={name && `${name}, ${label}`} kind={kind} iconAfter="down" {...trigger} />
+        <Button
+          label={label}
+          aria-label={name && `${name}, ${label}`}
+          kind={kind}
+          iconAfter="down"
+          stretch={width !== undefined}
+          {...trigger}
+        />
       )}
       {open && (
         <View
