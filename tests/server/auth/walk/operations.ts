@@ -1,5 +1,5 @@
 /** What the walk needs of an OpenAPI schema, as the document has it. */
-export interface Schema {
+interface Schema {
   readonly $ref?: string;
   readonly format?: string;
   readonly properties?: Readonly<Record<string, Schema>>;
@@ -14,7 +14,7 @@ interface Described {
   readonly responses: Readonly<Record<string, unknown>>;
 }
 
-export interface OpenApi {
+interface OpenApi {
   readonly paths: Readonly<Record<string, Readonly<Record<string, Described>>>>;
   readonly components: { readonly schemas: Readonly<Record<string, Schema>> };
 }
@@ -59,8 +59,7 @@ function topLevel(document: OpenApi, schema: Schema): string[] {
 const isId = ({ format, items, anyOf }: Schema): boolean =>
   format === 'uuid' || (items !== undefined && isId(items)) || (anyOf ?? []).some(isId);
 
-/** Everything that the document of a running server describes. */
-export function operationsOf(document: OpenApi): Operation[] {
+function operationsOf(document: OpenApi): Operation[] {
   return Object.entries(document.paths).flatMap(([path, methods]) =>
     Object.entries(methods).map(([method, { requestBody, responses }]) => {
       const body = requestBody?.content['application/json']?.schema;
@@ -78,4 +77,10 @@ export function operationsOf(document: OpenApi): Operation[] {
       };
     }),
   );
+}
+
+/** Everything that a running server's document describes. */
+export async function documentAt(url: string): Promise<Operation[]> {
+  const response = await fetch(`${url}/api/openapi.json`);
+  return operationsOf((await response.json()) as OpenApi);
 }

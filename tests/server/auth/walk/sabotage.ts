@@ -3,7 +3,7 @@ import type { AddressInfo } from 'node:net';
 import { createApp } from '@/server/app';
 import type { AnyVisit, Route } from '@/server/http/route';
 import type { TestApp } from '../../../support/test-app';
-import { operationsOf, type OpenApi, type Operation } from './operations';
+import { documentAt, type Operation } from './operations';
 import { elsewhere, type World } from './world';
 
 /** A second server over the same database, with routes as a test gives them. */
@@ -11,11 +11,6 @@ export interface Sabotaged {
   readonly world: World;
   readonly operations: readonly Operation[];
   readonly close: () => void;
-}
-
-export async function documentAt(url: string): Promise<Operation[]> {
-  const response = await fetch(`${url}/api/openapi.json`);
-  return operationsOf((await response.json()) as OpenApi);
 }
 
 export async function serve({ context }: TestApp, world: World, routes: readonly Route[]): Promise<Sabotaged> {
