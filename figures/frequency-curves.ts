@@ -4,23 +4,35 @@ import type { Rect } from './geometry';
 import type { Axis } from './linear-axis';
 import { responseOf, type LoopScene } from './loop-picture';
 import { indicesWithin } from './margin-marks';
+import { placementOf } from './placement';
 import { type Polyline, polylinePath, toPolyline } from './polyline';
+import { remember } from './remember';
 
 /** Takes one ordinate out of a response, in the units of the panel's axis. */
-export type Ordinate = (response: FrequencyResponse) => ArrayLike<number>;
+export type Ordinate = (response: FrequencyResponse) => readonly number[];
+
+/** An ordinate that is computed from a response, once for each. */
+export function derivedOrdinate(derive: Ordinate): Ordinate {
+  const derived = remember<FrequencyResponse, readonly number[]>();
+  return (response) => derived(response, [], () => derive(response));
+}
 
 /** The ordinates of a response inside the axis' window. */
-export function ordinatesWithin(response: FrequencyResponse, axis: FrequencyAxis, ordinate: Ordinate): number[] {
+export function ordinatesWithin(response: FrequencyResponse, axis: FrequencyAxis, ordinate: Ordinate): readonly number[] {
   if (response.frequencies.length === 0) return [];
   const [first, last] = indicesWithin(response, axis.domain);
-  return Array.from(ordinate(response)).slice(first, last + 1);
+  return ordinate(response).slice(first, last + 1);
 }
+
+const lines = remember<readonly number[], Polyline>();
 
 /** The curve of one ordinate in pixels, the window's part of it. */
 export function frequencyPolyline(response: FrequencyResponse, ordinate: Ordinate, across: FrequencyAxis, up: Axis): Polyline {
   if (response.frequencies.length === 0) return toPolyline([], [], across.at, up.at);
-  const [first, last] = indicesWithin(response, across.domain);
-  return toPolyline(response.frequencies.slice(first, last + 1), ordinatesWithin(response, across, ordinate), across.at, up.at);
+  return lines(ordinate(response), [...placementOf(across), ...placementOf(up)], () => {
+    const [first, last] = indicesWithin(response, across.domain);
+    return toPolyline(response.frequencies.slice(first, last + 1), ordinatesWithin(response, across, ordinate), across.at, up.at);
+  });
 }
 
 /** Where a panel stands and how it is scaled. */

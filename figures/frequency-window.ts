@@ -50,13 +50,17 @@ function withDecades([low, high]: Interval): Interval {
   return decades > MOST_DECADES ? [high / 10 ** MOST_DECADES, high] : [low, high];
 }
 
+/** The first and the last frequency of a curve that a logarithmic axis can show. */
+function endsOf(frequencies: readonly number[]): number[] {
+  return [frequencies.find(isDrawable), frequencies.findLast(isDrawable)].filter((frequency) => frequency !== undefined);
+}
+
 /** The frequencies that are drawn when nobody chose: round the crossovers and peaks of the loops, ending on 1, 2 or 5 of the reader's unit. rad/s. */
 export function frequencyWindow(loops: readonly LoopNumbers[], unit: FrequencyUnit): Interval {
   const telltales = loops.flatMap(framing);
-  const drawn = loops.flatMap(({ frequencyResponse }) => frequencyResponse?.frequencies ?? []).filter(isDrawable);
-  const limits: Interval =
-    drawn.length > 1 ? [Math.min(drawn[0], ...telltales), Math.max(drawn[drawn.length - 1], ...telltales)] : [1e-9, 1e12];
-  const middle = drawn.length > 1 ? Math.sqrt(drawn[0] * drawn[drawn.length - 1]) : 1;
+  const drawn = loops.flatMap(({ frequencyResponse }) => endsOf(frequencyResponse?.frequencies ?? []));
+  const limits: Interval = drawn.length > 0 ? [Math.min(...drawn, ...telltales), Math.max(...drawn, ...telltales)] : [1e-9, 1e12];
+  const middle = drawn.length > 0 ? Math.sqrt(drawn[0] * drawn[drawn.length - 1]) : 1;
   const matters = telltales.length > 0 ? telltales : [middle];
   const wide = withDecades([Math.max(limits[0], Math.min(...matters) / BELOW), Math.min(limits[1], Math.max(...matters) * ABOVE)]);
   return betweenStops(wide, unit);

@@ -1,6 +1,6 @@
 import { formatFrequency, formatMagnitude, shortNumber, withUnit } from './format';
 import type { FrequencyAxis } from './frequency-axis';
-import { frequencyCurves, type Ordinate, ordinatesWithin } from './frequency-curves';
+import { derivedOrdinate, frequencyCurves, ordinatesWithin } from './frequency-curves';
 import { contains, type Rect } from './geometry';
 import { straightKerb } from './kerb';
 import { boxAround, createLabelBoard, type LabelBoard, placesBeside } from './label-board';
@@ -15,7 +15,7 @@ import { magnitudeIn, toDecibels } from './units';
 /** Half the length of the short kerb across a margin bar. */
 export const SHORT_KERB = 17;
 
-const decibels: Ordinate = ({ loop }) => loop.magnitude.map(toDecibels);
+const decibels = derivedOrdinate(({ loop }) => loop.magnitude.map(toDecibels));
 
 type Marks = Pick<PanelPicture, 'kerbs' | 'bars' | 'dots'>;
 

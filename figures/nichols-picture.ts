@@ -49,8 +49,8 @@ function nameContours(turn: number, toPlane: ToPlane, board: LabelBoard): void {
 
 /** A closed outline as a curve that labels keep off. */
 const closedLine = (points: readonly Point[]): Polyline => ({
-  x: Float64Array.from([...points, points[0]], ({ x }) => x),
-  y: Float64Array.from([...points, points[0]], ({ y }) => y),
+  x: [...points, points[0]].map(({ x }) => x),
+  y: [...points, points[0]].map(({ y }) => y),
 });
 
 function boxOf(points: readonly Point[]): Rect {

@@ -9,6 +9,7 @@ import { postMarks, worstMark } from './plane-marks';
 import type { AxisLabel, ContourPaths, PlanePicture } from './plane-picture';
 import { formatNumber } from './format';
 import { type Polyline, polylinePath, toPolyline } from './polyline';
+import { remember } from './remember';
 import { contourLevels, contourPoint, contourRadius, legibleContours } from './sensitivity-contours';
 
 const CONTOUR_PITCH = 5;
@@ -84,11 +85,15 @@ function axisLabels({ toX, toY }: NyquistView, plot: Rect): AxisLabel[] {
   ];
 }
 
+const lines = remember<readonly number[], Polyline>();
+
 /** L in the plane, |S| drawn as height round −1: contours, the Ms limit as a kerb, posts and arrowheads along L, the nearest point with its number. */
 export function nyquistPicture(scene: LoopScene, window: NyquistWindow, plot: Rect): PlanePicture {
   const view = nyquistView(window, plot);
   const summit = view.toPixel(-1, 0);
-  const draw = ({ loop }: ReturnType<typeof responseOf>): Polyline => toPolyline(loop.real, loop.imaginary, view.toX, view.toY);
+  const placement = [...view.real, ...view.imaginary, plot.x, plot.y, plot.width, plot.height];
+  const draw = ({ loop }: ReturnType<typeof responseOf>): Polyline =>
+    lines(loop.real, placement, () => toPolyline(loop.real, loop.imaginary, view.toX, view.toY));
   const response = responseOf(scene.a);
   const lineA = draw(response);
   const lineB = scene.b === undefined ? null : draw(responseOf(scene.b));

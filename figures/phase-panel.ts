@@ -1,6 +1,6 @@
 import { formatDegrees, formatFrequency, formatNumber, withUnit } from './format';
 import type { FrequencyAxis } from './frequency-axis';
-import { frequencyCurves, type Ordinate, ordinatesWithin } from './frequency-curves';
+import { derivedOrdinate, frequencyCurves, type Ordinate, ordinatesWithin } from './frequency-curves';
 import { contains, type Rect } from './geometry';
 import { straightKerb, type StraightKerb } from './kerb';
 import { createLabelBoard, type LabelBoard, placesBeside } from './label-board';
@@ -15,7 +15,7 @@ import { placesAround } from './place-label';
 const degrees: Ordinate = ({ loop }) => loop.phaseDegrees;
 /** What lies under this |L| tells little of the loop: the axis does not follow its phase down. */
 const TELLING_MAGNITUDE = 0.2;
-const telling: Ordinate = ({ loop }) => loop.phaseDegrees.map((phase, i) => (loop.magnitude[i] >= TELLING_MAGNITUDE ? phase : NaN));
+const telling = derivedOrdinate(({ loop }) => loop.phaseDegrees.map((phase, i) => (loop.magnitude[i] >= TELLING_MAGNITUDE ? phase : NaN)));
 
 /** Degrees drawn beside −180° at least, and beyond what is demanded. */
 const LEAST_BESIDE = 35;

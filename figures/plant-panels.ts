@@ -1,6 +1,6 @@
 import type { FrequencyResponse } from '@/contract';
 import type { FrequencyAxis } from './frequency-axis';
-import { frequencyPolyline, type Ordinate, ordinatesWithin } from './frequency-curves';
+import { derivedOrdinate, frequencyPolyline, type Ordinate, ordinatesWithin } from './frequency-curves';
 import { betweenStops } from './frequency-window';
 import type { Interval, Rect } from './geometry';
 import type { Axis } from './linear-axis';
@@ -30,7 +30,7 @@ export function plantWindow([slowest, fastest]: Interval, unit: FrequencyUnit): 
   return betweenStops([Math.max(slowest / BEYOND, high / WIDEST), high], unit);
 }
 
-const decibels: Ordinate = ({ plant }) => plant.magnitude.map(toDecibels);
+const decibels = derivedOrdinate(({ plant }) => plant.magnitude.map(toDecibels));
 const degrees: Ordinate = ({ plant }) => plant.phaseDegrees;
 
 interface Panel {

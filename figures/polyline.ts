@@ -1,25 +1,28 @@
-import { grow, type Point, type Rect, round2, type Scale } from './geometry';
+import { grow, type Point, type Rect, type Scale } from './geometry';
+import { createPathPen } from './path-pen';
+import { remember } from './remember';
 
-/** A curve in pixels. Points that are not finite break it. */
+/**
+ * A curve in pixels. Points that are not finite break it. Plain arrays: a typed one has its memory outside the page's heap, and in a browser
+ * costs more to make than the few hundred points of a curve cost to compute.
+ */
 export interface Polyline {
-  readonly x: Float64Array;
-  readonly y: Float64Array;
+  readonly x: readonly number[];
+  readonly y: readonly number[];
 }
 
-/** Points nearer than this to the last one drawn add nothing that a screen can show. */
-const SHORTEST_STEP = 0.6;
 /** What lies outside is cut this far off the picture, so that line ends and joins never show. */
 const CUT = 6;
 
 /** Maps two series of one length through their scales. */
 export function toPolyline(xs: ArrayLike<number>, ys: ArrayLike<number>, toX: Scale, toY: Scale): Polyline {
   const length = Math.min(xs.length, ys.length);
-  const line = { x: new Float64Array(length), y: new Float64Array(length) };
+  const [x, y]: [number[], number[]] = [[], []];
   for (let i = 0; i < length; i++) {
-    line.x[i] = toX(xs[i]);
-    line.y[i] = toY(ys[i]);
+    x.push(toX(xs[i]));
+    y.push(toY(ys[i]));
   }
-  return line;
+  return { x, y };
 }
 
 export const pointAt = (line: Polyline, i: number): Point => ({ x: line.x[i], y: line.y[i] });
@@ -55,40 +58,42 @@ export function clipSegment(from: Point, to: Point, rect: Rect): [number, number
 
 const isFinitePoint = ({ x, y }: Point): boolean => Number.isFinite(x) && Number.isFinite(y);
 const along = (from: Point, to: Point, t: number): Point => ({ x: from.x + (to.x - from.x) * t, y: from.y + (to.y - from.y) * t });
-const print = ({ x, y }: Point): string => `${round2(x)} ${round2(y)}`;
 
-/** SVG path data of a curve, cut a little outside `bounds` and without points closer than a screen can show. Empty where nothing is inside. */
-export function polylinePath(line: Polyline, bounds: Rect): string {
-  const rect = grow(bounds, CUT);
-  let path = '';
-  let pen: Point | null = null;
+const boundsOf = ({ x, y, width, height }: Rect): number[] => [x, y, width, height];
+
+const paths = remember<Polyline, string>();
+
+/** SVG path data of a curve, cut a little outside `bounds` and without points that a screen cannot show. Empty where nothing is inside. */
+export const polylinePath = (line: Polyline, bounds: Rect): string =>
+  paths(line, boundsOf(bounds), () => drawPath(line, grow(bounds, CUT)));
+
+function drawPath(line: Polyline, rect: Rect): string {
+  const pen = createPathPen();
+  let down = false;
   for (let i = 1; i < line.x.length; i++) {
     const from = pointAt(line, i - 1);
     const to = pointAt(line, i);
     const part = isFinitePoint(from) && isFinitePoint(to) ? clipSegment(from, to, rect) : null;
     if (part === null) {
-      pen = null;
+      down = false;
       continue;
     }
-    const end = along(from, to, part[1]);
-    if (pen === null || part[0] > 0) {
-      pen = along(from, to, part[0]);
-      path += `M${print(pen)}`;
-    }
-    const last = i === line.x.length - 1 || part[1] < 1;
-    if (!last && Math.abs(end.x - pen.x) < SHORTEST_STEP && Math.abs(end.y - pen.y) < SHORTEST_STEP) continue;
-    path += `L${print(end)}`;
-    pen = part[1] < 1 ? null : end;
+    if (!down || part[0] > 0) pen.moveTo(along(from, to, part[0]));
+    pen.lineTo(along(from, to, part[1]));
+    down = part[1] === 1;
   }
-  return path;
+  return pen.path();
 }
 
 /** Points of a thinned curve are this far apart, and outside the picture there are none. */
 const THIN_STEP = 4;
 
+const thin = remember<Polyline, Polyline>();
+
 /** What of a curve is inside `bounds`, in segments just long enough to tell what it covers. NaN parts the pieces. */
-export function thinned(line: Polyline, bounds: Rect): Polyline {
-  const rect = grow(bounds, CUT);
+export const thinned = (line: Polyline, bounds: Rect): Polyline => thin(line, boundsOf(bounds), () => thinOut(line, grow(bounds, CUT)));
+
+function thinOut(line: Polyline, rect: Rect): Polyline {
   const [x, y]: [number[], number[]] = [[], []];
   for (let i = 1; i < line.x.length; i++) {
     const [from, to] = [pointAt(line, i - 1), pointAt(line, i)];
@@ -106,7 +111,7 @@ export function thinned(line: Polyline, bounds: Rect): Polyline {
     const start = { x: x[x.length - 1], y: y[y.length - 1] };
     for (let k = 1; k <= pieces; k++) pushPoint(x, y, along(start, end, k / pieces));
   }
-  return { x: Float64Array.from(x), y: Float64Array.from(y) };
+  return { x, y };
 }
 
 function pushPoint(x: number[], y: number[], point: Point): void {

@@ -5,7 +5,9 @@ import { createLabelBoard } from './label-board';
 import { type Axis, finiteExtent } from './linear-axis';
 import type { ChartDesign, LoopScene } from './loop-picture';
 import type { PanelPicture } from './panel';
+import { placementOf } from './placement';
 import { type Polyline, polylinePath, toPolyline } from './polyline';
+import { remember } from './remember';
 import type { TimeAxis } from './time-axis';
 import { controlKerbs, responseKerbs, type TimeGround } from './time-demands';
 import { loadMarks, referenceMarks, type TimeMarks } from './time-marks';
@@ -27,9 +29,13 @@ function verticalExtent(scene: LoopScene, kind: TimePanel['kind'], final: number
   return [Math.min(...wanted), Math.max(...wanted)];
 }
 
+const lines = remember<readonly number[], Polyline>();
+
 function timeLine(design: ChartDesign | undefined, kind: TimePanel['kind'], across: TimeAxis, up: Axis): Polyline | null {
   const series = design === undefined ? null : timeSeriesOf(design, kind);
-  return series === null ? null : toPolyline(series.time, series.values, across.at, up.at);
+  if (series === null) return null;
+  const placement = [...placementOf(across), ...placementOf(up)];
+  return lines(series.values, placement, () => toPolyline(series.time, series.values, across.at, up.at));
 }
 
 function kerbsOf(scene: LoopScene, kind: TimePanel['kind'], final: number | null, ground: TimeGround): StraightKerb[] {

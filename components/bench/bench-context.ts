@@ -7,6 +7,7 @@ import type { Settings } from './draft/settings';
 import type { LiveAnalyser, LiveAnswer } from './live/live-analyser';
 import type { LookedAtStore } from './live/looked-at';
 import type { LoopAnswer } from './live/loop-answer';
+import type { Readings } from './live/readings';
 import type { BenchSubject } from './subject/bench-subject';
 import type { BenchQuestion } from './live/bench-loop';
 
@@ -15,6 +16,7 @@ export interface BenchValue {
   readonly subject: BenchSubject;
   readonly store: DraftStore;
   readonly analyser: LiveAnalyser<BenchQuestion, LoopAnswer>;
+  readonly readings: Readings<BenchQuestion, LoopAnswer>;
   readonly lookedAt: LookedAtStore;
 }
 
@@ -32,10 +34,16 @@ export const useDraft = <Part>(select: (draft: DraftState) => Part): Part => use
 /** The settings on the bench this moment. */
 export const useSettings = (): Settings => useDraft(current);
 
-/** The engine's newest answer. What calls this is rendered once a frame while a gain moves. */
-export function useAnswer(): LiveAnswer<BenchQuestion, LoopAnswer> {
+/** The engine's answer for what is read and not looked at: it follows the curves at a pace of its own. */
+export function useReading(): LiveAnswer<BenchQuestion, LoopAnswer> {
+  const { readings } = useBench();
+  return useSyncExternalStore(readings.subscribe, readings.get);
+}
+
+/** Whether the engine has answered yet. */
+export function useHasAnswer(): boolean {
   const { analyser } = useBench();
-  return useSyncExternalStore(analyser.subscribe, analyser.get);
+  return useSyncExternalStore(analyser.subscribe, () => analyser.get().output !== null);
 }
 
 /** What is kept of the engine's answers from one rest to the next: what calls this is not rendered while a gain moves. */
@@ -59,7 +67,9 @@ const NO_WARNINGS: readonly Warning[] = [];
 export function useWarnings(): readonly Warning[] {
   const { analyser } = useBench();
   return useSyncExternalStore(analyser.subscribe, () => {
-    const warnings = analyser.get().complete?.analysis.warnings ?? NO_WARNINGS;
+    const { complete, rested } = analyser.get();
+    const newest = complete?.loop === rested?.loop ? rested : complete;
+    const warnings = newest?.analysis.warnings ?? NO_WARNINGS;
     return warnings.length === 0 ? NO_WARNINGS : warnings;
   });
 }

@@ -2,7 +2,7 @@ import { useCallback, useState } from 'react';
 import type { Compared } from './compare/use-compared';
 import type { BenchActions } from './layouts/bench-actions';
 import { BenchLayout } from './layouts/bench-layout';
-import { useDesigns } from './live/use-designs';
+import { useStanding } from './live/use-standing';
 import { SettingsSheet } from './settings/settings-sheet';
 import type { ChartSheet } from './sheets/chart-sheet';
 import type { BenchLink, ChangeLink } from './subject/bench-link';
@@ -15,7 +15,7 @@ interface BenchSceneProps extends Omit<BenchActions, 'onSettings'> {
 
 /** What is seen of the bench: the layout for this window, and the sheet with all settings over it. */
 export function BenchScene({ link, onLink, compared, ...actions }: BenchSceneProps) {
-  const designs = useDesigns(compared, link.steps);
+  const standing = useStanding(compared, link.steps);
   const [settings, setSettings] = useState(false);
   const openSettings = useCallback(() => setSettings(true), []);
   const showChart = useCallback((chart: ChartSheet) => onLink({ chart }), [onLink]);
@@ -26,7 +26,7 @@ export function BenchScene({ link, onLink, compared, ...actions }: BenchScenePro
       <BenchLayout
         {...actions}
         link={link}
-        designs={designs}
+        standing={standing}
         onSettings={openSettings}
         onChart={showChart}
         onCase={showCase}

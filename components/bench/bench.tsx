@@ -1,3 +1,4 @@
+import { useEffect } from 'react';
 import { View } from 'react-native';
 import { useProject } from '@/components/navigation/project-context';
 import { projectPath } from '@/components/navigation/routes';
@@ -7,6 +8,7 @@ import { Link } from '@/components/ui/link';
 import { Trouble } from '@/components/ui/trouble';
 import { Waiting } from '@/components/ui/waiting';
 import { BenchDesk } from './bench-desk';
+import { engines } from './engine/engines';
 import type { Lack } from './subject/bench-subject';
 import { useBenchLink } from './subject/use-bench-link';
 import { useBenchSubject } from './subject/use-bench-subject';
@@ -21,6 +23,8 @@ export function Bench() {
   const { id: projectId } = useProject();
   const [link, changeLink] = useBenchLink();
   const state = useBenchSubject(projectId, link);
+  // The engines start while the server is still being asked what lies on the bench.
+  useEffect(() => void engines(), []);
   if (state.kind === 'waiting') return <Waiting text="Fetching plant and design" />;
   if (state.kind === 'problem') return <Trouble title="It did not load" text={state.text} onRetry={state.retry} />;
   if (state.kind === 'lacking')

@@ -1,4 +1,4 @@
-import { type ReactNode, useState } from 'react';
+import { memo, type ReactNode, useCallback, useState } from 'react';
 import { type LayoutChangeEvent, Pressable, StyleSheet, View } from 'react-native';
 import { Text } from '@/components/ui/text';
 import { touch } from '@/components/ui/tokens';
@@ -21,7 +21,14 @@ export interface ChartShellProps {
   tools?: ReactNode;
 }
 
-function TableButton({ name, open, besideTools, onPress }: { name: string; open: boolean; besideTools: boolean; onPress: () => void }) {
+interface TableButtonProps {
+  name: string;
+  open: boolean;
+  besideTools: boolean;
+  onPress: () => void;
+}
+
+const TableButton = memo(function TableButton({ name, open, besideTools, onPress }: TableButtonProps) {
   const { style, ...focus } = useFocusRing();
   return (
     <Pressable
@@ -36,11 +43,12 @@ function TableButton({ name, open, besideTools, onPress }: { name: string; open:
       </Text>
     </Pressable>
   );
-}
+});
 
 /** What every chart has round its picture: a description, a cursor over it, and the same numbers as a table in its place. */
 export function ChartShell({ description, name, height, onLayout, picture, overlay, table, tools }: ChartShellProps) {
   const [open, setOpen] = useState(false);
+  const toggle = useCallback(() => setOpen((before) => !before), []);
   return (
     <View onLayout={onLayout} style={{ height }}>
       {open ? (
@@ -57,7 +65,7 @@ export function ChartShell({ description, name, height, onLayout, picture, overl
       )}
       <View style={styles.tools}>
         {open ? null : tools}
-        <TableButton name={name} open={open} besideTools={tools !== undefined} onPress={() => setOpen(!open)} />
+        <TableButton name={name} open={open} besideTools={tools !== undefined} onPress={toggle} />
       </View>
     </View>
   );

@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { formatFrequency, type FrequencyAxis, type LoopPoint, type LoopScene, type PanelPicture, toDecibels, withUnit } from '@/figures';
 import type { FrequencyPanel } from './chart-types';
 import { StackCursor } from './stack-cursor';
@@ -23,7 +24,7 @@ export interface FrequencyCursorProps {
 }
 
 /** The cursor of a frequency sheet, with a disc on each curve of A and B. */
-export function FrequencyCursor({ scene, panels, across, size }: FrequencyCursorProps) {
+export const FrequencyCursor = memo(function FrequencyCursor({ scene, panels, across, size }: FrequencyCursorProps) {
   const { a, b, units } = scene;
   const discs = (design: typeof b, now: number, kind: FrequencyPanel, { axis }: PanelPicture) =>
     design === undefined ? [] : ordinates[kind](design.at(now)).map((value) => ({ x: across.at(now), y: axis.at(value) }));
@@ -44,4 +45,4 @@ export function FrequencyCursor({ scene, panels, across, size }: FrequencyCursor
       }
     />
   );
-}
+});

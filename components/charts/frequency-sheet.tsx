@@ -1,4 +1,4 @@
-import { memo, useMemo } from 'react';
+import { memo, useDeferredValue, useMemo } from 'react';
 import {
   type FrequencyAxis,
   frequencyAxis,
@@ -70,6 +70,8 @@ export const FrequencySheet = memo(function FrequencySheet(props: FrequencySheet
     () => kinds.map((kind, i) => ({ kind, picture: builders[kind](scene, across, layout.plots[i]) })),
     [kinds, scene, across, layout],
   );
+  // What is read of the chart follows its curves when there is time.
+  const read = useDeferredValue(useMemo(() => ({ scene, panels }), [scene, panels]));
   const columns = useMemo(() => across.labelled.map(({ x }) => x), [across]);
   const stable = a.analysis.closedLoop.stable;
   const picture = (
@@ -84,11 +86,11 @@ export const FrequencySheet = memo(function FrequencySheet(props: FrequencySheet
   return (
     <ChartShell
       name="the loop over frequency"
-      description={describeFrequency(scene)}
+      description={describeFrequency(read.scene)}
       height={height}
       onLayout={onLayout}
       picture={width > 0 ? picture : null}
-      overlay={width > 0 ? <FrequencyCursor scene={scene} panels={panels} across={across} size={layout} /> : null}
+      overlay={width > 0 ? <FrequencyCursor {...read} across={across} size={layout} /> : null}
       table={() => frequencyTable(scene, domain)}
     />
   );

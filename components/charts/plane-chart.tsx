@@ -1,4 +1,4 @@
-import { memo, useMemo, useState } from 'react';
+import { memo, useDeferredValue, useMemo, useState } from 'react';
 import { Segments } from '@/components/ui/segments';
 import { touch } from '@/components/ui/tokens';
 import {
@@ -82,10 +82,14 @@ export const PlaneChart = memo(function PlaneChart({ a, b, others, limits, units
   const kind = plane ?? own;
   const scene = useMemo(() => ({ a, b, others, limits, units }), [a, b, others, limits, units]);
   const picture = useMemo(() => pictureOf(kind, scene, plotOf(kind, width, height)), [kind, scene, width, height]);
+  // What is read of the chart follows its curves when there is time.
+  const read = useDeferredValue(useMemo(() => ({ scene, picture }), [scene, picture]));
   const count = encirclementText(scene);
   const { plot } = picture;
   const right = plot.x + plot.width;
   const foot = kind === 'nyquist' ? `posts along L: ${units.frequency}` : `dB over arg L, posts in ${units.frequency}`;
+  const choose = onPlane ?? setOwn;
+  const tools = useMemo(() => <Segments label="Plane" value={kind} options={options} onChange={choose} />, [kind, choose]);
   const drawing = (
     <Layer width={width} height={height}>
       <PlaneView picture={picture} />
@@ -102,13 +106,13 @@ export const PlaneChart = memo(function PlaneChart({ a, b, others, limits, units
   return (
     <ChartShell
       name={names[kind]}
-      description={describePlane(scene, names[kind])}
+      description={describePlane(read.scene, names[kind])}
       height={height}
       onLayout={onLayout}
       picture={width > 0 ? drawing : null}
-      overlay={width > 0 ? <PlaneCursor scene={scene} picture={picture} size={{ width, height }} /> : null}
+      overlay={width > 0 ? <PlaneCursor {...read} width={width} height={height} /> : null}
       table={() => frequencyTable(scene, frequencyWindow([a.analysis], units.frequency))}
-      tools={<Segments label="Plane" value={kind} options={options} onChange={onPlane ?? setOwn} />}
+      tools={tools}
     />
   );
 });

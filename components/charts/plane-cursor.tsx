@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { clamp, contains, frequencyAtPlace, type LoopScene, nearestPlace, type PlanePicture, responseOf } from '@/figures';
 import { CursorDisc } from './cursor-marks';
 import { useCursor } from './cursor-provider';
@@ -6,16 +7,15 @@ import { Layer } from './layer';
 import { PointerLayer } from './pointer-layer';
 import { steppedFrequency } from './stack-cursor';
 
-/** The cursor on a plane: the frequency of the point of A that is nearest to the finger. */
-export function PlaneCursor({
-  scene,
-  picture,
-  size,
-}: {
+export interface PlaneCursorProps {
   scene: LoopScene;
   picture: PlanePicture;
-  size: { width: number; height: number };
-}) {
+  width: number;
+  height: number;
+}
+
+/** The cursor on a plane: the frequency of the point of A that is nearest to the finger. */
+export const PlaneCursor = memo(function PlaneCursor({ scene, picture, width, height }: PlaneCursorProps) {
   const [frequency, set] = useCursor('frequency');
   const { a, b } = scene;
   const { frequencies } = responseOf(a);
@@ -24,7 +24,7 @@ export function PlaneCursor({
   const places = [b, a].flatMap((design) => (design === undefined ? [] : [{ design, at: picture.toPixel(design.at(now)) }]));
   return (
     <>
-      <Layer width={size.width} height={size.height}>
+      <Layer width={width} height={height}>
         {places
           .filter(({ at }) => frequency !== null && contains(picture.plot, at))
           .map(({ design, at }) => (
@@ -44,4 +44,4 @@ export function PlaneCursor({
       />
     </>
   );
-}
+});

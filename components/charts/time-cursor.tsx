@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import {
   clamp,
   formatSeconds,
@@ -26,7 +27,7 @@ export interface TimeCursorProps {
 }
 
 /** The cursor of a time sheet, a time of its own: all that is drawn again when it moves. */
-export function TimeCursor({ scene: { a, b }, panels, across, size }: TimeCursorProps) {
+export const TimeCursor = memo(function TimeCursor({ scene: { a, b }, panels, across, size }: TimeCursorProps) {
   const [time, set] = useCursor('time');
   const [start, end] = across.domain;
   const seen = time !== null && time >= start && time <= end;
@@ -64,4 +65,4 @@ export function TimeCursor({ scene: { a, b }, panels, across, size }: TimeCursor
       />
     </>
   );
-}
+});

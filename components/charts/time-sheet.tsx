@@ -1,4 +1,4 @@
-import { memo, useMemo } from 'react';
+import { memo, useDeferredValue, useMemo } from 'react';
 import { type Interval, stackLayout, stackMargins, timeAxis, timePanel, timeWindow } from '@/figures';
 import { ChartShell } from './chart-shell';
 import type { LoopChartProps, TimePanel } from './chart-types';
@@ -48,6 +48,8 @@ export const TimeSheet = memo(function TimeSheet({ a, b, limits, units, panels: 
     () => asked.map((panel, i) => ({ panel, picture: timePanel(scene, panel, across, layout.plots[i]) })),
     [asked, scene, across, layout],
   );
+  // What is read of the chart follows its curves when there is time.
+  const read = useDeferredValue(useMemo(() => ({ scene, panels }), [scene, panels]));
   const columns = useMemo(() => across.ticks.filter(({ text }) => text !== null).map(({ x }) => x), [across]);
   const stable = a.analysis.closedLoop.stable;
   const picture = (
@@ -62,11 +64,11 @@ export const TimeSheet = memo(function TimeSheet({ a, b, limits, units, panels: 
   return (
     <ChartShell
       name={asked.map(({ title }) => title).join(', ')}
-      description={describeTime(scene, asked)}
+      description={describeTime(read.scene, asked)}
       height={height}
       onLayout={onLayout}
       picture={width > 0 ? picture : null}
-      overlay={width > 0 ? <TimeCursor scene={scene} panels={panels} across={across} size={layout} /> : null}
+      overlay={width > 0 ? <TimeCursor {...read} across={across} size={layout} /> : null}
       table={() => timeTable(scene, asked, domain)}
     />
   );

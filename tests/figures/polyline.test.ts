@@ -46,6 +46,41 @@ describe('polylinePath', () => {
   });
 });
 
+describe('a path of few points', () => {
+  const bow = Array.from({ length: 400 }, (_, i) => 50 + 40 * Math.sin(i / 60));
+  const line = toPolyline(
+    bow.map((_, i) => i / 4),
+    bow,
+    itself,
+    itself,
+  );
+  const path = points(polylinePath(line, bounds));
+
+  it('needs a quarter of those of the curve, and passes all of them within a tenth of a pixel', () => {
+    expect(path.length).toBeLessThan(100);
+    const drawn = toPolyline(
+      path.map(([x]) => x),
+      path.map(([, y]) => y),
+      itself,
+      itself,
+    );
+    // A written coordinate is itself rounded to a hundredth.
+    bow.forEach((y, i) => expect(nearestPlace(drawn, { x: i / 4, y })!.distance).toBeLessThan(0.1 + 0.01));
+  });
+
+  it('keeps the tip of a curve that turns back on itself', () => {
+    expect(polylinePath(toPolyline([10, 20, 30, 20], [10, 10, 10, 10], itself, itself), bounds)).toBe('M10 10L30 10L20 10');
+  });
+});
+
+describe('remember', () => {
+  it('makes anew what stands elsewhere, and nothing twice in the same place', () => {
+    const line = toPolyline([10, 20], [10, 10], itself, itself);
+    expect(thinned(line, bounds)).toBe(thinned(line, { ...bounds }));
+    expect(thinned(line, { ...bounds, width: 12 })).not.toEqual(thinned(line, bounds));
+  });
+});
+
 describe('thinned', () => {
   it('keeps to the curve inside the picture', () => {
     const line = thinned(toPolyline([-500, 500], [50, 50], itself, itself), bounds);

@@ -1,3 +1,4 @@
+import { useCallback } from 'react';
 import { useStore } from 'zustand';
 import { useBench } from '../bench-context';
 import { current } from './draft';
@@ -17,10 +18,12 @@ export function useHistory(): { readonly undo: HistoryStep; readonly redo: Histo
   const settings = useStore(store, current);
   const past = useStore(store.temporal, ({ pastStates }) => pastStates.at(-1)?.settings);
   const future = useStore(store.temporal, ({ futureStates }) => futureStates.at(-1)?.settings);
+  const takeBack = useCallback(() => undo(store), [store]);
+  const takeAgain = useCallback(() => redo(store), [store]);
   const step = (verb: string, to: typeof past, take: () => void): HistoryStep => ({
     possible: to !== undefined,
     label: to === undefined ? verb : `${verb} ${changeWords(settings, to)}`,
     take,
   });
-  return { undo: step('Undo', past, () => undo(store)), redo: step('Redo', future, () => redo(store)) };
+  return { undo: step('Undo', past, takeBack), redo: step('Redo', future, takeAgain) };
 }

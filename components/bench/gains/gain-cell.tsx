@@ -1,11 +1,11 @@
 import { memo } from 'react';
 import { StyleSheet, View } from 'react-native';
-import { IconButton } from '@/components/ui/icon-button';
 import { Text } from '@/components/ui/text';
 import { formatGain } from '@/figures/format';
 import { type Gain, gainWords } from '../draft/gain';
 import type { StabilitySpan } from '../live/stability-span';
 import { BenchGainRule } from './bench-gain-rule';
+import { CellNudge } from './cell-nudge';
 import { GainInput } from './gain-input';
 import { useGain } from './use-gain';
 
@@ -34,15 +34,9 @@ export const GainCell = memo(function GainCell({ gain, unstable, onActive }: Gai
       </View>
       <BenchGainRule gain={gain} control={control} unstable={unstable} wide />
       <View style={styles.row}>
-        <IconButton
-          icon="minus"
-          outlined
-          label={`${label} down 1 %`}
-          disabled={control.value === null}
-          onPress={() => control.nudge(-0.01)}
-        />
+        <CellNudge label={label} direction="down" disabled={control.value === null} onNudge={control.nudge} />
         <GainInput key={control.form} gain={gain} control={control} />
-        <IconButton icon="plus" outlined label={`${label} up 1 %`} disabled={control.value === null} onPress={() => control.nudge(0.01)} />
+        <CellNudge label={label} direction="up" disabled={control.value === null} onNudge={control.nudge} />
       </View>
     </View>
   );

@@ -1,18 +1,21 @@
+import { memo } from 'react';
 import { Pressable, StyleSheet, View } from 'react-native';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
+import type { Gain } from '../draft/gain';
 import { gainText } from './gain-text';
 
 interface GainTileProps {
+  gain: Gain;
   label: string;
   value: number | null;
   moved: boolean;
   active: boolean;
-  onChoose: () => void;
+  onChoose: (gain: Gain) => void;
 }
 
 /** A gain's name and value; the dot says that it was moved since it was kept. The active one is the one that rule and nudges move. */
-export function GainTile({ label, value, moved, active, onChoose }: GainTileProps) {
+export const GainTile = memo(function GainTile({ gain, label, value, moved, active, onChoose }: GainTileProps) {
   const { colors } = useTheme();
   return (
     <Pressable
@@ -20,7 +23,7 @@ export function GainTile({ label, value, moved, active, onChoose }: GainTileProp
       aria-checked={active}
       tabIndex={active ? 0 : -1}
       aria-label={`${label} ${gainText(value)}${moved ? ', moved' : ''}`}
-      onPress={onChoose}
+      onPress={() => onChoose(gain)}
       style={[styles.tile, active && { backgroundColor: colors.paper }]}
     >
       {active && <View style={[styles.mark, { backgroundColor: colors.ink }]} />}
@@ -35,7 +38,7 @@ export function GainTile({ label, value, moved, active, onChoose }: GainTileProp
       </Text>
     </Pressable>
   );
-}
+});
 
 const styles = StyleSheet.create({
   tile: { flex: 1, minHeight: 54, paddingTop: 7, paddingBottom: 6, paddingLeft: 12, paddingRight: 6, gap: 2 },

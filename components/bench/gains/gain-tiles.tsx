@@ -36,11 +36,12 @@ export function GainTiles({ active, onChoose, onSettings }: GainTilesProps) {
         {gains.map((gain) => (
           <GainTile
             key={gain}
+            gain={gain}
             label={gainWords(gain, settings.form).label}
             value={settings[gain]}
             moved={'refusal' in kept || !sameGain(settings[gain], kept.gains[gain])}
             active={gain === active}
-            onChoose={() => onChoose(gain)}
+            onChoose={onChoose}
           />
         ))}
       </View>

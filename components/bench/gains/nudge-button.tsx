@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { Pressable, StyleSheet } from 'react-native';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
@@ -12,7 +13,7 @@ interface NudgeButtonProps {
 }
 
 /** One step of a gain, in reach of a thumb. */
-export function NudgeButton({ gainLabel, percent, disabled, onNudge }: NudgeButtonProps) {
+export const NudgeButton = memo(function NudgeButton({ gainLabel, percent, disabled, onNudge }: NudgeButtonProps) {
   const { colors } = useTheme();
   const size = Math.abs(percent);
   return (
@@ -31,7 +32,7 @@ export function NudgeButton({ gainLabel, percent, disabled, onNudge }: NudgeButt
       </Text>
     </Pressable>
   );
-}
+});
 
 const styles = StyleSheet.create({
   key: { width: 48, height: 52, borderWidth: line.field, borderRadius: corner, alignItems: 'center', justifyContent: 'center' },

@@ -1,14 +1,22 @@
-import { memo } from 'react';
-import { IconButton } from '@/components/ui/icon-button';
-import { useHistory } from '../draft/use-history';
+import { memo, useDeferredValue } from 'react';
+import { IconButton, type IconButtonProps } from '@/components/ui/icon-button';
+import { type HistoryStep, useHistory } from '../draft/use-history';
 
 /** Undo and redo, each named after what it would change. */
 export const HistoryButtons = memo(function HistoryButtons() {
   const { undo, redo } = useHistory();
   return (
     <>
-      <IconButton icon="undo" outlined label={undo.label} disabled={!undo.possible} onPress={undo.take} />
-      <IconButton icon="redo" outlined label={redo.label} disabled={!redo.possible} onPress={redo.take} />
+      <StepButton icon="undo" {...undo} />
+      <StepButton icon="redo" {...redo} />
     </>
   );
 });
+
+/** Its name may follow a moving gain when there is time. */
+function StepButton({ icon, possible, label, take }: HistoryStep & Pick<IconButtonProps, 'icon'>) {
+  const name = useDeferredValue(label);
+  return <SteadyButton icon={icon} outlined label={name} disabled={!possible} onPress={take} />;
+}
+
+const SteadyButton = memo(IconButton);

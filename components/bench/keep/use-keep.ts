@@ -6,8 +6,8 @@ import { useCreateDesign, useReviseDesign } from '@/hooks/queries/designs';
 import { current } from '../draft/draft';
 import type { DraftStore } from '../draft/draft-store';
 import { contentWith, settingsOf } from '../draft/settings';
+import { engines } from '../engine/engines';
 import { benchLoop } from '../live/bench-loop';
-import { answerLoop } from '../live/loop-answer';
 import type { BenchSubject } from '../subject/bench-subject';
 import { type Agreement, agreementOf } from './agreement';
 import type { KeepOutcome } from './keep-outcome';
@@ -22,10 +22,11 @@ function serverNumbers(kept: KeptAnalysis, { plant, shownCase }: BenchSubject): 
   return kept.results.find((result) => result.case.id === shownCase.id)?.numbers ?? null;
 }
 
-function agreementWith(kept: KeptAnalysis | undefined, subject: BenchSubject, revision: DesignRevision): Agreement | null {
+async function agreementWith(kept: KeptAnalysis | undefined, subject: BenchSubject, revision: DesignRevision): Promise<Agreement | null> {
   const server = kept && serverNumbers(kept, subject);
   if (!server) return null;
-  return agreementOf(answerLoop(benchLoop(subject, settingsOf(revision), UNIT_STEPS), 'full').analysis, server);
+  const loop = benchLoop(subject, settingsOf(revision), UNIT_STEPS);
+  return agreementOf(await engines().responses.run('analyse', { loop, detail: 'full', end: null }), server);
 }
 
 /**
@@ -57,7 +58,7 @@ export function useKeep(subject: BenchSubject, store: DraftStore): { outcome: Ke
     try {
       const { revision, analysis } = await send();
       store.getState().keep({ revision: revision.revision, settings: settingsOf(revision) });
-      setOutcome({ kind: 'kept', revision: revision.revision, agreement: agreementWith(analysis, subject, revision) });
+      setOutcome({ kind: 'kept', revision: revision.revision, agreement: await agreementWith(analysis, subject, revision) });
     } catch (error) {
       setOutcome(refusal(error));
     }

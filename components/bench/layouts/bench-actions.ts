@@ -1,6 +1,6 @@
 import type { Gain } from '../draft/gain';
 import type { KeepOutcome } from '../keep/keep-outcome';
-import type { Designs } from '../live/use-designs';
+import type { Standing } from '../live/use-standing';
 import type { ChartSheet } from '../sheets/chart-sheet';
 import type { BenchLink } from '../subject/bench-link';
 
@@ -16,7 +16,7 @@ export interface BenchActions {
 /** What every layout of the bench is given. */
 export interface BenchLayoutProps extends BenchActions {
   readonly link: BenchLink;
-  readonly designs: Designs;
+  readonly standing: Standing;
   onChart(sheet: ChartSheet): void;
   onCase(caseId: string): void;
   /** To the newest revision, whatever the address named. */

@@ -1,4 +1,4 @@
-import { memo, useState } from 'react';
+import { memo } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { useOpenPages } from '@/components/navigation/project-context';
 import { IconButton } from '@/components/ui/icon-button';
@@ -6,11 +6,8 @@ import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
 import { gutter, line } from '@/components/ui/tokens';
 import type { Gain } from '../draft/gain';
-import { BenchGainRule } from '../gains/bench-gain-rule';
-import { GainKeypad } from '../gains/gain-keypad';
+import { ActiveGain } from '../gains/active-gain';
 import { GainTiles } from '../gains/gain-tiles';
-import { NudgeRow } from '../gains/nudge-row';
-import { useGain } from '../gains/use-gain';
 import { HistoryButtons } from '../keep/history-buttons';
 import { KeepControl } from '../keep/keep-control';
 import { SavedState } from '../keep/saved-state';
@@ -29,16 +26,13 @@ const only: Readonly<Record<Gain, readonly Gain[]>> = {
 export const Dock = memo(function Dock({ activeGain, onActiveGain, onSettings, outcome, onKeep }: BenchActions) {
   const { colors } = useTheme();
   const openPages = useOpenPages();
-  const [entering, setEntering] = useState(false);
-  const control = useGain(activeGain);
   const spans = useStabilitySpans(only[activeGain]);
   const { remark } = useKeepButton();
   return (
     <View role="region" aria-label="Gains" style={[styles.dock, { backgroundColor: colors.paper, borderTopColor: colors.ink }]}>
       <GainTiles active={activeGain} onChoose={onActiveGain} onSettings={onSettings} />
       <View style={styles.inset}>
-        <BenchGainRule key={activeGain} gain={activeGain} control={control} unstable={spans[activeGain]} />
-        <NudgeRow gain={activeGain} control={control} onEnter={() => setEntering(true)} />
+        <ActiveGain gain={activeGain} unstable={spans[activeGain]} />
         <View style={styles.actions}>
           <IconButton icon="pages" label="All pages" onPress={openPages} />
           <HistoryButtons />
@@ -53,7 +47,6 @@ export const Dock = memo(function Dock({ activeGain, onActiveGain, onSettings, o
           </Text>
         )}
       </View>
-      <GainKeypad gain={activeGain} control={control} open={entering} onClose={() => setEntering(false)} />
     </View>
   );
 });

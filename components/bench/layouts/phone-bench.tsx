@@ -1,11 +1,11 @@
+import { useMemo } from 'react';
 import { StyleSheet, View } from 'react-native';
-import { ReadOut, TimeReadOut } from '@/components/charts';
 import { useTheme } from '@/components/ui/theme';
-import { useUnits } from '@/components/ui/units';
-import { useBench } from '../bench-context';
+import { useBench, useHasAnswer } from '../bench-context';
 import { Notices } from '../keep/notices';
 import { useLookingAt } from '../live/use-looking-at';
 import { ChartStack } from '../sheets/chart-stack';
+import { ShownReadOut, ShownTimeReadOut } from '../sheets/shown-read-out';
 import { SheetTabs } from '../sheets/sheet-tabs';
 import { timePanels } from '../sheets/time-panels';
 import { BenchStrip } from '../strip/bench-strip';
@@ -13,13 +13,12 @@ import type { BenchLayoutProps } from './bench-actions';
 import { Dock } from './dock';
 
 /** One column: numbers fixed on top, one chart sheet at a time, the gains at the foot. */
-export function PhoneBench({ link, designs, onChart, onCase: _, onFollow, ...actions }: BenchLayoutProps) {
+export function PhoneBench({ link, standing, onChart, onCase: _, onFollow, ...actions }: BenchLayoutProps) {
   const { outcome } = actions;
   const { colors } = useTheme();
-  const units = useUnits();
   const { plant } = useBench().subject;
-  const { a, timed, b } = designs;
-  const panels = timePanels(plant.units, link.steps);
+  const hasAnswer = useHasAnswer();
+  const panels = useMemo(() => timePanels(plant.units, link.steps), [plant.units, link.steps]);
   const overTime = link.chart === 'step' || link.chart === 'load';
   useLookingAt(overTime ? 'responses' : 'frequency');
   const shown = link.chart === 'load' ? [panels.load] : [panels.reference, panels.control];
@@ -28,10 +27,12 @@ export function PhoneBench({ link, designs, onChart, onCase: _, onFollow, ...act
       <BenchStrip />
       <Notices outcome={outcome} onFollow={onFollow} />
       <SheetTabs active={link.chart} onChoose={onChart} />
-      {overTime
-        ? timed && <TimeReadOut a={timed} b={b} layout="line" panels={shown} />
-        : a && <ReadOut a={a} b={b} units={units} layout="line" />}
-      {a ? <ChartStack active={link.chart} onActive={onChart} designs={designs} steps={link.steps} /> : <View style={styles.column} />}
+      {overTime ? <ShownTimeReadOut standing={standing} panels={shown} /> : <ShownReadOut standing={standing} layout="line" />}
+      {hasAnswer ? (
+        <ChartStack active={link.chart} onActive={onChart} standing={standing} steps={link.steps} />
+      ) : (
+        <View style={styles.column} />
+      )}
       <Dock {...actions} />
     </View>
   );

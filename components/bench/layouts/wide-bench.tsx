@@ -1,12 +1,12 @@
 import { useMemo } from 'react';
 import { ScrollView, StyleSheet, View } from 'react-native';
-import { FrequencySheet, PlaneChart, ReadOut, TimeSheet } from '@/components/charts';
 import { useTheme } from '@/components/ui/theme';
-import { useUnits } from '@/components/ui/units';
-import { useBench } from '../bench-context';
+import { useBench, useHasAnswer } from '../bench-context';
 import { Notices } from '../keep/notices';
 import { useLookingAt } from '../live/use-looking-at';
 import { chartsId } from '../sheets/focus-chart';
+import { ShownFrequency, ShownPlane, ShownTime } from '../sheets/shown-charts';
+import { ShownReadOut } from '../sheets/shown-read-out';
 import { timePanels } from '../sheets/time-panels';
 import { BenchStrip } from '../strip/bench-strip';
 import { CaseLine } from '../strip/case-line';
@@ -32,7 +32,7 @@ function roomFor(paired: boolean, height: number) {
 export function WideBench({
   paired = false,
   link,
-  designs,
+  standing,
   onChart: _,
   onCase,
   onFollow,
@@ -40,7 +40,6 @@ export function WideBench({
 }: BenchLayoutProps & { paired?: boolean }) {
   const { outcome } = actions;
   const { colors } = useTheme();
-  const units = useUnits();
   const plantUnits = useBench().subject.plant.units;
   const [height, onLayout] = useHeight();
   const room = roomFor(paired, height);
@@ -48,12 +47,12 @@ export function WideBench({
     const { reference, load, control } = timePanels(plantUnits, link.steps);
     return [reference, load, control];
   }, [plantUnits, link.steps]);
-  const { a, timed, b, ends } = designs;
+  const hasAnswer = useHasAnswer();
   useLookingAt('all');
   const column = { backgroundColor: colors.paper };
-  const time = timed && (
+  const time = (
     <View id={chartsId('time')}>
-      <TimeSheet a={timed} b={b} units={units} panels={panels} end={ends?.both} height={room.time} />
+      <ShownTime standing={standing} panels={panels} end={standing.ends?.both} height={room.time} />
     </View>
   );
   return (
@@ -63,19 +62,19 @@ export function WideBench({
       <CaseLine onCase={onCase} />
       <View style={styles.middle} onLayout={onLayout}>
         <ScrollView contentContainerStyle={[styles.columns, { backgroundColor: colors.rule }]}>
-          {a && height > 0 && (
+          {hasAnswer && height > 0 && (
             <>
               <View style={[styles.column, paired ? styles.share : styles.frequency, column]}>
                 <View id={chartsId('frequency')}>
-                  <FrequencySheet a={a} b={b} units={units} height={room.frequency} />
+                  <ShownFrequency standing={standing} height={room.frequency} />
                 </View>
                 {paired && time}
               </View>
               <View style={[styles.column, styles.share, column]}>
                 <View id={chartsId('plane')}>
-                  <PlaneChart a={a} b={b} units={units} height={room.plane} />
+                  <ShownPlane standing={standing} height={room.plane} />
                 </View>
-                <ReadOut a={a} b={b} units={units} layout="table" />
+                <ShownReadOut standing={standing} layout="table" />
               </View>
               {!paired && <View style={[styles.column, styles.time, column]}>{time}</View>}
             </>

@@ -1,10 +1,13 @@
+import type { Detail } from '../engine/engine-tasks';
+import { createLane } from './lane';
+
 /** Where the engine's answer stands: of what it was computed, how finely, and why the newest has none. */
 export interface LiveAnswer<Input, Output> {
   /** The newest input that was computed; null before the first. */
   readonly input: Input | null;
   /** The newest answer. It belongs to an older input while `problem` is set. */
   readonly output: Output | null;
-  /** The newest answer that is more than an outline. */
+  /** The newest answer that is more than an outline; the coarse one where there is one in full too. */
   readonly complete: Output | null;
   /** The newest answer in full. */
   readonly rested: Output | null;
@@ -13,23 +16,14 @@ export interface LiveAnswer<Input, Output> {
   readonly problem: string | null;
 }
 
-/** outline: coarse, and what is slow to compute left out; live: coarse; full: what is kept. */
-export type Detail = 'outline' | 'live' | 'full';
-
-/** When to compute. Each takes a task and gives back what cancels it. */
-export interface Schedule {
-  frame(task: () => void): () => void;
-  rest(task: () => void): () => void;
-}
-
 interface LiveAnalyserOptions<Input, Output> {
-  /** `outline` is the outline of the same input where there is one. */
-  compute(input: Input, detail: Detail, outline: Output | null): Output;
-  /** What is computed while a gain moves, a frame each; one coarse answer where absent. */
+  compute(input: Input, detail: Detail): Promise<Output>;
+  /** What is computed while a gain moves, side by side; one coarse answer where absent. */
   steps?: () => readonly Detail[];
   /** Words for an error of the engine; others are thrown on. */
   explain(error: unknown): string;
-  schedule: Schedule;
+  /** Does a task after a rest. Gives back what cancels it. */
+  rest(task: () => void): () => void;
 }
 
 export interface LiveAnalyser<Input, Output> {
@@ -40,56 +34,67 @@ export interface LiveAnalyser<Input, Output> {
   stop(): void;
 }
 
+/** An input with its place in the row of those that were asked. */
+interface Question<Input> {
+  readonly input: Input;
+  readonly place: number;
+}
+
 /**
- * Computes the newest input once a frame, coarsely, perhaps in two steps, and once more in full when no newer one came for a while.
- * What was begun is ended before a newer input is: moves at the screen's rate never starve the second step.
+ * Computes the newest input coarsely, perhaps in two parts, and once more in full when no newer one came for a while. What was begun is
+ * ended before a newer input is taken up: moves at the screen's rate never starve a slower part.
  * An input that cannot be computed leaves the previous answer standing, with the problem beside it.
  */
 export function createLiveAnalyser<Input, Output>(options: LiveAnalyserOptions<Input, Output>): LiveAnalyser<Input, Output> {
-  const { compute, explain, schedule, steps = () => ['live'] } = options;
+  const { compute, explain, rest, steps = () => ['live'] } = options;
   const listeners = new Set<() => void>();
   let answer: LiveAnswer<Input, Output> = { input: null, output: null, complete: null, rested: null, detail: 'live', problem: null };
-  let asked: Input | null = null;
-  let begun: { readonly input: Input; readonly next: readonly Detail[] } | null = null;
-  let cancelFrame: (() => void) | null = null;
+  let asked: Question<Input> | null = null;
+  let count = 0;
   let cancelRest: (() => void) | null = null;
+  /** Places of what `output` and `complete` belong to. */
+  const reached = { output: 0, complete: 0 };
 
-  const answerWith = (input: Input, detail: Detail) => {
-    const outline = answer.input === input && answer.detail === 'outline' ? answer.output : null;
-    try {
-      const output = compute(input, detail, outline);
-      const complete = detail === 'outline' ? answer.complete : output;
-      const rested = detail === 'full' ? output : answer.rested;
-      answer = { input, output, complete, rested, detail, problem: null };
-    } catch (error) {
-      answer = { ...answer, input, problem: explain(error) };
-    }
+  const publish = (change: Partial<LiveAnswer<Input, Output>>) => {
+    answer = { ...answer, ...change };
     for (const listener of listeners) listener();
   };
-  const restOn = (input: Input) => {
-    cancelRest?.();
-    cancelRest = schedule.rest(() => {
-      cancelRest = null;
-      if (input === asked && answer.problem === null) answerWith(input, 'full');
-    });
+  const take = ({ input, place }: Question<Input>, detail: Detail, output: Output) => {
+    // A full answer to what has moved on meanwhile is none to rest on.
+    if (place < reached.output && detail !== 'live') return;
+    const complete = detail !== 'outline' && place > reached.complete ? { complete: output } : {};
+    if (detail !== 'outline') reached.complete = Math.max(reached.complete, place);
+    if (place < reached.output) return publish(complete);
+    // The two parts of one coarse answer have the same numbers: the curves that are drawn already stay.
+    const newer = place > reached.output || detail === 'full' ? { output } : {};
+    reached.output = place;
+    publish({ input, detail, problem: null, ...newer, ...complete, ...(detail === 'full' && { rested: output }) });
   };
-  const onFrame = () => {
-    cancelFrame = null;
-    if (asked === null) return;
-    const { input, next } = begun ?? { input: asked, next: steps() };
-    answerWith(input, next[0]);
-    begun = next.length > 1 && answer.problem === null ? { input, next: next.slice(1) } : null;
-    if (begun !== null || input !== asked) cancelFrame ??= schedule.frame(onFrame);
-    else restOn(input);
+  const answerTo = (detail: Detail) => async (question: Question<Input>) => {
+    try {
+      const output = await compute(question.input, detail);
+      if (asked !== null) take(question, detail, output);
+    } catch (error) {
+      const problem = explain(error);
+      if (asked === null || question.place < reached.output) return;
+      reached.output = question.place;
+      publish({ input: question.input, problem });
+    }
   };
+  const lanes = { outline: createLane(answerTo('outline')), live: createLane(answerTo('live')), full: createLane(answerTo('full')) };
 
   return {
     ask(input) {
-      if (input === asked) return;
-      asked = input;
+      if (input === asked?.input) return;
+      const question = { input, place: (count += 1) };
+      asked = question;
       cancelRest?.();
-      cancelRest = null;
-      cancelFrame ??= schedule.frame(onFrame);
+      for (const detail of steps()) lanes[detail].push(question);
+      cancelRest = rest(() => {
+        cancelRest = null;
+        const refused = answer.problem !== null && reached.output === question.place;
+        if (!refused) lanes.full.push(question);
+      });
     },
     get: () => answer,
     subscribe(listener) {
@@ -97,9 +102,9 @@ export function createLiveAnalyser<Input, Output>(options: LiveAnalyserOptions<I
       return () => listeners.delete(listener);
     },
     stop() {
-      cancelFrame?.();
       cancelRest?.();
-      cancelFrame = cancelRest = begun = asked = null;
+      for (const lane of Object.values(lanes)) lane.clear();
+      cancelRest = asked = null;
     },
   };
 }

@@ -1,4 +1,4 @@
-import type { Detail } from './live-analyser';
+import type { Detail } from '../engine/engine-tasks';
 
 /**
  * What the screen shows of the loop at this moment: while a gain moves, the engine leaves out what nobody sees. Read once a frame;
@@ -31,5 +31,5 @@ const steps: Readonly<Record<LookedAt['parts'], readonly Detail[]>> = {
   responses: ['live'],
 };
 
-/** What is computed while a gain moves, a frame each: the curves over frequency first, the responses right after. */
+/** What is computed while a gain moves: the curves over frequency, and the responses beside them. */
 export const stepsFor = ({ parts }: LookedAt): readonly Detail[] => steps[parts];

@@ -1,9 +1,9 @@
-import { useEffect, useRef } from 'react';
+import { memo, useEffect, useRef } from 'react';
 import { ScrollView, StyleSheet, View } from 'react-native';
-import { type ChartDesign, CurveKey } from '@/components/charts';
+import { CurveKey } from '@/components/charts';
 import { useHeight } from '../layouts/use-height';
 import type { StepSizes } from '../live/bench-loop';
-import type { Designs } from '../live/use-designs';
+import { NAME_OF_A, type Standing } from '../live/use-standing';
 import { type ChartSheet, chartSheets } from './chart-sheet';
 import { chartsId } from './focus-chart';
 import { SheetChart } from './sheet-chart';
@@ -11,7 +11,7 @@ import { SheetChart } from './sheet-chart';
 interface ChartStackProps {
   active: ChartSheet;
   onActive: (sheet: ChartSheet) => void;
-  designs: Designs;
+  standing: Standing;
   steps: StepSizes;
 }
 
@@ -19,15 +19,8 @@ interface ChartStackProps {
 const PEEK = 18;
 const LEAST_HEIGHT = 240;
 
-/** What a sheet draws: A as it moves on the sheet that is looked at, A as it last rested on the others. */
-function drawnOn(sheet: ChartSheet, active: ChartSheet, { a, timed, rested }: Designs): ChartDesign | null {
-  if (sheet !== active) return rested;
-  return sheet === 'step' || sheet === 'load' ? timed : a;
-}
-
 /** All chart sheets in one column that snaps to each: swipe up for the next. */
-export function ChartStack({ active, onActive, designs, steps }: ChartStackProps) {
-  const { a, b, ends } = designs;
+export const ChartStack = memo(function ChartStack({ active, onActive, standing, steps }: ChartStackProps) {
   const scroll = useRef<ScrollView>(null);
   const [viewport, onLayout] = useHeight();
   const height = Math.max(LEAST_HEIGHT, viewport - PEEK);
@@ -45,7 +38,9 @@ export function ChartStack({ active, onActive, designs, steps }: ChartStackProps
   };
   return (
     <View style={styles.viewport}>
-      <View style={styles.key}>{a && <CurveKey a={a.label} b={b?.label} />}</View>
+      <View style={styles.key}>
+        <CurveKey a={NAME_OF_A} b={standing.b?.label} />
+      </View>
       <View style={styles.viewport} onLayout={onLayout}>
         <ScrollView
           ref={scroll}
@@ -54,21 +49,17 @@ export function ChartStack({ active, onActive, designs, steps }: ChartStackProps
           scrollEventThrottle={50}
           onScroll={({ nativeEvent }) => follow(nativeEvent.contentOffset.y)}
         >
-          {chartSheets.map((sheet) => {
-            const drawn = drawnOn(sheet, active, designs);
-            const shown = { b, steps, height: height - 4, ends: ends ?? undefined };
-            return (
-              <View key={sheet} id={chartsId(sheet)} style={[styles.sheet, { height }]}>
-                {viewport > 0 && drawn && <SheetChart sheet={sheet} a={drawn} {...shown} />}
-              </View>
-            );
-          })}
+          {chartSheets.map((sheet) => (
+            <View key={sheet} id={chartsId(sheet)} style={[styles.sheet, { height }]}>
+              {viewport > 0 && <SheetChart sheet={sheet} moving={sheet === active} standing={standing} steps={steps} height={height - 4} />}
+            </View>
+          ))}
           <View style={{ height: PEEK }} />
         </ScrollView>
       </View>
     </View>
   );
-}
+});
 
 const styles = StyleSheet.create({
   viewport: { flex: 1, minHeight: 0 },

@@ -1,21 +1,21 @@
 import { memo, useMemo } from 'react';
 import { View } from 'react-native';
-import { type ChartDesign, type FrequencyPanel, FrequencySheet, PlaneChart, TimeSheet } from '@/components/charts';
-import { useUnits } from '@/components/ui/units';
+import type { FrequencyPanel } from '@/components/charts';
 import { useBench } from '../bench-context';
 import type { StepSizes } from '../live/bench-loop';
-import type { TimeEnds } from '../live/time-ends';
+import type { Standing } from '../live/use-standing';
 import { BudgetLine } from '../strip/budget-line';
 import type { ChartSheet } from './chart-sheet';
+import { ShownFrequency, ShownPlane, ShownTime } from './shown-charts';
 import { timePanels } from './time-panels';
 
 interface SheetChartProps {
   sheet: ChartSheet;
-  a: ChartDesign;
-  b: ChartDesign | undefined;
+  /** Whether this is the sheet that is looked at. */
+  moving: boolean;
+  standing: Standing;
   steps: StepSizes;
   height: number;
-  ends: TimeEnds | undefined;
 }
 
 const bode: readonly FrequencyPanel[] = ['magnitude', 'phase'];
@@ -23,30 +23,29 @@ const sensitivity: readonly FrequencyPanel[] = ['sensitivity'];
 const BUDGET_HEIGHT = 42;
 
 /** The chart of one sheet on a phone. */
-export const SheetChart = memo(function SheetChart({ sheet, a, b, steps, height, ends }: SheetChartProps) {
-  const units = useUnits();
+export const SheetChart = memo(function SheetChart({ sheet, steps, ...shown }: SheetChartProps) {
   const plantUnits = useBench().subject.plant.units;
   const panels = useMemo(() => timePanels(plantUnits, steps), [plantUnits, steps]);
   const stepPanels = useMemo(() => [panels.reference, panels.control], [panels]);
   const loadPanels = useMemo(() => [panels.load], [panels]);
-  const scene = { a, b, units, height };
+  const { ends } = shown.standing;
   switch (sheet) {
     case 'bode':
       return (
         <>
-          <FrequencySheet {...scene} height={height - BUDGET_HEIGHT} panels={bode} />
+          <ShownFrequency {...shown} height={shown.height - BUDGET_HEIGHT} panels={bode} />
           <View style={{ paddingHorizontal: 12, height: BUDGET_HEIGHT }}>
             <BudgetLine compact />
           </View>
         </>
       );
     case 'nyquist':
-      return <PlaneChart {...scene} />;
+      return <ShownPlane {...shown} />;
     case 'sensitivity':
-      return <FrequencySheet {...scene} panels={sensitivity} />;
+      return <ShownFrequency {...shown} panels={sensitivity} />;
     case 'step':
-      return <TimeSheet {...scene} panels={stepPanels} end={ends?.reference} />;
+      return <ShownTime {...shown} panels={stepPanels} end={ends?.reference} />;
     case 'load':
-      return <TimeSheet {...scene} panels={loadPanels} end={ends?.load} />;
+      return <ShownTime {...shown} panels={loadPanels} end={ends?.load} />;
   }
 });

@@ -9,7 +9,7 @@ import { useLayout } from '@/components/ui/use-layout';
 import { VerdictBlock } from '@/components/ui/verdict-block';
 import { marginNumbers } from '@/components/verdict/margin-numbers';
 import { MarginRow } from '@/components/verdict/margin-row';
-import { useAnswer, useBench } from '../bench-context';
+import { useBench, useReading } from '../bench-context';
 import { judged } from '../live/judged';
 import { stripWords } from './strip-words';
 
@@ -20,7 +20,7 @@ export const BenchStrip = memo(function BenchStrip() {
   const announce = useAnnounce();
   const phone = useLayout() === 'phone';
   const { subject } = useBench();
-  const { output, input, problem } = useAnswer();
+  const { output, input, problem } = useReading();
   const headline = useMemo(() => (output && input ? judged(subject, input.settings, output.analysis) : null), [subject, input, output]);
   const words = useMemo(() => (headline && output ? stripWords(headline, output.analysis, units) : null), [headline, output, units]);
   const spoken = problem ?? words?.spoken ?? null;

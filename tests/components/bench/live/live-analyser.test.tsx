@@ -1,141 +1,160 @@
 import { describe, expect, it } from 'vitest';
-import { createLiveAnalyser, type Detail, type Schedule } from '@/components/bench/live/live-analyser';
+import type { Detail } from '@/components/bench/engine/engine-tasks';
+import { createLiveAnalyser } from '@/components/bench/live/live-analyser';
 
-/** A clock that the test turns by hand. */
-function handSchedule() {
-  const waiting = { frame: [] as (() => void)[], rest: [] as (() => void)[] };
-  const enter = (kind: 'frame' | 'rest') => (task: () => void) => {
-    waiting[kind].push(task);
-    return () => void (waiting[kind] = waiting[kind].filter((other) => other !== task));
-  };
-  const turn = (kind: 'frame' | 'rest') => () => waiting[kind].splice(0).forEach((task) => task());
-  const schedule: Schedule = { frame: enter('frame'), rest: enter('rest') };
-  return { schedule, frame: turn('frame'), rest: turn('rest'), waiting };
+interface Task {
+  readonly input: number;
+  readonly detail: Detail;
+  end(): Promise<void>;
 }
 
-function bench(compute = (input: number) => input * 2, steps?: () => readonly Detail[]) {
-  const clock = handSchedule();
-  const calls: [number, Detail][] = [];
+/** Lets everything that waits for a settled promise go on. */
+const settled = () => new Promise<void>((resolve) => setTimeout(resolve, 0));
+
+/** An engine whose tasks end when the test says so, and a clock that it turns by hand. */
+function bench({ compute = (input: number) => input * 2, steps = ['live'] as readonly Detail[] } = {}) {
+  const begun: Task[] = [];
+  let resting: (() => void)[] = [];
   const analyser = createLiveAnalyser<number, number>({
-    compute(input, detail) {
-      calls.push([input, detail]);
-      return compute(input);
-    },
-    ...(steps && { steps }),
+    compute: (input, detail) =>
+      new Promise((resolve, reject) => {
+        const end = () => {
+          begun.splice(begun.indexOf(task), 1);
+          try {
+            resolve(compute(input));
+          } catch (error) {
+            reject(error);
+          }
+          return settled();
+        };
+        const task = { input, detail, end };
+        begun.push(task);
+      }),
+    steps: () => steps,
     explain(error) {
       if (error instanceof RangeError) return error.message;
       throw error;
     },
-    schedule: clock.schedule,
+    rest(task) {
+      resting.push(task);
+      return () => void (resting = resting.filter((other) => other !== task));
+    },
   });
-  return { ...clock, analyser, calls };
+  const rest = () => resting.splice(0).forEach((task) => task());
+  const under = (detail: Detail) => begun.find((task) => task.detail === detail)!;
+  const order = () => begun.map(({ input, detail }) => [input, detail]);
+  return { analyser, begun, order, under, rest };
 }
 
 describe('the live analyser', () => {
-  it('computes the newest of all that came within a frame, once', () => {
-    const { analyser, calls, frame } = bench();
+  it('begins at once, and of all that come meanwhile takes up the newest alone', async () => {
+    const { analyser, order, under } = bench();
     [1, 2, 3].forEach(analyser.ask);
-    frame();
-    expect(calls).toEqual([[3, 'live']]);
+    expect(order()).toEqual([[1, 'live']]);
+    await under('live').end();
+    expect(analyser.get()).toMatchObject({ input: 1, output: 2 });
+    expect(order()).toEqual([[3, 'live']]);
+    await under('live').end();
     expect(analyser.get()).toMatchObject({ input: 3, output: 6, detail: 'live', problem: null });
+    expect(order()).toEqual([]);
   });
 
-  it('computes in full when the gain rests, and only then', () => {
-    const { analyser, calls, frame, rest } = bench();
+  it('computes in full when the gain rests, and only then', async () => {
+    const { analyser, order, under, rest } = bench();
     analyser.ask(1);
-    frame();
     analyser.ask(2);
+    await under('live').end();
+    await under('live').end();
+    expect(order()).toEqual([]);
     rest();
-    expect(calls).toEqual([[1, 'live']]);
-    frame();
-    rest();
-    expect(calls.slice(1)).toEqual([
-      [2, 'live'],
-      [2, 'full'],
-    ]);
-    expect(analyser.get().detail).toBe('full');
+    expect(order()).toEqual([[2, 'full']]);
+    await under('full').end();
+    expect(analyser.get()).toMatchObject({ detail: 'full', output: 4, rested: 4 });
   });
 
   it('asks nothing twice', () => {
-    const { analyser, calls, frame, rest } = bench();
+    const { analyser, order } = bench();
     analyser.ask(1);
-    frame();
-    rest();
     analyser.ask(1);
-    frame();
-    rest();
-    expect(calls).toHaveLength(2);
+    expect(order()).toHaveLength(1);
   });
 
-  it('leaves the previous answer standing beside a problem, and recovers', () => {
-    const { analyser, frame, rest, calls } = bench((input) => {
-      if (input < 0) throw new RangeError('Tf is 0 or more.');
-      return input * 2;
+  it('does not rest on a full answer to what has moved on meanwhile', async () => {
+    const { analyser, under, rest } = bench();
+    analyser.ask(1);
+    await under('live').end();
+    rest();
+    const late = under('full');
+    analyser.ask(2);
+    await under('live').end();
+    await late.end();
+    expect(analyser.get()).toMatchObject({ input: 2, output: 4, rested: null, detail: 'live' });
+  });
+
+  it('leaves the previous answer standing beside a problem, and recovers', async () => {
+    const { analyser, order, under, rest } = bench({
+      compute(input) {
+        if (input < 0) throw new RangeError('Tf is 0 or more.');
+        return input * 2;
+      },
     });
     analyser.ask(1);
-    frame();
-    rest();
+    await under('live').end();
     analyser.ask(-1);
-    frame();
+    await under('live').end();
     rest();
+    expect(order()).toEqual([]);
     expect(analyser.get()).toMatchObject({ input: -1, output: 2, problem: 'Tf is 0 or more.' });
-    expect(calls.filter(([input]) => input < 0)).toHaveLength(1);
     analyser.ask(4);
-    frame();
+    await under('live').end();
     expect(analyser.get()).toMatchObject({ output: 8, problem: null });
   });
 
-  it('does not hide an error that is not the engine’s', () => {
-    const { analyser, frame } = bench(() => {
-      throw new TypeError('a defect');
-    });
-    analyser.ask(1);
-    expect(frame).toThrow('a defect');
-  });
-
-  it('tells those who listen, and computes nothing after it was stopped', () => {
-    const { analyser, frame, rest, calls } = bench();
+  it('tells those who listen, and nothing after it was stopped', async () => {
+    const { analyser, order, under, rest } = bench();
     let told = 0;
     const leave = analyser.subscribe(() => (told += 1));
     analyser.ask(1);
-    frame();
+    await under('live').end();
     leave();
+    analyser.ask(2);
+    const late = under('live');
+    analyser.ask(3);
+    analyser.stop();
+    await late.end();
     rest();
     expect(told).toBe(1);
-    analyser.ask(2);
-    analyser.stop();
-    frame();
-    rest();
-    expect(calls.map(([input]) => input)).toEqual([1, 1]);
+    expect(order()).toEqual([]);
+    expect(analyser.get()).toMatchObject({ input: 1 });
   });
+});
 
-  it('ends what it began before it takes up a newer input, so that moves at the rate of frames starve no step', () => {
-    const { analyser, calls, frame } = bench(undefined, () => ['outline', 'live']);
-    for (const input of [1, 2, 3, 4]) {
+describe('an answer in two parts', () => {
+  const parts = { steps: ['outline', 'live'] as const };
+
+  it('is asked for side by side: the curves do not wait for the responses', async () => {
+    const { analyser, order, under } = bench(parts);
+    for (const input of [1, 2, 3]) {
       analyser.ask(input);
-      frame();
+      await under('outline').end();
     }
-    expect(calls).toEqual([
-      [1, 'outline'],
-      [1, 'live'],
-      [3, 'outline'],
-      [3, 'live'],
-    ]);
-    frame();
-    expect(calls.at(-1)).toEqual([4, 'outline']);
+    expect(analyser.get()).toMatchObject({ input: 3, output: 6, complete: null, detail: 'outline' });
+    expect(order()).toEqual([[1, 'live']]);
+    await under('live').end();
+    expect(analyser.get()).toMatchObject({ input: 3, output: 6, complete: 2, detail: 'outline' });
+    await under('live').end();
+    expect(analyser.get()).toMatchObject({ input: 3, output: 6, complete: 6, detail: 'live' });
   });
 
-  it('keeps the newest complete answer beside an outline, and the newest full one while a gain moves', () => {
-    const { analyser, frame, rest } = bench(undefined, () => ['outline', 'live']);
+  it('keeps the newest full answer while a gain moves', async () => {
+    const { analyser, under, rest } = bench(parts);
     analyser.ask(1);
-    frame();
-    expect(analyser.get()).toMatchObject({ output: 2, complete: null, rested: null });
-    frame();
+    await under('outline').end();
+    await under('live').end();
     rest();
+    await under('full').end();
     analyser.ask(5);
-    frame();
+    await under('outline').end();
     expect(analyser.get()).toMatchObject({ output: 10, complete: 2, rested: 2, detail: 'outline' });
-    frame();
-    expect(analyser.get()).toMatchObject({ output: 10, complete: 10, rested: 2, detail: 'live' });
   });
 });

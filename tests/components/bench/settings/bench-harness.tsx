@@ -3,10 +3,12 @@ import type { ReactNode } from 'react';
 import { BenchContext } from '@/components/bench/bench-context';
 import { createDraftStore } from '@/components/bench/draft/draft-store';
 import { type Settings, startSettings } from '@/components/bench/draft/settings';
+import { doTask } from '@/components/bench/engine/engine-tasks';
 import { benchLoop, type BenchQuestion } from '@/components/bench/live/bench-loop';
 import type { LiveAnalyser, LiveAnswer } from '@/components/bench/live/live-analyser';
 import { createLookedAt } from '@/components/bench/live/looked-at';
-import { answerLoop, type LoopAnswer } from '@/components/bench/live/loop-answer';
+import { loopAnswer, type LoopAnswer } from '@/components/bench/live/loop-answer';
+import { createReadings } from '@/components/bench/live/readings';
 import type { BenchSubject } from '@/components/bench/subject/bench-subject';
 import { PlantContent } from '@/contract';
 
@@ -25,7 +27,7 @@ function answeringAtOnce(): LiveAnalyser<BenchQuestion, LoopAnswer> {
   let answer: LiveAnswer<BenchQuestion, LoopAnswer> | null = null;
   return {
     ask(input) {
-      const output = answerLoop(input.loop, 'full');
+      const output = loopAnswer(input.loop, doTask('analyse', { loop: input.loop, detail: 'full', end: null }));
       answer = { input, output, complete: output, rested: output, detail: 'full', problem: null };
       for (const listener of listeners) listener();
     },
@@ -49,7 +51,8 @@ export function onTheBench(part: ReactNode, settings: Partial<Settings> = {}) {
   };
   ask();
   store.subscribe(ask);
+  const readings = createReadings(analyser, (task) => task());
   const lookedAt = createLookedAt({ parts: 'frequency', end: null });
-  render(<BenchContext.Provider value={{ subject, store, analyser, lookedAt }}>{part}</BenchContext.Provider>);
+  render(<BenchContext.Provider value={{ subject, store, analyser, readings, lookedAt }}>{part}</BenchContext.Provider>);
   return { store, analyser };
 }

@@ -1,0 +1,45 @@
+import { analyseLoop, withResponses } from '@/analysis';
+import type { Analysis, Loop } from '@/contract';
+
+/** outline: coarse curves over frequency alone; live: these and coarse responses; full: what is kept. */
+export type Detail = 'outline' | 'live' | 'full';
+
+export interface LoopQuestion {
+  readonly loop: Loop;
+  readonly detail: Detail;
+  /** How long the coarse responses of a stable loop last, s; null: as long as the engine chooses. */
+  readonly end: number | null;
+}
+
+export interface LongerResponses {
+  readonly loop: Loop;
+  readonly analysis: Analysis;
+  /** s */
+  readonly end: number;
+}
+
+const lasting = (loop: Loop, duration: number | null): Loop => ({ ...loop, responses: { ...loop.responses, duration } });
+
+function analyse({ loop, detail, end }: LoopQuestion): Analysis {
+  if (detail === 'full') return analyseLoop(loop);
+  const outline = analyseLoop(loop, { responses: false, detail: 'live' });
+  if (detail === 'outline') return outline;
+  return withResponses(outline, outline.closedLoop.stable ? lasting(loop, end) : loop, 'live');
+}
+
+/** The same analysis with responses that last until `end`. An unstable loop is shown as long as it takes to grow, whatever is asked. */
+function lengthen({ loop, analysis, end }: LongerResponses): Analysis {
+  return analysis.closedLoop.stable ? withResponses(analysis, lasting(loop, end)) : analysis;
+}
+
+/** All that is asked of the engine beside the page: from plain data to plain data, so that it can be done in a worker. */
+export const engineTasks = { analyse, lengthen };
+
+export type EngineTasks = typeof engineTasks;
+export type TaskName = keyof EngineTasks;
+export type TaskInput<Name extends TaskName> = Parameters<EngineTasks[Name]>[0];
+export type TaskOutput<Name extends TaskName> = ReturnType<EngineTasks[Name]>;
+
+/** Does a task by its name. */
+export const doTask = <Name extends TaskName>(name: Name, input: TaskInput<Name>): TaskOutput<Name> =>
+  (engineTasks[name] as (input: TaskInput<Name>) => TaskOutput<Name>)(input);
