@@ -26,6 +26,7 @@ const inside = (project: string, analysis: string) => ({
   [`/projects/${project}`]: 'Where it stands',
   [`/projects/${project}/plant`]: 'Revisions',
   [`/projects/${project}/bench`]: 'Delay margin',
+  [`/projects/${project}/cases`]: 'Open on bench',
   [`/projects/${project}/analyses`]: 'An analysis never changes.',
   [`/projects/${project}/analyses/${analysis}`]: 'Compute again',
   '/no-such-page': /not here|no such|no page/i,

@@ -90,8 +90,8 @@ describe('a grid from lists', () => {
 
   it('says it at the row where it was typed row by row', () => {
     const rows = [
-      { at: '30', name: '', basis: 'measured' as const, parameters: {} },
-      { at: '40', name: '', basis: 'measured' as const, parameters: { deadTime: 'x' } },
+      { at: '30', name: '', basis: 'measured' as const, parameters: {} as Record<string, string> },
+      { at: '40', name: '', basis: 'measured' as const, parameters: { deadTime: 'x' } as Record<string, string> },
     ];
     expect(read(typed({ speed: { way: 'rows', rows } })).errors).toEqual({ 'speed.1.deadTime': 'A number, as in 0.35.' });
   });
