@@ -1,6 +1,6 @@
 import { STATUS_CODES } from 'node:http';
 import { createDocument, type ZodOpenApiOperationObject, type ZodOpenApiPathsObject } from 'zod-openapi';
-import { ProblemDetails } from '@/contract';
+import { permissions, ProblemDetails } from '@/contract';
 import type { Route } from '../http/route';
 
 const problem = (description: string) => ({ description, content: { 'application/problem+json': { schema: ProblemDetails } } });
@@ -15,12 +15,15 @@ function refusals({ access, input }: Route): Record<string, ReturnType<typeof pr
   return Object.fromEntries(statuses.map((status) => [status, problem(STATUS_CODES[status] ?? '')]));
 }
 
+const listed = (roles: readonly string[]) => roles.map((role) => `${role}s`).join(', ');
+
 function operation(route: Route): ZodOpenApiOperationObject {
   const { summary, tag, input, output, status, access, method, path, events } = route;
   const success = output && status < 300 ? { content: { [events ? 'text/event-stream' : 'application/json']: { schema: output } } } : {};
   return {
     operationId: `${method}${path.replace(/[^A-Za-z]+(\w)/g, (_, letter: string) => letter.toUpperCase())}`,
     summary,
+    ...(typeof access === 'object' && { description: `For ${listed(permissions[access.project].roles)}.` }),
     tags: [tag],
     security: access === 'public' ? [] : [{ session: [] }],
     requestParams: { ...(input.params && { path: input.params }), ...(input.query && { query: input.query }) },
