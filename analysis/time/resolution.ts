@@ -6,22 +6,16 @@ const TAIL = 1e-6;
 
 const DEGREE = NODE_COUNT - 1;
 
-/** Weights that take node values to the Chebyshev coefficients of the two highest degrees. */
-const TAIL_WEIGHTS = [DEGREE - 1, DEGREE].map((k) =>
-  Float64Array.from({ length: NODE_COUNT }, (_, j) => {
-    const ends = j === 0 || j === DEGREE ? 0.5 : 1;
-    return ((k === DEGREE ? 1 : 2) / DEGREE) * ends * Math.cos((Math.PI * k * j) / DEGREE);
-  }),
-);
+/** Leading coefficients of the Chebyshev polynomials of the two highest degrees: no other one has these powers of x. */
+const LEADING = [2 ** (DEGREE - 2), 2 ** (DEGREE - 1)];
 
 /** Whether the panels from `first` on follow the curve they stand for, told by how their coefficients fall off. */
 export function isResolved(curve: Curve, first = 0): boolean {
-  for (let offset = first * NODE_COUNT; offset < curve.nodes; offset += NODE_COUNT) {
-    for (const weights of TAIL_WEIGHTS) {
-      let coefficient = 0;
-      for (let j = 0; j < NODE_COUNT; j += 1) coefficient += weights[j] * curve.values[offset + j];
-      if (Math.abs(coefficient) > TAIL * curve.size) return false;
-    }
+  const { coefficients, nodes } = curve;
+  const most = TAIL * curve.size;
+  for (let offset = first * NODE_COUNT; offset < nodes; offset += NODE_COUNT) {
+    if (Math.abs(coefficients[offset + DEGREE - 1]) > most * LEADING[0]) return false;
+    if (Math.abs(coefficients[offset + DEGREE]) > most * LEADING[1]) return false;
   }
   return true;
 }
