@@ -1,7 +1,7 @@
 import { analyseLoop, withResponses } from '@/analysis';
 import type { Analysis, Loop } from '@/contract';
 
-/** outline: coarse curves over frequency alone; live: these and coarse responses; full: what is kept. */
+/** outline: coarse curves over frequency alone; live: coarse responses alone; full: what is kept. All have every number over frequency. */
 export type Detail = 'outline' | 'live' | 'full';
 
 export interface LoopQuestion {
@@ -22,9 +22,19 @@ const lasting = (loop: Loop, duration: number | null): Loop => ({ ...loop, respo
 
 function analyse({ loop, detail, end }: LoopQuestion): Analysis {
   if (detail === 'full') return analyseLoop(loop);
-  const outline = analyseLoop(loop, { responses: false, detail: 'live' });
-  if (detail === 'outline') return outline;
-  return withResponses(outline, outline.closedLoop.stable ? lasting(loop, end) : loop, 'live');
+  if (detail === 'outline') return withDrawnCurves(analyseLoop(loop, { responses: false, detail: 'live' }));
+  const numbers = analyseLoop(loop, { responses: false, curves: false, detail: 'live' });
+  return withResponses(numbers, numbers.closedLoop.stable ? lasting(loop, end) : loop, 'live');
+}
+
+const nothing = { magnitude: [], phaseDegrees: [] };
+
+/** While a gain moves, only the curves that are drawn are worth sending. */
+function withDrawnCurves(analysis: Analysis): Analysis {
+  const { frequencyResponse } = analysis;
+  if (frequencyResponse === undefined) return analysis;
+  const left = { plant: nothing, controller: nothing, loadSensitivity: [], noiseSensitivity: [] };
+  return { ...analysis, frequencyResponse: { ...frequencyResponse, ...left } };
 }
 
 /** The same analysis with responses that last until `end`. An unstable loop is shown as long as it takes to grow, whatever is asked. */

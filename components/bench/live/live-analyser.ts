@@ -38,6 +38,7 @@ export interface LiveAnalyser<Input, Output> {
 interface Question<Input> {
   readonly input: Input;
   readonly place: number;
+  readonly parts: readonly Detail[];
 }
 
 /**
@@ -59,16 +60,15 @@ export function createLiveAnalyser<Input, Output>(options: LiveAnalyserOptions<I
     answer = { ...answer, ...change };
     for (const listener of listeners) listener();
   };
-  const take = ({ input, place }: Question<Input>, detail: Detail, output: Output) => {
+  const take = ({ input, place, parts }: Question<Input>, detail: Detail, output: Output) => {
     // A full answer to what has moved on meanwhile is none to rest on.
     if (place < reached.output && detail !== 'live') return;
     const complete = detail !== 'outline' && place > reached.complete ? { complete: output } : {};
     if (detail !== 'outline') reached.complete = Math.max(reached.complete, place);
-    if (place < reached.output) return publish(complete);
-    // The two parts of one coarse answer have the same numbers: the curves that are drawn already stay.
-    const newer = place > reached.output || detail === 'full' ? { output } : {};
+    // Of an answer in two parts the curves are in the outline.
+    if (place < reached.output || (detail === 'live' && parts.includes('outline'))) return publish(complete);
     reached.output = place;
-    publish({ input, detail, problem: null, ...newer, ...complete, ...(detail === 'full' && { rested: output }) });
+    publish({ input, output, detail, problem: null, ...complete, ...(detail === 'full' && { rested: output }) });
   };
   const answerTo = (detail: Detail) => async (question: Question<Input>) => {
     try {
@@ -86,10 +86,10 @@ export function createLiveAnalyser<Input, Output>(options: LiveAnalyserOptions<I
   return {
     ask(input) {
       if (input === asked?.input) return;
-      const question = { input, place: (count += 1) };
+      const question = { input, place: (count += 1), parts: steps() };
       asked = question;
       cancelRest?.();
-      for (const detail of steps()) lanes[detail].push(question);
+      for (const detail of question.parts) lanes[detail].push(question);
       cancelRest = rest(() => {
         cancelRest = null;
         const refused = answer.problem !== null && reached.output === question.place;

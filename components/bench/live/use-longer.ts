@@ -9,10 +9,11 @@ export function useLonger(from: LoopAnswer | null, end: number | null): LoopAnsw
     if (from === null || end === null) return;
     let wanted = true;
     const { loop, analysis } = from;
+    const { frequencyResponse, ...numbers } = analysis;
     void engines()
-      .responses.run('lengthen', { loop, analysis, end })
+      .responses.run('lengthen', { loop, analysis: numbers, end })
       .then((longer) => {
-        if (wanted) setMade(loopAnswer(loop, longer));
+        if (wanted) setMade(loopAnswer(loop, { ...longer, frequencyResponse }));
       });
     return () => {
       wanted = false;

@@ -15,6 +15,7 @@ describe('the analysis of a loop', () => {
   it('as an outline has the numbers of the whole, and no responses', () => {
     const outline = doTask('analyse', { loop: loop(1.2), detail: 'outline', end: null });
     expect(outline.timeResponse).toBeNull();
+    expect(outline.frequencyResponse!.sensitivity).toHaveLength(outline.frequencyResponse!.frequencies.length);
     expect(outline.sensitivity.ms.value).toBeCloseTo(full(1.2).sensitivity.ms.value, 8);
     expect(outline.margins.phase!.degrees).toBeCloseTo(full(1.2).margins.phase!.degrees, 6);
   });

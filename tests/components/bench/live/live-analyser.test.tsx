@@ -143,7 +143,16 @@ describe('an answer in two parts', () => {
     await under('live').end();
     expect(analyser.get()).toMatchObject({ input: 3, output: 6, complete: 2, detail: 'outline' });
     await under('live').end();
-    expect(analyser.get()).toMatchObject({ input: 3, output: 6, complete: 6, detail: 'live' });
+    expect(analyser.get()).toMatchObject({ input: 3, output: 6, complete: 6, detail: 'outline' });
+  });
+
+  it('shows no curves of responses that came first', async () => {
+    const { analyser, under } = bench(parts);
+    analyser.ask(1);
+    await under('live').end();
+    expect(analyser.get()).toMatchObject({ output: null, complete: 2 });
+    await under('outline').end();
+    expect(analyser.get()).toMatchObject({ output: 2, complete: 2 });
   });
 
   it('keeps the newest full answer while a gain moves', async () => {
