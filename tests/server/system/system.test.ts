@@ -41,13 +41,14 @@ describe('the OpenAPI document', () => {
   it('has every route, with its parameters, its answer and its refusals', async () => {
     const document = await read();
     expect(document.openapi).toBe('3.1.0');
-    for (const { method, path, status, output } of routes) {
+    for (const { method, path, status, output, events } of routes) {
       const operation = document.paths[path.replace(/:(\w+)/g, '{$1}')]?.[method];
       expect(operation, `${method} ${path}`).toBeDefined();
       const named = operation.parameters?.filter((parameter) => parameter.in === 'path').map(({ name }) => name) ?? [];
       expect(named, `${method} ${path}`).toEqual([...path.matchAll(/:(\w+)/g)].map(([, name]) => name));
       expect(Object.keys(operation.responses)).toEqual(expect.arrayContaining([String(status), 'default']));
-      if (output && status < 300) expect(operation.responses[status].content).toHaveProperty('application/json');
+      if (output && status < 300)
+        expect(operation.responses[status].content).toHaveProperty(events ? 'text/event-stream' : 'application/json');
     }
   });
 
