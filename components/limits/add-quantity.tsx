@@ -26,5 +26,5 @@ export function AddQuantity({ label, rows, onAdd }: AddQuantityProps) {
     hint: boundWords[row.bound],
     onSelect: () => onAdd(row),
   }));
-  return items.length === 0 ? null : <Menu label={label} items={items} />;
+  return items.length === 0 ? null : <Menu label={label} rises items={items} />;
 }

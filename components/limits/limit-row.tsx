@@ -35,7 +35,9 @@ export function StackedLimitRow({ row }: { row: DemandRow }) {
             target
           </Text>
           <NumberCell row={row} field="target" />
-          <SourceCell row={row} />
+          <View style={styles.source}>
+            <SourceCell row={row} />
+          </View>
         </View>
       ) : (
         <Text tone="ink2">{rowWords(row, units)}</Text>
@@ -88,6 +90,7 @@ const styles = StyleSheet.create({
   head: { flexDirection: 'row', alignItems: 'center', gap: 8, minHeight: 48 },
   name: { flex: 1, minWidth: 0 },
   line: { flexDirection: 'row', alignItems: 'center', gap: 8, paddingBottom: 6 },
+  source: { flex: 1, minWidth: 0 },
   wideRow: { borderBottomWidth: 1, paddingHorizontal: gutter.wide, paddingVertical: 5, gap: 4 },
   wide: { flexDirection: 'row', alignItems: 'center', gap: COLUMN_GAP, minHeight: 46 },
 });

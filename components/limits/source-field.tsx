@@ -40,8 +40,7 @@ const styles = StyleSheet.create({
   one: { paddingVertical: 12 },
   two: { paddingVertical: 3 },
   input: {
-    flex: 1,
-    minWidth: 0,
+    width: '100%',
     height: touch,
     paddingHorizontal: INSET,
     borderWidth: line.field,

@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 import { useMayEdit, useProject } from '@/components/navigation/project-context';
 import { useAnnounce } from '@/components/ui/announcements';
 import { useUnits } from '@/components/ui/units';
@@ -31,8 +31,8 @@ export function useLimitsPage(kept: ReadLimits) {
   const [fresh, setFresh] = useState<string | null>(null);
   const { edit, change, changed, overtaken } = editing;
   const { rows, base } = edit;
-  const { analysis, revision, standingOf } = useStandings(rows);
-  const checked = checkRows(rows, units);
+  const checked = useMemo(() => checkRows(rows, units), [rows, units]);
+  const { analysis, revision, standingOf } = useStandings(rows, checked);
   const errorsOf = rowErrors({ rows, checked, refused: keeping.refused, asked });
   const outdated = isOutdated(analysis, kept);
 

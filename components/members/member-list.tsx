@@ -9,9 +9,9 @@ import { MemberRow } from './member-row';
 
 /** Everyone with a role in the project. */
 export function MemberList() {
-  const { id } = useProject();
+  const { id, archived } = useProject();
   const me = useMe();
-  const manages = useMay('manage');
+  const manages = useMay('manage') && !archived;
   const members = useQuery(membersQuery(id));
   return (
     <>

@@ -38,7 +38,6 @@ export function MemberRow({ member, self, manages, lastOwner }: MemberRowProps) 
   const [givingUp, setGivingUp] = useState<Role | null>(null);
   const change = (role: Role) =>
     give.mutate({ member, role }, { onSuccess: () => announce(`${member.name} is ${role} now.`), onSettled: () => setGivingUp(null) });
-  const words = self ? 'Leave' : 'Take out';
   const mayGo = (manages || self) && !lastOwner;
   const out = { key: 'out', label: self ? 'Leave the project' : 'Take out of the project', onSelect: () => setEnding(true) };
   return (
@@ -70,10 +69,17 @@ export function MemberRow({ member, self, manages, lastOwner }: MemberRowProps) 
         ) : (
           <Text weight={600}>{member.role}</Text>
         )}
-        {phone && manages ? null : mayGo ? (
-          <Button kind="quiet" label={words} aria-label={self ? 'Leave the project' : `Take ${member.name} out`} onPress={out.onSelect} />
-        ) : phone ? null : (
-          <View style={styles.noButton} />
+        {phone && (manages || !mayGo) ? null : (
+          <View style={styles.action}>
+            {mayGo ? (
+              <Button
+                kind="quiet"
+                label={self ? 'Leave' : 'Take out'}
+                aria-label={self ? 'Leave the project' : `Take ${member.name} out`}
+                onPress={out.onSelect}
+              />
+            ) : null}
+          </View>
         )}
       </View>
       {lastOwner && (manages || self) ? (
@@ -99,5 +105,5 @@ const styles = StyleSheet.create({
   line: { flexDirection: 'row', alignItems: 'center', gap: 10, minHeight: 46 },
   who: { flex: 1, minWidth: 0, gap: 1 },
   column: { flex: 1, minWidth: 0 },
-  noButton: { width: 84 },
+  action: { width: 90, alignItems: 'flex-end' },
 });

@@ -35,7 +35,7 @@ export function PhoneTop({ title, sub, up, children }: PropsWithChildren<PhoneTo
 }
 
 const styles = StyleSheet.create({
-  top: { height: 52, flexDirection: 'row', alignItems: 'center', paddingHorizontal: 4, gap: 2 },
+  top: { zIndex: 10, height: 52, flexDirection: 'row', alignItems: 'center', paddingHorizontal: 4, gap: 2 },
   inset: { width: 8 },
   title: { flex: 1, minWidth: 0 },
   name: { fontSize: 18 },

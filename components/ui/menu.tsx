@@ -22,6 +22,8 @@ export interface MenuProps {
   disabled?: boolean;
   /** A picture in the place of the label, for a row's own menu. */
   icon?: IconName;
+  /** At the foot of a page the list rises out of its button. */
+  rises?: boolean;
   /** Of its button, px, where several stand under each other. */
   width?: number;
   items: readonly MenuItem[];
@@ -30,7 +32,7 @@ export interface MenuProps {
 }
 
 /** A button with a list under it. Down opens it, arrows walk it, Escape closes it and gives the focus back. */
-export function Menu({ label, name, disabled, icon, width, items, kind = 'secondary', align = 'left' }: MenuProps) {
+export function Menu({ label, name, disabled, icon, rises = false, width, items, kind = 'secondary', align = 'left' }: MenuProps) {
   const { colors } = useTheme();
   const [open, setOpen] = useState(false);
   const box = useRef<View>(null);
@@ -82,7 +84,12 @@ export function Menu({ label, name, disabled, icon, width, items, kind = 'second
         <View
           role="menu"
           aria-label={name ?? label}
-          style={[styles.list, styles[align], { backgroundColor: colors.paper, borderColor: colors.ink }]}
+          style={[
+            styles.list,
+            rises ? styles.above : styles.below,
+            styles[align],
+            { backgroundColor: colors.paper, borderColor: colors.ink },
+          ]}
         >
           {items.map((item) => (
             <Pressable
@@ -111,7 +118,6 @@ const styles = StyleSheet.create({
   box: { zIndex: 20, alignSelf: 'center', maxWidth: '100%' },
   list: {
     position: 'absolute',
-    top: touch + 2,
     minWidth: 240,
     maxHeight: 420,
     overflowY: 'auto',
@@ -119,6 +125,8 @@ const styles = StyleSheet.create({
     borderRadius: corner,
     zIndex: 20,
   },
+  above: { bottom: touch + 2 },
+  below: { top: touch + 2 },
   left: { left: 0 },
   right: { right: 0 },
   item: { minHeight: touch, justifyContent: 'center', paddingHorizontal: 14, paddingVertical: 8 },

@@ -51,13 +51,14 @@ export function Page({ title, sub, actions, width = 1240, foot, children }: Prop
 
 const styles = StyleSheet.create({
   page: { flex: 1, minHeight: 0 },
-  foot: { flexDirection: 'row', gap: 8, paddingHorizontal: gutter.phone, paddingVertical: 8, borderTopWidth: line.head },
+  foot: { flexDirection: 'row', gap: 8, paddingHorizontal: gutter.phone, paddingVertical: 8, borderTopWidth: line.head, zIndex: 1 },
   scroll: { flex: 1 },
   content: { flexGrow: 1, alignItems: 'center' },
   column: { width: '100%' },
   wide: { paddingHorizontal: gutter.wide, paddingTop: 20, paddingBottom: 40, gap: 14 },
   phone: { flexGrow: 1, paddingBottom: 20, gap: 8 },
-  head: { flexDirection: 'row', alignItems: 'center', minHeight: 52, gap: 16 },
+  // The lists that drop out of its menus lie over the page.
+  head: { flexDirection: 'row', alignItems: 'center', minHeight: 52, gap: 16, zIndex: 1 },
   title: { flex: 1, gap: 2 },
   actions: { flexDirection: 'row', alignItems: 'center', gap: 10 },
 });

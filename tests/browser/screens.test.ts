@@ -19,7 +19,12 @@ afterAll(async () => {
 });
 
 /** Each screen by its address, with something that stands on it once it is there. */
-const outside = { '/sign-in': 'Sign in', '/sign-up': 'Make the account', '/forgot-password': 'Send the link' };
+const outside = {
+  '/sign-in': 'Sign in',
+  '/sign-up': 'Make the account',
+  '/forgot-password': 'Send the link',
+  '/invitation': 'All projects',
+};
 const inside = (project: string, analysis: string) => ({
   '/': 'Wet-track speed hold',
   '/account': 'Sign out',
@@ -27,6 +32,9 @@ const inside = (project: string, analysis: string) => ({
   [`/projects/${project}/plant`]: 'Revisions',
   [`/projects/${project}/bench`]: 'Delay margin',
   [`/projects/${project}/cases`]: 'Open on bench',
+  [`/projects/${project}/limits`]: 'A target is easier to live with.',
+  [`/projects/${project}/members`]: 'Who may do what',
+  [`/projects/${project}/activity`]: /This is where it begins|Earlier/,
   [`/projects/${project}/analyses`]: 'An analysis never changes.',
   [`/projects/${project}/analyses/${analysis}`]: 'Compute again',
   '/no-such-page': /not here|no such|no page/i,
