@@ -32,8 +32,8 @@ export class AxisProduct {
   private readonly bottom: Side;
   private readonly gain: number;
   private readonly originPower: number;
-  /** Nothing but the factor 1, which the fields hold from the start. */
-  private readonly isUnity: boolean;
+  /** Nothing but a gain, which the fields hold from the start. */
+  private readonly isConstant: boolean;
 
   constructor(parts: readonly Rational[]) {
     this.top = new Side(parts.map((part) => ({ roots: part.zeros, coefficients: part.coefficients?.numerator })));
@@ -45,7 +45,8 @@ export class AxisProduct {
     const order = parts.reduce((sum, part) => sum + part.zeros.length - part.poles.length, 0);
     this.atInfinity = { coefficient: leading, power: order };
     this.atZero = { coefficient: (this.gain * this.top.constant) / this.bottom.constant, power: this.originPower };
-    this.isUnity = this.gain === 1 && this.top.isUnity && this.bottom.isUnity;
+    this.isConstant = this.top.isUnity && this.bottom.isUnity;
+    this.setConstant();
   }
 
   get isZero(): boolean {
@@ -57,8 +58,15 @@ export class AxisProduct {
     return this.gain < 0;
   }
 
+  private setConstant(): void {
+    this.re = this.gain;
+    this.magnitude = Math.abs(this.gain);
+    this.logMagnitude = Math.log(this.magnitude);
+    this.phase = this.gain < 0 ? -Math.PI : 0;
+  }
+
   evaluate(omega: number): void {
-    if (this.isUnity) return;
+    if (this.isConstant) return;
     const { gain, originPower } = this;
     const quotient = this.top.evaluate(omega);
     divideBy(quotient, this.bottom.evaluate(omega));

@@ -1,4 +1,4 @@
-import type { Complex } from '@/analysis/numbers/complex';
+import { magnitude, type Complex } from '@/analysis/numbers/complex';
 import { hornerRoom, hornerWithSlope, SIZE, SLOPE_IM, SLOPE_RE, VALUE_IM, VALUE_RE } from '@/analysis/numbers/horner';
 import type { Rational } from './model';
 
@@ -70,7 +70,7 @@ class SideInPlane {
   private multiplyPolynomial(descending: readonly number[], re: number, im: number): void {
     const { room } = this;
     hornerWithSlope(descending, re, im, room);
-    this.roundings += (2 * descending.length * room[SIZE]) / Math.hypot(room[VALUE_RE], room[VALUE_IM]);
+    this.roundings += (2 * descending.length * room[SIZE]) / magnitude(room[VALUE_RE], room[VALUE_IM]);
     this.multiply(room[VALUE_RE], room[VALUE_IM], room[SLOPE_RE], room[SLOPE_IM]);
   }
 

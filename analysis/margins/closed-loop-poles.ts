@@ -1,6 +1,6 @@
 import { PlaneProduct } from '@/analysis/loop/plane-product';
 import type { Rational } from '@/analysis/loop/model';
-import type { Complex } from '@/analysis/numbers/complex';
+import { magnitude, type Complex } from '@/analysis/numbers/complex';
 import { pairConjugates } from '@/analysis/numbers/conjugates';
 import { ehrlichAberth, type NewtonStep } from '@/analysis/numbers/ehrlich-aberth';
 import { startingPoints } from '@/analysis/numbers/newton-polygon';
@@ -42,7 +42,7 @@ const characteristicStep =
     const length = slopeRe * slopeRe + slopeIm * slopeIm;
     step[0] = ((1 + x) * slopeRe + y * slopeIm) / length;
     step[1] = (y * slopeRe - (1 + x) * slopeIm) / length;
-    return Math.hypot(1 + x, y) <= loop.uncertainty;
+    return magnitude(1 + x, y) <= loop.uncertainty;
   };
 
 /** As many points as there are closed-loop poles, of about their magnitudes. */
@@ -65,6 +65,6 @@ const initialPoints = (parts: readonly Rational[]): Complex[] => {
 
 /** Geometric mean of the non-zero magnitudes; 1 where there are none. */
 const meanMagnitude = (roots: readonly Complex[]): number => {
-  const logs = roots.map(({ re, im }) => Math.log(Math.hypot(re, im))).filter((log) => log > -Infinity);
+  const logs = roots.map(({ re, im }) => Math.log(magnitude(re, im))).filter((log) => log > -Infinity);
   return logs.length === 0 ? 1 : Math.exp(logs.reduce((sum, log) => sum + log, 0) / logs.length);
 };

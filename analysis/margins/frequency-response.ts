@@ -1,4 +1,5 @@
 import type { FrequencyResponse } from '@/contract';
+import { magnitude } from '@/analysis/numbers/complex';
 import type { GainCrossover } from './crossovers';
 import { refinedGrid, type Fineness, type Grid } from './grid';
 import { ladder } from './ladder';
@@ -73,7 +74,7 @@ export const frequencyResponse = ({ table, rows }: Grid): FrequencyResponse => {
   const { frequencies, loop, plant, controller } = response;
   for (let i = 0; i < rows.length; i += 1) {
     const row = rows[i];
-    const sensitivity = 1 / Math.max(LEAST_DISTANCE, length(1 + table[row + S.RE], table[row + S.IM]));
+    const sensitivity = 1 / Math.max(LEAST_DISTANCE, magnitude(1 + table[row + S.RE], table[row + S.IM]));
     frequencies[i] = table[row + S.OMEGA];
     loop.magnitude[i] = table[row + S.MAGNITUDE];
     loop.phaseDegrees[i] = table[row + S.PHASE] * DEGREES;
@@ -89,10 +90,4 @@ export const frequencyResponse = ({ table, rows }: Grid): FrequencyResponse => {
     response.noiseSensitivity[i] = table[row + S.COMMAND_MAGNITUDE] * sensitivity;
   }
   return response;
-};
-
-/** √(re² + im²), by the slow safe way only where the squares overflow. */
-const length = (re: number, im: number): number => {
-  const square = re * re + im * im;
-  return square < Infinity ? Math.sqrt(square) : Math.hypot(re, im);
 };

@@ -31,6 +31,8 @@ export interface Grid {
 const QUIET = Math.log(0.3);
 /** An interval is cut into at most this many pieces at once, so that wide intervals are judged again on the way. */
 const MOST_PIECES = 8;
+/** Rows that most grids come to for each frequency they start from. */
+const ROOM_PER_FREQUENCY = 3;
 /** Neighbours nearer than this, relatively, are not parted further: L jumps there (an undamped pole or zero). */
 const CLOSEST = 1e-7;
 
@@ -40,7 +42,7 @@ const CLOSEST = 1e-7;
  */
 export const refinedGrid = (loop: LoopFunction, frequencies: readonly number[], fineness: Fineness): Grid => {
   const rule = { ...fineness, deadTime: loop.deadTime };
-  const samples = new SampledRows(loop, 2 * frequencies.length);
+  const samples = new SampledRows(loop, ROOM_PER_FREQUENCY * frequencies.length);
   let rows = frequencies.map((omega) => samples.add(omega));
   let pieces = rows.map(() => UNJUDGED);
   pieces[pieces.length - 1] = WHOLE;

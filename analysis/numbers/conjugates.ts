@@ -1,4 +1,4 @@
-import type { Complex } from './complex';
+import { magnitude, type Complex } from './complex';
 
 /** Below this multiple of its magnitude an imaginary part is rounding, not a pair. */
 const REAL = 1e-13;
@@ -12,7 +12,7 @@ export const pairConjugates = (roots: readonly Complex[]): Complex[] => {
   const upper: Complex[] = [];
   const lower: Complex[] = [];
   for (const root of roots) {
-    if (Math.abs(root.im) <= REAL * Math.hypot(root.re, root.im)) real.push(root.re);
+    if (Math.abs(root.im) <= REAL * magnitude(root.re, root.im)) real.push(root.re);
     else (root.im > 0 ? upper : lower).push(root);
   }
   upper.sort((a, b) => b.im - a.im);
@@ -28,7 +28,7 @@ export const pairConjugates = (roots: readonly Complex[]): Complex[] => {
   }
   lower.forEach((root) => real.push(root.re));
   const byMagnitude = (a: number, b: number) => Math.abs(a) - Math.abs(b) || a - b;
-  pairs.sort((a, b) => Math.hypot(a.re, a.im) - Math.hypot(b.re, b.im));
+  pairs.sort((a, b) => magnitude(a.re, a.im) - magnitude(b.re, b.im));
   return [
     ...real.sort(byMagnitude).map((re) => ({ re, im: 0 })),
     ...pairs.flatMap(({ re, im }) => [
@@ -43,7 +43,7 @@ const nearestIndex = (points: readonly Complex[], target: Complex): number => {
   let best = -1;
   let least = Infinity;
   points.forEach((point, i) => {
-    const distance = Math.hypot(point.re - target.re, point.im - target.im);
+    const distance = magnitude(point.re - target.re, point.im - target.im);
     if (distance < least) {
       least = distance;
       best = i;

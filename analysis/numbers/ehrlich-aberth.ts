@@ -1,4 +1,4 @@
-import type { Complex } from './complex';
+import { magnitude, type Complex } from './complex';
 
 const MAX_ROUNDS = 200;
 /** A root moves no more where its correction falls below this multiple of its magnitude. */
@@ -30,8 +30,8 @@ export const ehrlichAberth = (start: readonly Complex[], newtonStep: NewtonStep)
       if (final[i] === 1) continue;
       const done = newtonStep(re[i], im[i], step);
       deflate(re, im, i, step);
-      const size = Math.hypot(re[i], im[i]);
-      const length = Math.hypot(step[0], step[1]);
+      const size = magnitude(re[i], im[i]);
+      const length = magnitude(step[0], step[1]);
       if (!Number.isFinite(length)) re[i] += NUDGE * (size + Number.MIN_VALUE);
       else if (!done || length <= POLISH * size) {
         re[i] -= step[0];

@@ -1,3 +1,4 @@
+import { magnitude } from './complex';
 /** Places in what `hornerWithSlope` writes. */
 export const VALUE_RE = 0;
 export const VALUE_IM = 1;
@@ -11,7 +12,7 @@ export const hornerRoom = (): Float64Array => new Float64Array(5);
 
 /** A real polynomial with its derivative and the sum of its terms' magnitudes at re + j·im. Leading coefficient first. */
 export const hornerWithSlope = (descending: ArrayLike<number>, re: number, im: number, room: Float64Array): void => {
-  const size = Math.hypot(re, im);
+  const size = magnitude(re, im);
   let [valueRe, valueIm, slopeRe, slopeIm, sum] = [0, 0, 0, 0, 0];
   for (let k = 0; k < descending.length; k += 1) {
     const c = descending[k];

@@ -1,4 +1,4 @@
-import type { Complex } from './complex';
+import { magnitude, type Complex } from './complex';
 import { pairConjugates } from './conjugates';
 import { ehrlichAberth, type NewtonStep } from './ehrlich-aberth';
 import { hornerRoom, hornerWithSlope } from './horner';
@@ -86,5 +86,5 @@ const newtonStep =
     const square = slopeRe * slopeRe + slopeIm * slopeIm;
     step[0] = (valueRe * slopeRe + valueIm * slopeIm) / square;
     step[1] = (valueIm * slopeRe - valueRe * slopeIm) / square;
-    return Math.hypot(valueRe, valueIm) <= ROUNDINGS * sum;
+    return magnitude(valueRe, valueIm) <= ROUNDINGS * sum;
   };

@@ -1,4 +1,4 @@
-import type { Complex } from '@/analysis/numbers/complex';
+import { magnitude, type Complex } from '@/analysis/numbers/complex';
 
 /** `count` panels of equal width, one after the other; the last stage of a plan without period never ends. */
 export interface Stage {
@@ -26,7 +26,7 @@ const STILL_WIDTH = 1;
  */
 export function planPanels(poles: readonly Complex[], period: number, fineness = 1): Stage[] {
   const modes = poles
-    .map(({ re, im }) => ({ rate: Math.hypot(re, im), death: re < 0 ? DEAD_EXPONENT / -re : Infinity }))
+    .map(({ re, im }) => ({ rate: magnitude(re, im), death: re < 0 ? DEAD_EXPONENT / -re : Infinity }))
     .sort((a, b) => a.death - b.death);
   const spans: Span[] = [];
   let start = 0;

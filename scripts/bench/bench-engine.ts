@@ -3,7 +3,6 @@ import { readFileSync } from 'node:fs';
 import { analyseLoop, buildLoop } from '@/analysis';
 import { Loop, type Analysis, type LoopInput } from '@/contract';
 import { frequencyBaseline } from './frequency-baseline';
-import { marginsAlone } from './margins-alone';
 import { median, quantile } from './quantile';
 import { timeBaseline } from './time-baseline';
 
@@ -38,7 +37,7 @@ function runsOf(input: LoopInput): Runs {
     baseline: () => curves() + steps(),
     full: () => analyseLoop(loop),
     frequencies: () => analyseLoop(loop, { responses: false }),
-    margins: () => marginsAlone(loop),
+    margins: () => analyseLoop(loop, { curves: false, responses: false }),
   };
 }
 
