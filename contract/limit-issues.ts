@@ -21,8 +21,8 @@ type Say = (quantity: Quantity, value: number) => string;
 
 function ownIssues({ quantity, bound, limit, target }: Demand, index: number, say: Say): LimitIssue[] {
   const { bounds, range } = quantityRules[quantity];
+  if (!bounds.includes(bound)) return [{ path: [index, 'bound'], message: `This quantity is demanded as “${words[bounds[0]]}”.` }];
   const issues: LimitIssue[] = [];
-  if (!bounds.includes(bound)) issues.push({ path: [index, 'bound'], message: `This quantity is demanded as “${words[bounds[0]]}”.` });
   if (!isInRange(quantity, limit)) issues.push({ path: [index, 'limit'], message: `The limit of this quantity is ${range}.` });
   if (target === null) return issues;
   const outside = bound === 'min' ? target < limit : target > limit;
