@@ -85,7 +85,7 @@ export function CaseViews({ data: { views, analysis }, shown, link, onChange, to
           ) : null}
           {grid.off.length > 0 ? (
             <View style={styles.off}>
-              <Text step="note" tone="ink2">
+              <Text step="note" tone="ink2" style={layout === 'phone' && styles.phone}>
                 Without a place in the grid:
               </Text>
               <CaseList views={grid.off} columns={columns} worst={worst?.view.kept.id} selected={selected.kept.id} onOpen={open} />

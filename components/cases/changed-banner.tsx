@@ -2,6 +2,7 @@ import { StyleSheet, View } from 'react-native';
 import { useMayEdit } from '@/components/navigation/project-context';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
+import { gutter } from '@/components/ui/tokens';
 import { useLayout } from '@/components/ui/use-layout';
 import type { Conditions, KeptAnalysis } from '@/contract';
 import { AnalyseAgain } from './analyse-again';
@@ -44,8 +45,8 @@ export function ChangedBanner({ analysis, conditions, caseCount }: { analysis: K
 }
 
 const styles = StyleSheet.create({
-  bar: { paddingHorizontal: 12, paddingVertical: 8, gap: 10 },
-  line: { flexDirection: 'row', alignItems: 'center' },
-  stack: { alignItems: 'flex-start' },
+  bar: { paddingVertical: 8, gap: 10 },
+  line: { flexDirection: 'row', alignItems: 'center', paddingHorizontal: gutter.wide },
+  stack: { alignItems: 'flex-start', paddingHorizontal: gutter.phone },
   text: { flexShrink: 1, flexGrow: 1 },
 });

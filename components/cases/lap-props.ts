@@ -75,12 +75,14 @@ export function lapProps(reading: LapReading): Omit<LapChartProps, 'height'> {
   const line = rows.findIndex(({ cells }) => cells.some(({ shown }) => shown === worst));
   const point = rows[line]?.cells.findIndex(({ shown }) => shown === worst) ?? -1;
   const drawn = worst !== null && point >= 0 && worst.value !== null;
+  const undrawn = rows.flatMap(({ cells }) => cells).filter(({ shown }) => shown.value === null && shown.verdict === 'fail').length;
+  const unit = quantityText(quantity, 1, units).unit || 'factor';
   const title = `${quantityName(quantity)} over ${axisName(column).toLowerCase()}`;
   const beyond = { low: beyondEnd(column, 'low', reading), high: beyondEnd(column, 'high', reading) };
   const worstWords = worst ? `Nearest the edge: ${worst.view.kept.name}, ${worst.text}.` : '';
   return {
     title,
-    units: { number: quantityText(quantity, 1, units).unit || 'factor', foot: axisUnit(column, units.speed) },
+    units: { number: undrawn === 0 ? unit : `${unit}, ${undrawn} unstable not drawn`, foot: axisUnit(column, units.speed) },
     lines,
     demands,
     worst: drawn ? { line, point, text: [placed(worst, quantity, units), ...(aside === null ? [] : [aside])] } : null,

@@ -17,25 +17,29 @@ export interface CellFaceProps {
   small?: boolean;
 }
 
+/** A word in the place of the number is set smaller, and in a small cell left to the shape. */
+const LONG = 6;
+
 /** The number, the shape of its verdict, and at the foot its bar against the limit on the edge ruler's scale. */
 export function CellFace({ number, worst, more = 0, small = false }: CellFaceProps) {
   const { colors } = useTheme();
   const { digits, verdict, use, view } = number;
   const look = cellLook(verdict, colors);
+  const word = digits.length >= LONG;
   const demanded = verdict !== null && view.result !== null && use !== null;
   return (
     <View style={[styles.face, { backgroundColor: look.ground }]}>
       <View style={[styles.number, small && styles.tightly]}>
         <Text
-          step={small ? 'tick' : 'h3'}
+          step={small ? 'tick' : word ? 'small' : 'h3'}
           weight={worst ? 700 : 600}
           tone={view.outdated ? 'ink3' : 'ink'}
           numberOfLines={1}
-          style={!small && digits.length < 6 && styles.large}
+          style={!small && !word && styles.large}
         >
-          {digits}
+          {small && word ? '–' : digits}
         </Text>
-        {verdict === null ? null : <VerdictGlyph verdict={verdict} size={small ? 11 : 18} />}
+        {verdict === null ? null : <VerdictGlyph verdict={verdict} size={small ? 11 : word ? 14 : 18} />}
         {more > 0 && !small ? <Text step="tick" tone="ink2">{`+${more}`}</Text> : null}
       </View>
       {view.kept.basis === 'extrapolated' ? null : (
@@ -87,7 +91,7 @@ export const CaseCell = memo(function CaseCell({ label, selected, stop, column, 
 const styles = StyleSheet.create({
   cell: { flex: 1, minWidth: 68, height: 50, borderLeftWidth: 1 },
   face: { flex: 1, alignItems: 'center', justifyContent: 'center', overflow: 'hidden' },
-  number: { flexDirection: 'row', alignItems: 'center', gap: 6, paddingBottom: 3 },
+  number: { flexDirection: 'row', alignItems: 'center', gap: 5, paddingBottom: 3 },
   tightly: { gap: 2, paddingBottom: 2 },
   large: { fontSize: 20, lineHeight: 22 },
   basis: { position: 'absolute', left: 5, top: 5 },

@@ -76,7 +76,13 @@ export function CasePanel({ view, design, worst, capped, ends, alsoHere, onOpen,
       {mayEdit ? (
         <View style={styles.line}>
           <Button label="Change this case" onPress={() => onEdit(kept.id)} />
-          <DeleteCase kept={kept} only={only} />
+          {only ? (
+            <Text step="small" tone="ink2">
+              The last case stays.
+            </Text>
+          ) : (
+            <DeleteCase kept={kept} />
+          )}
         </View>
       ) : null}
     </View>

@@ -11,12 +11,12 @@ import { useDeleteCase } from '@/hooks/queries/cases';
 import { useSignal } from '@/hooks/use-signal';
 
 /** Takes a case away, once it is confirmed. */
-export function DeleteCase({ kept, only }: { kept: Case; only: boolean }) {
+export function DeleteCase({ kept }: { kept: Case }) {
   const signal = useSignal();
   const [asking, ask] = useState(false);
   return (
     <>
-      <Button kind="quiet" label="Delete" aria-label={`Delete ${kept.name}`} disabled={only || !signal} onPress={() => ask(true)} />
+      <Button kind="quiet" label="Delete" aria-label={`Delete ${kept.name}`} disabled={!signal} onPress={() => ask(true)} />
       <Dialog open={asking} title={`Delete ${kept.name}?`} onClose={() => ask(false)}>
         <DeleteForm kept={kept} onClose={() => ask(false)} />
       </Dialog>
