@@ -4,9 +4,10 @@ import { derivedOrdinate, frequencyCurves, type Ordinate, ordinatesWithin } from
 import { contains, type Rect } from './geometry';
 import { straightKerb, type StraightKerb } from './kerb';
 import { createLabelBoard, type LabelBoard, placesBeside } from './label-board';
+import { interpolateAt } from './interpolate';
 import type { Axis } from './linear-axis';
 import { nearestOddHalfTurn, oddHalfTurns, phaseAxis } from './loop-axes';
-import { responseOf, type LoopScene } from './loop-picture';
+import { type ChartDesign, responseOf, type LoopScene } from './loop-picture';
 import { SHORT_KERB } from './magnitude-panel';
 import { phaseMarginBar } from './margin-marks';
 import type { PanelPicture } from './panel';
@@ -16,6 +17,12 @@ const degrees: Ordinate = ({ loop }) => loop.phaseDegrees;
 /** What lies under this |L| tells little of the loop: the axis does not follow its phase down. */
 const TELLING_MAGNITUDE = 0.2;
 const telling = derivedOrdinate(({ loop }) => loop.phaseDegrees.map((phase, i) => (loop.magnitude[i] >= TELLING_MAGNITUDE ? phase : NaN)));
+
+/** arg L at a crossover, read off the curve, which has a point at each; where no curve is, of the loop itself, which takes longer. */
+function phaseOf({ analysis: { frequencyResponse }, at }: ChartDesign, frequency: number): number {
+  const drawn = frequencyResponse && interpolateAt(frequencyResponse.frequencies, frequencyResponse.loop.phaseDegrees, frequency);
+  return drawn ?? at(frequency).phaseDegrees;
+}
 
 /** Degrees drawn beside −180° at least, and beyond what is demanded. */
 const LEAST_BESIDE = 35;
@@ -45,7 +52,7 @@ function demandKerbs(demand: number, x: number, reference: number, { up, plot, b
 
 function marginMarks(scene: LoopScene, frame: Frame): Pick<PanelPicture, 'kerbs' | 'bars'> {
   const { across, up, board } = frame;
-  const bar = phaseMarginBar(scene.a.analysis, (frequency) => scene.a.at(frequency).phaseDegrees);
+  const bar = phaseMarginBar(scene.a.analysis, (frequency) => phaseOf(scene.a, frequency));
   if (bar === null || bar.frequency < across.domain[0] || bar.frequency > across.domain[1]) return { kerbs: [], bars: [] };
   const [x, from, to] = [across.at(bar.frequency), up.at(bar.from), up.at(bar.to)];
   board.reserve({ x: x - 2, y: Math.min(from, to), width: 4, height: Math.abs(from - to) });
@@ -62,7 +69,7 @@ function marginMarks(scene: LoopScene, frame: Frame): Pick<PanelPicture, 'kerbs'
 function phaseCrossoverMark(scene: LoopScene, { across, up, plot, board }: Frame): PanelPicture['dots'] {
   const frequency = scene.a.analysis.margins.gain?.frequency ?? null;
   if (frequency === null || frequency <= 0) return [];
-  const dot = { x: across.at(frequency), y: up.at(nearestOddHalfTurn(scene.a.at(frequency).phaseDegrees)), radius: 3 };
+  const dot = { x: across.at(frequency), y: up.at(nearestOddHalfTurn(phaseOf(scene.a, frequency))), radius: 3 };
   if (!contains(plot, dot)) return [];
   board.add([withUnit(formatFrequency(frequency, scene.units.frequency), scene.units.frequency)], 'quiet', placesAround(dot, [12, 20, 30]));
   return [dot];
