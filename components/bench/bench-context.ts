@@ -8,6 +8,7 @@ import type { LiveAnalyser, LiveAnswer } from './live/live-analyser';
 import type { LookedAtStore } from './live/looked-at';
 import type { LoopAnswer } from './live/loop-answer';
 import type { Readings } from './live/readings';
+import type { OverCases } from './over/use-over-cases';
 import type { BenchSubject } from './subject/bench-subject';
 import type { BenchQuestion } from './live/bench-loop';
 
@@ -18,6 +19,8 @@ export interface BenchValue {
   readonly analyser: LiveAnalyser<BenchQuestion, LoopAnswer>;
   readonly readings: Readings<BenchQuestion, LoopAnswer>;
   readonly lookedAt: LookedAtStore;
+  /** The same over all cases. */
+  readonly over: OverCases;
 }
 
 export const BenchContext = createContext<BenchValue | null>(null);

@@ -13,6 +13,8 @@ import { useDraftStore } from './draft/use-draft-store';
 import { useKeep } from './keep/use-keep';
 import { mayKeep } from './keep/saved-words';
 import { useBenchAnalysis } from './live/use-bench-analysis';
+import { FollowWorst } from './over/follow-worst';
+import { useOverCases } from './over/use-over-cases';
 import type { BenchSubject } from './subject/bench-subject';
 import type { BenchLink, ChangeLink } from './subject/bench-link';
 import { focusChart } from './sheets/focus-chart';
@@ -22,16 +24,19 @@ interface BenchDeskProps {
   subject: BenchSubject;
   link: BenchLink;
   onLink: ChangeLink;
+  /** Hears which case is nearest its limit, whenever the gains rest. */
+  onWorst: (caseId: string) => void;
 }
 
 /** The bench with something on it: its draft, the engine that answers, what can be kept, and its keys. */
-export function BenchDesk({ subject, link, onLink }: BenchDeskProps) {
+export function BenchDesk({ subject, link, onLink, onWorst }: BenchDeskProps) {
   const store = useDraftStore(subject);
   const live = useBenchAnalysis(subject, store, link.steps);
+  const over = useOverCases(subject, store);
   const compared = useCompared(subject, link);
   const { outcome, keep } = useKeep(subject, store);
   const [activeGain, setActiveGain] = useState<Gain>('kp');
-  const bench = useMemo(() => ({ subject, store, ...live }), [subject, store, live]);
+  const bench = useMemo(() => ({ subject, store, ...live, over }), [subject, store, live, over]);
   const keptRevision = outcome.kind === 'kept' ? outcome.revision : null;
   useEffect(() => {
     // What a link pinned is no longer what is on the bench once a newer revision was kept here.
@@ -57,6 +62,7 @@ export function BenchDesk({ subject, link, onLink }: BenchDeskProps) {
     <BenchContext.Provider value={bench}>
       <CursorProvider>
         <View ref={region} style={styles.desk}>
+          <FollowWorst onWorst={onWorst} />
           <BenchScene {...{ link, onLink, compared, outcome, activeGain }} onKeep={keep} onActiveGain={setActiveGain} />
         </View>
       </CursorProvider>

@@ -1,4 +1,4 @@
-import { useEffect } from 'react';
+import { useEffect, useState } from 'react';
 import { View } from 'react-native';
 import { useProject } from '@/components/navigation/project-context';
 import { projectPath } from '@/components/navigation/routes';
@@ -22,7 +22,8 @@ const lacks: Readonly<Record<Exclude<Lack, 'plant'>, string>> = {
 export function Bench() {
   const { id: projectId } = useProject();
   const [link, changeLink] = useBenchLink();
-  const state = useBenchSubject(projectId, link);
+  const [worst, setWorst] = useState<string>();
+  const state = useBenchSubject(projectId, link, worst);
   // The engines start while the server is still being asked what lies on the bench.
   useEffect(() => void engines(), []);
   if (state.kind === 'waiting') return <Waiting text="Fetching plant and design" />;
@@ -33,7 +34,7 @@ export function Bench() {
   return (
     <>
       <DocumentTitle parts={['Bench', subject.project.name]} />
-      <BenchDesk subject={subject} link={link} onLink={changeLink} />
+      <BenchDesk subject={subject} link={link} onLink={changeLink} onWorst={setWorst} />
     </>
   );
 }

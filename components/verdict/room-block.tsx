@@ -5,7 +5,7 @@ import type { Room } from '@/contract';
 import { roomLines } from './room-lines';
 
 interface RoomBlockProps {
-  room: Room;
+  room: Room | 'sought';
   /** On a phone each way is one running line. */
   compact?: boolean;
 }

@@ -34,5 +34,9 @@ function line(way: RoomWay, [key, amount, words]: (typeof changes)[number], unit
   return { way: key, change: `${amount(first.amount)} ${words}`, before: stop(first, units), caseName: first.case.name };
 }
 
+/** The same places, while the room is looked for. */
+const sought: readonly RoomLine[] = changes.map(([way, , words]) => ({ way, change: `… ${words}`, before: '', caseName: null }));
+
 /** What may change, one at a time, before the first limit breaks in any case. Amounts are rounded down: never more than there is. */
-export const roomLines = (room: Room, units: ReaderUnits): RoomLine[] => changes.map((change) => line(room[change[0]], change, units));
+export const roomLines = (room: Room | 'sought', units: ReaderUnits): readonly RoomLine[] =>
+  room === 'sought' ? sought : changes.map((change) => line(room[change[0]], change, units));

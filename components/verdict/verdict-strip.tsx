@@ -14,33 +14,36 @@ import { HeadlineRuler } from './headline-ruler';
 import { marginNumbers } from './margin-numbers';
 import { MarginRow } from './margin-row';
 import { RoomBlock } from './room-block';
-import { worstChecks } from './worst-checks';
+import { mostPressing, worstChecks } from './worst-checks';
 
 export interface VerdictStripProps {
   headline: Headline;
-  /** Null where it was not computed, or nothing is demanded. */
-  room: Room | null;
+  /** Null where it was not computed, or nothing is demanded; "sought" keeps its place while it is looked for. */
+  room: Room | 'sought' | null;
   results: readonly CaseResult[];
   /** Stands in the place of the rulers on a wide screen, where the page itself shows every case. */
   instead?: ReactNode;
+  label?: string;
 }
 
 /** As many as stand side by side on a wide screen. */
 const MOST_RULERS = 5;
 
 /** The number first: the worst over all cases, its case and frequency, the room that is left, and everything that is demanded on its ruler. */
-export function VerdictStrip({ headline, room, results, instead }: VerdictStripProps) {
+export function VerdictStrip({ headline, room, results, instead, label = 'Worst margin over all cases' }: VerdictStripProps) {
   const { colors } = useTheme();
   const phone = useLayout() === 'phone';
   const text = headlineText(headline, useUnits());
   return (
     <View
       role="region"
-      aria-label="Worst margin over all cases"
+      aria-label={label}
       style={[styles.strip, phone ? styles.phone : styles.wide, { backgroundColor: colors.paper, borderBottomColor: colors.rule2 }]}
     >
       <View style={styles.head}>
-        <VerdictBlock verdict={headline.verdict} quantity={text.quantity ?? undefined} value={text.value} words={text.words} />
+        <View style={text.words ? styles.shrinking : styles.whole}>
+          <VerdictBlock verdict={headline.verdict} quantity={text.quantity ?? undefined} value={text.value} words={text.words} />
+        </View>
         <View style={styles.text}>
           {headline.case && (
             <Text step="note" weight={600}>
@@ -66,12 +69,12 @@ export function VerdictStrip({ headline, room, results, instead }: VerdictStripP
 function Demands({ headline, results }: Pick<VerdictStripProps, 'headline' | 'results'>) {
   const units = useUnits();
   const phone = useLayout() === 'phone';
-  const checks = worstChecks(results);
+  const checks = mostPressing(worstChecks(results), MOST_RULERS);
   if (checks.length === 0) {
     const { numbers } = results.find((result) => result.case.id === headline.case?.id) ?? results[0];
     return <MarginRow numbers={marginNumbers(numbers, units)} unstable={!numbers.closedLoop.stable} compact={phone} />;
   }
-  if (!phone) return <CheckRulers checks={checks.slice(0, MOST_RULERS)} />;
+  if (!phone) return <CheckRulers checks={checks} />;
   const worst = checks.find(({ check }) => check.quantity === headline.quantity) ?? checks[0];
   return <HeadlineRuler worst={worst} />;
 }
@@ -91,5 +94,7 @@ const styles = StyleSheet.create({
     paddingVertical: 8,
   },
   head: { flexDirection: 'row', alignItems: 'center', gap: 12, flexShrink: 1 },
+  whole: { flexShrink: 0 },
+  shrinking: { flexShrink: 1 },
   text: { flexShrink: 1, gap: 1 },
 });

@@ -27,3 +27,9 @@ export function worstChecks(results: readonly Judged[]): WorstCheck[] {
     return { check: worst.checks[index], case: worst.case, uses };
   });
 }
+
+/** Of more demands than there is room for those nearest their limits, in the order of the limits. */
+export function mostPressing(checks: readonly WorstCheck[], most: number): WorstCheck[] {
+  const nearest = [...checks].sort((a, b) => (isWorse(a.check, b.check) ? -1 : isWorse(b.check, a.check) ? 1 : 0)).slice(0, most);
+  return checks.filter((check) => nearest.includes(check));
+}

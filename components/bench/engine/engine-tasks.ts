@@ -1,5 +1,6 @@
 import { analyseLoop, withResponses } from '@/analysis';
 import type { Analysis, Loop } from '@/contract';
+import { judge, lookAlong, marks } from './case-tasks';
 
 /** outline: coarse curves over frequency alone; live: coarse responses alone; full: what is kept. All have every number over frequency. */
 export type Detail = 'outline' | 'live' | 'full';
@@ -43,7 +44,7 @@ function lengthen({ loop, analysis, end }: LongerResponses): Analysis {
 }
 
 /** All that is asked of the engine beside the page: from plain data to plain data, so that it can be done in a worker. */
-export const engineTasks = { analyse, lengthen };
+export const engineTasks = { analyse, lengthen, judge, lookAlong, marks };
 
 export type EngineTasks = typeof engineTasks;
 export type TaskName = keyof EngineTasks;

@@ -1,20 +1,20 @@
-import { useCallback } from 'react';
+import { useCallback, useMemo } from 'react';
 import { GainRule } from '@/components/charts';
 import { gainSpans } from '@/figures';
 import { type Gain, gainWords } from '../draft/gain';
-import type { StabilitySpan } from '../live/stability-span';
+import { type GainMarks, ruleMarks } from '../over/gain-marks';
 import { IntegralOff } from './integral-off';
 import type { GainControl } from './use-gain';
 
 interface BenchGainRuleProps {
   gain: Gain;
   control: GainControl;
-  unstable: StabilitySpan | undefined;
+  marks: GainMarks | undefined;
   wide?: boolean;
 }
 
 /** The rule of one gain: dragging it moves the draft, lifting the finger ends the step. Without integral action Ti has none. */
-export function BenchGainRule({ gain, control, unstable, wide = false }: BenchGainRuleProps) {
+export function BenchGainRule({ gain, control, marks, wide = false }: BenchGainRuleProps) {
   const { hold, release } = control;
   const change = useCallback(
     (value: number, phase: 'move' | 'end') => {
@@ -23,6 +23,7 @@ export function BenchGainRule({ gain, control, unstable, wide = false }: BenchGa
     },
     [hold, release],
   );
+  const { stretch, unstable } = useMemo(() => ruleMarks(marks ?? {}), [marks]);
   const { label, name } = gainWords(gain, control.form);
   if (control.value === null) return <IntegralOff />;
   return (
@@ -32,6 +33,7 @@ export function BenchGainRule({ gain, control, unstable, wide = false }: BenchGa
       value={control.value}
       kept={control.kept}
       span={wide ? gainSpans.wide : gainSpans.phone}
+      stretch={stretch}
       unstable={unstable}
       onChange={change}
     />

@@ -3,7 +3,7 @@ import { StyleSheet, View } from 'react-native';
 import { Text } from '@/components/ui/text';
 import { formatGain } from '@/figures/format';
 import { type Gain, gainWords } from '../draft/gain';
-import type { StabilitySpan } from '../live/stability-span';
+import type { GainMarks } from '../over/gain-marks';
 import { BenchGainRule } from './bench-gain-rule';
 import { CellNudge } from './cell-nudge';
 import { GainInput } from './gain-input';
@@ -11,12 +11,12 @@ import { useGain } from './use-gain';
 
 interface GainCellProps {
   gain: Gain;
-  unstable: StabilitySpan | undefined;
+  marks: GainMarks | undefined;
   onActive: (gain: Gain) => void;
 }
 
 /** One gain of the shelf: its rule, its field, and a step down and up. */
-export const GainCell = memo(function GainCell({ gain, unstable, onActive }: GainCellProps) {
+export const GainCell = memo(function GainCell({ gain, marks, onActive }: GainCellProps) {
   const control = useGain(gain);
   const { label } = gainWords(gain, control.form);
   return (
@@ -32,7 +32,7 @@ export const GainCell = memo(function GainCell({ gain, unstable, onActive }: Gai
           </Text>
         )}
       </View>
-      <BenchGainRule gain={gain} control={control} unstable={unstable} wide />
+      <BenchGainRule gain={gain} control={control} marks={marks} wide />
       <View style={styles.row}>
         <CellNudge label={label} direction="down" disabled={control.value === null} onNudge={control.nudge} />
         <GainInput key={control.form} gain={gain} control={control} />

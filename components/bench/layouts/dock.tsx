@@ -12,7 +12,7 @@ import { HistoryButtons } from '../keep/history-buttons';
 import { KeepControl } from '../keep/keep-control';
 import { SavedState } from '../keep/saved-state';
 import { useKeepButton } from '../keep/use-keep-button';
-import { useStabilitySpans } from '../live/use-stability-spans';
+import { useGainMarks } from '../over/use-gain-marks';
 import type { BenchActions } from './bench-actions';
 
 const only: Readonly<Record<Gain, readonly Gain[]>> = {
@@ -26,13 +26,13 @@ const only: Readonly<Record<Gain, readonly Gain[]>> = {
 export const Dock = memo(function Dock({ activeGain, onActiveGain, onSettings, outcome, onKeep }: BenchActions) {
   const { colors } = useTheme();
   const openPages = useOpenPages();
-  const spans = useStabilitySpans(only[activeGain]);
+  const marks = useGainMarks(only[activeGain]);
   const { remark } = useKeepButton();
   return (
     <View role="region" aria-label="Gains" style={[styles.dock, { backgroundColor: colors.paper, borderTopColor: colors.ink }]}>
       <GainTiles active={activeGain} onChoose={onActiveGain} onSettings={onSettings} />
       <View style={styles.inset}>
-        <ActiveGain gain={activeGain} unstable={spans[activeGain]} />
+        <ActiveGain gain={activeGain} marks={marks[activeGain]} />
         <View style={styles.actions}>
           <IconButton icon="pages" label="All pages" onPress={openPages} />
           <HistoryButtons />

@@ -10,7 +10,7 @@ import { HistoryButtons } from '../keep/history-buttons';
 import { KeepControl } from '../keep/keep-control';
 import { SavedState } from '../keep/saved-state';
 import { useKeepButton } from '../keep/use-keep-button';
-import { useStabilitySpans } from '../live/use-stability-spans';
+import { useGainMarks } from '../over/use-gain-marks';
 import type { BenchActions } from './bench-actions';
 
 /** All gains along the foot, and at the end whether they are kept. Where there is less room the state stands below, and under 860 the gains two by two. */
@@ -22,7 +22,7 @@ export const GainShelf = memo(function GainShelf({
   onKeep,
 }: BenchActions & { paired?: boolean }) {
   const { colors } = useTheme();
-  const spans = useStabilitySpans(gains);
+  const marks = useGainMarks(gains);
   const { remark } = useKeepButton();
   const edge = { borderColor: colors.rule };
   return (
@@ -34,7 +34,7 @@ export const GainShelf = memo(function GainShelf({
       <View style={[styles.gains, paired && styles.pairs]}>
         {gains.map((gain) => (
           <View key={gain} style={[styles.gain, paired && styles.quarter, edge]}>
-            <GainCell gain={gain} unstable={spans[gain]} onActive={onActiveGain} />
+            <GainCell gain={gain} marks={marks[gain]} onActive={onActiveGain} />
           </View>
         ))}
       </View>

@@ -8,6 +8,7 @@ import {
 } from '@/components/charts';
 import { useUnits } from '@/components/ui/units';
 import { useShownLoop, useShownResponses } from '../live/use-shown';
+import { useDemands, useOtherCurves } from '../over/use-demands';
 import type { Standing } from '../live/use-standing';
 
 interface Shown {
@@ -16,23 +17,28 @@ interface Shown {
   readonly moving?: boolean;
 }
 
-type Place<Props> = Omit<Props, 'a' | 'b' | 'units'> & Shown;
+type Place<Props> = Omit<Props, 'a' | 'b' | 'others' | 'limits' | 'units'> & Shown;
 
 /** The charts of A and B. Each follows the gain by itself; nothing round it is rendered with it. */
 export function ShownFrequency({ standing, moving, ...place }: Place<FrequencySheetProps>) {
   const units = useUnits();
   const a = useShownLoop(standing, moving);
-  return a && <FrequencySheet {...place} a={a} b={standing.b} units={units} />;
+  const others = useOtherCurves();
+  const limits = useDemands();
+  return a && <FrequencySheet {...place} a={a} b={standing.b} others={others} limits={limits} units={units} />;
 }
 
 export function ShownPlane({ standing, moving, ...place }: Place<PlaneChartProps>) {
   const units = useUnits();
   const a = useShownLoop(standing, moving);
-  return a && <PlaneChart {...place} a={a} b={standing.b} units={units} />;
+  const others = useOtherCurves();
+  const limits = useDemands();
+  return a && <PlaneChart {...place} a={a} b={standing.b} others={others} limits={limits} units={units} />;
 }
 
 export function ShownTime({ standing, moving, ...place }: Place<TimeSheetProps>) {
   const units = useUnits();
   const a = useShownResponses(standing, moving);
-  return a && <TimeSheet {...place} a={a} b={standing.b} units={units} />;
+  const limits = useDemands();
+  return a && <TimeSheet {...place} a={a} b={standing.b} limits={limits} units={units} />;
 }

@@ -14,7 +14,11 @@ interface CaseLineProps {
 /** Which case the curves show, and its delay budget. */
 export const CaseLine = memo(function CaseLine({ onCase }: CaseLineProps) {
   const { colors } = useTheme();
-  const { shownCase, cases, plant } = useBench().subject;
+  const {
+    shownCase,
+    plant,
+    conditions: { cases },
+  } = useBench().subject;
   const label = `Curves show ${shownCase.name}`;
   const items = cases.map(({ id, name }) => ({ key: id, label: name, current: id === shownCase.id, onSelect: () => onCase(id) }));
   return (

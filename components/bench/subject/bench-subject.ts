@@ -1,11 +1,13 @@
-import type { Case, CaseParameters, DesignRevision, FrozenCase, KeptAnalysis, PlantRevision, Project } from '@/contract';
+import type { Conditions, DesignRevision, FrozenCase, KeptAnalysis, Project } from '@/contract';
 
-/** What is on the bench: one design in one case of one project. */
+/** What is on the bench: one design over the cases of one project, the curves of one of them shown. */
 export interface BenchSubject {
   readonly project: Project;
+  readonly shownCase: FrozenCase;
+  /** That of the case that is shown. */
   readonly plant: FrozenCase['plant'];
-  readonly shownCase: { readonly id: string; readonly name: string; readonly parameters: CaseParameters };
-  readonly cases: readonly Case[];
+  /** What the design is judged against: as it stands now, or as an analysis froze it. */
+  readonly conditions: Conditions;
   /** The revision that is laid on the bench; null while the project has no design. */
   readonly opened: DesignRevision | null;
   /** The newest kept revision of the same design. */
@@ -20,22 +22,21 @@ export interface Wanted {
   readonly caseId?: string;
 }
 
-/** What a link asks for; an analysis names its design, revision and first case. */
+/** What a link asks for; an analysis names its design and revision. */
 export function wantedBy(link: Wanted, analysis: KeptAnalysis | null): Wanted {
   if (analysis === null) return link;
-  const { design, cases } = analysis.inputs;
-  return { design: design.id, revision: design.revision, caseId: link.caseId ?? cases[0]?.id };
+  const { design } = analysis.inputs;
+  return { design: design.id, revision: design.revision, caseId: link.caseId };
 }
 
 interface Holdings {
   readonly project: Project;
-  readonly cases: readonly Case[];
-  readonly plants: readonly PlantRevision[];
+  readonly conditions: Conditions;
   readonly designs: readonly DesignRevision[];
-  readonly analysis: KeptAnalysis | null;
-  /** Revisions that the lists do not hold, once they are fetched. */
+  /** A revision that the list does not hold, once it is fetched. */
   readonly openedRevision: DesignRevision | null;
-  readonly plantRevision: PlantRevision | null;
+  /** The case nearest its limit, as far as is known: shown where nobody chose one. */
+  readonly worstCaseId: string | undefined;
 }
 
 export type Lack = 'plant' | 'design' | 'case';
@@ -46,28 +47,23 @@ const newestOf = (designs: readonly DesignRevision[]) =>
 export const latestDesign = (designs: readonly DesignRevision[], wanted: Wanted): DesignRevision | null =>
   wanted.design === undefined ? newestOf(designs) : (designs.find(({ id }) => id === wanted.design) ?? null);
 
-export const caseShown = (cases: readonly Case[], wanted: Wanted): Case | null =>
-  wanted.caseId === undefined ? (cases[0] ?? null) : (cases.find(({ id }) => id === wanted.caseId) ?? null);
-
 /** The revision that must be fetched besides the newest; null where the newest is the one. */
 export const revisionToFetch = (latest: DesignRevision | null, wanted: Wanted): number | null =>
   latest === null || wanted.revision === undefined || wanted.revision === latest.revision ? null : wanted.revision;
 
-function shownFrom({ analysis, cases, plants, plantRevision }: Holdings, wanted: Wanted): Pick<BenchSubject, 'plant' | 'shownCase'> | Lack {
-  const frozen = analysis?.inputs.cases.find(({ id }) => id === wanted.caseId);
-  if (frozen) return { plant: frozen.plant, shownCase: frozen };
-  const shownCase = caseShown(cases, wanted);
-  if (shownCase === null) return plants.length === 0 ? 'plant' : 'case';
-  const plant = plantRevision ?? plants.find(({ id }) => id === shownCase.plantId);
-  return plant ? { plant, shownCase } : 'plant';
+function caseShown({ conditions: { cases }, worstCaseId }: Holdings, { caseId }: Wanted): FrozenCase | Lack {
+  if (cases.length === 0) return 'plant';
+  if (caseId !== undefined) return cases.find(({ id }) => id === caseId) ?? 'case';
+  return cases.find(({ id }) => id === worstCaseId) ?? cases[0];
 }
 
 /** Puts together what is laid on the bench, or says what is lacking. */
 export function benchSubject(holdings: Holdings, wanted: Wanted): BenchSubject | Lack {
-  const shown = shownFrom(holdings, wanted);
-  if (typeof shown === 'string') return shown;
-  const latest = latestDesign(holdings.designs, wanted);
+  const shownCase = caseShown(holdings, wanted);
+  if (typeof shownCase === 'string') return shownCase;
+  const { project, conditions, designs, openedRevision } = holdings;
+  const latest = latestDesign(designs, wanted);
   if (latest === null && wanted.design !== undefined) return 'design';
   const pinned = revisionToFetch(latest, wanted) !== null;
-  return { ...shown, project: holdings.project, cases: holdings.cases, latest, opened: pinned ? holdings.openedRevision : latest, pinned };
+  return { project, shownCase, plant: shownCase.plant, conditions, latest, opened: pinned ? openedRevision : latest, pinned };
 }

@@ -36,6 +36,10 @@ describe('room in words', () => {
     expect(said({ moreDeadTime: way(null, 10) })[2]).toBe('over 10,000 ms more dead time');
   });
 
+  it('keeps its places while it is looked for', () => {
+    expect(roomLines('sought', units).map(({ change }) => change)).toEqual(['… more gain', '… less gain', '… more dead time']);
+  });
+
   it('names the edge of stability where no limit comes before', () => {
     const unstable: FirstBreak = { amount: 1.5, quantity: null, limit: null, case: slow };
     expect(said({ moreGain: { ...way(null, 100), instability: unstable } })[0]).toBe('50 % more gain before it is unstable');

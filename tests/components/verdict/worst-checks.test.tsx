@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { worstChecks } from '@/components/verdict/worst-checks';
+import { mostPressing, worstChecks } from '@/components/verdict/worst-checks';
 import type { Check, Verdict } from '@/contract';
 
 const check = (use: number | null, verdict: Verdict): Check => ({
@@ -35,5 +35,13 @@ describe('the worst of each demand over all cases', () => {
 
   it('is nothing where nothing is demanded', () => {
     expect(worstChecks([{ case: { id: '0', name: 'nominal' }, checks: [] }])).toEqual([]);
+  });
+});
+
+describe('where there is no room for every demand', () => {
+  it('are those nearest their limits, in their own order', () => {
+    const uses = [-3, 0.2, -1, 0.9];
+    const demands = uses.map((use) => ({ check: check(use, 'pass'), case: { id: '0', name: 'nominal' }, uses: [use] }));
+    expect(mostPressing(demands, 2).map(({ uses: [use] }) => use)).toEqual([0.2, 0.9]);
   });
 });

@@ -1,24 +1,23 @@
 import { describe, expect, it } from 'vitest';
 import { analyseLoop } from '@/analysis';
-import { startSettings, type Settings } from '@/components/bench/draft/settings';
+import { contentWith, startSettings, type Settings } from '@/components/bench/draft/settings';
+import { judge } from '@/components/bench/engine/case-tasks';
 import { benchLoop } from '@/components/bench/live/bench-loop';
-import { judged } from '@/components/bench/live/judged';
 import { budgetWords, samplingWords } from '@/components/bench/strip/budget-words';
 import { marginNumbers } from '@/components/verdict/margin-numbers';
-import { stripWords } from '@/components/bench/strip/strip-words';
+import { spokenHeadline } from '@/components/bench/strip/strip-words';
 import type { BenchSubject } from '@/components/bench/subject/bench-subject';
-import { type Filter, type Loop, PlantContent } from '@/contract';
+import { type Conditions, type Filter, type FrozenCase, type Loop, PlantContent } from '@/contract';
 
 const units = { frequency: 'rad/s', magnitude: 'dB' } as const;
 const content = PlantContent.parse({
   plant: { kind: 'coefficients', numerator: [2.1], denominator: [0.35, 1, 0], deadTime: 0.08 },
   deadTimeBasis: 'measured',
 });
-const subject = {
-  plant: { ...content, id: 'plant', name: 'Speed', revision: 1 },
-  shownCase: { id: 'nominal', name: 'nominal', parameters: {} },
-  opened: null,
-} as unknown as BenchSubject;
+const plant = { ...content, id: 'plant', name: 'Speed', revision: 1 };
+const nominal: FrozenCase = { id: 'nominal', name: 'nominal', parameters: {}, axes: {}, basis: 'figures', plant };
+const conditions: Conditions = { cases: [nominal], limits: [], operatingRange: [] };
+const subject = { plant, shownCase: nominal, conditions, opened: null } as unknown as BenchSubject;
 
 /** The loop whose numbers api.md prints. */
 const settings: Settings = { ...startSettings, kp: 1.2, integral: 0.4, derivative: 0.1, filterTime: 0.02, statedContinuous: true };
@@ -26,22 +25,20 @@ const settings: Settings = { ...startSettings, kp: 1.2, integral: 0.4, derivativ
 function strip(changes: Partial<Settings> = {}) {
   const moved = { ...settings, ...changes };
   const loop: Loop = benchLoop(subject, moved, { reference: 1, load: 1 });
-  const analysis = analyseLoop(loop);
-  const headline = judged(subject, moved, analysis);
-  return { loop, analysis, headline, words: stripWords(headline, analysis, units) };
+  const { conditions } = subject;
+  const { headline } = judge({ design: contentWith(null, moved), conditions, cases: conditions.cases, detail: 'full' });
+  return { loop, analysis: analyseLoop(loop), headline, spoken: spokenHeadline(headline, units) };
 }
 
 describe('the strip', () => {
-  it('without limits shows Ms, not judged, with the reason', () => {
-    const { headline, words } = strip();
-    expect(headline.verdict).toBe('notJudged');
-    expect(words.headline).toMatchObject({ quantity: 'Ms', value: '1.56' });
-    expect(words.lines).toEqual(['at 2.92 rad/s', 'No limits are set.']);
-    expect(words.spoken).toBe('Ms 1.56, not judged.');
+  it('without limits says Ms, not judged, with the reason', () => {
+    const { headline, spoken } = strip();
+    expect(headline).toMatchObject({ verdict: 'notJudged', reason: 'No limits are set.' });
+    expect(spoken).toBe('Ms 1.56, not judged, nominal.');
   });
 
   it('says that nobody stated the sampling', () =>
-    expect(strip({ statedContinuous: false }).words.lines[1]).toContain('Nobody stated the sample time.'));
+    expect(strip({ statedContinuous: false }).headline.reason).toContain('Nobody stated the sample time.'));
 
   it('prints Ms and the margins with their places, as the API example has them', () => {
     const printed = marginNumbers(strip().analysis, units).map(({ name, value, place }) => [name, value, place]);
@@ -53,12 +50,10 @@ describe('the strip', () => {
     ]);
   });
 
-  it('of an unstable loop has the word in the place of the number, and how many poles', () => {
-    const { headline, words } = strip({ kp: 40 });
+  it('of an unstable loop has the word in the place of the number', () => {
+    const { headline, spoken } = strip({ kp: 40 });
     expect(headline.verdict).toBe('fail');
-    expect(words.headline.value).toBe('unstable');
-    expect(words.lines[0]).toMatch(/^\d+ poles? on the wrong side$/);
-    expect(words.spoken).toMatch(/^Unstable, /);
+    expect(spoken).toBe('unstable, fail, nominal.');
   });
 
   it('calls a margin that does not exist "no limit"', () => {

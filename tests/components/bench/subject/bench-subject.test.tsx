@@ -1,34 +1,29 @@
 import { describe, expect, it } from 'vitest';
 import { benchSubject, type Wanted, wantedBy } from '@/components/bench/subject/bench-subject';
 import { benchLink } from '@/components/bench/subject/bench-link';
-import type { Case, DesignRevision, KeptAnalysis, PlantRevision, Project } from '@/contract';
+import type { Conditions, DesignRevision, FrozenCase, KeptAnalysis, Project } from '@/contract';
 
 const project = { id: 'p' } as Project;
-const plant = { id: 'plant', revision: 3 } as PlantRevision;
-const nominal = { id: 'nominal', name: 'nominal', plantId: 'plant', plantRevision: null, parameters: {} } as Case;
+const plant = { id: 'plant', revision: 3 } as FrozenCase['plant'];
+const nominal = { id: 'nominal', name: 'nominal', parameters: {}, plant } as FrozenCase;
 const heavy = { ...nominal, id: 'heavy', name: 'heavy' };
+const conditions: Conditions = { cases: [nominal, heavy], limits: [], operatingRange: [] };
 const design = (id: string, revision: number, createdAt: string) => ({ id, revision, createdAt }) as DesignRevision;
 const older = design('older', 2, '2026-05-01');
 const newer = design('newer', 6, '2026-05-02');
 
 const subject = (wanted: Wanted, changes: Partial<Parameters<typeof benchSubject>[0]> = {}) =>
-  benchSubject(
-    {
-      project,
-      plants: [plant],
-      cases: [nominal, heavy],
-      designs: [older, newer],
-      analysis: null,
-      openedRevision: null,
-      plantRevision: null,
-      ...changes,
-    },
-    wanted,
-  );
+  benchSubject({ project, conditions, designs: [older, newer], openedRevision: null, worstCaseId: undefined, ...changes }, wanted);
 
 describe('what lies on the bench', () => {
   it('is the design that was kept last, in the first case', () => {
     expect(subject({})).toMatchObject({ opened: newer, latest: newer, pinned: false, shownCase: nominal, plant });
+  });
+
+  it('is shown in the case nearest its limit, where nobody chose another and it is still there', () => {
+    expect(subject({}, { worstCaseId: 'heavy' })).toMatchObject({ shownCase: heavy });
+    expect(subject({ caseId: 'nominal' }, { worstCaseId: 'heavy' })).toMatchObject({ shownCase: nominal });
+    expect(subject({}, { worstCaseId: 'gone' })).toMatchObject({ shownCase: nominal });
   });
 
   it('is the design and case that the address names', () => {
@@ -51,21 +46,16 @@ describe('what lies on the bench', () => {
   });
 
   it('is nothing without a plant, or where the address names what is not there', () => {
-    expect(subject({}, { plants: [], cases: [] })).toBe('plant');
+    expect(subject({}, { conditions: { ...conditions, cases: [] } })).toBe('plant');
     expect(subject({ design: 'gone' })).toBe('design');
     expect(subject({ caseId: 'gone' })).toBe('case');
   });
 
-  it('is what an analysis froze, its plant included', () => {
-    const frozenPlant = { ...plant, revision: 1 };
-    const inputs = { design: { id: 'newer', revision: 3 }, cases: [{ ...nominal, plant: frozenPlant }], limits: [] };
-    const analysis = { inputs } as unknown as KeptAnalysis;
+  it('is the design and revision that an analysis froze', () => {
+    const analysis = { inputs: { design: { id: 'newer', revision: 3 }, ...conditions } } as unknown as KeptAnalysis;
     const wanted = wantedBy({}, analysis);
-    expect(wanted).toEqual({ design: 'newer', revision: 3, caseId: 'nominal' });
-    expect(subject(wanted, { analysis, openedRevision: design('newer', 3, '2026-04-01') })).toMatchObject({
-      plant: frozenPlant,
-      pinned: true,
-    });
+    expect(wanted).toEqual({ design: 'newer', revision: 3, caseId: undefined });
+    expect(subject(wanted, { openedRevision: design('newer', 3, '2026-04-01') })).toMatchObject({ pinned: true });
   });
 });
 
