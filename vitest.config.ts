@@ -31,6 +31,7 @@ export default defineConfig({
           name: 'components',
           environment: 'happy-dom',
           include: ['tests/components/**/*.test.tsx'],
+          testTimeout: 30_000,
           server: { deps: { inline: [/react-native/, /expo/] } },
         },
       },
