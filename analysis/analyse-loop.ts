@@ -1,14 +1,12 @@
 import type { Analysis, Loop, TimeResponse } from '@/contract';
-import { buildLoop } from '@/analysis/loop/build-loop';
-import { ContinuousLoop } from '@/analysis/margins/continuous-loop';
 import { exactValues } from '@/analysis/margins/exact-values';
+import { buildLoop } from '@/analysis/loop/build-loop';
 import { drawnGrid, frequencyResponse } from '@/analysis/margins/frequency-response';
 import { loopNumbers } from '@/analysis/margins/loop-numbers';
-import { loopWarnings } from '@/analysis/margins/loop-warnings';
-import { refuseSingular } from '@/analysis/margins/refuse-singular';
 import type { Detail } from '@/analysis/margins/search-grid';
-import { judgeStability } from '@/analysis/margins/stability';
-import { timeResponse } from '@/analysis/time';
+import { analysedContinuous } from './analysed-continuous';
+import type { AnalysedLoop } from './analysed-loop';
+import { analysedSampled } from './analysed-sampled';
 
 /** Changes whenever a number of an analysis can change. */
 export const engineVersion = '1.0.0';
@@ -32,25 +30,25 @@ export interface AnalyseOptions {
  * @throws LoopError where the loop has no meaning, is not supported, or would take too long
  */
 export const analyseLoop = (input: Loop, { curves = true, responses = true, detail = 'full' }: AnalyseOptions = {}): Analysis => {
-  const model = buildLoop(input);
-  const loop = new ContinuousLoop(model);
-  refuseSingular(loop);
-  const { margins, sensitivity, bandwidth, crossovers, startsOutside } = loopNumbers(loop, detail);
-  const stability = judgeStability(model, loop, { crossovers, startsOutside, modulus: margins.modulus });
+  const analysed = analysedLoop(input);
+  const { loop } = analysed;
+  const numbers = loopNumbers(loop, detail);
+  const { margins, sensitivity, bandwidth, crossovers, startsOutside } = numbers;
+  const stability = analysed.judge({ crossovers, startsOutside, modulus: margins.modulus });
   const grid = curves ? drawnGrid(loop, { crossovers, detail }) : null;
   const { stable, unstablePoles, encirclements, encirclementsNeeded, poles } = stability;
   const points = curves && detail === 'full' ? {} : { points: FEW_POINTS };
-  const times = responses ? timeResponse(model, input.responses, { stable, closedLoopPoles: poles }, points) : NO_RESPONSES;
+  const times = responses ? analysed.respond(input.responses, stability, points) : NO_RESPONSES;
   return {
     engineVersion,
     closedLoop: { stable, unstablePoles, encirclements, encirclementsNeeded, poles: poles && [...poles] },
-    margins,
+    margins: { ...margins, delay: analysed.delayMargin(numbers, stability) },
     sensitivity,
     bandwidth,
     ...(grid ? { frequencyResponse: frequencyResponse(grid) } : {}),
     at: exactValues(loop, input.at),
     timeResponse: curves ? times.timeResponse : withoutSeries(times.timeResponse),
-    warnings: [...loopWarnings(input, loop, { stability, capped: grid?.capped ?? false }), ...times.warnings],
+    warnings: [...analysed.warnings({ stability, capped: grid?.capped ?? false }), ...times.warnings],
   };
 };
 
@@ -63,7 +61,12 @@ const withoutSeries = (response: TimeResponse | null): TimeResponse | null => re
 export const withResponses = (analysis: Analysis, input: Loop, detail: Detail = 'full'): Analysis => {
   const { stable, poles } = analysis.closedLoop;
   const points = detail === 'full' ? {} : { points: FEW_POINTS };
-  const times = timeResponse(buildLoop(input), input.responses, { stable, closedLoopPoles: poles }, points);
+  const times = analysedLoop(input).respond(input.responses, { stable, poles }, points);
   const others = analysis.warnings.filter(({ code }) => times.warnings.every((warning) => warning.code !== code));
   return { ...analysis, timeResponse: times.timeResponse, warnings: [...others, ...times.warnings] };
+};
+
+const analysedLoop = (input: Loop): AnalysedLoop => {
+  const model = buildLoop(input);
+  return model.sampled ? analysedSampled(input, model, model.sampled) : analysedContinuous(input, model);
 };

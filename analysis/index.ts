@@ -8,5 +8,7 @@ export { gainsInForm, type Rewritten, type TimedGains } from './loop/gains-in-fo
 export { LoopError, type LoopErrorCode } from './loop/loop-error';
 export type { LoopModel, ParallelGains, Rational } from './loop/model';
 export { toParallelGains } from './loop/parallel-gains';
+export { differenceEquation, type DifferenceEquation } from './sampled/difference-equation';
+export type { DigitalFilter } from './sampled/digital-filter';
 export { plantResponse, type PlantResponse } from './plant-response';
 export type { Complex } from './numbers/complex';

@@ -1,6 +1,8 @@
 import type { LoopModel } from '@/analysis/loop/model';
 import { ContinuousLoop } from '@/analysis/margins/continuous-loop';
 import { IM, PHASE, RE, ROW } from '@/analysis/margins/sample';
+import { SampledLoop } from '@/analysis/sampled/sampled-loop';
+import { sampledModel } from '@/analysis/sampled/sampled-model';
 
 /** The exact loop at one frequency, for a cursor. Magnitudes are factors. */
 export interface LoopPoint {
@@ -13,11 +15,11 @@ export interface LoopPoint {
 }
 
 /**
- * Evaluates one loop at any ω > 0 rad/s: L, |S| and |T|. The loop is prepared once, so that a cursor can ask often.
+ * Evaluates one loop at any ω > 0 rad/s, below π/h if it is sampled: L, |S| and |T|. The loop is prepared once, so that a cursor can ask often.
  * @throws LoopError where the loop has no finite value there
  */
 export const loopAt = (model: LoopModel): ((omega: number) => LoopPoint) => {
-  const loop = new ContinuousLoop(model);
+  const loop = model.sampled ? new SampledLoop(sampledModel(model, model.sampled)) : new ContinuousLoop(model);
   const row = new Float64Array(ROW);
   return (omega) => {
     loop.sampleAt(omega, row, 0);

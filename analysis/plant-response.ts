@@ -44,5 +44,6 @@ const alone = (plant: Loop['plant']): LoopModel => {
     filters: UNITY,
     weights: { proportional: 1, derivative: 1 },
     feedforwardGain: 0,
+    sampled: null,
   };
 };

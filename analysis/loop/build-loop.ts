@@ -7,12 +7,10 @@ import { toParallelGains } from './parallel-gains';
 import { buildPlant } from './plant';
 
 /**
- * A contract Loop as one continuous loop in factored form.
+ * A contract Loop as one loop in factored form.
  * @throws LoopError with a JSON Pointer into the Loop where it has no meaning or is not yet supported
  */
 export const buildLoop = (loop: Loop): LoopModel => {
-  if (loop.sampling)
-    throw unsupported('/sampling', 'Loops with a sample period are not analysed yet; leave it out to analyse the continuous loop.');
   if (loop.actuator) throw unsupported('/actuator', 'Actuator limits are not analysed yet; leave them out to analyse the linear loop.');
   const { rational, deadTime } = buildPlant(loop.plant);
   const { controller } = loop;
@@ -26,6 +24,7 @@ export const buildLoop = (loop: Loop): LoopModel => {
     filters: buildFilters(controller.filters),
     weights: controller.setpointWeights,
     feedforwardGain: controller.feedforward.gain,
+    sampled: loop.sampling && { sampling: loop.sampling, filters: controller.filters },
   };
 };
 

@@ -1,3 +1,4 @@
+import type { Loop } from '@/contract';
 import type { Complex } from '@/analysis/numbers/complex';
 
 /** Coefficients in descending powers of s. */
@@ -29,10 +30,16 @@ export interface ParallelGains {
   readonly filterTime: number;
 }
 
+/** How a computer runs the controller; its filters as they were asked for, for each has a digital equivalent of its own. */
+export interface SampledRun {
+  readonly sampling: NonNullable<Loop['sampling']>;
+  readonly filters: Loop['controller']['filters'];
+}
+
 /**
- * One continuous loop, ready to be evaluated: what plant, controller and sensor of a contract Loop become.
+ * One loop, ready to be evaluated: what plant, controller and sensor of a contract Loop become.
  *
- * L(s) = plant·filters·controller·sensor·e^(−s(plantDeadTime + sensorDeadTime)), negative feedback.
+ * In continuous time L(s) = plant·filters·controller·sensor·e^(−s(plantDeadTime + sensorDeadTime)), negative feedback.
  */
 export interface LoopModel {
   readonly plant: Rational;
@@ -47,4 +54,6 @@ export interface LoopModel {
   readonly filters: Rational;
   readonly weights: { readonly proportional: number; readonly derivative: number };
   readonly feedforwardGain: number;
+  /** null: in continuous time. */
+  readonly sampled: SampledRun | null;
 }

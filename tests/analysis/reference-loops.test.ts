@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { analyseLoop } from '@/analysis';
 import { resolveFormula } from '@/analysis/formula';
 import { Loop } from '@/contract';
-import { continuousLoops, type Expected } from './support/reference-loops';
+import { referenceLoops, type Expected } from './support/reference-loops';
 
 /** numerics.md's tolerances. A flat peak fixes its height far better than its place, and a threshold on a flat slope too. */
 const RELATIVE = 1e-6;
@@ -16,7 +16,7 @@ const close = (got: number | null | undefined, want: number | null, relative: nu
   expect(Math.abs(got! - want)).toBeLessThanOrEqual(Math.max(relative * Math.abs(want), absolute));
 };
 
-describe.each(continuousLoops)('$id: $title', ({ loop, expect: want }) => {
+describe.each(referenceLoops)('$id: $title', ({ loop, expect: want }) => {
   const at = want.samples.map(({ frequency }) => frequency);
   const analysis = analyseLoop(resolveFormula(Loop.parse({ ...loop, at })));
 

@@ -21,7 +21,6 @@ describe('a loop without meaning is refused where it was entered', () => {
     ['a missing conjugate', { plant: { kind: 'roots', gain: 1, poles: [{ re: -1, im: 0 }, { re: -1, im: 2 }] }, controller }, '/plant/poles/1', 'missingConjugate'], // prettier-ignore
     ['feedthrough of −1', { plant: coefficients([-1, 1], [1, 3]), controller }, '/controller', 'singularLoop'],
     ['a formula not yet read', { plant: { kind: 'formula', text: '1/s' }, controller }, '/plant/kind', 'unsupported'],
-    ['a sample period', { plant: coefficients([1], [1, 1]), controller, sampling: { period: 0.1, integral: 'backward', derivative: 'backward' } }, '/sampling', 'unsupported'], // prettier-ignore
     [
       'actuator limits',
       { plant: coefficients([1], [1, 1]), controller, actuator: { minimum: -1, maximum: 1 } },

@@ -27,9 +27,12 @@ export interface ReferenceLoop {
   title: string;
   loop: LoopInput;
   expect: Expected;
+  time?: { times: number[]; reference: number[]; load: number[]; metrics: { steadyStateError: number | null } };
 }
 
 const { cases } = JSON.parse(readFileSync('tests/fixtures/loops.json', 'utf8')) as { cases: ReferenceLoop[] };
 
-/** Every continuous loop of the fixture. */
+/** Every loop of the fixture, continuous and sampled. */
+export const referenceLoops = cases;
+
 export const continuousLoops = cases.filter(({ loop }) => !loop.sampling);

@@ -106,10 +106,10 @@ describe('designs', () => {
 
   it('refuse at the door what the engine cannot compute', async () => {
     const sampling = { period: 0.01, integral: 'backward', derivative: 'backward' };
-    const actuator = { minimum: -1, maximum: 1 };
+    const notch = { kind: 'notch', frequency: 400, depth: 0.1, width: 0.3 };
     for (const [part, pointer] of [
-      [{ sampling }, '/sampling'],
-      [{ actuator }, '/actuator'],
+      [{ sampling, controller: { form: 'parallel', kp: 1, filters: [notch] } }, '/controller/filters/0/frequency'],
+      [{ actuator: { minimum: -1, maximum: 1 } }, '/actuator'],
     ] as const) {
       expect(await ada.call('POST', `${mine.at}/designs`, { ...aDesign, ...part })).toMatchObject({
         status: 422,
@@ -120,5 +120,6 @@ describe('designs', () => {
         body: { errors: [{ pointer }] },
       });
     }
+    expect(await ada.call('POST', `${mine.at}/designs`, { ...aDesign, sampling })).toMatchObject({ status: 201 });
   });
 });
