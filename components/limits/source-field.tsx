@@ -37,8 +37,8 @@ export function SourceField({ label, text, onChange }: SourceFieldProps) {
 }
 
 const styles = StyleSheet.create({
-  one: { paddingVertical: 12 },
-  two: { paddingVertical: 3 },
+  one: { paddingVertical: 11 },
+  two: { paddingVertical: 3.5 },
   input: {
     width: '100%',
     height: touch,
@@ -47,6 +47,6 @@ const styles = StyleSheet.create({
     borderRadius: corner,
     fontFamily: fonts.narrow[500],
     fontSize: SIZE,
-    lineHeight: 17,
+    lineHeight: 18,
   },
 });

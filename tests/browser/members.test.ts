@@ -41,10 +41,11 @@ async function openMembers(size: SizeName) {
 }
 
 /** On a phone the form stands in a dialog, opened from the foot. */
-async function invite({ page, visitor }: Awaited<ReturnType<typeof visit>>, size: SizeName, email: string) {
-  if (size === 'phone' && !(await page.getByRole('dialog').isVisible())) await visitor.press('Invite');
+async function invite({ page, visitor }: Pick<Awaited<ReturnType<typeof visit>>, 'page' | 'visitor'>, size: SizeName, email: string) {
+  const dialog = page.getByRole('dialog', { name: 'Invite' });
+  if (size === 'phone' && !(await dialog.isVisible())) await visitor.press('Invite');
   await visitor.fill('E-mail of someone new', email);
-  await page.getByRole('button', { name: 'Invite', exact: true }).last().click();
+  await (size === 'phone' ? dialog : page).getByRole('button', { name: 'Invite', exact: true }).click();
 }
 
 describe.each(['phone', 'wide'] as const)('members at the %s size', (size) => {
@@ -90,7 +91,7 @@ describe.each(['phone', 'wide'] as const)('members at the %s size', (size) => {
     await guest.visitor.sees('No such project, or it is not yours to see.');
     expect(owner.complaints.filter((text) => !/422|409/.test(text))).toEqual([]);
     await Promise.all([owner.context.close(), guest.context.close()]);
-  });
+  }, 240_000);
 });
 
 describe('a mailed invitation', () => {
