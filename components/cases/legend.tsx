@@ -40,6 +40,6 @@ export function Legend() {
 }
 
 const styles = StyleSheet.create({
-  legend: { flexDirection: 'row', flexWrap: 'wrap', columnGap: 18, rowGap: 4, alignItems: 'center', maxWidth: 580, flexShrink: 1 },
+  legend: { flexDirection: 'row', flexWrap: 'wrap', columnGap: 18, rowGap: 4, alignItems: 'center', maxWidth: 480, flexShrink: 1 },
   entry: { flexDirection: 'row', alignItems: 'center', gap: 6 },
 });

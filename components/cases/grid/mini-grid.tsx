@@ -1,5 +1,6 @@
 import { memo, useMemo } from 'react';
 import { Pressable, StyleSheet, View } from 'react-native';
+import { worstVerdict } from '@/analysis/project';
 import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
 import { useUnits } from '@/components/ui/units';
@@ -8,7 +9,7 @@ import type { Limit, Quantity } from '@/contract';
 import { quantityName } from '@/figures/quantity-text';
 import { verdictWords } from '@/figures/verdict-shape';
 import type { CaseGridLayout } from '../model/case-grid';
-import { caseNumber, worstOfVerdicts } from '../model/case-number';
+import { caseNumber } from '../model/case-number';
 import type { CaseView } from '../model/case-view';
 import { worstNumber } from '../model/worst-number';
 import { CellFace } from './case-cell';
@@ -28,11 +29,12 @@ export const MiniGrid = memo(function MiniGrid({ layout, views, quantity, limits
   const units = useUnits();
   const { table, worst, verdict } = useMemo(() => {
     const numbers = views.map((view) => caseNumber(view, quantity, units));
+    const verdicts = numbers.flatMap((number) => number.verdict ?? []);
     const byId = new Map(numbers.map((number) => [number.view.kept.id, number]));
     return {
       table: gridTable(layout, { quantity, numbers: byId, units, turned: false }),
       worst: worstNumber(numbers, quantity),
-      verdict: worstOfVerdicts(numbers.flatMap((number) => number.verdict ?? [])),
+      verdict: verdicts.length === 0 ? null : worstVerdict(verdicts),
     };
   }, [layout, views, quantity, units]);
   const demands = limits.filter((limit) => limit.quantity === quantity).map((limit) => demandText(limit, units));

@@ -16,7 +16,6 @@ export interface CaseNumber {
   readonly use: number | null;
 }
 
-const fromWorst: readonly Verdict[] = ['fail', 'notJudged', 'tight', 'pass'];
 const severity = ({ verdict, use }: Check): number => (use === null && verdict === 'fail' ? Infinity : (use ?? -Infinity));
 
 /** A quantity may be demanded twice, as a least and as a greatest value: the one nearer its limit counts. */
@@ -29,9 +28,6 @@ export function checkOf(view: CaseView, quantity: Quantity): Check | null {
 export function verdictOf({ stated, outdated }: CaseView, { verdict }: Check): Verdict {
   return outdated || (!stated && verdict !== 'fail') ? 'notJudged' : verdict;
 }
-
-/** The worst of several verdicts. */
-export const worstOfVerdicts = (verdicts: readonly Verdict[]): Verdict | null => fromWorst.find((one) => verdicts.includes(one)) ?? null;
 
 export function caseNumber(view: CaseView, quantity: Quantity, units: ReaderUnits): CaseNumber {
   const check = checkOf(view, quantity);

@@ -5,7 +5,7 @@ import { useUnits } from '@/components/ui/units';
 import { VerdictWord } from '@/components/ui/verdict-word';
 import { checkValueText, demandText } from '@/components/verdict/demand-text';
 import type { Check } from '@/contract';
-import { quantityName, quantityText } from '@/figures/quantity-text';
+import { demandedText, quantityName } from '@/figures/quantity-text';
 import { verdictOf } from '../model/case-number';
 import type { CaseView } from '../model/case-view';
 
@@ -39,7 +39,7 @@ interface CheckLineProps {
 function CheckLine({ check, view, unstable, barred }: CheckLineProps) {
   const { colors } = useTheme();
   const units = useUnits();
-  const target = check.target === null ? 'no target' : `target ${quantityText(check.quantity, check.target, units).text}`;
+  const target = check.target === null ? 'no target' : `target ${demandedText(check.quantity, check.target, units)}`;
   return (
     <View role="row" style={[styles.row, { backgroundColor: barred ? colors.bar : colors.paper }]}>
       <View role="rowheader" style={styles.name}>
