@@ -6,6 +6,8 @@ import { boundWords } from './model/row-words';
 
 export interface AddQuantityProps {
   label: string;
+  /** It stands at the foot of the page. */
+  rises: boolean;
   rows: readonly DemandRow[];
   onAdd: (row: DemandRow) => void;
 }
@@ -19,12 +21,12 @@ export const addable = (rows: readonly DemandRow[]): DemandRow[] => {
 };
 
 /** What else can be demanded, by name and by the sense of it. */
-export function AddQuantity({ label, rows, onAdd }: AddQuantityProps) {
+export function AddQuantity({ label, rises, rows, onAdd }: AddQuantityProps) {
   const items = addable(rows).map((row) => ({
     key: keyOf(row),
     label: quantityName(row.quantity),
     hint: boundWords[row.bound],
     onSelect: () => onAdd(row),
   }));
-  return items.length === 0 ? null : <Menu label={label} rises items={items} />;
+  return items.length === 0 ? null : <Menu label={label} rises={rises} items={items} />;
 }

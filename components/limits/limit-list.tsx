@@ -37,7 +37,7 @@ export function LimitList({ rows, changed }: LimitListProps) {
   ] as const;
   const Row = wide ? WideLimitRow : StackedLimitRow;
   return (
-    <View>
+    <View style={{ zIndex: 1 }}>
       {wide ? <ColumnHeads gap={COLUMN_GAP} columns={heads} /> : null}
       <View role="list" aria-label="Limits">
         {rows.map((row, index) => (

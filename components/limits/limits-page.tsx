@@ -24,7 +24,7 @@ export function LimitsPage({ kept }: { kept: ReadLimits }) {
   const { table, rows, editing, keeping } = page;
   const add = (
     <View style={styles.row}>
-      <AddQuantity label={phone ? 'Add a quantity' : 'Add'} rows={rows} onAdd={page.add} />
+      <AddQuantity label={phone ? 'Add a quantity' : 'Add'} rises={phone} rows={rows} onAdd={page.add} />
     </View>
   );
   const keep = (

@@ -14,7 +14,7 @@ export function MemberList() {
   const manages = useMay('manage') && !archived;
   const members = useQuery(membersQuery(id));
   return (
-    <>
+    <View style={{ gap: 12, zIndex: 2 }}>
       <Heading level={2}>Members</Heading>
       <QueryView query={members} waiting="Fetching the members">
         {(items) => {
@@ -36,6 +36,6 @@ export function MemberList() {
           );
         }}
       </QueryView>
-    </>
+    </View>
   );
 }

@@ -35,9 +35,13 @@ export function MembersScreen() {
     <Page title="Members" sub={name} foot={foot}>
       <DocumentTitle parts={['Members', name]} />
       <View style={phone ? styles.stack : styles.side}>
-        <Paper style={[styles.column, !phone && styles.more]}>
+        <Paper style={[styles.column, styles.over, !phone && styles.more]}>
           <MemberList />
-          {mayInvite && !phone ? <InviteForm onInvited={done} /> : null}
+          {mayInvite && !phone ? (
+            <View style={styles.over}>
+              <InviteForm onInvited={done} />
+            </View>
+          ) : null}
           {invited ? (
             <Banner lead={`A letter is on its way to ${invited}.`} text="Who confirms that address with an account is a member." />
           ) : null}
@@ -60,6 +64,8 @@ const styles = StyleSheet.create({
   side: { flexDirection: 'row', alignItems: 'flex-start', gap: 20 },
   stack: { gap: 8 },
   column: { gap: 12 },
+  // The lists that drop out of its menus lie over what follows.
+  over: { zIndex: 1 },
   more: { flex: 6, minWidth: 0 },
   share: { flex: 5, minWidth: 0 },
 });

@@ -57,6 +57,7 @@ describe.each(['phone', 'wide'] as const)('members at the %s size', (size) => {
     await invite(owner, size, 'rasmus@heron-racing.example');
     await owner.visitor.sees(/invited already/);
     const email = `lena-${size}@kerb.example`;
+    const name = `Lena of the ${size}`;
     await invite(owner, size, email);
     await owner.visitor.sees(`A letter is on its way to ${email}.`);
     await owner.page.getByRole('list', { name: 'Invitations' }).getByText(email).waitFor();
@@ -66,7 +67,7 @@ describe.each(['phone', 'wide'] as const)('members at the %s size', (size) => {
     await guest.visitor.sees(/Mira Castellan invites you to .+, as viewer\./);
     expect(await axeFindings(guest.page)).toEqual([]);
     await guest.visitor.press('Make an account');
-    await guest.visitor.fill('Name', 'Lena Ofori');
+    await guest.visitor.fill('Name', name);
     expect(await guest.page.getByLabel('E-mail', { exact: true }).inputValue()).toBe(email);
     await guest.visitor.fill('Password', 'a-long-and-dry-password');
     await guest.visitor.press('Make the account');
@@ -75,17 +76,17 @@ describe.each(['phone', 'wide'] as const)('members at the %s size', (size) => {
     const place = new URL(guest.page.url()).pathname;
 
     await owner.page.reload();
-    await owner.page.getByRole('button', { name: 'Role of Lena Ofori, viewer' }).click();
+    await owner.page.getByRole('button', { name: `Role of ${name}, viewer` }).click();
     await owner.page.getByRole('menuitem', { name: /^editor/ }).click();
-    await owner.page.getByRole('button', { name: 'Role of Lena Ofori, editor' }).waitFor();
+    await owner.page.getByRole('button', { name: `Role of ${name}, editor` }).waitFor();
     expect(((await (await guest.page.request.get(`${server.url}/api${place}`)).json()) as { role: string }).role).toBe('editor');
 
     if (size === 'phone') {
-      await owner.page.getByRole('button', { name: 'Role of Lena Ofori, editor' }).click();
+      await owner.page.getByRole('button', { name: `Role of ${name}, editor` }).click();
       await owner.page.getByRole('menuitem', { name: /^Take out/ }).click();
-    } else await owner.visitor.press('Take Lena Ofori out');
+    } else await owner.visitor.press(`Take ${name} out`);
     await owner.page.getByRole('dialog').getByRole('button', { name: 'Take out' }).click();
-    await owner.page.getByText('Lena Ofori').first().waitFor({ state: 'detached' });
+    await owner.page.getByText(name).first().waitFor({ state: 'detached' });
     expect((await guest.page.request.get(`${server.url}/api${place}`)).status()).toBe(404);
     await guest.page.reload();
     await guest.visitor.sees('No such project, or it is not yours to see.');
