@@ -61,6 +61,12 @@ function digitsAndUnit(quantity: Quantity, value: number, units: ReaderUnits): [
   }
 }
 
+/** A limit or a target: a whole number of a unit has no idle zero. 45°, 6 dB, 0.20 s, and 1.70 as every factor. */
+export function demandedText(quantity: Quantity, value: number, units: ReaderUnits): string {
+  const { number, unit } = quantityText(quantity, value, units);
+  return withUnit(unit === '' ? number : number.replace(/\.0+$/, ''), unit);
+}
+
 /** The value of a quantity, given in the contract's unit, as every screen prints it. */
 export function quantityText(quantity: Quantity, value: number, units: ReaderUnits): QuantityText {
   const [number, unit] = digitsAndUnit(quantity, value, units);

@@ -5,10 +5,10 @@ import { useUnits } from '@/components/ui/units';
 import { VerdictWord } from '@/components/ui/verdict-word';
 import { checkValueText, demandText } from '@/components/verdict/demand-text';
 import type { Check } from '@/contract';
-import { quantityName, quantityText, type ReaderUnits } from '@/figures/quantity-text';
+import { demandedText, quantityName, type ReaderUnits } from '@/figures/quantity-text';
 
 const targetText = ({ quantity, target }: Check, units: ReaderUnits) =>
-  target === null ? 'no target' : `target ${quantityText(quantity, target, units).text}`;
+  target === null ? 'no target' : `target ${demandedText(quantity, target, units)}`;
 
 /** What is demanded of one case: its number, the demand and the verdict on it. */
 export function CheckList({ checks, heading }: { checks: readonly Check[]; heading: string }) {

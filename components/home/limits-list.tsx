@@ -8,14 +8,14 @@ import { Text } from '@/components/ui/text';
 import { useUnits } from '@/components/ui/units';
 import { demandText } from '@/components/verdict/demand-text';
 import type { Limit } from '@/contract';
-import { quantityName, quantityText, type ReaderUnits } from '@/figures/quantity-text';
+import { demandedText, quantityName, type ReaderUnits } from '@/figures/quantity-text';
 import { limitsQuery } from '@/hooks/queries/limits';
 import { SectionHead } from './section-head';
 
 const factOf = (limit: Limit, units: ReaderUnits): Fact => ({
   name: quantityName(limit.quantity),
   value: demandText(limit, units),
-  aside: limit.target === null ? limit.source : `target ${quantityText(limit.quantity, limit.target, units).text}`,
+  aside: limit.target === null ? limit.source : `target ${demandedText(limit.quantity, limit.target, units)}`,
 });
 
 /** What the project demands, and the way to change it. */

@@ -6,12 +6,14 @@ import { roomLines } from './room-lines';
 
 interface RoomBlockProps {
   room: Room | 'sought';
+  /** The case that stands beside already: only another one is named. */
+  besideCase?: string;
   /** On a phone each way is one running line. */
   compact?: boolean;
 }
 
 /** How much more gain, less gain and dead time the loop takes before the first limit breaks, and which. */
-export function RoomBlock({ room, compact = false }: RoomBlockProps) {
+export function RoomBlock({ room, besideCase, compact = false }: RoomBlockProps) {
   const lines = roomLines(room, useUnits());
   return (
     <View role="group" aria-label="Room" style={compact ? styles.compact : styles.block}>
@@ -26,7 +28,7 @@ export function RoomBlock({ room, compact = false }: RoomBlockProps) {
             {change}
           </Text>
           <Text step="note" tone="ink2" style={styles.before}>
-            {[before, caseName].filter(Boolean).join(', ')}
+            {[before, caseName === besideCase ? null : caseName].filter(Boolean).join(', ')}
           </Text>
         </View>
       ))}

@@ -1,6 +1,6 @@
 import type { FirstBreak, Room, RoomWay } from '@/contract';
 import { formatFactor, formatRoomMilliseconds, formatRoomPercent } from '@/figures/format';
-import { quantityName, quantityText, type ReaderUnits } from '@/figures/quantity-text';
+import { demandedText, quantityName, type ReaderUnits } from '@/figures/quantity-text';
 
 /** One way in which the loop may change, and what stops it first. */
 export interface RoomLine {
@@ -25,7 +25,7 @@ const changes: readonly (readonly [keyof Room, (amount: number) => string, strin
 
 function stop({ quantity, limit }: FirstBreak, units: ReaderUnits): string {
   if (quantity === null) return 'before it is unstable';
-  return `before ${quantityName(quantity)}${limit === null ? '' : ` ${quantityText(quantity, limit, units).text}`}`;
+  return `before ${quantityName(quantity)}${limit === null ? '' : ` ${demandedText(quantity, limit, units)}`}`;
 }
 
 function line(way: RoomWay, [key, amount, words]: (typeof changes)[number], units: ReaderUnits): RoomLine {

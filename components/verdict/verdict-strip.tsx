@@ -58,9 +58,9 @@ export function VerdictStrip({ headline, room, results, instead, label = 'Worst 
           {headline.beside && <BesideLine beside={headline.beside} />}
         </View>
       </View>
-      {room && !phone ? <RoomBlock room={room} /> : null}
+      {room && !phone ? <RoomBlock room={room} besideCase={headline.case?.name} /> : null}
       {(!phone && instead) || <Demands headline={headline} results={results} />}
-      {room && phone ? <RoomBlock room={room} compact /> : null}
+      {room && phone ? <RoomBlock room={room} besideCase={headline.case?.name} compact /> : null}
     </View>
   );
 }

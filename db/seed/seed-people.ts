@@ -1,5 +1,7 @@
 import { randomUUID } from 'node:crypto';
+import { defaultPreferences } from '@/contract';
 import type { Context } from '@/server/context';
+import { changeUser } from '../stores/user-store';
 import { team, teamMember } from '../tables';
 import { transact } from '../transact';
 import { demoPassword, demoTeam, engineer, others, type DemoPerson } from './demo-people';
@@ -15,11 +17,13 @@ export interface DemoTeam {
 }
 
 /** Straight into better-auth's tables: a sign-up would send a mail to an address that nobody has. */
-async function createAccount({ auth }: Context, person: DemoPerson, at: Date): Promise<DemoUser> {
+async function createAccount({ auth, db }: Context, person: DemoPerson, at: Date): Promise<DemoUser> {
   const { internalAdapter, password } = await auth.$context;
   const profile = { name: person.name, email: person.email, emailVerified: true, createdAt: at };
   const { id } = await internalAdapter.createUser(profile, { method: 'email-password' });
   await internalAdapter.linkAccount({ userId: id, accountId: id, providerId: 'credential', password: await password.hash(demoPassword) });
+  // The demo's speeds are whole numbers of km/h.
+  changeUser(db, id, { preferences: { ...defaultPreferences, speedUnit: 'km/h' } });
   return { ...person, id };
 }
 

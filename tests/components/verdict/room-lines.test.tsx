@@ -16,11 +16,7 @@ const said = (change?: Partial<Room>) => roomLines(room(change), units).map(({ c
 
 describe('room in words', () => {
   it('says how much of each, and which limit breaks first', () => {
-    expect(said()).toEqual([
-      '7 % more gain before Ms 1.70',
-      '24 % less gain before Settling 6.00 s',
-      '16 ms more dead time before Ms 1.70',
-    ]);
+    expect(said()).toEqual(['7 % more gain before Ms 1.70', '24 % less gain before Settling 6 s', '16 ms more dead time before Ms 1.70']);
   });
 
   it('never rounds up', () => {
