@@ -12,6 +12,12 @@ import { SampledSimulation, type ContinuousHalf, type StepSizes } from './sample
 import { splitDelay } from './split-delay';
 import { stateEquations } from './state-equations';
 
+/**
+ * The fastest decay that the curves follow between samples, in e-foldings a period: what is faster hardly shows beside what is
+ * slower, and where it does the panels are found too coarse and all of it is followed.
+ */
+const FOLLOWED = [40, Infinity];
+
 /** The first look at a response reaches past its delay by so many samples. */
 const FIRST_SAMPLES = 8;
 
@@ -33,17 +39,25 @@ export interface SampledQuestion {
 
 /** The two unit step responses of a sampled loop, at and between the samples, or why there are none. */
 export const respondSampled = (model: LoopModel, run: SampledRun, question: SampledQuestion): StepResponses | Failure => {
+  const budget = new WorkBudget();
   try {
-    return responsesOf(model, run, question);
+    for (const fastest of FOLLOWED) {
+      const attempt = responsesOf(model, run, { ...question, fastest, budget });
+      if (attempt !== 'coarse') return attempt;
+    }
+    return 'coarse';
   } catch (error) {
     if (!(error instanceof OutOfWork)) throw error;
     return 'long';
   }
 };
 
-const responsesOf = (model: LoopModel, run: SampledRun, question: SampledQuestion): StepResponses | Failure => {
-  const budget = new WorkBudget();
-  const half = continuousHalf(model, run);
+const responsesOf = (
+  model: LoopModel,
+  run: SampledRun,
+  { fastest, budget, ...question }: SampledQuestion & { readonly fastest: number; readonly budget: WorkBudget },
+): StepResponses | Failure => {
+  const half = continuousHalf(model, run, fastest);
   const equation = equationOf(model, run);
   const finals = finalValues(model);
   const firstHorizon =
@@ -75,11 +89,11 @@ export const sampledResponse = (
   return { timeResponse: shown(steps, responses, { stable, points }), warnings: [] };
 };
 
-const continuousHalf = (model: LoopModel, { sampling: { period, computationDelay } }: SampledRun): ContinuousHalf => {
+const continuousHalf = (model: LoopModel, { sampling: { period, computationDelay } }: SampledRun, fastest: number): ContinuousHalf => {
   const { plant, sensor, plantDeadTime, sensorDeadTime } = model;
   return {
     equations: stateEquations([plant, sensor]),
-    poles: [...plant.poles, ...sensor.poles],
+    poles: [...plant.poles, ...sensor.poles].filter(({ re }) => -re * period <= fastest),
     delay: splitDelay(plantDeadTime + sensorDeadTime + computationDelay, period),
     computationDelay,
     plantDeadTime,

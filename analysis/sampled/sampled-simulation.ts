@@ -13,12 +13,13 @@ import type { SplitDelay } from './split-delay';
 import type { StateEquations } from './state-equations';
 
 /** What a panel of a curve costs: it is computed, and knots, integrals and drawing read it again. */
-const WORK_PER_PANEL = 2000;
+const WORK_PER_PANEL = 700;
 
 /** The continuous half of a sampled loop: plant and sensor, and where their delays stand. */
 export interface ContinuousHalf {
   /** Plant, then sensor. */
   readonly equations: StateEquations;
+  /** Modes that the curve is to follow between samples. */
   readonly poles: readonly Complex[];
   /** From the command to the sample: plant, sensor and computation, in sample periods. */
   readonly delay: SplitDelay;
