@@ -34,7 +34,9 @@ export function responseKerbs({ limits }: LoopScene, final: number, { across, up
     kerbs.push(strip(turn, end, final * (1 + CORRIDOR), true), strip(turn, end, final * (1 - CORRIDOR), false));
   if (settling !== undefined) {
     const y = up.at(final);
+    // Before the limit stands what the response does: beyond it there is room, as long as the axis goes on.
     board.add([`by ${shortNumber(settling, 3)} s within 2 %`], 'limit', [
+      { x: turn + 6, y: y + 22, anchor: 'start' },
       { x: turn - 6, y: y + 22, anchor: 'end' },
       { x: turn - 6, y: y + 40, anchor: 'end' },
     ]);

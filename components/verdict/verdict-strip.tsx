@@ -13,7 +13,7 @@ import { headlineLines, headlineText } from './headline-text';
 import { HeadlineRuler } from './headline-ruler';
 import { marginNumbers } from './margin-numbers';
 import { MarginRow } from './margin-row';
-import { RoomBlock } from './room-block';
+import { RoomBlock, RoomSentence } from './room-block';
 import { mostPressing, worstChecks } from './worst-checks';
 
 export interface VerdictStripProps {
@@ -60,7 +60,7 @@ export function VerdictStrip({ headline, room, results, instead, label = 'Worst 
       </View>
       {room && !phone ? <RoomBlock room={room} besideCase={headline.case?.name} /> : null}
       {(!phone && instead) || <Demands headline={headline} results={results} />}
-      {room && phone ? <RoomBlock room={room} besideCase={headline.case?.name} compact /> : null}
+      {room && phone ? <RoomSentence room={room} besideCase={headline.case?.name} /> : null}
     </View>
   );
 }

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { roomLines } from '@/components/verdict/room-lines';
+import { roomLines, roomSentence } from '@/components/verdict/room-lines';
 import type { FirstBreak, Room, RoomWay } from '@/contract';
 
 const units = { frequency: 'rad/s', magnitude: 'dB' } as const;
@@ -17,6 +17,11 @@ const said = (change?: Partial<Room>) => roomLines(room(change), units).map(({ c
 describe('room in words', () => {
   it('says how much of each, and which limit breaks first', () => {
     expect(said()).toEqual(['7 % more gain before Ms 1.70', '24 % less gain before Settling 6 s', '16 ms more dead time before Ms 1.70']);
+  });
+
+  it('is one sentence where there is room for one, and says together what breaks at the same limit', () => {
+    const lines = roomLines(room(), units).map((line) => ({ ...line, caseName: null }));
+    expect(roomSentence(lines)).toBe('7 % more gain or 16 ms more dead time before Ms 1.70; 24 % less gain before Settling 6 s.');
   });
 
   it('never rounds up', () => {
