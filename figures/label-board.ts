@@ -1,7 +1,6 @@
 import type { Rect } from './geometry';
 import type { LabelTone, PanelLabel } from './panel';
 import { type Polyline, thinned } from './polyline';
-import { remember } from './remember';
 import { type LabelPlace, type Paper, type PlacedLabel, placeLabel } from './place-label';
 
 export interface LabelBoard {
@@ -12,12 +11,9 @@ export interface LabelBoard {
   reserve(rect: Rect): void;
 }
 
-const thinLines = remember<Polyline, Polyline>();
-
 /** One picture's labels, placed one after the other so that none covers another. */
 export function createLabelBoard({ bounds, curves, faint = [], shaded }: Omit<Paper, 'taken'>): LabelBoard {
-  const { x, y, width, height } = bounds;
-  const thin = (line: Polyline) => thinLines(line, [x, y, width, height], () => thinned(line, bounds));
+  const thin = (line: Polyline) => thinned(line, bounds);
   const paper = { bounds, curves: curves.map(thin), faint: faint.map(thin), shaded };
   const labels: PanelLabel[] = [];
   const taken: Rect[] = [];
