@@ -26,6 +26,12 @@ export function InvitationRow({ invitation }: { invitation: Invitation }) {
   const takeBack = useTakeBack(id);
   const { email } = invitation;
   const error = again.error ?? takeBack.error;
+  // The row is gone by then, and with it callbacks of its own. What was refused is shown below.
+  const back = () =>
+    takeBack.mutateAsync(invitation).then(
+      () => announce(`The invitation of ${email} is taken back.`),
+      () => undefined,
+    );
   return (
     <View role="listitem" style={[styles.row, { borderBottomColor: colors.rule }]}>
       <View style={styles.line}>
@@ -50,7 +56,7 @@ export function InvitationRow({ invitation }: { invitation: Invitation }) {
             label="Take back"
             aria-label={`Take the invitation of ${email} back`}
             busy={takeBack.isPending}
-            onPress={() => takeBack.mutate(invitation, { onSuccess: () => announce(`The invitation of ${email} is taken back.`) })}
+            onPress={back}
           />
         </View>
       </View>

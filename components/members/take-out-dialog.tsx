@@ -23,15 +23,14 @@ export function TakeOutDialog({ open, member, self, onClose }: TakeOutDialogProp
   const { id, name } = useProject();
   const takeOut = useTakeOut(id);
   const leave = useLeave(id);
-  const { mutate, isPending, error } = self ? leave : takeOut;
-  const end = () =>
-    mutate(member, {
-      onSuccess: () => {
-        announce(self ? `You left ${name}.` : `${member.name} is no longer a member.`);
-        onClose();
-        if (self) router.replace('/');
-      },
-    });
+  const { mutateAsync, isPending, error } = self ? leave : takeOut;
+  const ended = () => {
+    announce(self ? `You left ${name}.` : `${member.name} is no longer a member.`);
+    onClose();
+    if (self) router.replace('/');
+  };
+  // The row that this stands in is gone by then, and with it callbacks of its own. What was refused is shown below.
+  const end = () => mutateAsync(member).then(ended, () => undefined);
   const text = self
     ? 'From then on you do not see the project. What you kept in it stays. Only an owner can invite you again.'
     : `From then on ${member.name} does not see the project. What ${member.name} kept in it stays.`;
