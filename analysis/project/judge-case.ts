@@ -15,13 +15,10 @@ export interface Judgement {
   readonly checks: Check[];
 }
 
-function whyNotJudged(checks: readonly Check[], stated: Stated): string[] {
-  const reasons: string[] = [];
-  if (!stated.sampling) reasons.push('Nobody stated the sample time.');
-  if (!stated.deadTime) reasons.push('Nobody stated where the dead time comes from.');
-  if (checks.length === 0) reasons.push('No limits are set.');
-  return reasons;
-}
+const unstatedOf = ({ sampling, deadTime }: Stated): string[] => [
+  ...(sampling ? [] : ['Nobody stated the sample time.']),
+  ...(deadTime ? [] : ['Nobody stated where the dead time comes from.']),
+];
 
 const uncomputed = (checks: readonly Check[]) =>
   `Could not be computed: ${checks
@@ -29,15 +26,19 @@ const uncomputed = (checks: readonly Check[]) =>
     .map(({ quantity }) => quantity)
     .join(', ')}.`;
 
+/** What holds in a loop that may not be the one in the car says nothing; what breaks there already is told. */
+const unfounded = (check: Check): Check => (check.verdict === 'fail' ? check : { ...check, verdict: 'notJudged' });
+
 /**
- * The verdict of one analysed case: not stable fails before anything; then what nobody stated or demanded leaves it
- * not judged, so that an unfounded number can be neither signed nor waived; then the worst of its checks.
+ * The verdict of one analysed case: not stable fails before anything; then what nobody stated or demanded leaves it and
+ * whatever holds not judged, so that an unfounded number is never green and can be neither signed nor waived; then the worst of its checks.
  */
 export function judgeCase(limits: readonly Limit[], analysis: Analysis, stated: Stated): Judgement {
   const checks = limits.map((limit) => judgeLimit(limit, analysis));
   if (!analysis.closedLoop.stable) return { verdict: 'fail', reason: null, checks };
-  const reasons = whyNotJudged(checks, stated);
-  if (reasons.length > 0) return { verdict: 'notJudged', reason: reasons.join(' '), checks };
+  const unstated = unstatedOf(stated);
+  const reasons = checks.length === 0 ? [...unstated, 'No limits are set.'] : unstated;
+  if (reasons.length > 0) return { verdict: 'notJudged', reason: reasons.join(' '), checks: checks.map(unfounded) };
   const verdict = worstVerdict(checks.map((check) => check.verdict));
   return { verdict, reason: verdict === 'notJudged' ? uncomputed(checks) : null, checks };
 }
