@@ -86,7 +86,7 @@ describe.each(['phone', 'wide'] as const)('members at the %s size', (size) => {
       await owner.page.getByRole('menuitem', { name: /^Take out/ }).click();
     } else await owner.visitor.press(`Take ${name} out`);
     await owner.page.getByRole('dialog').getByRole('button', { name: 'Take out' }).click();
-    await owner.page.getByRole('list', { name: 'Members' }).getByText(name).waitFor({ state: 'detached' });
+    await owner.page.getByRole('button', { name: `Role of ${name}, editor` }).waitFor({ state: 'detached' });
     await owner.visitor.sees(`${name} is no longer a member.`);
     expect((await guest.page.request.get(`${server.url}/api${place}`)).status()).toBe(404);
     await guest.page.reload();
