@@ -4,7 +4,7 @@ import { exactDelayMargin } from '@/analysis/sampled/delay-margin';
 import { refuseImmediate } from '@/analysis/sampled/refuse-immediate';
 import { SampledLoop } from '@/analysis/sampled/sampled-loop';
 import { sampledModel } from '@/analysis/sampled/sampled-model';
-import { sampledResponse } from '@/analysis/sampled/sampled-responses';
+import { sampledTime } from '@/analysis/sampled/sampled-time';
 import { judgeSampled } from '@/analysis/sampled/sampled-stability';
 import { sampledWarnings } from '@/analysis/sampled/sampled-warnings';
 import type { AnalysedLoop } from './analysed-loop';
@@ -19,6 +19,6 @@ export const analysedSampled = (input: Loop, model: LoopModel, run: SampledRun):
     judge: (crossings) => judgeSampled(sampled, loop, crossings),
     delayMargin: ({ crossovers }, { stable }) => exactDelayMargin(sampled, loop, { crossovers, stable }),
     warnings: (found) => sampledWarnings(input, model, found),
-    respond: (responses, { stable }, options) => sampledResponse(model, run, { responses, stable, ...options }),
+    respond: (responses, { stable }, options) => sampledTime(model, run, { responses, stable, ...options }),
   };
 };

@@ -76,6 +76,10 @@ export const TimeResponse = z
   .object({
     reference: Series.optional(),
     load: Series.optional(),
+    linear: z
+      .object({ reference: Series, load: Series })
+      .optional()
+      .meta({ description: "the same without the actuator's limits, where there are any" }),
     metrics: TimeMetrics.nullable().meta({ description: 'null where the loop is unstable' }),
   })
   .meta({ id: 'TimeResponse', description: 'the two series are left out under ?curves=false' });

@@ -11,7 +11,8 @@ import { buildPlant } from './plant';
  * @throws LoopError with a JSON Pointer into the Loop where it has no meaning or is not yet supported
  */
 export const buildLoop = (loop: Loop): LoopModel => {
-  if (loop.actuator) throw unsupported('/actuator', 'Actuator limits are not analysed yet; leave them out to analyse the linear loop.');
+  if (loop.actuator && !loop.sampling)
+    throw unsupported('/actuator', 'Actuator limits are computed for loops with a sample period: give one, or leave the limits out.');
   const { rational, deadTime } = buildPlant(loop.plant);
   const { controller } = loop;
   return {
@@ -24,7 +25,7 @@ export const buildLoop = (loop: Loop): LoopModel => {
     filters: buildFilters(controller.filters),
     weights: controller.setpointWeights,
     feedforwardGain: controller.feedforward.gain,
-    sampled: loop.sampling && { sampling: loop.sampling, filters: controller.filters },
+    sampled: loop.sampling && { sampling: loop.sampling, filters: controller.filters, actuator: loop.actuator },
   };
 };
 

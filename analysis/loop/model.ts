@@ -30,10 +30,11 @@ export interface ParallelGains {
   readonly filterTime: number;
 }
 
-/** How a computer runs the controller; its filters as they were asked for, for each has a digital equivalent of its own. */
+/** How a computer runs the controller; its filters as they were asked for, for each has a digital equivalent of its own, and what holds its command back. */
 export interface SampledRun {
   readonly sampling: NonNullable<Loop['sampling']>;
   readonly filters: Loop['controller']['filters'];
+  readonly actuator: Loop['actuator'];
 }
 
 /**

@@ -1,32 +1,59 @@
+import type { ActuatorLimits } from './actuator-limits';
 import type { DifferenceEquation } from './difference-equation';
-import type { DigitalFilter } from './digital-filter';
+import { FilterRun } from './filter-run';
 
 /** A difference equation in the middle of its run: the memory that a control unit keeps between samples. */
 export class ControllerRun {
+  /** Whether the last command was held back by the actuator. */
+  isLimited = false;
   private integral = 0;
   private derivative = 0;
   private lastError = 0;
   private lastDifference = 0;
+  private lastCommand = 0;
   private readonly filters: readonly FilterRun[];
 
-  constructor(private readonly equation: DifferenceEquation) {
+  constructor(
+    private readonly equation: DifferenceEquation,
+    private readonly limits: ActuatorLimits | null = null,
+  ) {
     this.filters = equation.filters.map((filter) => new FilterRun(filter));
   }
 
-  /** The command that this reference and sample would give; nothing is remembered. */
+  /** The command before the limits that this reference and sample would give; nothing is remembered. */
   preview(reference: number, sample: number): number {
     return this.filters.reduce((value, filter) => filter.preview(value), this.unfiltered(reference, sample));
   }
 
-  /** One sample period: the command for this reference and sample. */
+  /** One sample period: the command for this reference and sample, within the limits. */
   step(reference: number, sample: number): number {
-    const unfiltered = this.unfiltered(reference, sample);
-    const command = this.filters.reduce((value, filter) => filter.step(value), unfiltered);
-    this.integral = this.nextIntegral(reference - sample);
-    this.derivative = this.nextDerivative(this.differenceOf(reference, sample));
-    this.lastError = reference - sample;
-    this.lastDifference = this.differenceOf(reference, sample);
+    const [error, difference] = [reference - sample, this.differenceOf(reference, sample)];
+    const asked = this.filters.reduce((value, filter) => filter.step(value), this.unfiltered(reference, sample));
+    const command = this.withinLimits(asked);
+    this.isLimited = command !== asked;
+    this.integral = this.keptIntegral(error, asked - command);
+    this.derivative = this.nextDerivative(difference);
+    this.lastError = error;
+    this.lastDifference = difference;
+    this.lastCommand = command;
     return command;
+  }
+
+  withinLimits(command: number): number {
+    if (!this.limits) return command;
+    const { low, high, stride } = this.limits;
+    const reached = Math.min(Math.max(command, this.lastCommand - stride), this.lastCommand + stride);
+    return Math.min(Math.max(reached, low), high);
+  }
+
+  /** The integral that the next sample finds; `excess` is what the limits took off the command. */
+  private keptIntegral(error: number, excess: number): number {
+    const next = this.nextIntegral(error);
+    if (!this.limits || !this.equation.integral || excess === 0) return next;
+    const { antiWindup, tracking } = this.limits;
+    if (antiWindup === 'backCalculation') return next - tracking * excess;
+    const drivesDeeper = (next - this.integral) * excess > 0;
+    return antiWindup === 'conditional' && drivesDeeper ? this.integral : next;
   }
 
   private unfiltered(reference: number, sample: number): number {
@@ -51,35 +78,5 @@ export class ControllerRun {
 
   private differenceOf(reference: number, sample: number): number {
     return this.equation.derivativeWeight * reference - sample;
-  }
-}
-
-/** One filter and the samples that it remembers, the latest first. */
-class FilterRun {
-  private readonly inputs: number[];
-  private readonly answers: number[];
-
-  constructor(private readonly filter: DigitalFilter) {
-    this.inputs = filter.back.map(() => 0);
-    this.answers = filter.back.map(() => 0);
-  }
-
-  preview(input: number): number {
-    const { forward, back } = this.filter;
-    let answer = forward[0] * input;
-    for (let i = 0; i < back.length; i += 1) answer += forward[i + 1] * this.inputs[i] - back[i] * this.answers[i];
-    return answer;
-  }
-
-  step(input: number): number {
-    const answer = this.preview(input);
-    for (const [memory, latest] of [
-      [this.inputs, input],
-      [this.answers, answer],
-    ] as const) {
-      memory.pop();
-      memory.unshift(latest);
-    }
-    return answer;
   }
 }

@@ -48,7 +48,7 @@ export const differenceEquation = (controller: Loop['controller'], sampling: Sam
 /** The same from a loop that is built already. */
 export const equationOf = (
   { gains: { kp, ki, kd, filterTime }, weights, feedforwardGain }: Pick<LoopModel, 'gains' | 'weights' | 'feedforwardGain'>,
-  { sampling, filters }: SampledRun,
+  { sampling, filters }: Pick<SampledRun, 'sampling' | 'filters'>,
 ): DifferenceEquation => {
   const { period, integral } = sampling;
   const [now, before] = INTEGRAL[integral];

@@ -6,9 +6,6 @@ import { planPanels } from '@/analysis/time/panel-plan';
 import { dot, rowAfter } from './rows';
 import type { StateEquations } from './state-equations';
 
-/** Panels twice as wide as in continuous time: their ends, the samples, are exact, and between them 1e-7 of a mode is enough. */
-const FINENESS = 0.5;
-
 /** Panels of one width: what the state gives at their nodes, and the state at their end. */
 interface Stage {
   readonly width: number;
@@ -30,7 +27,7 @@ export class HeldPanels {
 
   constructor({ dynamics, outputs }: StateEquations, poles: readonly Complex[], length: number) {
     this.moved = new Float64Array(dynamics.rows);
-    this.stages = planPanels(poles, length, FINENESS).map(({ width, count }) => {
+    this.stages = planPanels(poles, length).map(({ width, count }) => {
       const changes = new ExponentialChanges(dynamics.rows, Array.from(NODES.subarray(1))).of(scaledBy(dynamics, width));
       const nodeRows = [outputs[0], ...changes.map((change) => rowAfter(outputs[0], change))];
       return { width, count, nodeRows, change: changes[NODE_COUNT - 2] };

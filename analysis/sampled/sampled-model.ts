@@ -35,8 +35,9 @@ export interface SampledModel {
  * The loop as the computer runs it, from the same parts as the continuous one.
  * @throws LoopError where a sampled loop has no meaning: a notch beyond half the sampling frequency, an endless delay
  */
-export const sampledModel = (model: LoopModel, { sampling, filters }: SampledRun): SampledModel => {
-  refuseUnsampled(model, { sampling, filters });
+export const sampledModel = (model: LoopModel, run: SampledRun): SampledModel => {
+  const { sampling, filters } = run;
+  refuseUnsampled(model, run);
   const { period, computationDelay } = sampling;
   const { gains, weights, feedforwardGain } = model;
   const hasSensor = model.sensor.poles.length > 0 || model.sensorDeadTime > 0;

@@ -1,14 +1,13 @@
-import type { Responses, TimeResponse, Warning } from '@/contract';
 import type { LoopModel, SampledRun } from '@/analysis/loop/model';
 import { finalValues } from '@/analysis/time/final-values';
 import type { Failure } from '@/analysis/time/horizon';
 import { answersReference } from '@/analysis/time/linear-loop';
 import type { StepResponse } from '@/analysis/time/metrics';
-import { bands, silence, watch, type StepResponses } from '@/analysis/time/step-response';
-import { shown, type TimeResponseOptions } from '@/analysis/time/time-response';
+import { bands, silence, watch, type Run, type StepResponses } from '@/analysis/time/step-response';
 import { OutOfWork, WorkBudget } from '@/analysis/time/work-budget';
+import { actuatorLimits } from './actuator-limits';
 import { equationOf } from './difference-equation';
-import { SampledSimulation, type ContinuousHalf, type StepSizes } from './sampled-simulation';
+import { SampledSimulation, type ContinuousHalf } from './sampled-simulation';
 import { splitDelay } from './split-delay';
 import { stateEquations } from './state-equations';
 
@@ -21,16 +20,8 @@ const FOLLOWED = [40, Infinity];
 /** The first look at a response reaches past its delay by so many samples. */
 const FIRST_SAMPLES = 8;
 
-const warnings = {
-  long: {
-    code: 'responseTooLong',
-    message: 'The response takes too many sample periods to be computed here: time responses are not given.',
-  },
-  boundless: {
-    code: 'responseUnbounded',
-    message: 'The response grows beyond all numbers within the time asked for: ask for a shorter one.',
-  },
-} satisfies Record<string, Warning>;
+/** A limited response that has not settled after so many times what the linear one was watched for never will. */
+const PATIENCE = 8;
 
 export interface SampledQuestion {
   readonly stable: boolean;
@@ -38,12 +29,82 @@ export interface SampledQuestion {
 }
 
 /** The two unit step responses of a sampled loop, at and between the samples, or why there are none. */
-export const respondSampled = (model: LoopModel, run: SampledRun, question: SampledQuestion): StepResponses | Failure => {
+export const respondSampled = (model: LoopModel, run: SampledRun, question: SampledQuestion): StepResponses | Failure =>
+  resolved((fastest, budget) => {
+    const course = courseOf(model, run, fastest);
+    const respond = (kind: StepKind): StepResponse | Failure => {
+      const simulation = new SampledSimulation({ ...course, sizes: sizesOf(kind, 1), limits: null, budget });
+      return watch(question, watched(model, run, { kind, simulation }));
+    };
+    const load = respond('load');
+    if (typeof load === 'string') return load;
+    const reference = answersReference(model) ? respond('reference') : silence(load);
+    return typeof reference === 'string' ? reference : { reference, load };
+  });
+
+export interface LimitedResponses extends StepResponses {
+  /** How long the reference response's command was held back, s. */
+  readonly timeAtLimits: number;
+  /** Whether a response ended with its command still held back. */
+  readonly staysLimited: boolean;
+}
+
+/**
+ * The same within the actuator's limits, for steps of these sizes; the curves are per unit of the step, as the linear ones.
+ *
+ * @throws LoopError for limits without meaning
+ */
+export const respondLimited = (
+  model: LoopModel,
+  run: SampledRun,
+  { sizes, linear, ...question }: SampledQuestion & { readonly sizes: Record<StepKind, number>; readonly linear: StepResponses },
+): LimitedResponses | Failure => {
+  const limits = actuatorLimits(run.actuator!, model.gains, run.sampling.period);
+  return resolved((fastest, budget) => {
+    const course = courseOf(model, run, fastest);
+    const respond = (kind: StepKind) => {
+      if (sizes[kind] === 0 || (kind === 'reference' && !answersReference(model)))
+        return { response: silence(linear[kind]), atLimits: 0, stays: false };
+      const simulation = new SampledSimulation({ ...course, sizes: sizesOf(kind, sizes[kind]), limits, budget });
+      const response = watch(question, { ...watched(model, run, { kind, simulation }), patience: PATIENCE * linear[kind].horizon });
+      if (typeof response === 'string') return response;
+      return { response, atLimits: simulation.timeAtLimits(response.axisEnd), stays: simulation.isLimited };
+    };
+    const load = respond('load');
+    if (typeof load === 'string') return load;
+    const reference = respond('reference');
+    if (typeof reference === 'string') return reference;
+    return {
+      reference: reference.response,
+      load: load.response,
+      timeAtLimits: reference.atLimits,
+      staysLimited: reference.stays || load.stays,
+    };
+  });
+};
+
+type StepKind = keyof typeof bands;
+
+const sizesOf = (kind: StepKind, size: number) => ({ reference: 0, load: 0, [kind]: size });
+
+const watched = (
+  model: LoopModel,
+  { sampling }: SampledRun,
+  { kind, simulation }: { kind: StepKind; simulation: SampledSimulation },
+): Run => ({
+  simulation,
+  firstHorizon: 2 * (model.plantDeadTime + model.sensorDeadTime + sampling.computationDelay) + FIRST_SAMPLES * sampling.period,
+  finalValue: finalValues(model)[kind],
+  bandOf: bands[kind],
+});
+
+/** Tries with few panels first, and with all of them where those do not follow the curves. */
+const resolved = <Responses>(attempt: (fastest: number, budget: WorkBudget) => Responses | Failure): Responses | Failure => {
   const budget = new WorkBudget();
   try {
     for (const fastest of FOLLOWED) {
-      const attempt = responsesOf(model, run, { ...question, fastest, budget });
-      if (attempt !== 'coarse') return attempt;
+      const found = attempt(fastest, budget);
+      if (found !== 'coarse') return found;
     }
     return 'coarse';
   } catch (error) {
@@ -52,42 +113,10 @@ export const respondSampled = (model: LoopModel, run: SampledRun, question: Samp
   }
 };
 
-const responsesOf = (
-  model: LoopModel,
-  run: SampledRun,
-  { fastest, budget, ...question }: SampledQuestion & { readonly fastest: number; readonly budget: WorkBudget },
-): StepResponses | Failure => {
-  const half = continuousHalf(model, run, fastest);
-  const equation = equationOf(model, run);
-  const finals = finalValues(model);
-  const firstHorizon =
-    2 * (model.plantDeadTime + model.sensorDeadTime + run.sampling.computationDelay) + FIRST_SAMPLES * run.sampling.period;
-  const respond = (kind: keyof typeof bands, sizes: StepSizes): StepResponse | Failure =>
-    watch(question, {
-      simulation: new SampledSimulation(half, equation, sizes, budget),
-      firstHorizon,
-      finalValue: finals[kind],
-      bandOf: bands[kind],
-    });
-  const load = respond('load', { reference: 0, load: 1 });
-  if (typeof load === 'string') return load;
-  const reference = answersReference(model) ? respond('reference', { reference: 1, load: 0 }) : silence(load);
-  return typeof reference === 'string' ? reference : { reference, load };
-};
-
-/**
- * Reference and load step of a sampled loop, with control and metrics; null, with a warning that says why, where it would take
- * too long.
- */
-export const sampledResponse = (
-  model: LoopModel,
-  run: SampledRun,
-  { responses, stable, points }: { readonly responses: Responses; readonly stable: boolean } & TimeResponseOptions,
-): { timeResponse: TimeResponse | null; warnings: Warning[] } => {
-  const steps = respondSampled(model, run, { stable, duration: responses.duration });
-  if (typeof steps === 'string') return { timeResponse: null, warnings: [steps === 'boundless' ? warnings.boundless : warnings.long] };
-  return { timeResponse: shown(steps, responses, { stable, points }), warnings: [] };
-};
+const courseOf = (model: LoopModel, run: SampledRun, fastest: number) => ({
+  half: continuousHalf(model, run, fastest),
+  equation: equationOf(model, run),
+});
 
 const continuousHalf = (model: LoopModel, { sampling: { period, computationDelay } }: SampledRun, fastest: number): ContinuousHalf => {
   const { plant, sensor, plantDeadTime, sensorDeadTime } = model;

@@ -5,6 +5,7 @@ import { Curve } from '@/analysis/time/curve';
 import type { Running } from '@/analysis/time/horizon';
 import { NODE_COUNT } from '@/analysis/time/nodes';
 import type { WorkBudget } from '@/analysis/time/work-budget';
+import type { ActuatorLimits } from './actuator-limits';
 import { ControllerRun } from './controller-run';
 import type { DifferenceEquation } from './difference-equation';
 import { HeldPanels } from './held-panels';
@@ -34,8 +35,18 @@ export interface StepSizes {
   readonly load: number;
 }
 
+interface Course {
+  readonly half: ContinuousHalf;
+  readonly equation: DifferenceEquation;
+  /** One of them is 0. */
+  readonly sizes: StepSizes;
+  /** null: the linear response. */
+  readonly limits: ActuatorLimits | null;
+  readonly budget: WorkBudget;
+}
+
 /**
- * One response of a sampled loop from rest, exact at and between the samples.
+ * One response of a sampled loop from rest, exact at and between the samples. Its curves are per unit of the step.
  *
  * The plant is followed on a clock on which its input changes at whole periods: the sample's time plus the computation delay.
  * A delay of n periods and a rest r means that sample k reads the sensor at the share 1 − r of the plant's period k − n − 1.
@@ -49,16 +60,20 @@ export class SampledSimulation implements Running {
   /** Reads the sample off the state at the start of the period in which it is taken. */
   private readonly sampleRow: Float64Array;
   private readonly samples: number[] = [];
+  private readonly limitedSince: number[] = [];
+  private readonly half: ContinuousHalf;
+  private readonly equation: DifferenceEquation;
+  private readonly sizes: StepSizes;
+  private readonly budget: WorkBudget;
   private k = 0;
 
-  constructor(
-    private readonly half: ContinuousHalf,
-    private readonly equation: DifferenceEquation,
-    private readonly sizes: StepSizes,
-    private readonly budget: WorkBudget,
-  ) {
+  constructor({ half, equation, sizes, limits, budget }: Course) {
     const { equations, poles, delay } = half;
-    this.controller = new ControllerRun(equation);
+    this.half = half;
+    this.equation = equation;
+    this.sizes = sizes;
+    this.budget = budget;
+    this.controller = new ControllerRun(equation, limits);
     this.heldPanels = new HeldPanels(equations, poles, equation.period);
     this.state = new Float64Array(equations.dynamics.rows);
     this.sampleRow = this.sensorRow(delay.rest === 0 ? 0 : 1 - delay.rest);
@@ -83,6 +98,16 @@ export class SampledSimulation implements Running {
     return this.k * period + computationDelay >= end;
   }
 
+  /** How long the actuator held the command back before `end`, s. */
+  timeAtLimits(end: number): number {
+    return this.limitedSince.filter((start) => start < end).length * this.equation.period;
+  }
+
+  /** Whether the actuator holds the latest command back. */
+  get isLimited(): boolean {
+    return this.controller.isLimited;
+  }
+
   /** From sample k to the next. */
   private next(): void {
     const { half, equation, sizes, state, k, heldPanels } = this;
@@ -91,7 +116,8 @@ export class SampledSimulation implements Running {
     this.hold(command + sizes.load);
     if (!this.isImmediate) this.takeSample(k, dot(this.sampleRow, state));
     const start = k * equation.period + half.computationDelay;
-    this.control.append(start, equation.period, new Float64Array(NODE_COUNT).fill(command), 0);
+    if (this.controller.isLimited) this.limitedSince.push(start);
+    this.control.append(start, equation.period, new Float64Array(NODE_COUNT).fill(command / this.unit), 0);
     heldPanels.pass(state, start + half.plantDeadTime, this.appendOutput);
     this.k = k + 1;
   }
@@ -112,7 +138,9 @@ export class SampledSimulation implements Running {
     const direct = dot(sampleRow, state) - own;
     const atRest = controller.preview(sizes.reference, 0);
     const slope = atRest - controller.preview(sizes.reference, 1);
-    return (own + direct * (atRest + sizes.load)) / (1 + direct * slope);
+    const agreed = (own + direct * (atRest + sizes.load)) / (1 + direct * slope);
+    const command = controller.withinLimits(atRest - slope * agreed);
+    return own + direct * (command + sizes.load);
   }
 
   private takeSample(period: number, value: number): void {
@@ -125,7 +153,15 @@ export class SampledSimulation implements Running {
     this.state[this.state.length - 1] = input / inputScale;
   }
 
-  private readonly appendOutput = (start: number, width: number, values: Float64Array): void => this.output.append(start, width, values, 0);
+  private get unit(): number {
+    return this.sizes.reference || this.sizes.load;
+  }
+
+  private readonly appendOutput = (start: number, width: number, values: Float64Array): void => {
+    const { unit } = this;
+    if (unit !== 1) for (let i = 0; i < values.length; i += 1) values[i] /= unit;
+    this.output.append(start, width, values, 0);
+  };
 
   private sensorRow(share: number): Float64Array {
     const { dynamics, output } = this.half.equations;

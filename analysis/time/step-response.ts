@@ -2,7 +2,7 @@ import type { Complex } from '@/analysis/numbers/complex';
 import type { LoopModel } from '@/analysis/loop/model';
 import { Curve } from './curve';
 import type { FinalValues } from './final-values';
-import { GROWN, hasGrown, hasSettled, isTooFine, simulateTo, simulateUntil, type Failure, type Running } from './horizon';
+import { GROWN, hasGrown, hasSettled, isTooFine, simulateTo, simulateUntil, type Enough, type Failure, type Running } from './horizon';
 import { monotoneKnots, type Knots } from './knots';
 import { answersReference } from './linear-loop';
 import type { LoopSystem } from './loop-system';
@@ -102,16 +102,20 @@ export interface Run {
   readonly firstHorizon: number;
   readonly finalValue: number | null;
   readonly bandOf: typeof referenceBand;
+  /** A stable response that has not settled by then is taken as it is, s. */
+  readonly patience?: number;
 }
 
 /** Simulates one response for as long as it takes to judge it and to show it. */
 export function watch(
   { stable, duration }: Pick<StepQuestion, 'stable' | 'duration'>,
-  { simulation, firstHorizon, finalValue, bandOf }: Run,
+  { simulation, firstHorizon, finalValue, bandOf, patience = Infinity }: Run,
 ): StepResponse | Failure {
   const { output, control } = simulation;
   const bandFor = (peak: number) => bandOf(finalValue, peak);
-  const judged = stable || duration === null ? simulateUntil(simulation, firstHorizon, stable ? hasSettled(bandFor) : hasGrown) : 0;
+  const settles = hasSettled(bandFor);
+  const shows: Enough = stable ? (curve, time) => settles(curve, time) || time >= patience : hasGrown;
+  const judged = stable || duration === null ? simulateUntil(simulation, firstHorizon, shows) : 0;
   if (typeof judged === 'string') return judged;
   const horizon = Math.max(judged, duration ?? 0);
   const failure = simulateTo(simulation, horizon);
