@@ -33,6 +33,8 @@ export interface EdgeRulerShape {
 
 const LEFT = 14;
 const RIGHT = 8;
+/** At least one red and one white, or it would not read as a kerb. */
+const BLOCK = 8;
 
 /** All cases against one target and limit; the edge is always on the right. */
 export function edgeRuler({ width, height, uses, worst, hasTarget, ghost = null, named }: EdgeRulerInput): EdgeRulerShape {
@@ -40,11 +42,18 @@ export function edgeRuler({ width, height, uses, worst, hasTarget, ghost = null,
   const at = (use: number) => LEFT + ((clamp(use, low, high) - low) / (high - low)) * (width - LEFT - RIGHT);
   const y = height - (named ? 25 : 9);
   const limit = at(1);
+  const end = width - RIGHT;
   return {
     baseline: { y, from: LEFT, to: limit },
     target: at(0),
     limit,
-    kerb: straightKerb({ from: { x: limit, y }, to: { x: width - RIGHT, y }, thickness: 7, block: 8, side: 'right' }),
+    kerb: straightKerb({
+      from: { x: limit, y },
+      to: { x: end, y },
+      thickness: 7,
+      block: Math.min(BLOCK, (end - limit) / 2),
+      side: 'right',
+    }),
     ticks: uses.filter((use) => use >= low && use <= high).map(at),
     needle: worst === null ? null : at(worst),
     ghost: ghost === null ? null : at(ghost),

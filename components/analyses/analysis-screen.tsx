@@ -13,11 +13,11 @@ import { Paper } from '@/components/ui/paper';
 import { QueryView } from '@/components/ui/query-view';
 import { Heading, Text } from '@/components/ui/text';
 import { useLayout } from '@/components/ui/use-layout';
+import { CheckTable } from '@/components/verdict/check-table';
 import { VerdictStrip } from '@/components/verdict/verdict-strip';
 import type { KeptAnalysis } from '@/contract';
 import { chartLimits } from '@/figures';
 import { CaseCurves } from './case-curves';
-import { CheckList } from './check-list';
 import { LoopNumbers, ResponseNumbers } from './case-numbers';
 import { FrozenInputs } from './frozen-inputs';
 import { Recompute } from './recompute';
@@ -64,6 +64,7 @@ function AnalysisPage({ analysis, caseId, onCase, children }: AnalysisPageProps)
     onSelect: () => onCase(one.case.id),
   }));
   const computed = `computed ${moment(analysis.createdAt, new Date(), true)} by ${analysis.createdBy}, engine ${analysis.engineVersion}`;
+  const demandsHeading = `What is demanded of ${result.case.name}`;
   const column = phone ? styles.stackColumn : styles.column;
   return (
     <Page title={title} sub={computed} actions={bench}>
@@ -86,7 +87,8 @@ function AnalysisPage({ analysis, caseId, onCase, children }: AnalysisPageProps)
       <View style={phone ? styles.stack : styles.side}>
         {result.checks.length > 0 ? (
           <Paper style={column}>
-            <CheckList heading={`What is demanded of ${result.case.name}`} checks={result.checks} />
+            <Heading level={2}>{demandsHeading}</Heading>
+            <CheckTable label={demandsHeading} checks={result.checks} unstable={!result.numbers.closedLoop.stable} />
           </Paper>
         ) : null}
         <Paper style={column}>

@@ -11,7 +11,7 @@ import { nudgeGain } from './draft/move-gain';
 import { redo, undo } from './draft/draft-store';
 import { useDraftStore } from './draft/use-draft-store';
 import { useKeep } from './keep/use-keep';
-import { mayKeep } from './keep/saved-words';
+import { whyNotKept } from './keep/saved-words';
 import { useBenchAnalysis } from './live/use-bench-analysis';
 import { FollowWorst } from './over/follow-worst';
 import { useOverCases } from './over/use-over-cases';
@@ -44,6 +44,7 @@ export function BenchDesk({ subject, link, onLink, onWorst }: BenchDeskProps) {
   }, [keptRevision, onLink]);
 
   const announce = useAnnounce();
+  const refused = whyNotKept(subject.project);
   const obey = useCallback(
     (command: BenchCommand) => {
       if (command.kind === 'chart') {
@@ -52,10 +53,10 @@ export function BenchDesk({ subject, link, onLink, onWorst }: BenchDeskProps) {
       } else if (command.kind === 'undo') undo(store);
       else if (command.kind === 'redo') redo(store);
       else if (command.kind === 'nudge') nudgeGain(store.getState(), activeGain, command.fraction);
-      else if (mayKeep(subject.project.role)) keep();
-      else announce('Keeping is for editors of this project.');
+      else if (refused === null) keep();
+      else announce(refused);
     },
-    [store, onLink, activeGain, keep, announce, subject.project.role],
+    [store, onLink, activeGain, keep, announce, refused],
   );
   const region = useBenchKeys(obey);
   return (

@@ -23,23 +23,28 @@ const changes: readonly (readonly [keyof Room, (amount: number) => string, strin
   ['moreDeadTime', formatRoomMilliseconds, 'more dead time'],
 ];
 
-function stop({ quantity, limit }: FirstBreak, units: ReaderUnits): string {
-  if (quantity === null) return 'before it is unstable';
-  return `before ${quantityName(quantity)}${limit === null ? '' : ` ${demandedText(quantity, limit, units)}`}`;
-}
+const limitWords = ({ quantity, limit }: FirstBreak, units: ReaderUnits): string | null =>
+  quantity === null ? null : `${quantityName(quantity)}${limit === null ? '' : ` ${demandedText(quantity, limit, units)}`}`;
 
 function line(way: RoomWay, [key, amount, words]: (typeof changes)[number], units: ReaderUnits): RoomLine {
   const first = way.any ?? way.instability;
   if (first === null) return { way: key, change: `over ${amount(way.lookedTo)} ${words}`, before: '', caseName: null };
-  return { way: key, change: `${amount(first.amount)} ${words}`, before: stop(first, units), caseName: first.case.name };
+  const limit = limitWords(first, units);
+  const shared = { way: key, caseName: first.case.name };
+  // Less than is shown is none: what would break is all but reached, or was passed before.
+  if (first.amount === (key === 'moreDeadTime' ? 0 : 1))
+    return { ...shared, change: `no ${words}`, before: limit === null ? 'without being unstable' : `within ${limit}` };
+  return { ...shared, change: `${amount(first.amount)} ${words}`, before: `before ${limit ?? 'it is unstable'}` };
 }
+
+const stopOf = ({ before, caseName }: RoomLine): string => [before, caseName].filter(Boolean).join(', ');
 
 /** All ways in one sentence: what breaks at the same limit is said together. "7 % more gain or 16 ms more dead time before Ms 1.70" */
 export function roomSentence(lines: readonly RoomLine[]): string {
-  const stops = [...new Set(lines.map(({ before, caseName }) => [before, caseName].filter(Boolean).join(', ')))];
+  const stops = [...new Set(lines.map(stopOf))];
   const parts = stops.map((stop) => {
-    const changes = lines.filter(({ before, caseName }) => [before, caseName].filter(Boolean).join(', ') === stop);
-    return [changes.map(({ change }) => change).join(' or '), stop].filter(Boolean).join(' ');
+    const together = lines.filter((one) => stopOf(one) === stop).map(({ change }) => change);
+    return [together.join(' or '), stop].filter(Boolean).join(' ');
   });
   return `${parts.join('; ')}.`;
 }

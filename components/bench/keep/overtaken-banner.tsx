@@ -6,7 +6,7 @@ import { useBench, useDraft } from '../bench-context';
 import { isMoved } from '../draft/draft';
 import { isOvertaken } from '../draft/meet-latest';
 import { settingsOf } from '../draft/settings';
-import { mayKeep } from './saved-words';
+import { whyNotKept } from './saved-words';
 
 /** Someone kept a newer revision than the one on the bench: what it is, and the two ways on. Nothing is lost by either. */
 export function OvertakenBanner({ onFollow }: { onFollow: () => void }) {
@@ -35,7 +35,7 @@ export function OvertakenBanner({ onFollow }: { onFollow: () => void }) {
       {...words}
       action={
         <View style={styles.actions}>
-          {moved && mayKeep(project.role) && (
+          {moved && whyNotKept(project) === null && (
             <Button label={`Put mine on top of rev ${latest.revision}`} onPress={() => store.getState().rebase(newest)} />
           )}
           <Button kind="quiet" label={`Show rev ${latest.revision}`} onPress={take} />

@@ -1,4 +1,5 @@
-import type { Role } from '@/contract';
+import type { Project } from '@/contract';
+import { allows } from '@/contract/permissions';
 import { type Draft, isMoved, movesSinceKept } from '../draft/draft';
 
 export interface SavedWords {
@@ -6,7 +7,11 @@ export interface SavedWords {
   readonly detail: string;
 }
 
-export const mayKeep = (role: Role): boolean => role === 'owner' || role === 'editor';
+/** Why nothing can be kept here by this person; null where it can. */
+export function whyNotKept({ role, archived }: Pick<Project, 'role' | 'archived'>): string | null {
+  if (!allows(role, 'edit')) return `You are a ${role} here: move the gains, an editor keeps them.`;
+  return archived ? 'An archived project keeps nothing new.' : null;
+}
 
 const counted = (moves: number): string => `${moves} ${moves === 1 ? 'move' : 'moves'}`;
 

@@ -2,7 +2,7 @@ import { useSignal } from '@/hooks/use-signal';
 import { useBench, useDraft } from '../bench-context';
 import { isMoved } from '../draft/draft';
 import { isOvertaken } from '../draft/meet-latest';
-import { mayKeep, nextRevision } from './saved-words';
+import { nextRevision, whyNotKept } from './saved-words';
 
 export interface KeepButton {
   /** false for those who may never keep here: they are told why, and offered nothing to press. */
@@ -21,11 +21,7 @@ export function useKeepButton(): KeepButton {
   const nothingToKeep = useDraft((draft) => draft.base.revision !== null && !isMoved(draft));
   const overtaken = useDraft((draft) => isOvertaken(draft, latest));
   const revision = nextRevision(latest);
-  const remark = (() => {
-    if (subject.project.archived) return 'An archived project keeps nothing new.';
-    if (!mayKeep(subject.project.role)) return `You are a ${subject.project.role} here: move the gains, an editor keeps them.`;
-    if (!online) return 'No signal. The draft stays on this device; keeping it needs signal.';
-    return null;
-  })();
-  return { offered: mayKeep(subject.project.role), revision, disabled: remark !== null || nothingToKeep || overtaken, remark };
+  const refused = whyNotKept(subject.project);
+  const remark = refused ?? (online ? null : 'No signal. The draft stays on this device; keeping it needs signal.');
+  return { offered: refused === null, revision, disabled: remark !== null || nothingToKeep || overtaken, remark };
 }

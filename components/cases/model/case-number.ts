@@ -24,10 +24,8 @@ export function checkOf(view: CaseView, quantity: Quantity): Check | null {
   return checks.reduce<Check | null>((worst, next) => (worst === null || severity(next) > severity(worst) ? next : worst), null);
 }
 
-/** What a check is worth on this screen: never green where nobody stated delay or sample time, or where the case changed since. */
-export function verdictOf({ stated, outdated }: CaseView, { verdict }: Check): Verdict {
-  return outdated || (!stated && verdict !== 'fail') ? 'notJudged' : verdict;
-}
+/** What a check is worth on this screen: nothing can be said of a case that changed since it was analysed. */
+export const verdictOf = ({ outdated }: CaseView, { verdict }: Check): Verdict => (outdated ? 'notJudged' : verdict);
 
 export function caseNumber(view: CaseView, quantity: Quantity, units: ReaderUnits): CaseNumber {
   const check = checkOf(view, quantity);

@@ -10,8 +10,6 @@ export interface CaseView {
   readonly result: CaseResult | null;
   /** The loop of this case is another one than the one that was analysed: its numbers are those of before. */
   readonly outdated: boolean;
-  /** Somebody stated the sample time and where the dead time comes from; without, nothing is judged. */
-  readonly stated: boolean;
 }
 
 /** Joins the cases of now with the results of an analysis. A case that was taken away since is not among them. */
@@ -27,7 +25,6 @@ export function caseViews(cases: readonly Case[], conditions: Conditions | null,
       frozen: was,
       result: results.get(kept.id) ?? null,
       outdated: current !== null && was !== null && runsOtherwise(was, current),
-      stated: analysis?.inputs.design.sampling !== null && was?.plant.deadTimeBasis !== null,
     };
   });
 }

@@ -6,13 +6,14 @@ import { Button } from '@/components/ui/button';
 import { Heading, Text } from '@/components/ui/text';
 import { useUnits } from '@/components/ui/units';
 import { VerdictWord } from '@/components/ui/verdict-word';
+import { CheckTable } from '@/components/verdict/check-table';
 import { placeText } from '@/figures/axis-text';
 import { BasisMark } from '../basis-mark';
 import { basisWords } from '../basis-words';
+import { verdictOf } from '../model/case-number';
 import { caseVerdict, whyNotJudged } from '../model/case-verdict';
 import type { CaseView } from '../model/case-view';
 import { parameterText, plantWords } from './case-facts';
-import { CheckTable } from './check-table';
 import { DeleteCase } from './delete-case';
 import { EdgeNote } from './edge-note';
 import type { EndOfAxis } from './end-words';
@@ -69,7 +70,14 @@ export function CasePanel({ view, design, worst, capped, ends, alsoHere, onOpen,
         </Text>
       ) : null}
       {result?.numbers.closedLoop.stable === false ? <Text tone="fail">Unstable: the numbers have no meaning here.</Text> : null}
-      {result && result.checks.length > 0 ? <CheckTable view={view} /> : null}
+      {result && result.checks.length > 0 ? (
+        <CheckTable
+          label={`Checks of ${view.kept.name}`}
+          checks={result.checks.map((check) => ({ ...check, verdict: verdictOf(view, check) }))}
+          unstable={!result.numbers.closedLoop.stable}
+          outdated={view.outdated}
+        />
+      ) : null}
       {ends.length > 0 ? (
         <EdgeNote ends={ends} worst={worst} capped={capped} mayEdit={mayEdit} onCheckFurther={() => onEdit('new')} />
       ) : null}

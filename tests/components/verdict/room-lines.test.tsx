@@ -37,6 +37,12 @@ describe('room in words', () => {
     expect(said({ moreDeadTime: way(null, 10) })[2]).toBe('over 10,000 ms more dead time');
   });
 
+  it('says none where the limit is reached or passed, or the loop is unstable as it is', () => {
+    expect(said({ moreGain: way(ms(1), 100) })[0]).toBe('no more gain within Ms 1.70');
+    const unstable: FirstBreak = { amount: 0, quantity: null, limit: null, case: slow };
+    expect(said({ moreDeadTime: way(unstable, 10) })[2]).toBe('no more dead time without being unstable');
+  });
+
   it('keeps its places while it is looked for', () => {
     expect(roomLines('sought', units).map(({ change }) => change)).toEqual(['… more gain', '… less gain', '… more dead time']);
   });

@@ -4,7 +4,7 @@ import { freshDraft, moved } from '@/components/bench/draft/draft';
 import { changeWords } from '@/components/bench/draft/draft-words';
 import { startSettings } from '@/components/bench/draft/settings';
 import { keepWords } from '@/components/bench/keep/keep-outcome';
-import { mayKeep, nextRevision, savedWords } from '@/components/bench/keep/saved-words';
+import { nextRevision, savedWords, whyNotKept } from '@/components/bench/keep/saved-words';
 
 const units = { frequency: 'rad/s', magnitude: 'dB' } as const;
 
@@ -45,8 +45,12 @@ describe('what became of keeping', () => {
 });
 
 describe('keeping', () => {
-  it('is for owners and editors', () =>
-    expect((['owner', 'editor', 'reviewer', 'viewer'] as const).map(mayKeep)).toEqual([true, true, false, false]));
+  it('is for owners and editors', () => {
+    const refused = (archived: boolean) =>
+      (['owner', 'editor', 'reviewer', 'viewer'] as const).map((role) => whyNotKept({ role, archived }) !== null);
+    expect(refused(false)).toEqual([false, false, true, true]);
+    expect(refused(true)).toEqual([true, true, true, true]);
+  });
   it('counts from the newest revision', () => expect([nextRevision(null), nextRevision(6)]).toEqual([1, 7]));
 });
 

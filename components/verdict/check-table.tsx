@@ -3,18 +3,23 @@ import { Text } from '@/components/ui/text';
 import { useTheme } from '@/components/ui/theme';
 import { useUnits } from '@/components/ui/units';
 import { VerdictWord } from '@/components/ui/verdict-word';
-import { checkValueText, demandText } from '@/components/verdict/demand-text';
 import type { Check } from '@/contract';
 import { demandedText, quantityName } from '@/figures/quantity-text';
-import { verdictOf } from '../model/case-number';
-import type { CaseView } from '../model/case-view';
+import { checkValueText, demandText } from './demand-text';
+
+export interface CheckTableProps {
+  label: string;
+  checks: readonly Check[];
+  /** The numbers have no meaning: struck out. */
+  unstable?: boolean;
+  /** The numbers are those of before: set lighter. */
+  outdated?: boolean;
+}
 
 /** Every check of a case: the number, what is demanded of it, and what it is worth. */
-export function CheckTable({ view }: { view: CaseView }) {
-  const checks = view.result?.checks ?? [];
-  const unstable = view.result?.numbers.closedLoop.stable === false;
+export function CheckTable({ label, checks, unstable = false, outdated = false }: CheckTableProps) {
   return (
-    <View role="table" aria-label={`Checks of ${view.kept.name}`}>
+    <View role="table" aria-label={label}>
       <View role="row" style={styles.heads}>
         {['number', 'value', 'demanded', 'verdict'].map((name) => (
           <View key={name} role="columnheader">
@@ -23,20 +28,21 @@ export function CheckTable({ view }: { view: CaseView }) {
         ))}
       </View>
       {checks.map((check, index) => (
-        <CheckLine key={`${check.quantity} ${check.bound}`} check={check} view={view} unstable={unstable} barred={index % 2 === 0} />
+        <CheckLine
+          key={`${check.quantity} ${check.bound}`}
+          check={check}
+          unstable={unstable}
+          outdated={outdated}
+          barred={index % 2 === 0}
+        />
       ))}
     </View>
   );
 }
 
-interface CheckLineProps {
-  check: Check;
-  view: CaseView;
-  unstable: boolean;
-  barred: boolean;
-}
+type CheckLineProps = Pick<Required<CheckTableProps>, 'unstable' | 'outdated'> & { check: Check; barred: boolean };
 
-function CheckLine({ check, view, unstable, barred }: CheckLineProps) {
+function CheckLine({ check, unstable, outdated, barred }: CheckLineProps) {
   const { colors } = useTheme();
   const units = useUnits();
   const target = check.target === null ? 'no target' : `target ${demandedText(check.quantity, check.target, units)}`;
@@ -46,7 +52,7 @@ function CheckLine({ check, view, unstable, barred }: CheckLineProps) {
         <Text>{quantityName(check.quantity)}</Text>
       </View>
       <View role="cell" style={styles.value}>
-        <Text step="h3" tone={unstable || view.outdated ? 'ink3' : 'ink'} style={unstable && styles.struck} numberOfLines={1}>
+        <Text step="h3" tone={unstable || outdated ? 'ink3' : 'ink'} style={unstable && styles.struck} numberOfLines={1}>
           {checkValueText(check, units)}
         </Text>
       </View>
@@ -56,7 +62,7 @@ function CheckLine({ check, view, unstable, barred }: CheckLineProps) {
         </Text>
       </View>
       <View role="cell" style={styles.verdict}>
-        <VerdictWord verdict={verdictOf(view, check)} size={17} />
+        <VerdictWord verdict={check.verdict} size={17} />
       </View>
     </View>
   );
