@@ -3,8 +3,8 @@ import type { GainCrossover } from '@/analysis/margins/crossovers';
 import { ladder } from '@/analysis/margins/ladder';
 import { wrapped } from '@/analysis/margins/margins';
 import { bracketedRoot } from '@/analysis/numbers/bracketed-root';
-import { DelayedCircle } from './delayed-circle';
-import { contourAt, gainContour, type ContourPiece } from './gain-contour';
+import { DelayedCircle, type Path } from './delayed-circle';
+import { contourAt, gainContour, type ContourPiece, type ContourPoint } from './gain-contour';
 import type { SampledLoop } from './sampled-loop';
 import type { SampledModel } from './sampled-model';
 
@@ -25,7 +25,8 @@ const MOST_TURNS = 64;
 interface Hit {
   /** Total delay in periods. */
   readonly delay: number;
-  readonly omega: number;
+  /** null: in a jump. */
+  readonly omega: number | null;
 }
 
 /**
@@ -34,7 +35,8 @@ interface Hit {
  * A delay of n whole periods and a rest changes |L| by its rest alone and turns L by ωh for each period. So the curve |L| = 1
  * is followed over frequency and rest, one period of it; on it n = (arg L + π + 2πk)/(ωh) is to be a whole number.
  *
- * null where no delay does it, and where an unstable loop's |L| never crosses 1.
+ * A plant that answers at once makes L jump where the delay passes a whole period; a pole that leaves on the way counts there,
+ * without a frequency. null where no delay does it, and where an unstable loop's |L| never crosses 1.
  *
  * @see REFERENCES "Exact delay margin"
  */
@@ -44,11 +46,15 @@ export const exactDelayMargin = (
   { crossovers, stable }: { crossovers: readonly GainCrossover[]; stable: boolean },
 ): Margins['delay'] => {
   if (loop.isZero || (crossovers.length === 0 && !stable)) return null;
-  const circle = new DelayedCircle(model);
   const present = model.delay / model.period;
-  const pieces = gainContour(circle, searchRows(loop, crossovers), columnsFor(model));
+  const rows = searchRows(loop, crossovers);
+  const paths: readonly Path[] = model.held.isImmediate ? ['between', 'jump'] : ['between'];
   let best: Hit | null = null;
-  for (const piece of pieces) best = firstHit(circle, piece, { period: model.period, present, best }) ?? best;
+  for (const path of paths) {
+    const circle = new DelayedCircle(model, path);
+    for (const piece of gainContour(circle, rows, columnsFor(model)))
+      best = firstHit(circle, piece, { period: model.period, present, best }) ?? best;
+  }
   return best && { seconds: Math.max(0, best.delay - present) * model.period, frequency: best.omega };
 };
 
@@ -73,8 +79,9 @@ interface Search {
 const firstHit = (circle: DelayedCircle, piece: ContourPiece, { period, present, best }: Search): Hit | null => {
   const { from, to } = piece;
   const phaseTo = from.phase + wrapped(to.phase - from.phase);
-  const earliest = Math.min(from.rest, to.rest);
-  const least = present - Math.max(from.rest, to.rest) - SAME;
+  const rests = [circle.delayOf(from.rest), circle.delayOf(to.rest)];
+  const earliest = Math.min(...rests);
+  const least = present - Math.max(...rests) - SAME;
   const angle = Math.min(from.omega, to.omega) * period;
   const firstTurn = Math.floor((least * angle - Math.max(from.phase, phaseTo) - Math.PI) / TURN);
   let found: Hit | null = null;
@@ -104,13 +111,17 @@ interface Meeting {
 /** Where on a piece exactly `periods` whole periods bring L to −1. */
 const hitAt = (circle: DelayedCircle, { from, to, rows }: ContourPiece, { period, periods, ends, turn }: Meeting): Hit => {
   const [a, b] = [ends[0] - periods, ends[1] - periods];
-  if (Math.abs(a) <= SAME) return { delay: periods + from.rest, omega: from.omega };
-  if (Math.abs(b) <= SAME) return { delay: periods + to.rest, omega: to.omega };
+  const at = ({ rest, omega }: Pick<ContourPoint, 'rest' | 'omega'>): Hit => {
+    const share = circle.delayOf(rest);
+    return { delay: periods + share, omega: rest > 0 && share === 0 ? null : omega };
+  };
+  if (Math.abs(a) <= SAME) return at(from);
+  if (Math.abs(b) <= SAME) return at(to);
   const needed = (rest: number) => {
     const { omega, phase } = contourAt(circle, rows, rest);
     const unwrapped = from.phase + wrapped(phase - from.phase);
     return (unwrapped + Math.PI + TURN * turn) / (omega * period) - periods;
   };
   const rest = bracketedRoot(needed, { a: from.rest, fa: a, b: to.rest, fb: b });
-  return { delay: periods + rest, omega: contourAt(circle, rows, rest).omega };
+  return at(contourAt(circle, rows, rest));
 };

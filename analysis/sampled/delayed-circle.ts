@@ -1,5 +1,6 @@
 import { AxisProduct } from '@/analysis/loop/axis-product';
 import { limitOf } from '@/analysis/margins/end-values';
+import { multiply } from '@/analysis/numbers/polynomial';
 import type { SampledModel } from './sampled-model';
 
 /** A point of the unit circle: everything of L there that no delay changes. */
@@ -14,15 +15,25 @@ export interface CirclePoint {
 }
 
 /**
+ * How the second variable leads from one delay to another: through the delays between two whole periods, or, with a plant that
+ * answers at once, through the jump that L makes where a delay passes a whole period.
+ */
+export type Path = 'between' | 'jump';
+
+/**
  * L of a sampled loop as a function of two variables: the frequency, and the part `rest` of the delay beyond whole periods, in
  * periods from 0 to 1. Whole periods only turn L by e^(−jωh) each and are left out; `rest` = 1 is one period more than 0.
+ * On the path of a jump `rest` leads from L at a delay of whole periods to L just past it.
  */
 export class DelayedCircle {
   re = 0;
   im = 0;
   private readonly command: AxisProduct;
 
-  constructor(private readonly model: SampledModel) {
+  constructor(
+    private readonly model: SampledModel,
+    private readonly path: Path,
+  ) {
     this.command = new AxisProduct([model.controller, model.filters]);
   }
 
@@ -47,9 +58,18 @@ export class DelayedCircle {
     return { omega, wRe, wIm, restRe: re, restIm: im };
   }
 
+  /** What a rest adds to the delay, in periods: nothing on the way through a jump. */
+  delayOf(rest: number): number {
+    return this.path === 'jump' ? 0 : rest;
+  }
+
   /** Numerators of the held plant for each rest in [0, 1]. */
   numerators(rests: readonly number[]): number[][] {
     const { held } = this.model;
+    if (this.path === 'jump') {
+      const [before, after] = [multiply(held.atSample(), [1, 1]), [0, ...held.after([1])[0]]];
+      return rests.map((rest) => before.map((c, i) => (1 - rest) * c + rest * after[i]));
+    }
     const between = held.after(rests.filter((rest) => rest < 1).map((rest) => 1 - rest));
     return rests.map((rest) => (rest < 1 ? between.shift()! : held.atSample()));
   }

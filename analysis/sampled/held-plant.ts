@@ -40,6 +40,11 @@ export class HeldPlant {
     this.isWashedOut = atOrigin('zeros') > atOrigin('poles');
   }
 
+  /** Whether the output answers its input at once: it then jumps where the input does. */
+  get isImmediate(): boolean {
+    return this.atSample()[0] !== 0;
+  }
+
   /** Numerator, descending in w, of the output at the sample itself: its input is the one that begins there. */
   atSample(): number[] {
     const { output } = this.equations;

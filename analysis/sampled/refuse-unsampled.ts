@@ -4,8 +4,8 @@ import type { LoopModel, SampledRun } from '@/analysis/loop/model';
 /** Delays beyond this many sample periods are refused rather than worked through. */
 export const MOST_PERIODS = 1000;
 
-/** An unstable mode that grows by more than e^30 between two samples cannot be seen by any computer. */
-const FASTEST_GROWTH = 30;
+/** An unstable mode that grows by more than e^15 between two samples cannot be seen by any computer. */
+const FASTEST_GROWTH = 15;
 
 /** @throws LoopError for what only a sampled loop refuses, each at its field and with what would be right */
 export const refuseUnsampled = (model: LoopModel, { sampling, filters }: SampledRun): void => {

@@ -76,6 +76,25 @@ describe('the exact delay margin', () => {
     ));
 });
 
+describe('the delay margin of a plant that answers at once', () => {
+  const gain = (deadTime: number, kp = 0.2) => numbersOf(coefficients([0.5], [1], deadTime), pid(kp, 0.5), every(0.1));
+  const stableAt = (deadTime: number, kp?: number) => gain(deadTime, kp).closedLoop.stable;
+
+  it('ends where a whole period more tips it over', () => {
+    const { seconds, frequency } = gain(0.05).margins.delay!;
+    expect(frequency).toBeNull();
+    expect(Math.abs((seconds + 0.05) / 0.1 - Math.round((seconds + 0.05) / 0.1))).toBeLessThan(1e-9);
+    expect(stableAt(0.05 + seconds - 1e-6)).toBe(true);
+    expect(stableAt(0.05 + seconds + 1e-6)).toBe(false);
+  });
+
+  it('is 0 where any delay at all does', () => {
+    expect(stableAt(0, 2.2)).toBe(true);
+    expect(stableAt(1e-6, 2.2)).toBe(false);
+    expect(gain(0, 2.2).margins.delay).toEqual({ seconds: 0, frequency: null });
+  });
+});
+
 describe('a sampled loop', () => {
   it('counts the same unstable poles by roots and by the turns of the Nyquist curve', () =>
     check(
