@@ -5,10 +5,11 @@ import { type RuleLabel, ruleTicks, type RuleTick } from './gain-rule-ticks';
 import { straightKerb, type StraightKerb } from './kerb';
 import { textWidth } from './text-width';
 
-/** Where, around the present gain, the first limit stops holding, and its name ("Ms, 30 km/h"). */
+/** Where, around the present gain, the first limit stops holding, which that is, and in which case ("30 km/h, 1,380 kg"). */
 export interface GainEdge {
   value: number;
   name: string;
+  case: string;
 }
 
 /** The stretch in which every limit holds; an end that is not known or has no limit is absent. */
@@ -53,10 +54,22 @@ export const ruleRows = { baseline: 30, edge: 53, warning: 69, height: 74 } as c
 
 const inside = (x: number, width: number): boolean => x > 0 && x < width;
 
-function edgeText(edge: GainEdge, x: number, end: 'low' | 'high', width: number): GainRuleShape['edges'][number] {
-  const length = textWidth(edge.name);
-  if (end === 'low') return { tick: x, text: edge.name, x: Math.max(x + 2, length), anchor: 'end' };
-  return { tick: x, text: edge.name, x: Math.min(x - 2, width - length), anchor: 'start' };
+type EdgeText = GainRuleShape['edges'][number];
+
+/** Between the names of both ends, px. */
+const BETWEEN_NAMES = 10;
+
+/** What an edge is called, from all there is to say to what there is always room for. */
+const callings: readonly ((edge: GainEdge) => string)[] = [
+  (edge) => `${edge.name}, ${edge.case}`,
+  (edge) => `${edge.name}, ${edge.case.split(', ')[0]}`,
+  (edge) => edge.name,
+];
+
+function edgeText(text: string, x: number, end: 'low' | 'high', width: number): EdgeText {
+  const length = textWidth(text);
+  if (end === 'low') return { tick: x, text, x: Math.max(x + 2, length), anchor: 'end' };
+  return { tick: x, text, x: Math.min(x - 2, width - length), anchor: 'start' };
 }
 
 function warningText(value: number, end: 'below' | 'above', x: number, width: number): RuleText {
@@ -65,12 +78,17 @@ function warningText(value: number, end: 'below' | 'above', x: number, width: nu
   return { x: width, anchor: 'end', text: `unstable from ${number}${inside(x, width) ? '' : ' ›'}` };
 }
 
-function edgesOf(stretch: GainStretch, at: (value: number) => number, width: number): GainRuleShape['edges'] {
-  const ends = [
-    stretch.low && edgeText(stretch.low, at(stretch.low.value), 'low', width),
-    stretch.high && edgeText(stretch.high, at(stretch.high.value), 'high', width),
-  ];
-  return ends.filter((edge) => edge !== undefined).filter((edge) => inside(edge.tick, width));
+/** The edges in view, called by as much as both have room for. */
+function edgesOf({ low, high }: GainStretch, at: (value: number) => number, width: number): GainRuleShape['edges'] {
+  const inView = (edge: GainEdge | undefined) => (edge && inside(at(edge.value), width) ? edge : undefined);
+  const [left, right] = [inView(low), inView(high)];
+  const called = callings.map((calling) => ({
+    low: left && edgeText(calling(left), at(left.value), 'low', width),
+    high: right && edgeText(calling(right), at(right.value), 'high', width),
+  }));
+  const fits = ({ low: a, high: b }: (typeof called)[number]) => (a?.x ?? 0) + (a && b ? BETWEEN_NAMES : 0) <= (b?.x ?? width);
+  const chosen = called.find(fits) ?? called[called.length - 1];
+  return [chosen.low, chosen.high].filter((edge) => edge !== undefined);
 }
 
 function unstableOf(unstable: UnstableGains, at: (value: number) => number, width: number) {

@@ -8,7 +8,7 @@ import { verdictWords } from '@/figures/verdict-shape';
 import { checkValueText, demandSign, demandText } from './demand-text';
 import type { WorstCheck } from './worst-checks';
 
-const WIDTH = 128;
+const WIDTH = 116;
 
 /** What is demanded side by side: the worst over all cases, its limit, and all cases on the edge ruler. */
 export function CheckRulers({ checks }: { checks: readonly WorstCheck[] }) {
@@ -49,7 +49,7 @@ function CheckRuler({ worst: { check, case: where, uses } }: { worst: WorstCheck
 }
 
 const styles = StyleSheet.create({
-  row: { flexDirection: 'row', flexWrap: 'wrap', columnGap: 18, rowGap: 6 },
+  row: { flexDirection: 'row', flexWrap: 'wrap', columnGap: 14, rowGap: 6 },
   ruler: { width: WIDTH, gap: 1 },
   head: { flexDirection: 'row', alignItems: 'center', gap: 6 },
   name: { flexShrink: 1, flexGrow: 1 },

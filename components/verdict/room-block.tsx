@@ -25,10 +25,10 @@ export function RoomBlock(props: RoomBlockProps) {
       </Text>
       {lines.map(({ way, change, before, caseName }) => (
         <View key={way} style={styles.line}>
-          <Text step="note" weight={600}>
+          <Text step="small" weight={600}>
             {change}
           </Text>
-          <Text step="note" tone="ink2" style={styles.before}>
+          <Text step="small" tone="ink2" style={styles.before}>
             {[before, caseName].filter(Boolean).join(', ')}
           </Text>
         </View>

@@ -87,7 +87,7 @@ const styles = StyleSheet.create({
     flexWrap: 'wrap',
     alignItems: 'center',
     justifyContent: 'space-between',
-    columnGap: 30,
+    columnGap: 22,
     rowGap: 8,
     minHeight: 84,
     paddingHorizontal: gutter.wide,

@@ -66,13 +66,21 @@ describe('the names on a gain rule', () => {
 });
 
 describe('limits on a gain rule', () => {
-  const stretch = { low: { value: 0.95, name: 'Overshoot, 30 km/h' }, high: { value: 1.14, name: 'Ms, 30 km/h' } };
+  const where = { case: '30 km/h, 1,380 kg' };
+  const stretch = { low: { value: 0.95, name: 'Overshoot', ...where }, high: { value: 1.14, name: 'Ms', ...where } };
 
   it('bound the stretch in which all of them hold', () => {
     const shape = gainRule({ ...base, kept: 1, stretch });
     const { at } = gainScale(base);
     expect(shape.held).toEqual([at(0.95), at(1.14)]);
-    expect(shape.edges.map(({ text }) => text)).toEqual(['Overshoot, 30 km/h', 'Ms, 30 km/h']);
+    expect(shape.edges.map(({ tick }) => tick)).toEqual([at(0.95), at(1.14)]);
+  });
+
+  it('are called by as much as there is room for, and never over each other', () => {
+    const called = (width: number) => gainRule({ ...base, width, kept: 1, stretch }).edges.map(({ text }) => text);
+    expect(called(600)).toEqual(['Overshoot, 30 km/h, 1,380 kg', 'Ms, 30 km/h, 1,380 kg']);
+    expect(called(270)).toEqual(['Overshoot, 30 km/h', 'Ms, 30 km/h']);
+    expect(called(140)).toEqual(['Overshoot', 'Ms']);
   });
 
   it('are not claimed where nobody looked', () => expect(gainRule({ ...base, kept: 1 }).held).toBeNull());

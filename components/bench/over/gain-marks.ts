@@ -22,8 +22,7 @@ const isBroken = (mark: Mark | null) => mark !== null && ahead(mark) === null;
 
 function edge(mark: Mark | null): GainEdge | undefined {
   if (!mark) return undefined;
-  const quantity = mark.quantity === null ? 'Unstable' : quantityName(mark.quantity);
-  return { value: mark.holds, name: `${quantity}, ${mark.case.name}` };
+  return { value: mark.holds, name: mark.quantity === null ? 'Unstable' : quantityName(mark.quantity), case: mark.case.name };
 }
 
 /** Both sides as the rule draws them: the stretch in which every limit holds, and where the first case is no longer stable. */

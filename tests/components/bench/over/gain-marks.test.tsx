@@ -10,7 +10,7 @@ describe('what a gain’s rule shows of limits', () => {
     const down = { limit: null, instability: lost(0.19, 0.18) };
     const up = { limit: ms(1.2, 1.21), instability: lost(3.4, 3.5) };
     expect(ruleMarks({ down, up })).toEqual({
-      stretch: { low: undefined, high: { value: 1.2, name: 'Ms, 30 km/h' } },
+      stretch: { low: undefined, high: { value: 1.2, name: 'Ms', case: '30 km/h' } },
       unstable: { below: 0.18, above: 3.5 },
     });
   });
