@@ -22,6 +22,9 @@ const SAME = 1e-9;
 /** Turns of the phase after which a piece that never met −1 is left: others have long done so. */
 const MOST_TURNS = 64;
 
+/** A delay of more periods than this is no limit: whole periods have no digits left beside it. */
+const FARTHEST = 1e9;
+
 interface Hit {
   /** Total delay in periods. */
   readonly delay: number;
@@ -91,8 +94,11 @@ const firstHit = (circle: DelayedCircle, piece: ContourPiece, { period, present,
       (phaseTo + Math.PI + TURN * turn) / (to.omega * period),
     ];
     const [low, high] = [Math.min(...ends), Math.max(...ends)];
-    if (best && low - SAME + earliest > best.delay) break;
-    for (let periods = Math.max(Math.ceil(low - SAME), Math.ceil(least)); periods <= high + SAME && !found; periods += 1) {
+    if ((best && low - SAME + earliest > best.delay) || !(low < FARTHEST)) break;
+    const first = Math.max(Math.ceil(low - SAME), Math.ceil(least));
+    const last = Math.min(high + SAME, first + MOST_TURNS);
+    for (let periods = first; periods <= last && !found; periods += 1) {
+      if (best && periods + earliest - SAME > best.delay) break;
       const hit = hitAt(circle, piece, { period, periods, ends, turn });
       if (hit.delay >= present - SAME && hit.delay < (best?.delay ?? Infinity)) found = hit;
     }

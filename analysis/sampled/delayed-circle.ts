@@ -85,6 +85,6 @@ export class DelayedCircle {
   /** ln|L| at a point. */
   logAt(point: CirclePoint, numerator: readonly number[]): number {
     this.evaluate(point, numerator);
-    return Math.log(Math.hypot(this.re, this.im));
+    return 0.5 * Math.log(this.re * this.re + this.im * this.im);
   }
 }

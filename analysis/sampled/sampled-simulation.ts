@@ -61,6 +61,7 @@ export class SampledSimulation implements Running {
   private readonly sampleRow: Float64Array;
   private readonly samples: number[] = [];
   private readonly limitedSince: number[] = [];
+  private readonly heldCommand = new Float64Array(NODE_COUNT);
   private readonly half: ContinuousHalf;
   private readonly equation: DifferenceEquation;
   private readonly sizes: StepSizes;
@@ -110,15 +111,14 @@ export class SampledSimulation implements Running {
 
   /** From sample k to the next. */
   private next(): void {
-    const { half, equation, sizes, state, k, heldPanels } = this;
-    this.budget.spend((heldPanels.count + 1) * WORK_PER_PANEL);
+    const { half, equation, sizes, state, k } = this;
     const command = this.controller.step(sizes.reference, this.sampleNow());
     this.hold(command + sizes.load);
     if (!this.isImmediate) this.takeSample(k, dot(this.sampleRow, state));
     const start = k * equation.period + half.computationDelay;
     if (this.controller.isLimited) this.limitedSince.push(start);
-    this.control.append(start, equation.period, new Float64Array(NODE_COUNT).fill(command / this.unit), 0);
-    heldPanels.pass(state, start + half.plantDeadTime, this.appendOutput);
+    this.control.append(start, equation.period, this.heldCommand.fill(command / this.unit), 0);
+    this.follow(this.heldPanels, start + half.plantDeadTime);
     this.k = k + 1;
   }
 
@@ -146,6 +146,12 @@ export class SampledSimulation implements Running {
   private takeSample(period: number, value: number): void {
     const { periods, rest } = this.half.delay;
     this.samples[period + periods + (rest > 0 ? 1 : 0)] = value;
+  }
+
+  /** Carries the plant over a stretch with its input held. @throws OutOfWork */
+  private follow(panels: HeldPanels, start: number): void {
+    this.budget.spend((panels.count + 1) * WORK_PER_PANEL);
+    panels.pass(this.state, start, this.appendOutput);
   }
 
   private hold(input: number): void {
@@ -190,11 +196,11 @@ export class SampledSimulation implements Running {
     this.hold(this.sizes.load);
     if (part > 0) {
       if (read > begins) this.takeSample(-whole - 1, dot(this.sensorRow(read - begins), this.state));
-      new HeldPanels(equations, poles, part).pass(this.state, plantDeadTime, this.appendOutput);
+      this.follow(new HeldPanels(equations, poles, part), plantDeadTime);
     }
     for (let j = -whole; j < 0; j += 1) {
       this.takeSample(j, dot(this.sampleRow, this.state));
-      this.heldPanels.pass(this.state, plantDeadTime + computationDelay + j * period, this.appendOutput);
+      this.follow(this.heldPanels, plantDeadTime + computationDelay + j * period);
     }
   }
 }
