@@ -1,4 +1,4 @@
-import { memo, useMemo } from 'react';
+import { memo, useId, useMemo } from 'react';
 import { View, type ViewStyle } from 'react-native';
 import {
   formatGain,
@@ -13,6 +13,8 @@ import {
   type UnstableGains,
   withUnit,
 } from '@/figures';
+import { HiddenText } from '@/components/ui/hidden-text';
+import { describeRule } from './describe-rule';
 import { GainRuleView } from './gain-rule-view';
 import { useChartFrame } from './use-chart-frame';
 import { useFocusRing } from './use-focus-ring';
@@ -69,27 +71,33 @@ export const GainRule = memo(function GainRule(props: GainRuleProps) {
     const size = event.shiftKey ? NUDGE.coarse : event.altKey ? NUDGE.fine : NUDGE.plain;
     onChange(nudgedGain(scale, direction * size), 'end');
   };
+  const marks = describeRule(stretch, unstable);
+  const marksId = useId();
   return (
-    <View
-      role="slider"
-      tabIndex={disabled ? -1 : 0}
-      aria-label={name}
-      aria-disabled={disabled || undefined}
-      aria-valuemin={least}
-      aria-valuemax={most}
-      aria-valuenow={value}
-      aria-valuetext={withUnit(formatGain(value), unit)}
-      onLayout={onLayout}
-      onKeyDown={disabled ? undefined : press}
-      {...(disabled ? {} : handlers)}
-      {...focus}
-      style={[{ height: ruleRows.height }, sideways, style]}
-    >
-      {shape === null ? null : (
-        <svg width={width} height={ruleRows.height} aria-hidden>
-          <GainRuleView shape={shape} width={width} moving={dragged !== null} />
-        </svg>
-      )}
+    <View>
+      <View
+        role="slider"
+        tabIndex={disabled ? -1 : 0}
+        aria-label={name}
+        aria-disabled={disabled || undefined}
+        aria-valuemin={least}
+        aria-valuemax={most}
+        aria-valuenow={value}
+        aria-valuetext={withUnit(formatGain(value), unit)}
+        aria-describedby={marks === '' ? undefined : marksId}
+        onLayout={onLayout}
+        onKeyDown={disabled ? undefined : press}
+        {...(disabled ? {} : handlers)}
+        {...focus}
+        style={[{ height: ruleRows.height }, sideways, style]}
+      >
+        {shape === null ? null : (
+          <svg width={width} height={ruleRows.height} aria-hidden>
+            <GainRuleView shape={shape} width={width} moving={dragged !== null} />
+          </svg>
+        )}
+      </View>
+      <HiddenText id={marksId}>{marks}</HiddenText>
     </View>
   );
 });

@@ -65,12 +65,12 @@ export function VerdictStrip({ headline, room, results, instead, label = 'Worst 
   );
 }
 
-/** Rulers where limits are demanded, else the margins of the headline's case. */
+/** Rulers where limits are demanded; the margins of the headline's case where none are, and struck out where it is not stable. */
 function Demands({ headline, results }: Pick<VerdictStripProps, 'headline' | 'results'>) {
   const units = useUnits();
   const phone = useLayout() === 'phone';
   const checks = mostPressing(worstChecks(results), MOST_RULERS);
-  if (checks.length === 0) {
+  if (checks.length === 0 || headline.unstableCases > 0) {
     const { numbers } = results.find((result) => result.case.id === headline.case?.id) ?? results[0];
     return <MarginRow numbers={marginNumbers(numbers, units)} unstable={!numbers.closedLoop.stable} compact={phone} />;
   }
