@@ -41,6 +41,15 @@ function walk<Case, What>(one: Case, breakAt: BreakAt<Case, What>): Break<Case, 
   return null;
 }
 
+/** Where one of these cases gives way before the end of the walk, which nothing else has until there. */
+function atTheEnd<Case, What>(cases: readonly Case[], breakAt: BreakAt<Case, What>): Break<Case, What> | null {
+  for (const one of cases) {
+    const what = breakAt(one, 1);
+    if (what !== null) return bracket({ holds: 0, breaks: 1, case: one, what }, breakAt);
+  }
+  return null;
+}
+
 /**
  * Whichever gives way before the first that is known. Of those that do, the middle one is bracketed next and the others are
  * asked again: in whatever order they stand, each round leaves about half of them.
@@ -65,7 +74,7 @@ function soonest<Case, What>(suspects: readonly Case[], known: Break<Case, What>
  * The first thing to give way in any case along one change of the loop, a gain that is turned or a dead time that grows.
  *
  * A first case is walked outward in steps that grow by half and bracketed by halving, on the exact judgement. Every other is
- * asked only where everything known so far still holds, and bracketed only if it gives way there. What gives way and holds
+ * asked only where everything known so far still holds, at the latest at the end of the walk, and bracketed only if it gives way there. What gives way and holds
  * again between two steps, or before that place, is passed over.
  *
  * @param cases the likeliest to give way first
@@ -84,9 +93,14 @@ export function firstBreak<Case, What>(
     if (now !== null) return { holds: 0, breaks: 0, case: one, what: now };
   }
   if (known) return soonest(cases, known, breakAt);
-  for (const [index, one] of cases.entries()) {
-    const first = walk(one, breakAt);
-    if (first) return soonest(cases.slice(index + 1), first, breakAt);
-  }
-  return null;
+  const [nearest, ...others] = cases;
+  const first = (nearest !== undefined && walk(nearest, breakAt)) || atTheEnd(others, breakAt);
+  return (
+    first &&
+    soonest(
+      others.filter((one) => one !== first.case),
+      first,
+      breakAt,
+    )
+  );
 }
