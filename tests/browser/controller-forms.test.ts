@@ -24,7 +24,7 @@ async function atTheBench(size: SizeName) {
   const visitor = new Visitor(page, server.url);
   await visitor.isSignedInAs(engineer);
   const bench = new BenchPage(visitor, size);
-  const project = await visitor.firstProjectId();
+  const project = await visitor.projectId('Pit-lane limiter');
   await bench.open(project);
   // The design beside it comes a moment later, and every chart's description names it.
   await bench.chart(/Beside it, dashed/).waitFor({ state: 'attached' });

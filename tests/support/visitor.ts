@@ -40,6 +40,15 @@ export class Visitor {
     if (!answer.ok()) throw new Error(`sign-in answered ${answer.status()}: ${await answer.text()}`);
   }
 
+  /** A project that this person may see, by its name. */
+  async projectId(name: string): Promise<string> {
+    const answer = await this.page.request.get(`${this.url}/api/projects`);
+    const { items } = (await answer.json()) as { items: { id: string; name: string }[] };
+    const found = items.find((project) => project.name === name);
+    if (!found) throw new Error(`There is no project “${name}”.`);
+    return found.id;
+  }
+
   async firstProjectId(): Promise<string> {
     const answer = await this.page.request.get(`${this.url}/api/projects`);
     const { items } = (await answer.json()) as { items: { id: string }[] };
