@@ -10,7 +10,7 @@ export interface CasesQuestion {
   readonly conditions: Conditions;
   /** Those of the conditions' cases that are looked at. */
   readonly cases: readonly FrozenCase[];
-  /** live: coarse, with curves; full: what is kept. */
+  /** live: coarse, the numbers alone; full: what is kept, and a coarse curve of every case. */
   readonly detail: 'live' | 'full';
 }
 
@@ -19,23 +19,31 @@ export interface CasesAnswer {
   /** In the order of the cases, without curves. */
   readonly results: readonly CaseResult[];
   readonly headline: Headline;
-  /** Of each case over frequency, coarse; none in an answer in full, whose curves are those before it. */
+  /** Of each case over frequency, as far as it is drawn thin; none in a coarse answer. */
   readonly curves: readonly FrequencyResponse[];
 }
 
 function analyseCase(one: FrozenCase, { design, conditions, detail }: CasesQuestion): Analysis {
   const loop = caseLoop(one, design);
-  const analysis = analyseLoop(loop, { detail, responses: false, curves: detail === 'live' });
+  const analysis = analyseLoop(loop, { detail, responses: false, curves: false });
   return needsResponses(conditions.limits) ? withResponses(analysis, loop, 'live') : analysis;
+}
+
+const none = { magnitude: [], phaseDegrees: [] };
+
+/** What is drawn of a case that is not the shown one; what is not drawn need not be sent to the page. */
+function thinCurve(one: FrozenCase, design: DesignContent): FrequencyResponse {
+  const { frequencyResponse } = analyseLoop(caseLoop(one, design), { detail: 'live', responses: false });
+  if (!frequencyResponse) throw new Error('An analysis with curves has a frequency response.');
+  return { ...frequencyResponse, plant: none, controller: none, loadSensitivity: [], noiseSensitivity: [] };
 }
 
 /** These cases analysed as far as the limits ask for, and judged as the server would. */
 export function judge(question: CasesQuestion): CasesAnswer {
   const { design, conditions, cases } = question;
   const analyses = cases.map((one) => analyseCase(one, question));
-  const curves = analyses.flatMap(({ frequencyResponse }) => frequencyResponse ?? []);
-  const numbers = analyses.map(({ frequencyResponse: _, ...rest }) => rest);
-  const { results } = judgeCases(design, { ...conditions, cases: [...cases] }, numbers);
+  const { results } = judgeCases(design, { ...conditions, cases: [...cases] }, analyses);
+  const curves = question.detail === 'full' ? cases.map((one) => thinCurve(one, design)) : [];
   return { results, headline: headline(results, conditions), curves };
 }
 

@@ -11,10 +11,10 @@ export function useDemands(): ChartLimits {
   return useMemo(() => chartLimits(conditions.limits, actuator), [conditions, actuator]);
 }
 
-/** The curves over frequency of every case but the one that is shown, drawn thin; undefined until they are there. */
+/** The curves over frequency of every case but the one that is shown, drawn thin as they last rested; undefined until they are there. */
 export function useOtherCurves(): readonly FrequencyResponse[] | undefined {
   const { over, subject } = useBench();
-  const { complete } = useSyncExternalStore(over.subscribe, over.get);
+  const rested = useSyncExternalStore(over.subscribe, () => over.get().rested);
   const shown = subject.shownCase.id;
-  return useMemo(() => complete?.curves.filter((_, index) => complete.results[index].case.id !== shown), [complete, shown]);
+  return useMemo(() => rested?.curves.filter((_, index) => rested.results[index].case.id !== shown), [rested, shown]);
 }
