@@ -8,7 +8,9 @@ export const Job = z
     id: Id,
     kind: z.enum(['analysis']),
     state: z.enum(['running', 'done', 'failed', 'cancelled']),
-    progress: z.object({ done: z.int(), total: z.int() }).meta({ description: 'counted in cases: each is analysed, and asked how much room it leaves three ways' }),
+    progress: z
+      .object({ done: z.int(), total: z.int() })
+      .meta({ description: 'counted in cases: each is analysed, and asked how much room it leaves three ways' }),
     result: z.object({ projectId: Id, analysisId: Id }).nullable().meta({ description: 'once done' }),
     problem: ProblemDetails.nullable().meta({ description: 'why it failed' }),
     createdAt: Timestamp,

@@ -29,7 +29,10 @@ const WARM_UP = 15;
 /** Between two moves: longer than a frame, so that each is answered by itself. */
 const PAUSE_MS = 45;
 
-const slowWorker = readFileSync(join(root, 'scripts', 'slow-worker.js'), 'utf8').trim();
+const slowWorker = readFileSync(join(root, 'scripts', 'slow-worker.js'), 'utf8')
+  .replace('export default', '')
+  .trim()
+  .replace(/;$/, '');
 
 const pause = (page: Page) => page.waitForTimeout(PAUSE_MS);
 
@@ -84,7 +87,7 @@ async function measure(page: Page, bench: BenchPage, size: SizeName): Promise<vo
   console.log(`${size}, unthrottled thread time per move: ${share('TaskDuration')} ms`);
   console.log(`  script ${share('ScriptDuration')}, style ${share('RecalcStyleDuration')}, layout ${share('LayoutDuration')}`);
   await session.send('Emulation.setCPUThrottlingRate', { rate: THROTTLE });
-  for (const worker of page.workers()) await worker.evaluate(`${slowWorker}(${THROTTLE})`);
+  for (const worker of page.workers()) await worker.evaluate(`(${slowWorker})(${THROTTLE})`);
   await page.evaluate(() => (window as unknown as { frameWatch: FrameWatch }).frameWatch.clear());
   await gestures[size](page, bench, MOVES);
   const charts = await page.evaluate(() => (window as unknown as { frameWatch: FrameWatch }).frameWatch.times());

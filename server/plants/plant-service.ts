@@ -35,7 +35,15 @@ export async function enterPlant(
 ): Promise<PlantRevision> {
   const content = await read(parts, entered);
   const plantId = randomUUID();
-  const nominal = { id: randomUUID(), name: 'nominal', plantId, plantRevision: null, parameters: {}, axes: {}, basis: 'extrapolated' as const };
+  const nominal = {
+    id: randomUUID(),
+    name: 'nominal',
+    plantId,
+    plantRevision: null,
+    parameters: {},
+    axes: {},
+    basis: 'extrapolated' as const,
+  };
   const activity = activityEntry('plant.created', `entered the plant ${name}`, note);
   createPlant(parts.db, { projectId, plantId, name, content, note, activity, stamp }, nominal);
   return openPlant(parts, { projectId, plantId });

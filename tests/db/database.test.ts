@@ -78,7 +78,10 @@ describe('the tables', () => {
 
   it.each([
     ["insert into team_member values ('t', 'u', 'captain', 0)", /CHECK constraint failed: team_member_role/],
-    ["insert into project_member (project_id, user_id, role, created_at) values ('p', 'u', 'admin', 0)", /CHECK constraint failed: project_member_role/],
+    [
+      "insert into project_member (project_id, user_id, role, created_at) values ('p', 'u', 'admin', 0)",
+      /CHECK constraint failed: project_member_role/,
+    ],
     ["insert into team values ('t', 'name', 'yesterday')", /cannot store TEXT value in INTEGER column/],
     ["insert into project (id, team_id, name, created_at, updated_at) values ('p', 'nobody', 'n', 0, 0)", /FOREIGN KEY/],
   ])('refuse %s', (statement, reason) => {

@@ -8,11 +8,15 @@ export interface RestedOverCases {
   readonly answer: CasesAnswer;
 }
 
-/** The verdicts in full over all cases; null while a gain moves. */
+/** The verdicts in full over all cases; null while a gain moves, and what calls this is not rendered meanwhile. */
 export function useRestedOverCases(): RestedOverCases | null {
   const { over } = useBench();
-  const standing = useSyncExternalStore(over.subscribe, over.get);
-  const { input, rested, detail, problem } = standing;
-  const full = detail === 'full' && problem === null;
-  return useMemo(() => (full && input !== null && rested !== null ? { settings: input, answer: rested } : null), [full, input, rested]);
+  const resting = useSyncExternalStore(over.subscribe, () => {
+    const standing = over.get();
+    return standing.detail === 'full' && standing.problem === null ? standing : null;
+  });
+  return useMemo(() => {
+    if (!resting || resting.input === null || resting.rested === null) return null;
+    return { settings: resting.input, answer: resting.rested };
+  }, [resting]);
 }

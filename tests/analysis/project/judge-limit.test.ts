@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { defaultTarget, judgeLimit, limitUse } from '@/analysis/project';
 import type { Limit } from '@/contract';

@@ -1,4 +1,4 @@
-import fc from 'fast-check';
+import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { analyseLoop } from '@/analysis';
 import { caseLoop, judgeCases, marksAlong, room } from '@/analysis/project';
