@@ -66,9 +66,18 @@ export const withMs = (ms: number, phaseDegrees = 55): Analysis =>
 export const sixNumbers = [1.63, 1.51, 1.36, 1.56, 1.46, 1.32].map((ms) => withMs(ms));
 
 /** What would be kept of these cases with these numbers. */
-export function keptOf(cases: readonly Case[], numbers: readonly Analysis[], changes: Partial<Conditions> = {}): KeptAnalysis {
+interface Kept extends Partial<Conditions> {
+  /** null: nobody stated how the loop is sampled. */
+  readonly sampling?: 'continuous' | null;
+}
+
+export function keptOf(
+  cases: readonly Case[],
+  numbers: readonly Analysis[],
+  { sampling = 'continuous', ...changes }: Kept = {},
+): KeptAnalysis {
   const conditions = conditionsOf(cases, changes);
-  const { results, headline } = judgeCases({ sampling: 'continuous' }, conditions, numbers);
+  const { results, headline } = judgeCases({ sampling }, conditions, numbers);
   const controller = { form: 'parallel', kp: 1, ki: 0.4, kd: 0, derivativeFilterTime: 0, filters: [] };
   return {
     id: uuid(700),
@@ -90,7 +99,7 @@ export function keptOf(cases: readonly Case[], numbers: readonly Analysis[], cha
         name: 'Speed hold',
         revision: 7,
         controller,
-        sampling: 'continuous',
+        sampling,
         actuator: null,
       } as unknown as KeptAnalysis['inputs']['design'],
     },

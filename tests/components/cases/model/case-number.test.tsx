@@ -47,9 +47,7 @@ describe('the number of a case', () => {
   });
 
   it('is never green where nobody stated the sample time', () => {
-    const kept = keptOf(sixCases, sixNumbers);
-    const unsaid = { ...kept, inputs: { ...kept.inputs, design: { ...kept.inputs.design, sampling: null } } };
-    const views = caseViews(sixCases, conditionsOf(sixCases), unsaid);
+    const views = caseViews(sixCases, conditionsOf(sixCases), keptOf(sixCases, sixNumbers, { sampling: null }));
     expect(ms(views).map(({ verdict }) => verdict)).toEqual(Array(6).fill('notJudged'));
   });
 });
