@@ -58,7 +58,7 @@ const styles = StyleSheet.create({
   wide: { paddingHorizontal: gutter.wide, paddingTop: 20, paddingBottom: 40, gap: 14 },
   phone: { flexGrow: 1, paddingBottom: 20, gap: 8 },
   // The lists that drop out of its menus lie over the page.
-  head: { flexDirection: 'row', alignItems: 'center', minHeight: 52, gap: 16, zIndex: 1 },
+  head: { flexDirection: 'row', alignItems: 'center', minHeight: 52, gap: 16, zIndex: 2 },
   title: { flex: 1, gap: 2 },
   actions: { flexDirection: 'row', alignItems: 'center', gap: 10 },
 });

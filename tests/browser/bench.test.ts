@@ -93,7 +93,7 @@ describe.each(Object.keys(sizes) as SizeName[])('the bench at the %s size', (siz
   it('has a table behind every chart', async () => {
     const { page, context } = await atTheBench(size);
     const tables = page.getByRole('button', { name: /^Table of/ });
-    expect(await tables.count()).toBeGreaterThanOrEqual(3);
+    await expect.poll(() => tables.count()).toBeGreaterThanOrEqual(3);
     await tables.first().click();
     const rows = page.getByRole('table').first().getByRole('row');
     await expect.poll(() => rows.count()).toBeGreaterThan(10);

@@ -73,7 +73,7 @@ describe.each(Object.keys(sizes) as SizeName[])('a controller at the %s size', (
     await bench.gain('Td').waitFor();
     await visitor.open(`/projects/${project}/analyses`);
     await page
-      .getByRole('link', { name: /Speed hold, rev \d+/ })
+      .getByRole('link', { name: /Limiter, rev \d+/ })
       .first()
       .click();
     await visitor.sees(/series form/);
