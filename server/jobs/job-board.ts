@@ -1,4 +1,5 @@
 import { randomUUID } from 'node:crypto';
+import { setTimeout as pause } from 'node:timers/promises';
 import type { Job } from '@/contract';
 import { Problem, TooMany } from '../http/problem';
 import type { Watch } from './in-turn';
@@ -35,10 +36,8 @@ export interface JobBoard {
   readonly find: (owner: string, jobId: string) => Posted | undefined;
 }
 
-const later = (ms: number) =>
-  new Promise<null>((resolve) => {
-    setTimeout(() => resolve(null), ms).unref();
-  });
+/** Nobody who waits for an answer keeps the server from ending. */
+const later = (ms: number) => pause(ms, null, { ref: false });
 
 function post({ kind, total, work }: Order, onError: (error: unknown) => void): Posted {
   const abort = new AbortController();

@@ -30,7 +30,7 @@ const inside = (project: string, analysis: string) => ({
   '/account': 'Sign out',
   [`/projects/${project}`]: 'Where it stands',
   [`/projects/${project}/plant`]: 'Revisions',
-  [`/projects/${project}/bench`]: 'Delay margin',
+  [`/projects/${project}/bench`]: /worst of \d+/,
   [`/projects/${project}/cases`]: 'Open on bench',
   [`/projects/${project}/limits`]: 'A target is easier to live with.',
   [`/projects/${project}/members`]: 'Who may do what',
