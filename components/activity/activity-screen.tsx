@@ -14,7 +14,7 @@ export function ActivityScreen() {
   const { id, name } = useProject();
   const activity = useInfiniteQuery(activityQuery(id));
   return (
-    <Page title="Activity" sub={name} width={760}>
+    <Page title="Activity" sub={name} width={760} scrolledAs="Activity">
       <DocumentTitle parts={['Activity', name]} />
       <Paper style={{ gap: 10 }}>
         <QueryView query={activity} waiting="Fetching what happened">

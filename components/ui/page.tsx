@@ -6,6 +6,8 @@ import { gutter, line } from './tokens';
 import { useLayout } from './use-layout';
 
 export interface PageProps {
+  /** Names a page on which nothing may take the keyboard: it is then scrolled by keys as a whole. */
+  scrolledAs?: string;
   /** Left out where the phone's top bar already says it. */
   title?: string;
   sub?: string;
@@ -17,11 +19,15 @@ export interface PageProps {
 }
 
 /** One scrolling page on the desk: its title and actions, then sheets. On a phone the sheet fills the page. */
-export function Page({ title, sub, actions, width = 1240, foot, children }: PropsWithChildren<PageProps>) {
+export function Page({ scrolledAs, title, sub, actions, width = 1240, foot, children }: PropsWithChildren<PageProps>) {
   const { colors } = useTheme();
   const phone = useLayout() === 'phone';
   const page = (
-    <ScrollView style={[styles.scroll, { backgroundColor: colors.desk }]} contentContainerStyle={styles.content}>
+    <ScrollView
+      style={[styles.scroll, { backgroundColor: colors.desk }]}
+      contentContainerStyle={styles.content}
+      {...(scrolledAs && { tabIndex: 0, role: 'region', 'aria-label': scrolledAs })}
+    >
       <View style={[styles.column, { maxWidth: width + 2 * gutter.wide }, phone ? styles.phone : styles.wide]}>
         {title && !phone ? (
           <View style={styles.head}>
