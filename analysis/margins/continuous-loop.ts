@@ -1,11 +1,11 @@
 import { AxisProduct, productOf } from '@/analysis/loop/axis-product';
 import { fromGains } from '@/analysis/loop/controller';
-import { LoopError } from '@/analysis/loop/loop-error';
 import type { LoopModel, Rational } from '@/analysis/loop/model';
 import { axisFrequencies, landmarks } from './landmarks';
 import { LEAST_LISTED_GAIN, ZERO_GAIN } from './least-gain';
 import type { EndOfAxis, LoopFunction } from './loop-function';
 import * as S from './sample';
+import { outOfRange, tooMuch } from './loop-refusals';
 
 /** More evaluations than any loop needs that a person would draw; past it the loop is refused rather than waited for. */
 export const MOST_EVALUATIONS = 400_000;
@@ -101,17 +101,3 @@ const forwardController = ({ gains, weights, feedforwardGain, controller }: Loop
   if (weights.proportional === 1 && weights.derivative === 1 && feedforwardGain === 0) return controller;
   return fromGains({ ...gains, kp: gains.kp * weights.proportional + feedforwardGain, kd: gains.kd * weights.derivative });
 };
-
-const tooMuch = () =>
-  new LoopError({
-    pointer: '/plant',
-    detail: 'This loop has too many crossovers and peaks to analyse.',
-    code: 'tooMuchToCompute',
-  });
-
-const outOfRange = (omega: number) =>
-  new LoopError({
-    pointer: '/plant',
-    detail: `The loop has no finite value at ${omega} rad/s: its numbers are too far apart.`,
-    code: 'outOfRange',
-  });

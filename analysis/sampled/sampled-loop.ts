@@ -1,10 +1,10 @@
 import { AxisProduct, productOf, type Asymptote } from '@/analysis/loop/axis-product';
-import { LoopError } from '@/analysis/loop/loop-error';
 import { axisFrequencies, landmarks } from '@/analysis/margins/landmarks';
 import type { EndOfAxis, LoopFunction } from '@/analysis/margins/loop-function';
 import * as S from '@/analysis/margins/sample';
 import { LEAST_LISTED_GAIN, ZERO_GAIN } from '@/analysis/margins/least-gain';
 import type { SampledModel } from './sampled-model';
+import { outOfRange, tooMuch } from '@/analysis/margins/loop-refusals';
 
 /** More evaluations than any loop needs that a person would draw. */
 const MOST_EVALUATIONS = 400_000;
@@ -113,17 +113,3 @@ export class SampledLoop implements LoopFunction {
     };
   }
 }
-
-const tooMuch = () =>
-  new LoopError({
-    pointer: '/plant',
-    detail: 'This loop has too many crossovers and peaks to analyse.',
-    code: 'tooMuchToCompute',
-  });
-
-const outOfRange = (omega: number) =>
-  new LoopError({
-    pointer: '/plant',
-    detail: `The loop has no finite value at ${omega} rad/s: its numbers are too far apart.`,
-    code: 'outOfRange',
-  });

@@ -23,6 +23,9 @@ import { FrozenInputs } from './frozen-inputs';
 import { Recompute } from './recompute';
 import { useCaseCurves } from './use-case-curves';
 
+const plantOf = ({ inputs: { cases } }: KeptAnalysis, caseId: string | undefined) =>
+  (cases.find(({ id }) => id === caseId) ?? cases[0]).plant;
+
 /** One kept analysis by its address: its number, curves, numbers, what it was computed from, and the proof that it is still the same. */
 export function AnalysisScreen({ analysisId }: { analysisId: string }) {
   const project = useProject();
@@ -33,7 +36,13 @@ export function AnalysisScreen({ analysisId }: { analysisId: string }) {
       {(analysis) => (
         <AnalysisPage analysis={analysis} caseId={caseId} onCase={choose}>
           <QueryView query={{ ...curves, data: design }} waiting="Computing the curves">
-            {(a) => <CaseCurves design={a} limits={chartLimits(analysis.inputs.limits, analysis.inputs.design.actuator)} />}
+            {(a) => (
+              <CaseCurves
+                design={a}
+                limits={chartLimits(analysis.inputs.limits, analysis.inputs.design.actuator)}
+                plantUnits={plantOf(analysis, caseId).units}
+              />
+            )}
           </QueryView>
         </AnalysisPage>
       )}
@@ -53,7 +62,7 @@ function AnalysisPage({ analysis, caseId, onCase, children }: AnalysisPageProps)
   const router = useRouter();
   const phone = useLayout() === 'phone';
   const result = analysis.results.find((one) => one.case.id === caseId) ?? analysis.results[0];
-  const { units } = (analysis.inputs.cases.find((one) => one.id === result.case.id) ?? analysis.inputs.cases[0]).plant;
+  const { units } = plantOf(analysis, result.case.id);
   const { id, name, revision } = analysis.design;
   const title = `${name}, rev ${revision}`;
   const bench = <Button kind="primary" label="Open on bench" onPress={() => router.push(benchPath(project.id, id, revision))} />;

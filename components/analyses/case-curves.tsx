@@ -1,18 +1,26 @@
+import { useMemo } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { type ChartDesign, type ChartLimits, CursorProvider, FrequencySheet, PlaneChart, ReadOut, TimeSheet } from '@/components/charts';
+import { timePanels } from '@/components/charts/time-panels';
 import { Paper } from '@/components/ui/paper';
 import { useUnits } from '@/components/ui/units';
 import { useLayout } from '@/components/ui/use-layout';
+import type { KeptPlant } from '@/contract';
 
-const panels = [
-  { kind: 'reference', title: 'Output after a reference step of 1', unit: '' },
-  { kind: 'load', title: 'Output after a load step of 1 at the command', unit: '' },
-  { kind: 'control', title: 'Control for the reference step', unit: '' },
-] as const;
+/** An analysis is kept with responses to steps of one. */
+const UNIT_STEPS = { reference: 1, load: 1 };
+
+interface CaseCurvesProps {
+  design: ChartDesign;
+  limits: ChartLimits;
+  plantUnits: KeptPlant['units'];
+}
 
 /** All curves of one case, one cursor through them. */
-export function CaseCurves({ design, limits }: { design: ChartDesign; limits: ChartLimits }) {
+export function CaseCurves({ design, limits, plantUnits }: CaseCurvesProps) {
   const units = useUnits();
+  const { reference, load, control } = useMemo(() => timePanels(plantUnits, UNIT_STEPS), [plantUnits]);
+  const panels = useMemo(() => [reference, load, control], [reference, load, control]);
   const phone = useLayout() === 'phone';
   const sheet = phone ? undefined : styles.sheet;
   return (

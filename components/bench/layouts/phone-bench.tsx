@@ -1,5 +1,6 @@
 import { useMemo } from 'react';
 import { StyleSheet, View } from 'react-native';
+import { timePanels } from '@/components/charts/time-panels';
 import { useTheme } from '@/components/ui/theme';
 import { useBench, useHasAnswer } from '../bench-context';
 import { Notices } from '../keep/notices';
@@ -7,7 +8,6 @@ import { useLookingAt } from '../live/use-looking-at';
 import { ChartStack } from '../sheets/chart-stack';
 import { ShownReadOut, ShownTimeReadOut } from '../sheets/shown-read-out';
 import { SheetTabs } from '../sheets/sheet-tabs';
-import { timePanels } from '../sheets/time-panels';
 import { BenchStrip } from '../strip/bench-strip';
 import type { BenchLayoutProps } from './bench-actions';
 import { Dock } from './dock';

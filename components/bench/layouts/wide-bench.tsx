@@ -1,5 +1,6 @@
 import { useMemo } from 'react';
 import { ScrollView, StyleSheet, View } from 'react-native';
+import { timePanels } from '@/components/charts/time-panels';
 import { useTheme } from '@/components/ui/theme';
 import { useBench, useHasAnswer } from '../bench-context';
 import { Notices } from '../keep/notices';
@@ -7,7 +8,6 @@ import { useLookingAt } from '../live/use-looking-at';
 import { chartsId } from '../sheets/focus-chart';
 import { ShownFrequency, ShownPlane, ShownTime } from '../sheets/shown-charts';
 import { ShownReadOut } from '../sheets/shown-read-out';
-import { timePanels } from '../sheets/time-panels';
 import { BenchStrip } from '../strip/bench-strip';
 import { CaseLine } from '../strip/case-line';
 import type { BenchLayoutProps } from './bench-actions';

@@ -1,5 +1,6 @@
 import { memo, useMemo } from 'react';
 import { View } from 'react-native';
+import { timePanels } from '@/components/charts/time-panels';
 import type { FrequencyPanel } from '@/components/charts';
 import { useBench } from '../bench-context';
 import type { StepSizes } from '../live/bench-loop';
@@ -7,7 +8,6 @@ import type { Standing } from '../live/use-standing';
 import { BudgetLine } from '../strip/budget-line';
 import type { ChartSheet } from './chart-sheet';
 import { ShownFrequency, ShownPlane, ShownTime } from './shown-charts';
-import { timePanels } from './time-panels';
 
 interface SheetChartProps {
   sheet: ChartSheet;

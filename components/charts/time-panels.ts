@@ -1,10 +1,14 @@
-import type { TimePanel } from '@/components/charts';
 import { typographicMinus } from '@/figures/format';
-import type { StepSizes } from '../live/bench-loop';
+import type { TimePanel } from './chart-types';
 
 interface PlantUnits {
   readonly input: string;
   readonly output: string;
+}
+
+interface StepSizes {
+  readonly reference: number;
+  readonly load: number;
 }
 
 const sized = (size: number, unit: string): string => `${typographicMinus(String(size))}${unit ? ` ${unit}` : ''}`;
